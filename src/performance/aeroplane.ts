@@ -1,0 +1,171 @@
+/**
+ * An aeroplane's definition in SI: the same members as the JSON of the contract, bare numbers.
+ *
+ * Lengths m, areas m2, masses kg, speeds m/s, forces N, powers W, temperature differences K, angles rad, times s.
+ * A member that may be absent is absent, never zero: what a method then assumes is said by whoever assumes it.
+ */
+export const categories = [
+  'single-piston',
+  'single-electric',
+  'single-turboprop',
+  'single-jet',
+  'twin-piston',
+  'twin-electric',
+  'twin-turboprop',
+  'twin-jet',
+] as const;
+export type Category = (typeof categories)[number];
+
+export const certificationBases = ['cs-23-amendment-4', 'cs-23-commuter', 'cs-25', 'none'] as const;
+export type CertificationBasis = (typeof certificationBases)[number];
+
+export interface Aeroplane {
+  readonly id: string;
+  readonly revision: string;
+  readonly name: string;
+  readonly category: Category;
+  readonly engines: number;
+  readonly certification: { readonly basis: CertificationBasis; readonly screenHeight: number };
+  readonly masses: { readonly empty?: number; readonly maximumTakeoff: number; readonly maximumLanding?: number };
+  readonly wing: Wing;
+  readonly drag: { readonly zeroLiftCoefficient: number; readonly oswaldFactor: number };
+  readonly configurations: Readonly<Record<string, Configuration>>;
+  readonly propulsion: Propulsion;
+  readonly wheels?: { readonly tyrePressure?: number; readonly tyreSpeedLimit?: number };
+  readonly brakes?: {
+    readonly brakingFrictionCoefficient?: number;
+    readonly loadFactor?: number;
+    readonly antiSkid?: AntiSkid;
+    readonly energyLimit?: number;
+  };
+  readonly engineOut?: {
+    readonly vmc?: number;
+    readonly vmcg?: number;
+    readonly dragIncrementCoefficient?: number;
+    readonly propeller?: 'feathered' | 'windmilling' | 'stopped';
+  };
+  readonly limitations?: {
+    readonly demonstratedCrosswind?: number;
+    readonly crosswind?: number;
+    readonly tailwind?: number;
+    readonly maximumTemperature?: number;
+    readonly maximumPressureAltitude?: number;
+  };
+  readonly airspeedCalibration?: AirspeedCalibration;
+}
+
+export const antiSkids = ['none', 'on-off', 'quasi-modulating', 'fully-modulating'] as const;
+export type AntiSkid = (typeof antiSkids)[number];
+
+export interface Wing {
+  readonly area: number;
+  readonly span: number;
+  /** quarter-chord of the mean chord above the runway [m] */
+  readonly heightAboveGround: number;
+  readonly taperRatio?: number;
+  readonly sweep?: number;
+}
+
+/** Indicated and calibrated airspeed pairs [m/s], both rising. */
+export interface AirspeedCalibration {
+  readonly indicated: readonly number[];
+  readonly calibrated: readonly number[];
+}
+
+/** A speed of the procedure: a ratio to the stall speed, or a calibrated airspeed at a mass. */
+export type ScheduledSpeed =
+  | { readonly kind: 'stall-ratio'; readonly ratio: number }
+  | { readonly kind: 'cas'; readonly cas: number; readonly mass: number };
+
+export type MaximumLift =
+  | { readonly kind: 'coefficient'; readonly coefficient: number }
+  | {
+      readonly kind: 'stall-speed';
+      readonly cas: number;
+      readonly mass: number;
+      /** 'minimum' is the older minimum speed in the manoeuvre, about 0.94 of the 1-g stall speed */
+      readonly definition: 'one-g' | 'minimum';
+    };
+
+export interface Configuration {
+  readonly for: readonly ('takeoff' | 'landing')[];
+  /** flap deflection [rad] */
+  readonly flap: number;
+  readonly maximumLift: MaximumLift;
+  readonly groundDragIncrementCoefficient?: number;
+  readonly airDragIncrementCoefficient?: number;
+  readonly groundLiftCoefficient?: number;
+  readonly speeds?: {
+    readonly rotation?: ScheduledSpeed;
+    readonly liftOff?: ScheduledSpeed;
+    readonly screen?: ScheduledSpeed;
+    readonly landingReference?: ScheduledSpeed;
+    readonly touchdown?: ScheduledSpeed;
+  };
+  readonly rotationTime?: number;
+  readonly pullUpLoadFactor?: number;
+  readonly approachAngle?: number;
+  readonly flareLoadFactor?: number;
+  readonly freeRollTime?: number;
+  readonly idleThrust?: number;
+}
+
+/** How power or static thrust falls with altitude, temperature and moisture (members absent take the kind's defaults). */
+export interface Lapse {
+  readonly altitudeLapseCoefficient?: number;
+  readonly temperatureExponent?: number;
+  readonly humidityFactor?: number;
+  readonly thrustFactor?: number;
+}
+
+/** Power, static thrust and measured thrust are of one engine. */
+export type Propulsion = FixedPitch | ConstantSpeed | Turboprop | Jet | Electric | MeasuredThrust;
+
+export interface FixedPitch extends Lapse {
+  readonly kind: 'fixed-pitch';
+  readonly staticThrust: number;
+  readonly propellerDiameter: number;
+  /** |b| of the linear propeller polar; absent: 0.056 */
+  readonly polarSlopeCoefficient?: number;
+}
+export interface Disc {
+  readonly propellerDiameter: number;
+  readonly profileFactor?: number;
+  readonly inducedFactor?: number;
+  /** a known static thrust of one engine caps the disc's [N] */
+  readonly staticThrust?: number;
+}
+export interface ConstantSpeed extends Lapse, Disc {
+  readonly kind: 'constant-speed';
+  readonly power: number;
+  readonly criticalAltitude?: number;
+}
+export interface Turboprop extends Disc {
+  readonly kind: 'turboprop';
+  readonly power: number;
+  readonly flatRating?: number;
+  readonly lapseExponent?: number;
+  readonly thrustFactor?: number;
+}
+export interface Jet {
+  readonly kind: 'jet';
+  readonly staticThrust: number;
+  readonly flatRating?: number;
+  readonly bypassRatio?: number;
+  readonly thrustFactor?: number;
+}
+export interface Electric extends Disc {
+  readonly kind: 'electric';
+  readonly power: number;
+  readonly thrustFactor?: number;
+}
+export interface MeasuredThrust {
+  readonly kind: 'measured';
+  /** true airspeeds [m/s], rising, and the thrust of one engine at each [N] */
+  readonly airspeeds: readonly number[];
+  readonly thrusts: readonly number[];
+  /** the density at which it was measured [kg/m3] */
+  readonly density: number;
+  readonly densityExponent: number;
+  readonly thrustFactor?: number;
+}

@@ -1,0 +1,177 @@
+import type { Kind } from '../units/presentation.ts';
+import type { ReferenceKey } from '../references.ts';
+
+/**
+ * An answer in SI, as planning hands it to the contract's gate out. Sentences are already in the asked units; numbers are
+ * not: the gate converts and rounds them.
+ */
+export const outcomes = [
+  'enough',
+  'enough-but-thin',
+  'not-enough',
+  'nothing-to-compare',
+  'never-reaches-lift-off-speed',
+  'never-reaches-screen-height',
+  'never-stops',
+  'roll-longer-than-runway',
+  'outside-flight-manual',
+  'outside-stated-data',
+  'no-data-for-this-surface',
+  'rule-set-does-not-apply',
+  'single-engine-cannot-continue',
+  'no-decision-speed',
+  'ground-speed-not-positive',
+] as const;
+export type Outcome = (typeof outcomes)[number];
+
+/** A number with what it is; the gate out turns it into a quantity. */
+export interface Measure {
+  readonly kind: Kind;
+  readonly value: number;
+}
+
+export type Severity = 'note' | 'caution' | 'strong';
+
+export interface Caution {
+  readonly code: string;
+  readonly severity: Severity;
+  readonly message: string;
+  /** pointer into the request */
+  readonly at?: string;
+  readonly value?: Measure | number;
+  readonly threshold?: Measure | number;
+  readonly source?: ReferenceKey;
+}
+
+export interface Air {
+  readonly temperature: number;
+  /** from the standard temperature at the pressure altitude [K] */
+  readonly temperatureDeviation: number;
+  readonly pressure: number;
+  readonly pressureAltitude: number;
+  readonly density: number;
+  readonly densityRatio: number;
+  readonly densityAltitude: number;
+  readonly dewPoint?: number;
+  readonly relativeHumidity?: number;
+}
+
+export interface WindComponents {
+  /** on the nose positive [m/s] */
+  readonly headwind: number;
+  /** size of the crosswind [m/s]; absent where it was not given */
+  readonly crosswind?: number;
+  readonly crosswindFrom?: 'left' | 'right';
+  /** what the rule set lets be taken into account [m/s] */
+  readonly creditedHeadwind: number;
+}
+
+/** One speed in its kinds [m/s]. */
+export interface SpeedSet {
+  readonly cas: number;
+  readonly eas: number;
+  readonly tas: number;
+  readonly ias?: number;
+  readonly stallRatio: number;
+}
+
+export type Method = 'flight-manual' | 'fitted' | 'stated' | 'geometry';
+
+export interface BandedDistance {
+  readonly value: number;
+  /** 90 % band [m] */
+  readonly low: number;
+  readonly high: number;
+  readonly method: Method;
+}
+
+export interface Factor {
+  readonly code: string;
+  readonly value: number;
+  readonly because: string;
+  readonly source: ReferenceKey;
+  readonly status: string;
+}
+
+export interface Check {
+  readonly code: string;
+  /** what is compared: 'groundRoll', 'takeoffDistance', 'landingDistance' ... */
+  readonly of: string;
+  readonly startsFrom: 'reference' | 'credited' | 'flight-manual';
+  /** the distance before factors [m], where one exists */
+  readonly distance?: number;
+  readonly factors: readonly Factor[];
+  /** another reading of the rule, shown and not chosen */
+  readonly alternative?: {
+    readonly startsFrom: 'reference' | 'credited' | 'flight-manual';
+    readonly distance: number;
+    readonly factors: readonly Factor[];
+    readonly required: number;
+    readonly because: string;
+  };
+  readonly unit: Kind;
+  readonly required?: number;
+  readonly available?: number;
+  readonly margin?: number;
+  /** margin as per cent of required, a ratio here: 0.1 is 10 % */
+  readonly marginRatio?: number;
+  readonly result: 'passes' | 'fails' | 'not-assessed';
+  readonly why?: string;
+  readonly source: ReferenceKey;
+}
+
+export interface Assumption {
+  readonly at: string;
+  readonly value: Measure | number | string;
+  readonly because: string;
+  /** change of the stated total distance, as a ratio, when the other end of the plausible range is taken instead */
+  readonly effectRatio?: number;
+  readonly source?: ReferenceKey;
+}
+
+/** Why there are no distances, in numbers. */
+export interface Shortfall {
+  readonly at: string;
+  readonly axis?: string;
+  readonly table?: string;
+  readonly given: Measure | number;
+  readonly bound: Measure | number;
+  readonly side: 'above' | 'below';
+}
+
+export interface Basis {
+  readonly method: Method;
+  readonly assumed: readonly Assumption[];
+  readonly notGiven: readonly string[];
+  readonly sources: readonly ReferenceKey[];
+}
+
+export interface TakeoffAnswer {
+  readonly outcome: Outcome;
+  readonly sentence: string;
+  readonly cautions: readonly Caution[];
+  readonly air: Air;
+  readonly wind: WindComponents;
+  readonly speeds: {
+    readonly stall: SpeedSet;
+    readonly rotation: SpeedSet;
+    readonly liftOff: SpeedSet;
+    readonly screen: SpeedSet;
+  };
+  readonly distances?: {
+    readonly screenHeight: number;
+    readonly groundRoll: BandedDistance;
+    readonly airDistance: BandedDistance;
+    readonly takeoffDistance: BandedDistance;
+    readonly groundRollTime: number;
+    readonly airTime: number;
+  };
+  readonly assessment?: {
+    readonly ruleSet: string;
+    readonly checks: readonly Check[];
+    /** code of the governing check */
+    readonly governing?: string;
+  };
+  readonly shortfall?: readonly Shortfall[];
+  readonly basis: Basis;
+}

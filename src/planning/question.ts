@@ -1,0 +1,90 @@
+import type { Aeroplane } from '../performance/aeroplane.ts';
+import type { UnitFamily } from '../units/presentation.ts';
+
+/** A question in SI, as the contract's gate hands it in. Angles in rad, clockwise from north where they are directions. */
+export interface Question {
+  readonly aeroplane: Aeroplane;
+  /** SHA-256 of the definition, hex */
+  readonly aeroplaneDigest: string;
+  /** pointer to the aeroplane in the request: '/aeroplane' by id, '/aeroplane/definition' inline */
+  readonly aeroplaneAt: string;
+  readonly mass: number;
+  /** id of a configuration; may not exist in the aeroplane: planning refuses it with the list */
+  readonly configuration: string;
+  readonly runway: Runway;
+  readonly weather: Weather;
+  readonly ruleSet: string;
+  readonly stage?: 'dispatch' | 'in-flight';
+  /** presentation only: the family in which sentences are written */
+  readonly units: UnitFamily;
+  /** pointers of members that the gate filled in (units, rounding ...): said under basis.assumed */
+  readonly defaulted: readonly string[];
+}
+
+export const surfaceKinds = ['paved', 'grass', 'gravel', 'dirt', 'snow', 'ice'] as const;
+export const surfaceStates = ['dry', 'damp', 'wet', 'flooded', 'contaminated'] as const;
+export const contaminantKinds = [
+  'water',
+  'slush',
+  'wet-snow',
+  'dry-snow',
+  'compacted-snow',
+  'frost',
+  'ice',
+  'wet-ice',
+] as const;
+
+export interface Surface {
+  readonly kind: (typeof surfaceKinds)[number];
+  readonly state: (typeof surfaceStates)[number];
+  readonly grass?: 'short' | 'long';
+  readonly firmness?: 'firm' | 'soft';
+  readonly contaminant?: { readonly kind: (typeof contaminantKinds)[number]; readonly depth?: number };
+  readonly runwayConditionCode?: number | readonly [number, number, number];
+  readonly rollingFrictionCoefficient?: number;
+  readonly brakingFrictionCoefficient?: number;
+}
+
+export interface Declared {
+  readonly tora?: number;
+  readonly toda?: number;
+  readonly asda?: number;
+  readonly lda?: number;
+}
+
+export interface Runway {
+  readonly designator: string;
+  readonly direction: number;
+  readonly directionReference: 'true' | 'magnetic';
+  /** east positive */
+  readonly magneticVariation?: number;
+  readonly elevation: number;
+  /** uphill positive in the direction of movement */
+  readonly slope: number;
+  readonly surface: Surface;
+  readonly start:
+    | { readonly kind: 'threshold' }
+    | { readonly kind: 'offset'; readonly offset: number }
+    | { readonly kind: 'point'; readonly name: string };
+  readonly lineUp?: { readonly tora: number; readonly asda: number };
+  readonly declared?: Declared;
+}
+
+export interface Weather {
+  readonly temperature: number;
+  readonly dewPoint?: number;
+  readonly pressure: { readonly kind: 'qnh' | 'pressureAltitude' | 'stationPressure'; readonly value: number };
+  readonly wind: Wind;
+}
+
+export type Wind =
+  | {
+      readonly kind: 'from';
+      readonly from: number;
+      readonly fromReference: 'true' | 'magnetic';
+      readonly speed: number;
+      readonly gust?: number;
+      readonly variable?: { readonly from: number; readonly to: number };
+    }
+  | { readonly kind: 'components'; readonly headwind: number; readonly crosswind?: number }
+  | { readonly kind: 'calm' };

@@ -1,0 +1,12 @@
+import { defineConfig } from 'vitest/config';
+
+export default defineConfig({
+  test: {
+    root: new URL('..', import.meta.url).pathname,
+    include: ['test/**/*.test.ts'],
+    exclude: ['test/long/**'],
+    pool: 'threads',
+    maxWorkers: 2,
+    testTimeout: 20_000,
+  },
+});
