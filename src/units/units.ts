@@ -1,13 +1,13 @@
 /**
  * The closed lists of units, by quantity, each with its exact factor to SI.
  *
- * Factors: 1 ft = 0.3048 m, 1 NM = 1852 m, 1 lb = 0.45359237 kg, 1 mile = 1609.344 m are exact by definition;
+ * Factors: 1 ft = 0.3048 m, 1 in = 0.0254 m, 1 NM = 1852 m, 1 lb = 0.45359237 kg, 1 mile = 1609.344 m are exact by definition;
  * 1 lbf = lb x g0; 1 hp = 550 ft lbf/s; 1 inHg = 3386.389 Pa (conventional, 0 degC); 1 psi = lbf/in2.
  *
  * @see references.SI9, references.Icao5
  */
 export const scales = {
-  length: { m: 1, km: 1000, ft: 0.3048, NM: 1852 },
+  length: { m: 1, km: 1000, ft: 0.3048, NM: 1852, in: 0.0254 },
   area: { m2: 1, ft2: 0.09290304 },
   speed: { 'm/s': 1, kt: 1852 / 3600, 'km/h': 1 / 3.6, mph: 0.44704, 'ft/min': 0.00508 },
   mass: { kg: 1, t: 1000, lb: 0.45359237 },

@@ -1,0 +1,49 @@
+import { z } from 'zod';
+import { maximumLift, scheduledSpeed } from './lift.ts';
+import { approachAngle, flapAngle, idleThrust, shortTime } from './quantities.ts';
+
+const dragIncrement = z.number().min(-0.05).max(0.5);
+const loadFactor = z.number().min(1.01).max(2);
+
+/** One setting of flap and gear with its lift, drag and speeds. */
+export const configuration = z
+  .strictObject({
+    for: z
+      .array(z.enum(['takeoff', 'landing']))
+      .min(1)
+      .max(2)
+      .meta({ description: 'What the setting is used for.' }),
+    flap: flapAngle,
+    maximumLift,
+    groundDragIncrementCoefficient: dragIncrement
+      .meta({ description: 'Drag coefficient of flap and gear on the ground, added to the zero-lift coefficient.' })
+      .exactOptional(),
+    airDragIncrementCoefficient: dragIncrement
+      .meta({ description: 'Drag coefficient of flap and gear in the air, added to the zero-lift coefficient.' })
+      .exactOptional(),
+    groundLiftCoefficient: z
+      .number()
+      .min(-0.5)
+      .max(2.5)
+      .meta({ description: 'Lift coefficient in the attitude of the roll.' })
+      .exactOptional(),
+    speeds: z
+      .strictObject({
+        rotation: scheduledSpeed.exactOptional(),
+        liftOff: scheduledSpeed.exactOptional(),
+        screen: scheduledSpeed.exactOptional(),
+        landingReference: scheduledSpeed.exactOptional(),
+        touchdown: scheduledSpeed.exactOptional(),
+      })
+      .meta({ id: 'ScheduledSpeeds', description: 'The speeds of the procedure in this configuration.' })
+      .exactOptional(),
+    rotationTime: shortTime.meta({ description: 'From rotation to lift-off.' }).exactOptional(),
+    pullUpLoadFactor: loadFactor.meta({ description: 'Load factor in the arc after lift-off.' }).exactOptional(),
+    approachAngle: approachAngle.exactOptional(),
+    flareLoadFactor: loadFactor.meta({ description: 'Load factor in the flare.' }).exactOptional(),
+    freeRollTime: shortTime.meta({ description: 'From touchdown to braking.' }).exactOptional(),
+    idleThrust: idleThrust.exactOptional(),
+  })
+  .meta({ id: 'Configuration', description: 'One setting of flap and gear with its lift, drag and speeds.' });
+
+export type ConfigurationOnWire = z.infer<typeof configuration>;

@@ -1,0 +1,80 @@
+import { z } from 'zod';
+import { surfaceKinds, surfaceStates } from '../planning/question.ts';
+import { direction, elevation, magneticVariation, runwayLength, slope } from './quantities.ts';
+import { shortText } from './text.ts';
+import { north } from './weather.ts';
+
+export const surface = z
+  .strictObject({
+    kind: z.enum(surfaceKinds).meta({ description: 'What the surface is made of.' }),
+    state: z.enum(surfaceStates).meta({ description: 'What lies on it.' }),
+    grass: z.enum(['short', 'long']).meta({ description: 'Length of the grass, on grass.' }).exactOptional(),
+    firmness: z
+      .enum(['firm', 'soft'])
+      .meta({ description: 'Of the subsoil: firm when wheels mark it without making ruts.' })
+      .exactOptional(),
+    rollingFrictionCoefficient: z
+      .number()
+      .min(0)
+      .max(0.3)
+      .meta({
+        description: 'Friction of free-rolling wheels over their load, instead of the one for this kind and state.',
+      })
+      .exactOptional(),
+  })
+  .meta({ id: 'Surface', description: 'The surface of the runway and its state.' });
+
+export const start = z
+  .union([
+    z.literal('threshold'),
+    z.strictObject({
+      offset: runwayLength.meta({ description: 'Distance from the beginning of the declared distances to the start.' }),
+    }),
+    z.strictObject({
+      point: shortText.meta({
+        description: 'Name of the intersection; the declared distances are as published from there.',
+      }),
+    }),
+  ])
+  .meta({
+    id: 'Start',
+    description: 'Where the takeoff run starts. It is never assumed to be the full length.',
+  });
+
+export const declared = z
+  .strictObject({
+    tora: runwayLength.meta({ description: 'Takeoff run available.' }).exactOptional(),
+    toda: runwayLength.meta({ description: 'Takeoff distance available.' }).exactOptional(),
+    asda: runwayLength.meta({ description: 'Accelerate-stop distance available.' }).exactOptional(),
+    lda: runwayLength.meta({ description: 'Landing distance available.' }).exactOptional(),
+  })
+  .meta({
+    id: 'DeclaredDistances',
+    description:
+      'The declared distances. None is assumed equal to another: an absent one leaves its check not assessed.',
+  });
+
+export const runway = z
+  .strictObject({
+    designator: shortText.meta({ description: 'Name of the runway end used, for example 07 or 25L.' }),
+    direction: direction.meta({ description: 'Direction of movement.' }),
+    directionReference: north,
+    magneticVariation: magneticVariation
+      .meta({ description: 'Needed when runway and wind are given in different references; east positive.' })
+      .exactOptional(),
+    elevation,
+    slope,
+    surface,
+    start,
+    lineUp: z
+      .strictObject({
+        tora: runwayLength.meta({ description: 'What lining up takes from TORA and TODA.' }),
+        asda: runwayLength.meta({ description: 'What lining up takes from ASDA.' }),
+      })
+      .meta({ id: 'LineUp', description: 'Length lost in lining up.' })
+      .exactOptional(),
+    declared: declared.exactOptional(),
+  })
+  .meta({ id: 'Runway', description: 'The runway, seen in the direction of movement.' });
+
+export type RunwayOnWire = z.infer<typeof runway>;

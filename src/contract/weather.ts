@@ -1,0 +1,62 @@
+import { z } from 'zod';
+import { direction, headwind, pressureAltitude, qnh, stationPressure, temperature, windSpeed } from './quantities.ts';
+
+export const north = z
+  .enum(['true', 'magnetic'])
+  .meta({ description: 'The north a direction is measured from: reports use true, runways are painted magnetic.' });
+
+/** Exactly one of three. */
+export const pressure = z
+  .union([z.strictObject({ qnh }), z.strictObject({ pressureAltitude }), z.strictObject({ stationPressure })])
+  .meta({
+    id: 'Pressure',
+    description:
+      'The pressure in exactly one form: the altimeter setting, the pressure altitude of the aerodrome, or the pressure measured there.',
+  });
+
+const windFrom = z.strictObject({
+  from: direction.meta({ description: 'Direction the wind blows from.' }),
+  fromReference: north,
+  speed: windSpeed.meta({ description: 'Mean speed of the wind.' }),
+  gust: windSpeed
+    .meta({ description: 'Highest speed in gusts, at least the mean; it is never credited as headwind.' })
+    .exactOptional(),
+  variable: z
+    .strictObject({ from: direction, to: direction })
+    .meta({
+      description: 'Extremes of a varying direction, clockwise from the first to the second, in the same reference.',
+    })
+    .exactOptional(),
+});
+
+const windComponents = z.strictObject({
+  headwind,
+  crosswind: windSpeed.meta({ description: 'Size of the wind across the runway, from either side.' }).exactOptional(),
+});
+
+/** Exactly one of three forms. */
+export const wind = z.union([windFrom, windComponents, z.literal('calm')]).meta({
+  id: 'Wind',
+  description: 'The wind in exactly one form: direction and speed, components along and across the runway, or calm.',
+});
+
+const air = {
+  temperature: temperature.meta({ description: 'Temperature of the outside air.' }),
+  dewPoint: temperature
+    .meta({ description: 'Dew point, not above the temperature. Without it the air is taken as dry, and said to be.' })
+    .exactOptional(),
+  pressure,
+};
+
+export const weather = z
+  .strictObject({ ...air, wind })
+  .meta({ id: 'Weather', description: 'The air and the wind at the aerodrome.' });
+
+export const stillWeather = z
+  .strictObject(air)
+  .meta({ id: 'StillWeather', description: 'The air at the aerodrome, without its wind.' });
+
+export type WeatherOnWire = z.infer<typeof weather>;
+export type StillWeatherOnWire = z.infer<typeof stillWeather>;
+export type WindOnWire = z.infer<typeof wind>;
+export type PressureOnWire = z.infer<typeof pressure>;
