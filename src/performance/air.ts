@@ -1,14 +1,14 @@
-import { pressureAltitude as fromQnh } from '../physics/altimetry.ts';
+import { pressureAltitudeOfPressure, pressureAltitude as pressureAltitudeOfQnh } from '../physics/altimetry.ts';
 import {
-  altitudeOfDensity,
-  altitudeOfPressure,
   highestAltitude,
   lowestAltitude,
   standardPressure,
   standardTemperature,
+  withinStandardAtmosphere,
 } from '../physics/atmosphere.ts';
 import { rho0 } from '../physics/constants.ts';
 import { airDensity } from '../physics/density.ts';
+import { densityAltitude as densityAltitudeOf } from '../physics/density-altitude.ts';
 import { saturationVapourPressure } from '../physics/humidity.ts';
 
 /** What is known of the air: temperatures [K], pressure setting or station pressure [Pa] or pressure altitude [m]. */
@@ -69,7 +69,7 @@ export function airOf(report: AirReport, elevation?: number): AirOutcome {
     report.pressure.kind === 'stationPressure' ? report.pressure.value : standardPressure(pressureAltitude);
   const vapourPressure = dewPoint === undefined ? undefined : saturationVapourPressure(dewPoint);
   const density = airDensity(pressure, temperature, vapourPressure);
-  const densityAltitude = altitudeOfDensity(density);
+  const densityAltitude = densityAltitudeOf(density);
   if (densityAltitude === 'outside-standard-atmosphere') return outside('densityAltitude');
   return {
     outcome: 'air',
@@ -92,10 +92,10 @@ function pressureAltitudeOf(
   given: AirReport['pressure'],
   elevation: number | undefined,
 ): number | 'elevation-needed' | 'outside-standard-atmosphere' {
-  if (given.kind === 'stationPressure') return altitudeOfPressure(given.value);
-  if (given.kind === 'qnh' && elevation === undefined) return 'elevation-needed';
-  const altitude = given.kind === 'qnh' ? fromQnh(elevation as number, given.value) : given.value;
-  return altitude >= lowestAltitude && altitude <= highestAltitude ? altitude : 'outside-standard-atmosphere';
+  if (given.kind === 'stationPressure') return pressureAltitudeOfPressure(given.value);
+  if (given.kind === 'pressureAltitude') return withinStandardAtmosphere(given.value);
+  if (elevation === undefined) return 'elevation-needed';
+  return withinStandardAtmosphere(pressureAltitudeOfQnh(elevation, given.value));
 }
 
 function outside(of: 'pressureAltitude' | 'densityAltitude'): AirOutcome {

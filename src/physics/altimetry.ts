@@ -1,7 +1,9 @@
-import { lapseRate, p0, pressureExponent, T0 } from './constants.ts';
+import { scaleHeight, standardPressure, withinStandardAtmosphere } from './atmosphere.ts';
+import { lapseRate, p0, pressureExponent, T0, tropopause } from './constants.ts';
 
 const inverse = 1 / pressureExponent;
 const height = T0 / lapseRate;
+const tropopausePressure = standardPressure(tropopause);
 
 /**
  * Pressure altitude of a place from its elevation and the altimeter setting.
@@ -51,6 +53,24 @@ export function qnh(elevation: number, pressure: number): number {
   const base = (pressure / p0) ** inverse + elevation / height;
   if (!(base > 0)) throw new RangeError(`elevation is too low for this pressure: ${elevation}`);
   return p0 * base ** pressureExponent;
+}
+
+/**
+ * Pressure altitude of a pressure: what an altimeter set to 1013.25 hPa shows. The way back is standardPressure.
+ *
+ * PA = (T0/L) (1 - (p/p0)^(R L/g0)) up to 11 000 m; 11 000 + (R T11/g0) ln(p11/p) above.
+ *
+ * @param pressure - [Pa], above 0
+ * @returns [m], or 'outside-standard-atmosphere' below -5000 or above 20 000 m
+ * @see references.Iso2533, formulas (12) and (13) solved for H
+ */
+export function pressureAltitudeOfPressure(pressure: number): number | 'outside-standard-atmosphere' {
+  requirePressure('pressure', pressure);
+  return withinStandardAtmosphere(
+    pressure >= tropopausePressure
+      ? height * (1 - (pressure / p0) ** inverse)
+      : tropopause + scaleHeight * Math.log(tropopausePressure / pressure),
+  );
 }
 
 function requirePressure(name: string, pressure: number): void {

@@ -6,7 +6,8 @@ export const highestAltitude = 20_000;
 
 const stratosphereTemperature = T0 - lapseRate * tropopause;
 const tropopausePressureRatio = (stratosphereTemperature / T0) ** pressureExponent;
-const scaleHeight = (R * stratosphereTemperature) / g0;
+/** R T11/g0 [m]: the height over which pressure falls by e in the lower stratosphere. @see references.Iso2533 */
+export const scaleHeight = (R * stratosphereTemperature) / g0;
 
 /**
  * Temperature of the standard atmosphere.
@@ -66,44 +67,13 @@ export function speedOfSound(temperature: number): number {
 }
 
 /**
- * Altitude of the standard atmosphere with this pressure: the pressure altitude.
+ * An altitude if the standard atmosphere reaches it; the ends count as inside to a micrometre, so that round trips return.
  *
- * @param pressure - [Pa], above 0
- * @returns geopotential [m], or 'outside-standard-atmosphere' below -5000 or above 20 000 m
- * @see references.Iso2533, formulas (12) and (13) solved for H
+ * @param altitude - geopotential [m]
+ * @returns the altitude, or 'outside-standard-atmosphere' below -5000 or above 20 000 m
+ * @see references.Iso2533Add2
  */
-export function altitudeOfPressure(pressure: number): number | 'outside-standard-atmosphere' {
-  if (!(pressure > 0)) throw new RangeError(`pressure must be above 0 Pa: ${pressure}`);
-  const ratio = pressure / p0;
-  const altitude =
-    ratio >= tropopausePressureRatio
-      ? (T0 / lapseRate) * (1 - ratio ** (1 / pressureExponent))
-      : tropopause + scaleHeight * Math.log(tropopausePressureRatio / ratio);
-  return inside(altitude);
-}
-
-/**
- * Altitude of the standard atmosphere with this density: the density altitude.
- *
- * H = (T0/L) (1 - sigma^(1/(g0/(R L) - 1))) up to 11 000 m.
- *
- * @param density - [kg/m3], above 0
- * @returns geopotential [m], or 'outside-standard-atmosphere' below -5000 or above 20 000 m
- * @see references.Iso2533, formula (14) solved for H
- */
-export function altitudeOfDensity(density: number): number | 'outside-standard-atmosphere' {
-  if (!(density > 0)) throw new RangeError(`density must be above 0 kg/m3: ${density}`);
-  const ratio = density / rho0;
-  const atTropopause = (tropopausePressureRatio * T0) / stratosphereTemperature;
-  const altitude =
-    ratio >= atTropopause
-      ? (T0 / lapseRate) * (1 - ratio ** (1 / (pressureExponent - 1)))
-      : tropopause + scaleHeight * Math.log(atTropopause / ratio);
-  return inside(altitude);
-}
-
-/** The ends count as inside to a micrometre, so that a round trip from an end comes back. */
-function inside(altitude: number): number | 'outside-standard-atmosphere' {
+export function withinStandardAtmosphere(altitude: number): number | 'outside-standard-atmosphere' {
   const held = Math.min(highestAltitude, Math.max(lowestAltitude, altitude));
   return Math.abs(held - altitude) <= 1e-6 ? held : 'outside-standard-atmosphere';
 }
