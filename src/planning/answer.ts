@@ -1,5 +1,5 @@
-import type { Kind } from '../units/presentation.ts';
 import type { ReferenceKey } from '../references.ts';
+import type { Kind } from '../units/presentation.ts';
 
 /**
  * An answer in SI, as planning hands it to the contract's gate out. Sentences are already in the asked units; numbers are

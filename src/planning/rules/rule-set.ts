@@ -1,0 +1,51 @@
+import type { Aeroplane } from '../../performance/aeroplane.ts';
+import type { ReferenceKey } from '../../references.ts';
+import type { Factor } from '../answer.ts';
+import type { DeclaredDistances } from '../declared-distances.ts';
+import type { Surface } from '../question.ts';
+
+/** What a rule set lets be taken into account of the wind along the runway, as multiples of the component. */
+export interface WindCredit {
+  readonly headwind: number;
+  readonly tailwind: number;
+  readonly because: string;
+  readonly source: ReferenceKey;
+}
+
+/** One comparison a rule asks for: a distance times its overall factor against one declared distance. */
+export interface Requirement {
+  readonly code: string;
+  readonly of: 'groundRoll' | 'takeoffDistance' | 'landingDistance';
+  readonly against: 'tora' | 'toda' | 'asda' | 'lda';
+  /** the overall factor, applied once; absent: 1 without a word */
+  readonly factor?: Factor;
+  /** another reading of the same rule, shown beside the one that decides */
+  readonly alternative?: { readonly factor: Factor; readonly because: string };
+  readonly source: ReferenceKey;
+}
+
+/** The takeoff side of a rule set. */
+export interface TakeoffRules {
+  /**
+   * The distance that the set's surface and slope factors multiply. 'reference': credited wind on a paved, dry, level runway;
+   * 'credited': the set has no such factors and physics on the actual runway stands alone.
+   */
+  readonly startsFrom: 'reference' | 'credited';
+  /** factors of the surface and the slope on the reference distance; undefined where the set does not speak of the surface */
+  readonly runwayFactors: (surface: Surface, slope: number) => readonly Factor[] | undefined;
+  /** the comparisons, which may depend on which distances are declared */
+  readonly requirements: (declared: DeclaredDistances) => readonly Requirement[];
+}
+
+/** A set of operating rules as figures with their sources; numbers somebody decided live in these files and nowhere else. */
+export interface RuleSet {
+  readonly id: string;
+  readonly title: string;
+  readonly source: ReferenceKey;
+  /** why the set does not speak of this aeroplane; undefined where it does */
+  readonly doesNotApply: (aeroplane: Aeroplane) => string | undefined;
+  readonly windCredit: WindCredit;
+  /** a margin over required below this makes an answer thin */
+  readonly thinMargin: { readonly ratio: number; readonly because: string; readonly source: ReferenceKey };
+  readonly takeoff: TakeoffRules;
+}

@@ -1,0 +1,9 @@
+import type { RuleSet } from './rule-set.ts';
+
+/** Every set of operating rules that can be asked for, in the order in which it is listed to users. */
+export const ruleSets: readonly RuleSet[] = [];
+
+/** The rule set with this id, or undefined where there is none. */
+export function ruleSetOf(id: string): RuleSet | undefined {
+  return ruleSets.find((set) => set.id === id);
+}
