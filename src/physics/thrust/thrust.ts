@@ -12,4 +12,6 @@ export interface Thrust {
   readonly kinks: readonly number[];
   /** true airspeeds [m/s] inside which there are data; absent: no bound but the method's */
   readonly domain?: readonly [lowest: number, highest: number];
+  /** true where the thrust falls with the square root of the airspeed from rest: a quadrature then substitutes V = u^2 */
+  readonly squareRootAtRest?: boolean;
 }
