@@ -48,3 +48,4 @@ export const takeoffRequest = z
   .meta({ id: 'TakeoffRequest', description: 'A takeoff: aeroplane, mass, configuration, runway, weather, rules.' });
 
 export type TakeoffRequest = z.infer<typeof takeoffRequest>;
+export type AeroplaneOnWire = z.infer<typeof aeroplane>;

@@ -1,0 +1,63 @@
+import { pressureAltitude, qnh as qnhOf } from '../../physics/altimetry.ts';
+import type { Fault } from '../../planning/fault.ts';
+import { type Q, si } from '../quantity.ts';
+import type { StillWeatherOnWire } from '../weather.ts';
+import { written } from '../written.ts';
+
+/** Altimeter settings met on earth [Pa], the bounds of a stated one. */
+const settings = { lowest: 87_000, highest: 108_500 };
+
+/**
+ * Members of the air against each other and against the elevation.
+ *
+ * @param elevation - of the aerodrome, where it is given
+ */
+export function checkAir(weather: StillWeatherOnWire, elevation: Q<'m' | 'km' | 'ft'> | undefined): Fault[] {
+  const { temperature, dewPoint } = weather;
+  const faults: Fault[] = [];
+  if (dewPoint !== undefined && si('temperature', dewPoint) > si('temperature', temperature) + 1e-9) {
+    faults.push({
+      pointer: '/weather/dewPoint',
+      code: 'contradiction',
+      message: `The dew point ${written(dewPoint)} is above the temperature ${written(temperature)}.`,
+      received: dewPoint.value,
+      allowed: `at most ${written(temperature)}`,
+      hint: 'Check whether the two were exchanged, and their units.',
+    });
+  }
+  const misfit = elevation && checkPressure(weather.pressure, elevation);
+  return misfit ? [...faults, misfit] : faults;
+}
+
+/** A pressure altitude or a station pressure must go with the elevation by some altimeter setting met on earth. */
+function checkPressure(pressure: StillWeatherOnWire['pressure'], elevation: Q<'m' | 'km' | 'ft'>): Fault | undefined {
+  if ('qnh' in pressure) return undefined;
+  const height = si('length', elevation);
+  if ('stationPressure' in pressure) {
+    const given = pressure.stationPressure;
+    const setting = qnhOf(height, si('pressure', given));
+    if (setting >= settings.lowest && setting <= settings.highest) return undefined;
+    return {
+      pointer: '/weather/pressure/stationPressure',
+      code: 'contradiction',
+      message: `A pressure of ${written(given)} at ${written(elevation)} would be an altimeter setting of ${(setting / 100).toFixed(0)} hPa.`,
+      received: given.value,
+      allowed: 'an altimeter setting of 870 to 1085 hPa',
+      hint: 'If it is the altimeter setting, give it as qnh; else check the unit of the elevation.',
+    };
+  }
+  const given = pressure.pressureAltitude;
+  const altitude = si('length', given);
+  const lowest = pressureAltitude(height, settings.highest);
+  const highest = pressureAltitude(height, settings.lowest);
+  if (altitude >= lowest && altitude <= highest) return undefined;
+  const factor = given.unit === 'ft' ? 0.3048 : given.unit === 'km' ? 1000 : 1;
+  return {
+    pointer: '/weather/pressure/pressureAltitude',
+    code: 'contradiction',
+    message: `A pressure altitude of ${written(given)} does not go with an elevation of ${written(elevation)}.`,
+    received: given.value,
+    allowed: `${Math.round(lowest / factor)} to ${Math.round(highest / factor)} ${given.unit}, altimeter settings of 1085 to 870 hPa`,
+    hint: 'Check the units of both.',
+  };
+}

@@ -1,0 +1,88 @@
+import type { Fault } from '../../planning/fault.ts';
+import { si } from '../quantity.ts';
+import type { RunwayOnWire } from '../runway.ts';
+import { written } from '../written.ts';
+
+const takeoffDistances = ['tora', 'toda', 'asda'] as const;
+
+/** Members of a runway against each other. */
+export function checkRunway(runway: RunwayOnWire): Fault[] {
+  return [...checkDeclared(runway.declared ?? {}), ...checkStart(runway), ...checkSurface(runway.surface)];
+}
+
+function checkDeclared({ tora, toda, asda }: NonNullable<RunwayOnWire['declared']>): Fault[] {
+  if (tora === undefined) return [];
+  const faults: Fault[] = [];
+  for (const [name, length] of [
+    ['toda', toda],
+    ['asda', asda],
+  ] as const) {
+    if (length === undefined || si('length', length) >= si('length', tora) * (1 - 1e-9)) continue;
+    faults.push({
+      pointer: `/runway/declared/${name}`,
+      code: 'contradiction',
+      message: `${name.toUpperCase()} ${written(length)} is shorter than TORA ${written(tora)}, of which it is a part.`,
+      received: length.value,
+      allowed: `at least ${written(tora)}`,
+      hint: 'Check the unit and whether the two were exchanged.',
+    });
+  }
+  return faults;
+}
+
+/** What a start offset and lining up take must leave something of each declared distance. */
+function checkStart({ start, lineUp, declared = {} }: RunwayOnWire): Fault[] {
+  const faults: Fault[] = [];
+  const offset = typeof start === 'object' && 'offset' in start ? start.offset : undefined;
+  const offsetLength = offset === undefined ? 0 : si('length', offset);
+  for (const name of takeoffDistances) {
+    const length = declared[name];
+    if (length === undefined) continue;
+    const published = si('length', length);
+    if (offset !== undefined && offsetLength > 0 && offsetLength >= published) {
+      faults.push({
+        pointer: '/runway/start/offset',
+        code: 'contradiction',
+        message: `A start ${written(offset)} along the runway leaves nothing of ${name.toUpperCase()} ${written(length)}.`,
+        received: offset.value,
+        allowed: `below ${written(length)}`,
+      });
+      break;
+    }
+    if (lineUp === undefined) continue;
+    const member = name === 'asda' ? 'asda' : 'tora';
+    const loss = si('length', lineUp[member]);
+    if (loss > 0 && offsetLength + loss >= published) {
+      faults.push({
+        pointer: `/runway/lineUp/${member}`,
+        code: 'contradiction',
+        message: `Lining up takes ${written(lineUp[member])}, which leaves nothing of ${name.toUpperCase()} ${written(length)}.`,
+        received: lineUp[member].value,
+      });
+      break;
+    }
+  }
+  return faults;
+}
+
+function checkSurface({ kind, grass, firmness }: RunwayOnWire['surface']): Fault[] {
+  const faults: Fault[] = [];
+  if (grass !== undefined && kind !== 'grass') {
+    faults.push({
+      pointer: '/runway/surface/grass',
+      code: 'contradiction',
+      message: `The surface is ${kind}, with ${grass} grass given.`,
+      received: grass,
+      hint: 'Leave grass away, or make the kind grass.',
+    });
+  }
+  if (firmness !== undefined && kind === 'paved') {
+    faults.push({
+      pointer: '/runway/surface/firmness',
+      code: 'contradiction',
+      message: 'firmness is of the subsoil of an unpaved runway; the surface is paved.',
+      received: firmness,
+    });
+  }
+  return faults;
+}
