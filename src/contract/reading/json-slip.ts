@@ -11,7 +11,7 @@ export interface JsonSlip {
 
 const space = /[ \t\n\r]*/y;
 const scalar = /-?(?:0|[1-9]\d*)(?:\.\d+)?(?:[eE][+-]?\d+)?(?![\w.+-])|(?:true|false|null)(?!\w)/y;
-const string = /"(?:[^"\\\u0000-\u001f]|\\(?:["\\/bfnrt]|u[0-9a-fA-F]{4}))*"/y;
+const string = /"(?:[ !#-[\]-\uffff]|\\(?:["\\/bfnrt]|u[0-9a-fA-F]{4}))*"/y;
 
 /**
  * Finds the first place where a text breaks the grammar of RFC 8259 or names a member twice in one object.

@@ -11,7 +11,7 @@ export interface SettledTree {
 }
 
 /** Control characters of C0 and C1, DEL, and surrogates without their other half. */
-const unprintable = /[\u0000-\u001f\u007f-\u009f\p{Surrogate}]/u;
+const unprintable = /[\p{Cc}\p{Cs}]/u;
 
 interface Walk {
   members: number;
