@@ -39,6 +39,31 @@ export const references = entries({
   GraceyRp1046: { title: 'Gracey, Measurement of Aircraft Speed and Altitude, NASA RP-1046, 1980', status: 'memory' },
   Phak: { title: "FAA-H-8083-25, Pilot's Handbook of Aeronautical Knowledge", status: 'read' },
   AndersonIntroduction: { title: 'Anderson, Introduction to Flight, 6th edition', status: 'secondary' },
+  EuAirOps100: {
+    title: 'Regulation (EU) No 965/2012, CAT.POL.A.100, performance classes of aeroplanes',
+    status: 'memory',
+  },
+  EuAirOps205: { title: 'Regulation (EU) No 965/2012, CAT.POL.A.205, take-off of class A aeroplanes', status: 'read' },
+  EuAirOps305: { title: 'Regulation (EU) No 965/2012, CAT.POL.A.305, take-off of class B aeroplanes', status: 'read' },
+  EuAirOps305Amc1: {
+    title: 'AMC1 CAT.POL.A.305, runway surface condition, Table 1 (ED Decision 2014/015/R)',
+    status: 'secondary',
+  },
+  EuAirOps305Amc2: { title: 'AMC2 CAT.POL.A.305, runway slope (ED Decision 2014/015/R)', status: 'read' },
+  EuAirOps340: { title: 'Regulation (EU) No 965/2012, CAT.POL.A.340, climb of class B aeroplanes', status: 'read' },
+  Wmo306: {
+    title: 'WMO-No. 306, Manual on Codes, FM 15 METAR, regulations 15.5 (wind) and 15.11 (temperature)',
+    status: 'read',
+  },
+  Cfr25s1501: { title: '14 CFR 25.1501 and 23.1501, operating limitations', status: 'memory' },
+  Cfr23s233: { title: '14 CFR 23.233 and 25.237, crosswind that was demonstrated', status: 'memory' },
+  Annex14: { title: 'ICAO Annex 14, Volume I, declared distances, clearways and runway slopes', status: 'memory' },
+  SpaEfbAmc5: {
+    title:
+      'AMC5 SPA.EFB.100(b)(3), performance applications: critical assumptions, unachievable results (ED Decision 2019/008/R)',
+    status: 'read',
+  },
+  Judgement: { title: 'A choice made for this service where no public source decides', status: 'judgement' },
 });
 
 export type ReferenceKey = keyof typeof references;
