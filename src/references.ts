@@ -64,6 +64,52 @@ export const references = entries({
     status: 'read',
   },
   Judgement: { title: 'A choice made for this service where no public source decides', status: 'judgement' },
+  AbramowitzStegun: { title: 'Abramowitz & Stegun, Handbook of Mathematical Functions, 1964', status: 'memory' },
+  Brent1973: { title: 'Brent, Algorithms for Minimization without Derivatives, 1973', status: 'memory' },
+  Wieselsberger1922: { title: 'Wieselsberger, Wing Resistance near the Ground, NACA TM 77, 1922', status: 'secondary' },
+  Lowry1995: {
+    title: 'Lowry, The Bootstrap Approach to Predicting Airplane Flight Performance, JAAER 6(1), 1995',
+    status: 'secondary',
+  },
+  GaggFerrar1934: {
+    title: 'Gagg & Ferrar, Altitude Performance of Aircraft Engines Equipped with Gear-Driven Superchargers, SAE, 1934',
+    status: 'secondary',
+  },
+  McCormick1995: {
+    title: 'McCormick, Aerodynamics, Aeronautics, and Flight Mechanics, 2nd edition',
+    status: 'secondary',
+  },
+  Torenbeek1982: { title: 'Torenbeek, Synthesis of Subsonic Airplane Design', status: 'memory' },
+  Mattingly2002: { title: 'Mattingly, Heiser & Pratt, Aircraft Engine Design, 2nd edition, 2002', status: 'secondary' },
+  GudmundssonGa: { title: 'Gudmundsson, General Aviation Aircraft Design', status: 'secondary' },
+  PerkinsHage1949: { title: 'Perkins & Hage, Airplane Performance, Stability and Control, 1949', status: 'secondary' },
+  KrenkelSalzman1968: {
+    title: 'Krenkel & Salzman, take-off performance, Journal of Aircraft, 1968',
+    status: 'secondary',
+  },
+  Raymer: { title: 'Raymer, Aircraft Design: A Conceptual Approach, ch. 17', status: 'secondary' },
+  AndersonPerformance: { title: 'Anderson, Aircraft Performance and Design, 1999, ch. 6', status: 'read' },
+  HouseFriction: {
+    title: 'Rolling and braking friction by surface: the long-distance end of the published ranges',
+    status: 'judgement',
+  },
+  HousePistonLapse: {
+    title: 'Lapse of piston thrust with altitude and temperature, from fits to two published takeoff tables',
+    status: 'derived',
+  },
+  HouseTurbineLapse: {
+    title: 'Turboprop power against temperature, low end of the usual reserve',
+    status: 'judgement',
+  },
+  HouseThrustFactor: {
+    title: "Thrust factors of propulsion nobody has fitted, held to Torenbeek's mean takeoff thrust",
+    status: 'derived',
+  },
+  HouseEnergyPath: {
+    title: 'Airborne path by the energy equation on a stated speed schedule, behind a pull-up arc',
+    status: 'derived',
+  },
+  Fips180: { title: 'NIST FIPS 180-4, Secure Hash Standard, 2015', status: 'memory' },
 });
 
 export type ReferenceKey = keyof typeof references;
