@@ -1,0 +1,20 @@
+import { isRefused, type Refused } from '../planning/fault.ts';
+import { planTakeoff } from '../planning/plan-takeoff.ts';
+import type { AeroplaneLookup } from './aeroplane-lookup.ts';
+import type { TakeoffRequest } from './takeoff-request.ts';
+import type { TakeoffResponse } from './takeoff-response.ts';
+import type { Stamp } from './to-basis.ts';
+import { toQuestion } from './to-question.ts';
+import { toResponse } from './to-response.ts';
+
+/** A takeoff from gate to gate: the request as a question, the plan, the answer as a response. */
+export function answerTakeoff(
+  request: TakeoffRequest,
+  lookup: AeroplaneLookup,
+  stamp: Stamp,
+): TakeoffResponse | Refused {
+  const question = toQuestion(request, lookup);
+  if (isRefused(question)) return question;
+  const answer = planTakeoff(question);
+  return isRefused(answer) ? answer : toResponse(answer, request, question, stamp);
+}
