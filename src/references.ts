@@ -56,6 +56,7 @@ export const references = entries({
     status: 'read',
   },
   Cfr25s1501: { title: '14 CFR 25.1501 and 23.1501, operating limitations', status: 'memory' },
+  Cfr23s51: { title: '14 CFR 23.51 at amendments 23-50 to 23-62, takeoff speeds', status: 'read' },
   Cfr23s233: { title: '14 CFR 23.233 and 25.237, crosswind that was demonstrated', status: 'memory' },
   Annex14: { title: 'ICAO Annex 14, Volume I, declared distances, clearways and runway slopes', status: 'memory' },
   SpaEfbAmc5: {
