@@ -1,13 +1,23 @@
-import { g0, gamma, lapseRate, p0, pressureExponent, R, rho0, T0, tropopause } from './constants.ts';
+import {
+  g0,
+  gamma,
+  lapseRate,
+  p0,
+  pressureExponent,
+  R,
+  rho0,
+  T0,
+  tropopause,
+  tropopauseTemperature,
+} from './constants.ts';
 
 /** Geopotential altitudes [m] between which the standard atmosphere is stated here. @see references.Iso2533Add2 */
 export const lowestAltitude = -5_000;
 export const highestAltitude = 20_000;
 
-const stratosphereTemperature = T0 - lapseRate * tropopause;
-const tropopausePressureRatio = (stratosphereTemperature / T0) ** pressureExponent;
+const tropopausePressureRatio = (tropopauseTemperature / T0) ** pressureExponent;
 /** R T11/g0 [m]: the height over which pressure falls by e in the lower stratosphere. @see references.Iso2533 */
-export const scaleHeight = (R * stratosphereTemperature) / g0;
+export const scaleHeight = (R * tropopauseTemperature) / g0;
 
 /**
  * Temperature of the standard atmosphere.
@@ -20,7 +30,7 @@ export const scaleHeight = (R * stratosphereTemperature) / g0;
  */
 export function standardTemperature(altitude: number): number {
   requireAltitude(altitude);
-  return altitude <= tropopause ? T0 - lapseRate * altitude : stratosphereTemperature;
+  return altitude <= tropopause ? T0 - lapseRate * altitude : tropopauseTemperature;
 }
 
 /**

@@ -28,6 +28,7 @@ export const constants = {
   /** fall of temperature with geopotential altitude up to the tropopause */
   lapseRate: constant(gradient, 'K/m', 'Iso2533'),
   tropopause: constant(11_000, 'm', 'Iso2533'),
+  tropopauseTemperature: constant(216.65, 'K', 'Iso2533'),
   /** speed of sound at sea level, sqrt(gamma R T0) = 340.294 */
   a0: constant(Math.sqrt(heatRatio * gasConstant * seaLevelTemperature), 'm/s', 'Iso2533'),
   /** g0/(R L), 5.25588 */
@@ -46,6 +47,7 @@ export const R = constants.R.value;
 export const gamma = constants.gamma.value;
 export const lapseRate = constants.lapseRate.value;
 export const tropopause = constants.tropopause.value;
+export const tropopauseTemperature = constants.tropopauseTemperature.value;
 export const a0 = constants.a0.value;
 export const pressureExponent = constants.pressureExponent.value;
 export const vapourMassRatio = constants.vapourMassRatio.value;

@@ -41,6 +41,7 @@ export function humidityPowerTerm(
   if (!(vapourPressure >= 0 && vapourPressure < pressure)) {
     throw new RangeError(`vapourPressure must be at least 0 and below the pressure: ${vapourPressure}, ${pressure}`);
   }
+  if (!(humidityFactor >= 0)) throw new RangeError(`humidityFactor must be 0 or more: ${humidityFactor}`);
   const reference = certificationVapourPressure(pressureAltitude);
   const loss = 1 - (pressure - vapourPressure) / (pressure - reference);
   return Math.max(0, Math.min(1, 1 - humidityFactor * loss));

@@ -21,6 +21,8 @@ export interface WindResolved {
  */
 export function windComponents(from: number, speed: number, direction: number): WindResolved {
   if (!(speed >= 0)) throw new RangeError(`speed must be 0 or more: ${speed}`);
+  if (!Number.isFinite(from)) throw new RangeError(`from must be finite: ${from}`);
+  if (!Number.isFinite(direction)) throw new RangeError(`direction must be finite: ${direction}`);
   const angle = from - direction;
   const headwind = settled(speed * Math.cos(angle), speed);
   const across = settled(speed * Math.sin(angle), speed);

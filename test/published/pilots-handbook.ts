@@ -69,6 +69,7 @@ export const chartLoadFactors = figures(
   [
     { id: 'STALL-n 10', inputs: { bank_deg: 10 }, expected: 1.015, tolerance: 0.001 },
     { id: 'STALL-n 30', inputs: { bank_deg: 30 }, expected: 1.154, tolerance: 0.001 },
+    // biome-ignore lint/suspicious/noApproximativeNumericConstant: the figure as the chart prints it
     { id: 'STALL-n 45', inputs: { bank_deg: 45 }, expected: 1.414, tolerance: 0.001 },
     { id: 'STALL-n 60', inputs: { bank_deg: 60 }, expected: 2, tolerance: 0.001 },
     { id: 'STALL-n 70', inputs: { bank_deg: 70 }, expected: 2.923, tolerance: 0.002 },
