@@ -32,7 +32,7 @@ export const pressureAltitude = quantitySchema(
   'Altitude in the standard atmosphere at which its pressure is the one meant.',
   'length',
   ['m', 'km', 'ft'],
-  -1500,
+  -1200,
   7500,
 );
 export const flightAltitude = quantitySchema(
@@ -40,7 +40,7 @@ export const flightAltitude = quantitySchema(
   'Pressure altitude of an aeroplane in flight.',
   'length',
   ['m', 'km', 'ft'],
-  -1500,
+  -1200,
   15_000,
 );
 export const screenHeight = quantitySchema(

@@ -1,6 +1,6 @@
 import { z } from 'zod';
 import { outcomes } from '../planning/answer.ts';
-import { aeroplaneDefinition } from './aeroplane-definition.ts';
+import { aeroplaneUnderstood } from './aeroplane-choice.ts';
 import {
   advisory,
   air,
@@ -16,8 +16,9 @@ import {
   speedSet,
   time,
 } from './answer-parts.ts';
-import { rounding, takeoffRequest, units } from './takeoff-request.ts';
-import { id, shortText } from './text.ts';
+import { rounding, units } from './question-frame.ts';
+import { takeoffRequest } from './takeoff-request.ts';
+import { id } from './text.ts';
 
 const method = z.enum(['flight-manual', 'fitted', 'stated', 'geometry']).meta({
   description:
@@ -85,10 +86,7 @@ const shortfall = z
 export const takeoffQuestion = z
   .strictObject({
     ...takeoffRequest.shape,
-    aeroplane: z.union([
-      z.strictObject({ id, revision: shortText }),
-      z.strictObject({ definition: aeroplaneDefinition }),
-    ]),
+    aeroplane: aeroplaneUnderstood,
     units,
     rounding,
   })

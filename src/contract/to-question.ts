@@ -8,15 +8,12 @@ import { checkConfigurationId } from './question-checks/check-configuration-id.t
 import { checkMass } from './question-checks/check-mass.ts';
 import { checkRunway } from './question-checks/check-runway.ts';
 import { checkWind } from './question-checks/check-wind.ts';
+import { defaultUnits } from './question-frame.ts';
 import type { TakeoffRequest } from './takeoff-request.ts';
 import { aeroplaneAt, toKnownAeroplane } from './to-known-aeroplane.ts';
 import { toRunway } from './to-runway.ts';
 import { toWeather } from './to-weather.ts';
 import { unknownId } from './unknown-id.ts';
-
-/** What an answer is written in when the question does not say; frozen in v1. */
-export const defaultUnits = 'm-kt-kg';
-export const defaultRounding = 'safe';
 
 /**
  * The gate in: a takeoff request as planning's question, in SI.

@@ -2,6 +2,8 @@ import type { BandedDistance, Shortfall, TakeoffAnswer, WindComponents } from '.
 import type { Question } from '../planning/question.ts';
 import type { ReferenceKey } from '../references.ts';
 import { shown, unitFor } from '../units/presentation.ts';
+import { asChosen } from './aeroplane-choice.ts';
+import { defaultRounding, defaultUnits } from './question-frame.ts';
 import { type Presentation, shownQuantity } from './shown-quantity.ts';
 import type { TakeoffRequest } from './takeoff-request.ts';
 import type { TakeoffQuestion, TakeoffResponse } from './takeoff-response.ts';
@@ -9,7 +11,6 @@ import { toAdvisory, toMeasure } from './to-advisory.ts';
 import { toAir } from './to-air.ts';
 import { toAssessment } from './to-assessment.ts';
 import { type Stamp, toAssumed, toSources } from './to-basis.ts';
-import { defaultRounding, defaultUnits } from './to-question.ts';
 import { toSpeedSet } from './to-speed-set.ts';
 
 /**
@@ -114,7 +115,7 @@ function asUnderstood(request: TakeoffRequest, revision: string): TakeoffQuestio
   return {
     ...(reference === undefined ? {} : { reference }),
     ...(asOf === undefined ? {} : { asOf }),
-    aeroplane: 'id' in aeroplane ? { id: aeroplane.id, revision } : aeroplane,
+    aeroplane: asChosen(aeroplane, revision),
     mass: request.mass,
     configuration: request.configuration,
     runway: request.runway,

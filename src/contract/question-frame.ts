@@ -1,0 +1,20 @@
+import { z } from 'zod';
+import { unitFamilies } from '../units/presentation.ts';
+import { shortText } from './text.ts';
+
+/** Members that every question may have: what is echoed, and how the answer is written. */
+export const reference = shortText.meta({ description: "The caller's own reference, echoed and not used." });
+export const asOf = z.iso
+  .datetime({ offset: true })
+  .max(40)
+  .meta({ description: 'The time the question is asked for, RFC 3339; echoed.' });
+export const units = z.enum(unitFamilies).meta({
+  description: 'Units of the answer: metres, knots, kilograms (altitudes in feet); feet, knots, pounds; or SI.',
+});
+export const rounding = z
+  .enum(['safe', 'none'])
+  .meta({ description: 'safe rounds what is required up and what is available down; none shows numbers unrounded.' });
+
+/** What an answer is written in when the question does not say; frozen in v1. */
+export const defaultUnits = 'm-kt-kg';
+export const defaultRounding = 'safe';
