@@ -29,7 +29,10 @@ export function aeroplaneFile(name: string, bytes: Uint8Array): CatalogueEntry |
   const json = readStrictJson(bytes);
   if (isRefused(json)) return json;
   const read = readDefinition(json.value);
-  if (isRefused(read)) return { refused: [...json.slips, ...read.refused] };
+  if (isRefused(read)) {
+    const told = new Set(json.slips.map(({ pointer }) => pointer));
+    return { refused: [...json.slips, ...read.refused.filter(({ pointer }) => !told.has(pointer))] };
+  }
   const definition = read.value;
   const faults = [...json.slips, ...checkName(definition, name), ...checkAeroplane(definition, '')];
   if (faults.length > 0) return { refused: faults };
