@@ -1,5 +1,5 @@
-/** Least height over span for which the formula is used [-]: a wing lies higher than this above its wheels. */
-const leastRatio = 0.03;
+/** Least height over span for which the formula is used: a wing lies higher than this above its wheels. */
+export const leastHeightRatio = 0.03;
 
 /** Height of the wing over the span at which the ground's effect ends, 1/1.32. @see references.Wieselsberger1922 */
 export const heightRatioWithoutEffect = 1 / 1.32;
@@ -16,6 +16,6 @@ export const heightRatioWithoutEffect = 1 / 1.32;
  */
 export function groundEffect(heightRatio: number): number {
   if (heightRatio >= heightRatioWithoutEffect) return 1;
-  const r = Math.max(heightRatio, leastRatio);
+  const r = Math.max(heightRatio, leastHeightRatio);
   return 1 - (1 - 1.32 * r) / (1.05 + 7.4 * r);
 }

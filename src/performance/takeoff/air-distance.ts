@@ -1,0 +1,95 @@
+import { splitPoints } from '../../numerics/split-points.ts';
+import { addSettled, newPathIntegral, type PathIntegral } from '../path-integral.ts';
+import { type ClimbForces, climbForces, climbGradient } from './climb-forces.ts';
+import { addClimbPiece, climbJumps } from './climb-piece.ts';
+import { pullUpArcTime, pullUpArcTop, pullUpRadius } from './pull-up-arc.ts';
+import type { TakeoffRun } from './takeoff-run.ts';
+
+/** The air path, or the name of why there is none. */
+export type AirDistance =
+  | {
+      readonly outcome: 'reaches-screen';
+      /** lift-off to the screen, over the ground [m], [s] */
+      readonly distance: number;
+      readonly time: number;
+      readonly leastClimbGradient: number;
+    }
+  | {
+      readonly outcome: 'never-reaches-screen-height';
+      readonly leastClimbGradient: number;
+      readonly neededClimbGradient: number;
+    };
+
+/** Least climb gradient at which a path with all engines is computed. @see references.HouseEnergyPath */
+export const neededWithAllEngines = 0.015;
+/** Below this share of the greatest gradient, 8 nodes a piece are not trusted unseen. */
+const fineBelowShare = 0.4;
+
+/**
+ * Distance over the ground from lift-off to the screen height.
+ *
+ * The speed schedule is the procedure's: V^2 grows linearly with height from V_LOF^2 to V_scr^2, so that
+ * sin(gamma_e) = ((T - D)/W - max(slope, 0))/kappa, kappa = 1 + (V_scr^2 - V_LOF^2)/(2 g h_s). Just after lift-off the path is no
+ * steeper than a pull-up arc of radius R = V_LOF^2/(g (n - 1)): cos(gamma_a) = 1 - h/R. With gamma the lesser of the two,
+ * s = integral of (V cos gamma - w)/(V sin gamma) dh. On the arc the still-air part is R sin gamma exactly and the time is
+ * R times the integral of d gamma/V; above it both are integrals over height, in pieces that end where the ground effect does
+ * and at the thrust's kinks.
+ *
+ * @param run - speeds true [m/s], screen height h_s [m], load factor n of the arc above 1
+ * @param needed - climb gradient that must be exceeded on the whole path
+ * @returns distance [m] and time [s], or 'never-reaches-screen-height' with the least (T - D)/W - max(slope, 0)
+ * @remarks A screen speed below the lift-off speed counts as the lift-off speed. Long by design just after lift-off, where the
+ * arc throws energy away; a falling runway gets no credit. Path angles are held to 45 degrees.
+ * @see references.HouseEnergyPath
+ */
+export function airDistance(run: TakeoffRun, needed = neededWithAllEngines): AirDistance {
+  const { headwind, screenHeight } = run;
+  const forces = climbForces(run);
+  const atLiftOff = climbGradient(forces, 0);
+  const atScreen = climbGradient(forces, screenHeight);
+  const lesser = Math.min(atLiftOff, atScreen);
+  if (!(lesser > needed)) return neverReaches(lesser, needed);
+
+  const radius = pullUpRadius(run.liftOffSpeed, run.pullUpLoadFactor);
+  const arcTop = pullUpArcTop(forces, radius, screenHeight, atLiftOff, atScreen);
+  const angle = 2 * Math.asin(Math.sqrt(arcTop / (2 * radius)));
+  const arcTime = pullUpArcTime(forces, radius, angle);
+
+  const jumps = climbJumps(forces);
+  const onArc = leastAt(forces, lesser, jumps, arcTop);
+  if (!(onArc > needed)) return neverReaches(onArc, needed);
+
+  let sum = newPathIntegral();
+  if (arcTop < screenHeight) {
+    const ends = splitPoints(arcTop, screenHeight, jumps);
+    for (let i = 1; i < ends.length; i++) addClimbPiece(forces, ends[i - 1] as number, ends[i] as number, sum);
+    if (!(sum.least > needed)) return neverReaches(sum.least, needed);
+    if (sum.least < fineBelowShare * sum.most) {
+      const add = (from: number, to: number, into: PathIntegral) => addClimbPiece(forces, from, to, into);
+      sum = newPathIntegral();
+      let settled = true;
+      for (let i = 1; i < ends.length && settled; i++) {
+        settled = addSettled(add, ends[i - 1] as number, ends[i] as number, sum);
+      }
+      if (!settled || !(sum.least > needed)) return neverReaches(sum.least, needed);
+    }
+  }
+  const time = arcTime + sum.time;
+  return {
+    outcome: 'reaches-screen',
+    distance: radius * Math.sin(angle) + sum.distance - headwind * time,
+    time,
+    leastClimbGradient: Math.min(onArc, sum.least),
+  };
+}
+
+/** The least of a gradient already found and those where its slope jumps below a height. */
+function leastAt(forces: ClimbForces, found: number, jumps: readonly number[], below: number): number {
+  let least = found;
+  for (const height of jumps) if (height > 0 && height < below) least = Math.min(least, climbGradient(forces, height));
+  return least;
+}
+
+function neverReaches(leastClimbGradient: number, neededClimbGradient: number): AirDistance {
+  return { outcome: 'never-reaches-screen-height', leastClimbGradient, neededClimbGradient };
+}

@@ -1,0 +1,85 @@
+import { splitPoints } from '../../numerics/split-points.ts';
+import { g0 } from '../../physics/constants.ts';
+import { addSettled, newPathIntegral, type PathIntegral } from '../path-integral.ts';
+import { type RollForces, rollAcceleration, rollForces } from './roll-forces.ts';
+import { addRollPiece } from './roll-piece.ts';
+import type { TakeoffRun } from './takeoff-run.ts';
+
+/** The roll, or the name of why there is none. */
+export type GroundRoll =
+  | {
+      readonly outcome: 'lifts-off';
+      /** brake release to lift-off, rotation included [m], [s] */
+      readonly distance: number;
+      readonly time: number;
+      /** least acceleration over g */
+      readonly leastAccelerationRatio: number;
+    }
+  | {
+      readonly outcome: 'never-reaches-lift-off-speed';
+      readonly atAirspeed: number;
+      readonly leastAccelerationRatio: number;
+    }
+  | { readonly outcome: 'ground-speed-not-positive'; readonly headwind: number; readonly liftOffSpeed: number };
+
+/** An acceleration over g that counts as none: at 1e-6 g a takeoff would last days. */
+const none = 1e-6;
+/** Below this acceleration over g, or this share of the greatest, 16 nodes a piece are not trusted unseen. */
+const fineBelow = 0.02;
+const fineBelowShare = 0.15;
+
+/**
+ * Distance along the runway from brake release to lift-off.
+ *
+ * s = integral of (V - w)/a(V) dV from V = w to V_LOF, plus (V_R - w) t_R for the rotation; t = integral of dV/a, plus t_R;
+ * m a = T(V) - q S C_Dg - mu max(0, W - q S C_Lg) - W slope, q = rho V|V|/2.
+ *
+ * Gauss-Legendre, 16 nodes a piece; a piece ends where V = 0, where lift reaches the weight and at the thrust's kinks. Where the
+ * acceleration is small or falls by much, pieces are halved until they agree. The acceleration is integrated to V_LOF even where
+ * V_R is lower, and the rotation comes on top: the longer reading of two.
+ *
+ * @param run - steady headwind w, airspeeds and V_R = rotationSpeed [m/s], t_R = rotationTime [s]
+ * @returns distance [m] and time [s]; 'never-reaches-lift-off-speed' where a is not above 1e-6 g throughout, with the airspeed at
+ * which it is first gone; 'ground-speed-not-positive' where w is at or above V_LOF
+ * @remarks Small slopes, wheels, below Mach 0.4; thrust acts along the runway; rotating masses are left out (0 to 2 %).
+ * @see references.McCormick1995, sec. 7.2; references.KrenkelSalzman1968; references.Raymer for the rotation
+ */
+export function groundRoll(run: TakeoffRun): GroundRoll {
+  const { headwind, liftOffSpeed } = run;
+  if (headwind >= liftOffSpeed) return { outcome: 'ground-speed-not-positive', headwind, liftOffSpeed };
+  const forces = rollForces(run);
+  const airborne = forces.lift > 0 ? Math.sqrt(forces.weight / forces.lift) : 0;
+  const ends = splitPoints(headwind, liftOffSpeed, forces.thrust.kinks, 0, airborne);
+  let sum = newPathIntegral();
+  for (let i = 1; i < ends.length; i++) {
+    addRollPiece(forces, headwind, ends[i - 1] as number, ends[i] as number, sum);
+  }
+  if (!(sum.least > none * g0)) return neverReaches(forces, headwind, liftOffSpeed, sum.leastAt);
+  if (sum.least < fineBelow * g0 || sum.least < fineBelowShare * sum.most) {
+    sum = newPathIntegral();
+    let settled = true;
+    const add = (from: number, to: number, into: PathIntegral) => addRollPiece(forces, headwind, from, to, into);
+    for (let i = 1; i < ends.length && settled; i++) {
+      settled = addSettled(add, ends[i - 1] as number, ends[i] as number, sum);
+    }
+    if (!settled || sum.least <= none * g0) return neverReaches(forces, headwind, liftOffSpeed, sum.leastAt);
+  }
+  return {
+    outcome: 'lifts-off',
+    distance: sum.distance + Math.max(0, run.rotationSpeed - headwind) * run.rotationTime,
+    time: sum.time + run.rotationTime,
+    leastAccelerationRatio: sum.least / g0,
+  };
+}
+
+/** The named outcome, with the first airspeed at which the acceleration is gone, to a thousandth of the roll's speeds. */
+function neverReaches(forces: RollForces, from: number, to: number, leastAt: number): GroundRoll {
+  const leastAccelerationRatio = rollAcceleration(forces, leastAt) / g0;
+  for (let i = 0; i <= 1000; i++) {
+    const airspeed = from + ((to - from) * i) / 1000;
+    if (rollAcceleration(forces, airspeed) <= none * g0) {
+      return { outcome: 'never-reaches-lift-off-speed', atAirspeed: airspeed, leastAccelerationRatio };
+    }
+  }
+  return { outcome: 'never-reaches-lift-off-speed', atAirspeed: leastAt, leastAccelerationRatio };
+}
