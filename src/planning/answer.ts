@@ -139,8 +139,18 @@ export interface Shortfall {
   readonly side: 'above' | 'below';
 }
 
+/** What one input adds to the bands: the share by which each distance moves for one standard deviation of it, with its sign. */
+export interface BandContribution {
+  readonly of: string;
+  readonly groundRoll: number;
+  readonly airDistance: number;
+  readonly takeoffDistance: number;
+}
+
 export interface Basis {
   readonly method: Method;
+  /** absent where there are no distances */
+  readonly band?: readonly BandContribution[];
   readonly assumed: readonly Assumption[];
   readonly notGiven: readonly string[];
   readonly sources: readonly ReferenceKey[];

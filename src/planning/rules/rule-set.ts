@@ -12,6 +12,13 @@ export interface WindCredit {
   readonly source: ReferenceKey;
 }
 
+/** A margin over what is required below which an answer is thin. */
+export interface ThinMargin {
+  readonly ratio: number;
+  readonly because: string;
+  readonly source: ReferenceKey;
+}
+
 /** One comparison a rule asks for: a distance times its overall factor against one declared distance. */
 export interface Requirement {
   readonly code: string;
@@ -33,6 +40,8 @@ export interface TakeoffRules {
   readonly startsFrom: 'reference' | 'credited';
   /** factors of the surface and the slope on the reference distance; undefined where the set does not speak of the surface */
   readonly runwayFactors: (surface: Surface, slope: number) => readonly Factor[] | undefined;
+  /** the most that counts of a clearway, over the run */
+  readonly clearwayShare: number;
   /** the comparisons, which may depend on which distances are declared */
   readonly requirements: (declared: DeclaredDistances) => readonly Requirement[];
 }
@@ -41,11 +50,12 @@ export interface TakeoffRules {
 export interface RuleSet {
   readonly id: string;
   readonly title: string;
+  /** how a sentence names the set: 'under class B factors' */
+  readonly phrase: string;
   readonly source: ReferenceKey;
   /** why the set does not speak of this aeroplane; undefined where it does */
   readonly doesNotApply: (aeroplane: Aeroplane) => string | undefined;
   readonly windCredit: WindCredit;
-  /** a margin over required below this makes an answer thin */
-  readonly thinMargin: { readonly ratio: number; readonly because: string; readonly source: ReferenceKey };
+  readonly thinMargin: ThinMargin;
   readonly takeoff: TakeoffRules;
 }

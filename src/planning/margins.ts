@@ -1,0 +1,118 @@
+import type { Check, Factor } from './answer.ts';
+import type { DeclaredDistances } from './declared-distances.ts';
+import type { Requirement } from './rules/rule-set.ts';
+
+/** The distances that checks start from [m], each absent where it does not exist. */
+export interface StartingDistances {
+  /** credited wind; paved, dry, level */
+  readonly reference?: number;
+  /** credited wind; the runway as it is */
+  readonly credited?: number;
+}
+
+/** Below this a shortfall is the arithmetic's, not the runway's [m]: 600 x 1.3 x 1.15 is 896.9999999999999. */
+export const arithmeticSlack = 1e-6;
+
+type Start = 'reference' | 'credited';
+interface Reading {
+  readonly startsFrom: Start;
+  readonly distance: number;
+  readonly factors: readonly Factor[];
+  readonly required: number;
+}
+
+/**
+ * One check: what a rule requires against what is declared.
+ *
+ * The factors of the surface and the slope multiply the reference distance only. Where physics on the actual runway exceeds the
+ * reference times those factors, it is taken; the one not taken stands beside it. The overall factor is applied once, to
+ * whichever is taken.
+ *
+ * @param requirement - what is compared, the overall factor
+ * @param from - reference and credited distance [m]; at least one
+ * @param runwayFactors - on the reference; undefined where the rule set does not speak of the surface
+ * @param declared - what is available
+ * @see references.EuAirOps305, AMC1 and AMC2: the factors are for where the manual holds no data of its own
+ */
+export function checkOf(
+  requirement: Requirement,
+  from: StartingDistances,
+  runwayFactors: readonly Factor[] | undefined,
+  declared: DeclaredDistances,
+): Check {
+  const { code, of, against, factor, source } = requirement;
+  const overall = factor === undefined ? [] : [factor];
+  const { taken, other } = readings(from, runwayFactors, overall);
+  const available = declared.credited[against as keyof DeclaredDistances['credited']];
+  const { startsFrom, distance, factors, required } = taken;
+  const alternative = otherReading(requirement, taken) ?? other;
+  const shared = {
+    code,
+    of,
+    startsFrom,
+    distance,
+    factors,
+    ...(alternative === undefined ? {} : { alternative }),
+    unit: 'distance',
+    required,
+    source,
+  } as const;
+  if (available === undefined) {
+    return { ...shared, result: 'not-assessed', why: `${against.toUpperCase()} is not declared` };
+  }
+  const margin = available - required;
+  return {
+    ...shared,
+    available,
+    margin,
+    marginRatio: margin / required,
+    result: -margin <= arithmeticSlack ? 'passes' : 'fails',
+  };
+}
+
+function readings(
+  { reference, credited }: StartingDistances,
+  runwayFactors: readonly Factor[] | undefined,
+  overall: readonly Factor[],
+): { readonly taken: Reading; readonly other?: Check['alternative'] } {
+  const byFactors =
+    reference === undefined || runwayFactors === undefined
+      ? undefined
+      : reading('reference', reference, [...runwayFactors, ...overall]);
+  const byPhysics = credited === undefined ? undefined : reading('credited', credited, overall);
+  if (byFactors === undefined && byPhysics === undefined) {
+    throw new RangeError('from must hold a distance to start from');
+  }
+  if (byFactors === undefined) return { taken: byPhysics as Reading };
+  if (byPhysics === undefined || byPhysics.required === byFactors.required) return { taken: byFactors };
+  return byPhysics.required > byFactors.required
+    ? { taken: byPhysics, other: { ...byFactors, because: 'the factors on a paved, dry, level runway ask for less' } }
+    : { taken: byFactors, other: { ...byPhysics, because: 'physics on the runway as it is asks for less' } };
+}
+
+/** The rule's other reading, from the same distance with its own overall factor. */
+function otherReading({ alternative, factor }: Requirement, taken: Reading): Check['alternative'] {
+  if (alternative === undefined) return undefined;
+  const factors = [...taken.factors.filter((one) => one !== factor), alternative.factor];
+  return { ...reading(taken.startsFrom, taken.distance, factors), because: alternative.because };
+}
+
+function reading(startsFrom: Start, distance: number, factors: readonly Factor[]): Reading {
+  let required = distance;
+  for (const { value } of factors) required *= value;
+  return { startsFrom, distance, factors, required };
+}
+
+/**
+ * The check with the least margin as a share of what it requires; of equal ones the first.
+ *
+ * @returns its code, or undefined where nothing was assessed
+ */
+export function governingCheck(checks: readonly Check[]): Check | undefined {
+  let governing: Check | undefined;
+  for (const check of checks) {
+    if (check.marginRatio === undefined) continue;
+    if (governing?.marginRatio === undefined || check.marginRatio < governing.marginRatio) governing = check;
+  }
+  return governing;
+}

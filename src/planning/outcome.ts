@@ -1,0 +1,62 @@
+import type { Check, Outcome } from './answer.ts';
+import { arithmeticSlack } from './margins.ts';
+import type { NotReached } from './takeoff-runs.ts';
+
+/** Why an answer that passes is thin. */
+export type ThinBecause = 'margin' | 'band';
+
+/** What decides the outcome of a takeoff or landing. */
+export interface Deciding {
+  readonly notReached?: NotReached;
+  /** why the rule set does not speak of the aeroplane */
+  readonly doesNotApply?: string;
+  /** whether neither factor nor physics speaks of the surface */
+  readonly noSurface: boolean;
+  readonly checks: readonly Check[];
+  /** the roll as stated, without factors, and the length it has [m] */
+  readonly roll?: number;
+  readonly rollAvailable?: number;
+  /** a margin over required below this is thin */
+  readonly thinRatio: number;
+  /** the high end of the band over the value, for what a check is of */
+  readonly highOver: (of: string) => number;
+}
+
+/**
+ * The outcome, in the order in which one hides the next: no distance, rules that do not apply, a surface nothing speaks of, a
+ * roll longer than the runway, not enough, nothing to compare, thin, enough.
+ *
+ * A check that is not assessed keeps the outcome from enough.
+ */
+export function outcomeOf(deciding: Deciding): Outcome {
+  const { notReached, doesNotApply, noSurface, checks, roll, rollAvailable } = deciding;
+  if (notReached !== undefined) return notReached.outcome;
+  if (doesNotApply !== undefined) return 'rule-set-does-not-apply';
+  if (noSurface) return 'no-data-for-this-surface';
+  if (roll !== undefined && rollAvailable !== undefined && roll - rollAvailable > arithmeticSlack) {
+    return 'roll-longer-than-runway';
+  }
+  if (checks.some(({ result }) => result === 'fails')) return 'not-enough';
+  if (checks.length === 0 || checks.some(({ result }) => result === 'not-assessed')) return 'nothing-to-compare';
+  return thinBecause(checks, deciding.thinRatio, deciding.highOver) === undefined ? 'enough' : 'enough-but-thin';
+}
+
+/**
+ * Why checks that all pass are thin, or undefined where they are not.
+ *
+ * @param checks - all passing
+ * @param thinRatio - the least margin over required that is not thin
+ * @param highOver - the high end of the band over the value; with the same factors it must still pass
+ */
+export function thinBecause(
+  checks: readonly Check[],
+  thinRatio: number,
+  highOver: (of: string) => number,
+): ThinBecause | undefined {
+  if (checks.some(({ marginRatio }) => marginRatio !== undefined && marginRatio < thinRatio - 1e-9)) return 'margin';
+  const beyond = checks.some(
+    ({ of, required, available }) =>
+      required !== undefined && available !== undefined && required * highOver(of) - available > arithmeticSlack,
+  );
+  return beyond ? 'band' : undefined;
+}

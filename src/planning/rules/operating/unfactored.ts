@@ -1,0 +1,23 @@
+import { clearwayShare } from '../clearway-share.ts';
+import type { RuleSet } from '../rule-set.ts';
+import { thinMargin } from '../thin-margin.ts';
+
+/** No rule at all: the computed distances against the declared ones, wind as given. */
+export const unfactored: RuleSet = {
+  id: 'unfactored',
+  title: 'Distances without factors',
+  phrase: 'without factors',
+  source: 'Judgement',
+  doesNotApply: () => undefined,
+  windCredit: { headwind: 1, tailwind: 1, because: 'the wind is taken as given', source: 'Judgement' },
+  thinMargin,
+  takeoff: {
+    startsFrom: 'credited',
+    clearwayShare,
+    runwayFactors: () => undefined,
+    requirements: () => [
+      { code: 'takeoff-run', of: 'groundRoll', against: 'tora', source: 'Annex14' },
+      { code: 'takeoff-distance', of: 'takeoffDistance', against: 'toda', source: 'Annex14' },
+    ],
+  },
+};

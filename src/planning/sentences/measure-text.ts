@@ -1,0 +1,39 @@
+import { type Direction, type Kind, shown, type UnitFamily, unitFor } from '../../units/presentation.ts';
+
+const symbols: Readonly<Record<string, string>> = {
+  degC: '°C',
+  degF: '°F',
+  deltaC: '°C',
+  deltaF: '°F',
+  percent: '%',
+  deg: '°',
+  'kg/m3': 'kg/m³',
+  m2: 'm²',
+  ft2: 'ft²',
+};
+
+/**
+ * A number from SI as a sentence writes it: rounded as the gate out rounds it, thousands apart, its unit behind.
+ *
+ * @param family - the units the answer was asked in
+ * @param kind - what the number is
+ * @param si - the number in SI, finite
+ * @param direction - up for what is required, down for what is available or spare
+ * @returns such as '1 255 m', '11.9 kt', '-3.5 °C'
+ */
+export function measureText(family: UnitFamily, kind: Kind, si: number, direction: Direction = 'nearest'): string {
+  const unit = unitFor(family, kind);
+  return `${numberText(shown(family, kind, si, direction))} ${symbols[unit] ?? unit}`;
+}
+
+/** Per cent of a ratio with one decimal, such as '8.1 %'. */
+export function percentText(ratio: number): string {
+  return `${numberText(Math.round(ratio * 1000) / 10)} %`;
+}
+
+/** A number with its thousands set apart by a space. */
+export function numberText(value: number): string {
+  const [whole = '', decimals] = String(value).split('.');
+  const grouped = whole.replace(/\B(?=(\d{3})+$)/g, ' ');
+  return decimals === undefined ? grouped : `${grouped}.${decimals}`;
+}
