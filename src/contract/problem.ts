@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import { type Fault, faultCodes, type Refused } from '../planning/fault.ts';
+import type { Fault, faultCodes, Refused } from '../planning/fault.ts';
 
 interface Form {
   readonly status: number;
@@ -69,7 +69,9 @@ export const problem = z
     title: z.string().meta({ description: 'The kind of problem in words, always the same for a code.' }),
     status: z.int().min(400).max(599).meta({ description: 'The HTTP status, repeated.' }),
     detail: z.string().meta({ description: 'This problem in a sentence.' }),
-    code: z.enum(problemCodes).meta({ description: 'Stable code of the problem; of the first fault where there are more.' }),
+    code: z
+      .enum(problemCodes)
+      .meta({ description: 'Stable code of the problem; of the first fault where there are more.' }),
     errors: z.array(problemError).max(100).meta({ description: 'Every fault of the request, at most 100.' }),
   })
   .meta({ id: 'Problem', description: 'A problem as RFC 9457 writes it.' });
@@ -86,6 +88,7 @@ export function problemOf(code: ProblemCode, detail: string, errors: Problem['er
 export function toProblem({ refused }: Refused): Problem {
   const [first] = refused as readonly [Fault, ...Fault[]];
   const place = first.pointer === '' ? '' : ` (at ${first.pointer})`;
-  const detail = refused.length === 1 ? `${first.message}${place}` : `${refused.length} faults; the first: ${first.message}${place}`;
+  const detail =
+    refused.length === 1 ? `${first.message}${place}` : `${refused.length} faults; the first: ${first.message}${place}`;
   return problemOf(first.code, detail, refused.slice(0, 100));
 }

@@ -94,6 +94,14 @@ export const stationPressure = quantitySchema(
   35_000,
   115_000,
 );
+export const flightPressure = quantitySchema(
+  'FlightPressure',
+  'Static pressure around the aeroplane.',
+  'pressure',
+  weatherPressureUnits,
+  12_000,
+  115_000,
+);
 export const windSpeed = quantitySchema('WindSpeed', 'Speed of the wind.', 'speed', airspeedUnits, 0, 60);
 export const headwind = quantitySchema(
   'Headwind',

@@ -5,9 +5,9 @@ const listedSource = z
   .strictObject({
     key: z.string().meta({ description: 'How answers name the source.' }),
     title: z.string(),
-    status: z
-      .enum(['read', 'secondary', 'memory', 'derived', 'judgement'])
-      .meta({ description: 'Whether the text was read, seen as quoted, not confirmed, worked out by us, or our choice.' }),
+    status: z.enum(['read', 'secondary', 'memory', 'derived', 'judgement']).meta({
+      description: 'Whether the text was read, seen as quoted, not confirmed, worked out by us, or our choice.',
+    }),
   })
   .meta({ id: 'ListedSource', description: 'A source of the numbers.' });
 
