@@ -1,0 +1,42 @@
+import type { FastifyInstance } from 'fastify';
+import type { Catalogue } from '../../catalogue/read-catalogue.ts';
+import { answerTakeoff } from '../../contract/answer-takeoff.ts';
+import { takeoffRequest } from '../../contract/takeoff-request.ts';
+import { takeoffResponse } from '../../contract/takeoff-response.ts';
+import { aeroplaneLookup } from '../aeroplane-lookup.ts';
+import { exampleTakeoff } from '../document/example-takeoff.ts';
+import { addOperation, type WarmUp } from '../operation.ts';
+import { stamp } from '../stamp.ts';
+
+/** The takeoff; warmed up with each aeroplane on file, since each kind of propulsion has its own arithmetic. */
+export function takeoff(app: FastifyInstance, catalogue: Catalogue): WarmUp {
+  const lookup = aeroplaneLookup(catalogue);
+  const ours = stamp();
+  return addOperation(app, {
+    url: '/v1/takeoff',
+    operationId: 'takeoff',
+    summary: 'How much runway does this takeoff need?',
+    description:
+      'Takes an aeroplane, its mass and configuration, a runway, the weather and a rule set; gives the air, the wind, the speeds, the distances and the margins against the declared distances. Advisory only.',
+    tag: 'questions',
+    request: takeoffRequest,
+    response: takeoffResponse,
+    example: exampleTakeoff,
+    warmUp: catalogue.list().flatMap(({ definition }) => {
+      const [configuration] =
+        Object.entries(definition.configurations).find(([, one]) => one.for.includes('takeoff')) ?? [];
+      return configuration === undefined
+        ? []
+        : [
+            {
+              ...exampleTakeoff,
+              aeroplane: { id: definition.id },
+              mass: definition.masses.maximumTakeoff,
+              configuration,
+              ruleSet: 'unfactored',
+            },
+          ];
+    }),
+    answer: (request) => answerTakeoff(request, lookup, ours),
+  });
+}
