@@ -127,11 +127,11 @@ export function shown(
 
 /** Rounds to a multiple of the step; the step's reciprocal is a whole number or the step is. */
 export function roundTo(value: number, step: number, direction: Direction): number {
+  if (!Number.isFinite(value)) throw new RangeError(`value must be finite: ${value}`);
   const inverse = step < 1 ? Math.round(1 / step) : 1 / step;
   const steps = value * inverse;
   const nearest = Math.round(steps);
   const near = Math.abs(steps - nearest) <= 1e-9 * Math.max(1, Math.abs(steps));
-  const whole =
-    direction === 'nearest' || near ? nearest : direction === 'up' ? Math.ceil(steps) : Math.floor(steps);
+  const whole = direction === 'nearest' || near ? nearest : direction === 'up' ? Math.ceil(steps) : Math.floor(steps);
   return step < 1 ? whole / inverse + 0 : whole * step + 0;
 }

@@ -1,5 +1,5 @@
-import { fc, it } from '@fast-check/vitest';
-import { describe, expect } from 'vitest';
+import { fc, test } from '@fast-check/vitest';
+import { describe, expect, it } from 'vitest';
 import { interpolate, interpolateHeld } from '../../src/numerics/interpolate.ts';
 import { expectNear } from '../support/near.ts';
 
@@ -51,7 +51,7 @@ describe('interpolate', () => {
       }),
     );
 
-  it.prop([tables])('stays between the two rows it lies between (2 to 30 rows, values to 1e6)', (table) => {
+  test.prop([tables])('stays between the two rows it lies between (2 to 30 rows, values to 1e6)', (table) => {
     const x0 = table.axis[table.piece] as number;
     const x1 = table.axis[table.piece + 1] as number;
     const y0 = table.values[table.piece] as number;
@@ -62,7 +62,7 @@ describe('interpolate', () => {
     expect(y).toBeLessThanOrEqual(Math.max(y0, y1) + slack);
   });
 
-  it.prop([fc.double({ min: -100, max: 100, noNaN: true })])('gives a straight line back, -100 to 100', (x) => {
+  test.prop([fc.double({ min: -100, max: 100, noNaN: true })])('gives a straight line back, -100 to 100', (x) => {
     expectNear(interpolate([-100, -3, 0.5, 100], [-197, -3, 4, 203], x), 2 * x + 3, 1e-10);
   });
 });

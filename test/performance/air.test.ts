@@ -1,5 +1,5 @@
-import { fc, it } from '@fast-check/vitest';
-import { describe, expect } from 'vitest';
+import { fc, test } from '@fast-check/vitest';
+import { describe, expect, it } from 'vitest';
 import { type Air, type AirOutcome, type AirReport, airOf } from '../../src/performance/air.ts';
 import { qnh, stationPressure } from '../../src/physics/altimetry.ts';
 import { standardPressure } from '../../src/physics/atmosphere.ts';
@@ -38,7 +38,7 @@ describe('the air at the runway', () => {
     expectNear(reported(inputs).densityAltitude, expected, tolerance);
   });
 
-  it.prop([weather])(
+  test.prop([weather])(
     'is the same from QNH, station pressure and pressure altitude: -60 to +60 °C, QNH 870 to 1085 hPa, -500 to 6000 m',
     ({ temperature, qnh: setting, elevation }) => {
       const one = told(airOf({ temperature, pressure: { kind: 'qnh', value: setting } }, elevation));
@@ -56,7 +56,7 @@ describe('the air at the runway', () => {
     },
   );
 
-  it.prop([weather])('is lighter and stands higher with moisture, dew point 0 to 40 K below', (given) => {
+  test.prop([weather])('is lighter and stands higher with moisture, dew point 0 to 40 K below', (given) => {
     const { temperature, elevation, spread } = given;
     const pressure = { kind: 'qnh', value: given.qnh } as const;
     const dry = told(airOf({ temperature, pressure }, elevation));

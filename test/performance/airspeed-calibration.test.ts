@@ -1,5 +1,5 @@
-import { fc, it } from '@fast-check/vitest';
-import { describe, expect } from 'vitest';
+import { fc, test } from '@fast-check/vitest';
+import { describe, expect, it } from 'vitest';
 import { calibratedFromIndicated, indicatedFromCalibrated } from '../../src/performance/airspeed-calibration.ts';
 import { expectNear } from '../support/near.ts';
 
@@ -21,7 +21,7 @@ describe('airspeed calibration', () => {
     expect(indicatedFromCalibrated(calibration, 69.1)).toBe('outside');
   });
 
-  it.prop([fc.double({ min: 20, max: 70, noNaN: true })])('comes back, over the whole table, to 1e-12 m/s', (ias) => {
+  test.prop([fc.double({ min: 20, max: 70, noNaN: true })])('comes back, over the whole table, to 1e-12 m/s', (ias) => {
     expectNear(indicatedFromCalibrated(calibration, calibratedFromIndicated(calibration, ias) as number), ias, 1e-12);
   });
 });

@@ -1,5 +1,5 @@
-import { fc, it } from '@fast-check/vitest';
-import { describe, expect } from 'vitest';
+import { fc, test } from '@fast-check/vitest';
+import { describe, expect, it } from 'vitest';
 import {
   casFromEas,
   casFromMach,
@@ -49,7 +49,7 @@ describe('airspeeds', () => {
     expectNear(flown(inputs).mach, expected, tolerance);
   });
 
-  it.prop([speeds, pressures, densities])(
+  test.prop([speeds, pressures, densities])(
     'CAS to EAS to TAS and back, 0.001 to 200 m/s, 350 to 1150 hPa, 0.3 to 1.9 kg/m3, to 1e-12',
     (cas, pressure, density) => {
       const eas = easFromCas(cas, pressure) as number;
@@ -60,7 +60,7 @@ describe('airspeeds', () => {
     },
   );
 
-  it.prop([fc.double({ min: 1e-5, max: 1, noNaN: true })])('Mach to impact pressure and back, to 1e-12', (mach) => {
+  test.prop([fc.double({ min: 1e-5, max: 1, noNaN: true })])('Mach to impact pressure and back, to 1e-12', (mach) => {
     expectRatio(machOfImpactPressureRatio(impactPressureRatio(mach)), mach, 1e-12);
   });
 
@@ -71,12 +71,12 @@ describe('airspeeds', () => {
     expect(tasFromEas(0, 0.5)).toBe(0);
   });
 
-  it.prop([speeds])('CAS, EAS and TAS are one at sea level on the standard day', (cas) => {
+  test.prop([speeds])('CAS, EAS and TAS are one at sea level on the standard day', (cas) => {
     expectRatio(easFromCas(cas, p0), cas, 1e-12);
     expectRatio(tasFromEas(cas, rho0), cas, 1e-15);
   });
 
-  it.prop([fc.double({ min: 1, max: 200, noNaN: true }), fc.double({ min: 35_000, max: 101_324, noNaN: true })])(
+  test.prop([fc.double({ min: 1, max: 200, noNaN: true }), fc.double({ min: 35_000, max: 101_324, noNaN: true })])(
     'EAS lies below CAS where pressure is below the standard, and rises with CAS',
     (cas, pressure) => {
       const eas = easFromCas(cas, pressure) as number;
@@ -85,7 +85,7 @@ describe('airspeeds', () => {
     },
   );
 
-  it.prop([fc.double({ min: 1, max: 200, noNaN: true }), fc.double({ min: -500, max: 6000, noNaN: true })])(
+  test.prop([fc.double({ min: 1, max: 200, noNaN: true }), fc.double({ min: -500, max: 6000, noNaN: true })])(
     'in dry air TAS = M a whether through density or through the speed of sound, to 2e-8',
     (cas, altitude) => {
       const pressure = standardPressure(altitude);

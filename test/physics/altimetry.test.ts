@@ -1,5 +1,5 @@
-import { fc, it } from '@fast-check/vitest';
-import { describe, expect } from 'vitest';
+import { fc, test } from '@fast-check/vitest';
+import { describe, expect, it } from 'vitest';
 import { pressureAltitude, pressureAltitudeOfPressure, qnh, stationPressure } from '../../src/physics/altimetry.ts';
 import { standardPressure } from '../../src/physics/atmosphere.ts';
 import { fromSi, toSi } from '../../src/units/units.ts';
@@ -33,7 +33,7 @@ describe('pressure altitude', () => {
     expectNear(feet(pressureAltitude(indicated, inputs.qnh_hPa * 100)), expected, tolerance);
   });
 
-  it.prop([elevations, settings])(
+  test.prop([elevations, settings])(
     'is that of the station pressure, elevation -500 to 6000 m, QNH 870 to 1085 hPa, to 1e-6 m',
     (elevation, setting) => {
       expectNear(
@@ -44,7 +44,7 @@ describe('pressure altitude', () => {
     },
   );
 
-  it.prop([elevations, settings])(
+  test.prop([elevations, settings])(
     'rises metre for metre with elevation and falls as QNH rises',
     (elevation, setting) => {
       expectNear(pressureAltitude(elevation + 1, setting) - pressureAltitude(elevation, setting), 1, 1e-9);
@@ -52,7 +52,7 @@ describe('pressure altitude', () => {
     },
   );
 
-  it.prop([fc.double({ min: -5000, max: 20_000, noNaN: true })])(
+  test.prop([fc.double({ min: -5000, max: 20_000, noNaN: true })])(
     'comes back through the pressure, -5000 to 20 000 m, to 1e-6 m',
     (altitude) => {
       expectNear(pressureAltitudeOfPressure(standardPressure(altitude)), altitude, 1e-6);
@@ -66,7 +66,7 @@ describe('pressure altitude', () => {
 });
 
 describe('station pressure and QNH', () => {
-  it.prop([elevations, settings])(
+  test.prop([elevations, settings])(
     'invert each other, elevation -500 to 6000 m, QNH 870 to 1085 hPa, to 1e-12',
     (elevation, setting) => {
       expectRatio(qnh(elevation, stationPressure(elevation, setting)), setting, 1e-12);

@@ -1,6 +1,6 @@
-import { fc, it } from '@fast-check/vitest';
+import { fc, test } from '@fast-check/vitest';
 import psychrolib from 'psychrolib';
-import { describe, expect } from 'vitest';
+import { describe, expect, it } from 'vitest';
 import {
   highestAltitude,
   lowestAltitude,
@@ -43,7 +43,7 @@ describe('the standard atmosphere', () => {
     expectNear(speedOfSound(standardTemperature(inputs.geopotential_altitude_m)), expected, tolerance);
   });
 
-  it.prop([fc.double({ min: -5000, max: 11_000, noNaN: true })])(
+  test.prop([fc.double({ min: -5000, max: 11_000, noNaN: true })])(
     'agrees with the ASHRAE handbook as psychrolib computes it, -5000 to 11 000 m, pressure to 2e-4, temperature to 0.01 K',
     (altitude) => {
       expectRatio(standardPressure(altitude), psychrolib.GetStandardAtmPressure(altitude), 2e-4);
@@ -51,7 +51,7 @@ describe('the standard atmosphere', () => {
     },
   );
 
-  it.prop([fc.double({ min: -5000, max: 19_999, noNaN: true }), fc.double({ min: 1e-3, max: 1, noNaN: true })])(
+  test.prop([fc.double({ min: -5000, max: 19_999, noNaN: true }), fc.double({ min: 1e-3, max: 1, noNaN: true })])(
     'obeys the hydrostatic equation dp = -rho g dH and falls, -5000 to 20 000 m',
     (altitude, step) => {
       const above = standardPressure(altitude + step);

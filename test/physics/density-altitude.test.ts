@@ -1,5 +1,5 @@
-import { fc, it } from '@fast-check/vitest';
-import { describe, expect } from 'vitest';
+import { fc, test } from '@fast-check/vitest';
+import { describe, expect, it } from 'vitest';
 import { pressureAltitude } from '../../src/physics/altimetry.ts';
 import { standardDensity, standardPressure } from '../../src/physics/atmosphere.ts';
 import { airDensity } from '../../src/physics/density.ts';
@@ -41,14 +41,14 @@ describe('density altitude', () => {
     expectNear(at(inputs.to_F) - at(inputs.from_F), expected, tolerance);
   });
 
-  it.prop([fc.double({ min: -5000, max: 20_000, noNaN: true })])(
+  test.prop([fc.double({ min: -5000, max: 20_000, noNaN: true })])(
     'comes back through the density, -5000 to 20 000 m, to 1e-6 m',
     (altitude) => {
       expectNear(densityAltitude(standardDensity(altitude)), altitude, 1e-6);
     },
   );
 
-  it.prop([fc.double({ min: 0.1, max: 1.9, noNaN: true }), fc.double({ min: 1e-6, max: 0.01, noNaN: true })])(
+  test.prop([fc.double({ min: 0.1, max: 1.9, noNaN: true }), fc.double({ min: 1e-6, max: 0.01, noNaN: true })])(
     'falls as density rises, 0.1 to 1.9 kg/m3',
     (density, more) => {
       expect(densityAltitude(density + more)).toBeLessThan(densityAltitude(density) as number);

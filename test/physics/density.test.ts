@@ -1,6 +1,6 @@
-import { fc, it } from '@fast-check/vitest';
+import { fc, test } from '@fast-check/vitest';
 import psychrolib from 'psychrolib';
-import { describe, expect } from 'vitest';
+import { describe, expect, it } from 'vitest';
 import { standardPressure, standardTemperature } from '../../src/physics/atmosphere.ts';
 import { rho0 } from '../../src/physics/constants.ts';
 import { airDensity } from '../../src/physics/density.ts';
@@ -32,7 +32,7 @@ describe('density of the air', () => {
     expectRatio(ours, expected, 5e-4);
   });
 
-  it.prop([
+  test.prop([
     fc.double({ min: 0.1, max: 45, noNaN: true }),
     fc.double({ min: 60_000, max: 110_000, noNaN: true }),
     fc.double({ min: 0, max: 1, noNaN: true }),
@@ -42,7 +42,7 @@ describe('density of the air', () => {
     expectRatio(airDensity(pressure, celsius + 273.15, vapour), theirs, 1.5e-4);
   });
 
-  it.prop([temperatures, pressures, fc.double({ min: 0.001, max: 0.5, noNaN: true })])(
+  test.prop([temperatures, pressures, fc.double({ min: 0.001, max: 0.5, noNaN: true })])(
     'falls with moisture and temperature and rises with pressure, -60 to +60 °C, 350 to 1150 hPa',
     (temperature, pressure, share) => {
       const dry = airDensity(pressure, temperature);

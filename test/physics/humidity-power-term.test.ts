@@ -1,5 +1,5 @@
-import { fc, it } from '@fast-check/vitest';
-import { describe, expect } from 'vitest';
+import { fc, test } from '@fast-check/vitest';
+import { describe, expect, it } from 'vitest';
 import { standardPressure } from '../../src/physics/atmosphere.ts';
 import { saturationVapourPressure } from '../../src/physics/humidity.ts';
 import { certificationVapourPressure, humidityPowerTerm } from '../../src/physics/humidity-power-term.ts';
@@ -39,7 +39,7 @@ describe('what moisture leaves of the power', () => {
     expectNear(humidityPowerTerm(101_325, vapour, 0, 1.5), 1 - 1.5 * 0.042498, 3e-6);
   });
 
-  it.prop([altitudes, factors, fc.double({ min: 0, max: 0.3, noNaN: true })])(
+  test.prop([altitudes, factors, fc.double({ min: 0, max: 0.3, noNaN: true })])(
     'lies in 0 to 1, falls with moisture, and is 1 with factor 0, -1500 to 7500 m',
     (altitude, factor, share) => {
       const pressure = standardPressure(altitude);

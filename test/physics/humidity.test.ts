@@ -1,6 +1,6 @@
-import { fc, it } from '@fast-check/vitest';
+import { fc, test } from '@fast-check/vitest';
 import psychrolib from 'psychrolib';
-import { describe, expect } from 'vitest';
+import { describe, expect, it } from 'vitest';
 import { standardPressure, standardTemperature } from '../../src/physics/atmosphere.ts';
 import { dewPoint, mixingRatio, relativeHumidity, saturationVapourPressure } from '../../src/physics/humidity.ts';
 import { fromSi, toSi } from '../../src/units/units.ts';
@@ -30,7 +30,7 @@ describe('saturation vapour pressure', () => {
     expectNear(fromSi('pressure', pressure, 'inHg'), expected, tolerance);
   });
 
-  it.prop([fc.double({ min: 0.1, max: 60, noNaN: true })])(
+  test.prop([fc.double({ min: 0.1, max: 60, noNaN: true })])(
     'agrees with ASHRAE as psychrolib computes it, 0.1 to 60 °C, to 0.6 %, and to 0.3 % up to 45 °C',
     (celsius) => {
       const theirs = psychrolib.GetSatVapPres(celsius) / 100;
@@ -38,7 +38,7 @@ describe('saturation vapour pressure', () => {
     },
   );
 
-  it.prop([fc.double({ min: 213.15, max: 333.15, noNaN: true })])(
+  test.prop([fc.double({ min: 213.15, max: 333.15, noNaN: true })])(
     'comes back as the dew point, -60 to +60 °C, to 1e-9 K, and rises',
     (temperature) => {
       expectNear(dewPoint(saturationVapourPressure(temperature)), temperature, 1e-9);
@@ -60,7 +60,7 @@ describe('relative humidity and mixing ratio', () => {
     expectNear(mixingRatio(standardPressure(altitude), vapour), expected, tolerance);
   });
 
-  it.prop([fc.double({ min: 1, max: 45, noNaN: true }), fc.double({ min: 0, max: 1, noNaN: true })])(
+  test.prop([fc.double({ min: 1, max: 45, noNaN: true }), fc.double({ min: 0, max: 1, noNaN: true })])(
     'agree with psychrolib, 1 to 45 °C, dew point 0.1 °C to saturation, to 0.5 % and 1e-4',
     (celsius, share) => {
       const dew = 0.1 + share * (celsius - 0.1);

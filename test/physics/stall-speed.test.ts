@@ -1,5 +1,5 @@
-import { fc, it } from '@fast-check/vitest';
-import { describe, expect } from 'vitest';
+import { fc, test } from '@fast-check/vitest';
+import { describe, expect, it } from 'vitest';
 import { tasFromEas } from '../../src/physics/airspeed.ts';
 import { maximumLiftCoefficientFromStallSpeed, stallSpeed, turnLoadFactor } from '../../src/physics/stall-speed.ts';
 import { toSi } from '../../src/units/units.ts';
@@ -28,7 +28,7 @@ describe('stall speed', () => {
     expectNear(turnLoadFactor(toSi('angle', 80, 'deg')), 5.75877, 5e-6);
   });
 
-  it.prop([masses, areas, lifts, fc.double({ min: 0.5, max: 2, noNaN: true })])(
+  test.prop([masses, areas, lifts, fc.double({ min: 0.5, max: 2, noNaN: true })])(
     'goes as the square root of mass and of load factor, 100 to 100 000 kg, 1 to 600 m2, to 1e-14',
     (mass, area, lift, ratio) => {
       const one = stallSpeed(mass, area, lift);
@@ -39,7 +39,7 @@ describe('stall speed', () => {
     },
   );
 
-  it.prop([masses, areas, lifts])('gives its lift coefficient back, to 1e-14', (mass, area, lift) => {
+  test.prop([masses, areas, lifts])('gives its lift coefficient back, to 1e-14', (mass, area, lift) => {
     const found = maximumLiftCoefficientFromStallSpeed(stallSpeed(mass, area, lift), mass, area);
     expectRatio(found, lift, 1e-14);
   });

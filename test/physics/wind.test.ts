@@ -1,5 +1,5 @@
-import { fc, it } from '@fast-check/vitest';
-import { describe, expect } from 'vitest';
+import { fc, test } from '@fast-check/vitest';
+import { describe, expect, it } from 'vitest';
 import { windComponents } from '../../src/physics/wind.ts';
 import { toSi } from '../../src/units/units.ts';
 import {
@@ -53,7 +53,7 @@ describe('wind components', () => {
   const angles = fc.double({ min: 0, max: 2 * Math.PI, noNaN: true });
   const speeds = fc.double({ min: 0, max: 60, noNaN: true });
 
-  it.prop([angles, speeds, angles])(
+  test.prop([angles, speeds, angles])(
     'keep the speed, and the other end of the runway turns both, 0 to 360°, 0 to 60 m/s',
     (from, speed, direction) => {
       const here = windComponents(from, speed, direction);

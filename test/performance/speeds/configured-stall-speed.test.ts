@@ -1,5 +1,5 @@
-import { fc, it } from '@fast-check/vitest';
-import { describe } from 'vitest';
+import { fc, test } from '@fast-check/vitest';
+import { describe, it } from 'vitest';
 import { configuredStallSpeed } from '../../../src/performance/speeds/configured-stall-speed.ts';
 import { expectNear, expectRatio } from '../../support/near.ts';
 
@@ -7,7 +7,7 @@ const masses = fc.double({ min: 100, max: 100_000, noNaN: true });
 const stated = { kind: 'stall-speed', cas: 25, mass: 1000, definition: 'one-g' } as const;
 
 describe('stall speed of a configuration', () => {
-  it.prop([fc.double({ min: 1, max: 600, noNaN: true })])(
+  test.prop([fc.double({ min: 1, max: 600, noNaN: true })])(
     'is the stated one at its mass, whatever the wing area, 1 to 600 m2, to 1e-14',
     (wingArea) => {
       expectRatio(configuredStallSpeed(stated, wingArea, 1000), 25, 1e-14);
@@ -15,7 +15,7 @@ describe('stall speed of a configuration', () => {
     },
   );
 
-  it.prop([masses, fc.double({ min: 0.5, max: 2, noNaN: true })])(
+  test.prop([masses, fc.double({ min: 0.5, max: 2, noNaN: true })])(
     'goes as the square root of mass and load factor, 100 to 100 000 kg, to 1e-14',
     (mass, loadFactor) => {
       expectRatio(configuredStallSpeed(stated, 16, mass), 25 * Math.sqrt(mass / 1000), 1e-14);

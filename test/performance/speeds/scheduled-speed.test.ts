@@ -1,5 +1,5 @@
-import { fc, it } from '@fast-check/vitest';
-import { describe, expect } from 'vitest';
+import { fc, test } from '@fast-check/vitest';
+import { describe, expect, it } from 'vitest';
 import { scheduledSpeed } from '../../../src/performance/speeds/scheduled-speed.ts';
 import { standardPressure } from '../../../src/physics/atmosphere.ts';
 import { fromSi, toSi } from '../../../src/units/units.ts';
@@ -7,7 +7,7 @@ import { equivalentAirspeeds } from '../../published/airspeeds.ts';
 import { expectNear, expectRatio } from '../../support/near.ts';
 
 describe('a scheduled speed', () => {
-  it.prop([fc.double({ min: 1, max: 2, noNaN: true }), fc.double({ min: 35_000, max: 115_000, noNaN: true })])(
+  test.prop([fc.double({ min: 1, max: 2, noNaN: true }), fc.double({ min: 35_000, max: 115_000, noNaN: true })])(
     'by ratio is that many stall speeds in EAS at any pressure',
     (ratio, pressure) => {
       expect(scheduledSpeed({ kind: 'stall-ratio', ratio }, 1000, 25, pressure)).toBe(ratio * 25);
@@ -21,7 +21,7 @@ describe('a scheduled speed', () => {
     expectNear(fromSi('speed', found, 'kt'), expected, tolerance);
   });
 
-  it.prop([fc.double({ min: 500, max: 2000, noNaN: true })])(
+  test.prop([fc.double({ min: 500, max: 2000, noNaN: true })])(
     'by CAS goes as the square root of mass, 500 to 2000 kg, at sea level to 1e-12',
     (mass) => {
       const schedule = { kind: 'cas', cas: 30, mass: 1000 } as const;

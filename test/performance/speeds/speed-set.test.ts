@@ -1,5 +1,5 @@
-import { fc, it } from '@fast-check/vitest';
-import { describe, expect } from 'vitest';
+import { fc, test } from '@fast-check/vitest';
+import { describe, expect, it } from 'vitest';
 import { type SpeedSet, speedSet } from '../../../src/performance/speeds/speed-set.ts';
 import { standardPressure, standardTemperature } from '../../../src/physics/atmosphere.ts';
 import { airDensity } from '../../../src/physics/density.ts';
@@ -32,7 +32,7 @@ describe('a speed in its kinds', () => {
     expectRatio(set.stallRatio, 1.15, 1e-15);
   });
 
-  it.prop([fc.double({ min: 1, max: 150, noNaN: true })])('are one at sea level on the standard day', (eas) => {
+  test.prop([fc.double({ min: 1, max: 150, noNaN: true })])('are one at sea level on the standard day', (eas) => {
     const set = speedSet(eas, 25, standard) as SpeedSet;
     expectRatio(set.cas, eas, 1e-12);
     expect(set.eas).toBe(eas);
