@@ -1,5 +1,6 @@
 import fastify, { type FastifyInstance, type FastifyServerOptions, LogController } from 'fastify';
 import type { Catalogue } from '../catalogue/read-catalogue.ts';
+import { aeroplaneLookup } from './aeroplane-lookup.ts';
 import { acceptable } from './plugins/acceptable.ts';
 import { clientError } from './plugins/client-error.ts';
 import { closing } from './plugins/closing.ts';
@@ -12,11 +13,15 @@ import { parameters } from './plugins/parameters.ts';
 import { requestId, requestIdOf } from './plugins/request-id.ts';
 import { requestLog } from './plugins/request-log.ts';
 import { aeroplanes } from './routes/aeroplanes.ts';
+import { air } from './routes/air.ts';
+import { airspeed } from './routes/airspeed.ts';
 import { ruleSets } from './routes/rule-sets.ts';
 import { service } from './routes/service.ts';
 import { sources } from './routes/sources.ts';
+import { speeds } from './routes/speeds.ts';
 import { takeoff } from './routes/takeoff.ts';
 import { defaultSettings, type Settings } from './settings.ts';
+import { stamp } from './stamp.ts';
 
 export interface House {
   readonly catalogue: Catalogue;
@@ -63,7 +68,14 @@ export async function buildApp({ catalogue, logger = false, settings }: House): 
   aeroplanes(app, catalogue);
   ruleSets(app);
   sources(app);
-  const warmUps = [takeoff(app, catalogue)];
+  const lookup = aeroplaneLookup(catalogue);
+  const ours = stamp();
+  const warmUps = [
+    takeoff(app, catalogue, lookup, ours),
+    speeds(app, catalogue, lookup, ours),
+    airspeed(app, lookup, ours),
+    air(app, ours),
+  ];
   await documentPages(app);
 
   app.addHook('onReady', (done) => {

@@ -9,6 +9,13 @@ import { operationSchema } from './document/operation-schema.ts';
 import { jsonOnly } from './plugins/json-body.ts';
 import { sendProblem } from './problems.ts';
 
+declare module 'fastify' {
+  interface FastifyContextConfig {
+    /** a body that the document shows */
+    example?: unknown;
+  }
+}
+
 /** One POST of the service: what it reads, what it answers, and the function between. */
 export interface Operation<Request extends z.ZodType, Response extends z.ZodType> {
   readonly url: string;
@@ -79,6 +86,7 @@ export function addOperation<Request extends z.ZodType, Response extends z.ZodTy
     method: 'POST',
     url: operation.url,
     schema: operationSchema(operation),
+    config: { example: operation.example },
     onRequest: jsonOnly,
     handler(request, reply) {
       const answered = answerTo((request.body as Uint8Array | undefined) ?? nothing);

@@ -11,7 +11,6 @@ interface Described {
   readonly tag: string;
   readonly response: z.ZodType;
   readonly request?: z.ZodType;
-  readonly example?: unknown;
   readonly params?: z.ZodObject;
 }
 
@@ -21,7 +20,7 @@ const ofIds: readonly ProblemCode[] = ['not-found'];
 
 /** What the document says of a route: texts, bodies, and each status a caller must be ready for. */
 export function operationSchema(described: Described): FastifySchema {
-  const { operationId, summary, description, tag, request, response, example, params } = described;
+  const { operationId, summary, description, tag, request, response, params } = described;
   const problems = [...ofEveryPath, ...(request ? ofBodies : []), ...(params ? ofIds : [])];
   const statuses = problems
     .map((code) => problemForms[code].status)
@@ -34,7 +33,7 @@ export function operationSchema(described: Described): FastifySchema {
     tags: [tag],
     ...(request === undefined
       ? {}
-      : { body: { required: true, content: { 'application/json': { schema: request, example } } } }),
+      : { body: { required: true, content: { 'application/json': { schema: request } } } }),
     ...(params === undefined ? {} : { params }),
     response: {
       200: { description: 'The answer.', content: { 'application/json': { schema: response } } },

@@ -7,8 +7,34 @@ import { documentHead } from '../document/document-head.ts';
 
 /** Gathers every route into one OpenAPI document. Must come before the routes. */
 export async function documentation(app: FastifyInstance): Promise<void> {
+  const examples = new Map<string, unknown>();
+  app.addHook('onRoute', ({ url, config }) => {
+    if (config?.example !== undefined) examples.set(url, config.example);
+  });
   await app.register(fastifyZodOpenApiPlugin);
-  await app.register(swagger, { openapi: documentHead, ...fastifyZodOpenApiTransformers });
+  await app.register(swagger, {
+    openapi: documentHead,
+    transform: fastifyZodOpenApiTransformers.transform,
+    transformObject(gathered) {
+      const document = fastifyZodOpenApiTransformers.transformObject(gathered);
+      addExamples(document as Bodies, examples);
+      return document;
+    },
+  });
+}
+
+interface Bodies {
+  readonly paths?: Readonly<
+    Record<string, { post?: { requestBody?: { content?: Record<string, { example?: unknown }> } } }>
+  >;
+}
+
+/** The transformer drops the example of a body; this puts it back. */
+function addExamples({ paths }: Bodies, examples: ReadonlyMap<string, unknown>): void {
+  for (const [url, example] of examples) {
+    const content = paths?.[url]?.post?.requestBody?.content?.['application/json'];
+    if (content !== undefined) content.example = example;
+  }
 }
 
 /** Serves the document and a page to browse it. Must come after the routes. */

@@ -1,17 +1,16 @@
 import type { FastifyInstance } from 'fastify';
 import type { Catalogue } from '../../catalogue/read-catalogue.ts';
+import type { AeroplaneLookup } from '../../contract/aeroplane-lookup.ts';
 import { answerTakeoff } from '../../contract/answer-takeoff.ts';
 import { takeoffRequest } from '../../contract/takeoff-request.ts';
 import { takeoffResponse } from '../../contract/takeoff-response.ts';
-import { aeroplaneLookup } from '../aeroplane-lookup.ts';
+import type { Stamp } from '../../contract/to-basis.ts';
 import { exampleTakeoff } from '../document/example-takeoff.ts';
 import { addOperation, type WarmUp } from '../operation.ts';
-import { stamp } from '../stamp.ts';
+import { takeoffStates } from '../takeoff-states.ts';
 
 /** The takeoff; warmed up with each aeroplane on file, since each kind of propulsion has its own arithmetic. */
-export function takeoff(app: FastifyInstance, catalogue: Catalogue): WarmUp {
-  const lookup = aeroplaneLookup(catalogue);
-  const ours = stamp();
+export function takeoff(app: FastifyInstance, catalogue: Catalogue, lookup: AeroplaneLookup, stamp: Stamp): WarmUp {
   return addOperation(app, {
     url: '/v1/takeoff',
     operationId: 'takeoff',
@@ -22,21 +21,7 @@ export function takeoff(app: FastifyInstance, catalogue: Catalogue): WarmUp {
     request: takeoffRequest,
     response: takeoffResponse,
     example: exampleTakeoff,
-    warmUp: catalogue.list().flatMap(({ definition }) => {
-      const [configuration] =
-        Object.entries(definition.configurations).find(([, one]) => one.for.includes('takeoff')) ?? [];
-      return configuration === undefined
-        ? []
-        : [
-            {
-              ...exampleTakeoff,
-              aeroplane: { id: definition.id },
-              mass: definition.masses.maximumTakeoff,
-              configuration,
-              ruleSet: 'unfactored',
-            },
-          ];
-    }),
-    answer: (request) => answerTakeoff(request, lookup, ours),
+    warmUp: takeoffStates(catalogue).map((state) => ({ ...exampleTakeoff, ...state, ruleSet: 'unfactored' })),
+    answer: (request) => answerTakeoff(request, lookup, stamp),
   });
 }
