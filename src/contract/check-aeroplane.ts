@@ -3,8 +3,10 @@ import { checkConfiguration } from './aeroplane-checks/check-configuration.ts';
 import { checkMasses } from './aeroplane-checks/check-masses.ts';
 import { checkPowerplant } from './aeroplane-checks/check-powerplant.ts';
 import { checkTables } from './aeroplane-checks/check-tables.ts';
-import { checkWing } from './aeroplane-checks/check-wing.ts';
+import { checkWing, checkWingLoading } from './aeroplane-checks/check-wing.ts';
 import type { AeroplaneDefinition } from './aeroplane-definition.ts';
+import { perhaps } from './present.ts';
+import { si } from './quantity.ts';
 import { toCalibration } from './to-aeroplane.ts';
 
 /** So many configurations at most; our choice. */
@@ -32,18 +34,17 @@ export function checkAeroplane(definition: AeroplaneDefinition, at: string): Fau
             allowed: `1 to ${mostConfigurations} configurations`,
           },
         ];
-  const usable =
-    definition.airspeedCalibration !== undefined && tables.every((fault) => !fault.pointer.includes('Calibration'));
-  const calibration = usable ? toCalibration(definition.airspeedCalibration as never) : undefined;
-  const spoilt = definition.airspeedCalibration !== undefined && !usable;
+  const loading = checkWingLoading(definition, at);
+  const wingArea = loading.length > 0 ? undefined : si('area', definition.wing.area);
+  const calibration = tables.some(({ pointer }) => pointer.startsWith(`${at}/airspeedCalibration`))
+    ? 'at-fault'
+    : perhaps(toCalibration, definition.airspeedCalibration);
   return [
     ...count,
     ...checkMasses(definition, at),
-    ...checkWing(definition, at),
+    ...(wingArea === undefined ? loading : checkWing(definition, at)),
     ...checkPowerplant(definition, at),
     ...tables,
-    ...(spoilt
-      ? []
-      : ids.slice(0, mostConfigurations).flatMap((id) => checkConfiguration(id, definition, calibration, at))),
+    ...ids.slice(0, mostConfigurations).flatMap((id) => checkConfiguration(id, definition, wingArea, calibration, at)),
   ];
 }

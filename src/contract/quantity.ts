@@ -10,7 +10,7 @@ export interface Q<U extends string = string> {
 /**
  * The schema of one quantity family: one branch a unit, each with the family's bounds in that unit.
  *
- * The bounds are stated once in SI and rounded outward to three figures, so that a value on the bound is accepted in
+ * The bounds are stated once in SI and rounded outward to four figures, so that a value on the bound is accepted in
  * every unit whatever its last bit.
  */
 export function quantitySchema<K extends Quantity, const U extends UnitOf<K>>(
@@ -45,12 +45,12 @@ export function si<K extends Quantity>(kind: K, quantity: Q<UnitOf<K>>): number 
   return toSi(kind, quantity.value, quantity.unit) + 0;
 }
 
-/** Rounds to three significant figures, away from the range's inside. */
+/** Rounds to four significant figures, away from the range's inside. */
 function outward(value: number, direction: 'down' | 'up'): number {
   if (value === 0) return 0;
-  const step = 10 ** (Math.floor(Math.log10(Math.abs(value))) - 2);
+  const step = 10 ** (Math.floor(Math.log10(Math.abs(value))) - 3);
   const steps = value / step;
   const near = Math.abs(steps - Math.round(steps)) < 1e-9;
   const whole = near ? Math.round(steps) : direction === 'down' ? Math.floor(steps) : Math.ceil(steps);
-  return Number((whole * step).toPrecision(3)) + 0;
+  return Number((whole * step).toPrecision(4)) + 0;
 }

@@ -18,11 +18,17 @@ const orders = [
 /** A speed of the procedure further above the stall than this is a slip; our choice. */
 const greatestStallRatio = 2.5;
 
-/** One configuration: its lift, its drag and the order of its speeds. */
+/**
+ * One configuration: its lift, its drag and the order of its speeds.
+ *
+ * @param wingArea - [m2]; undefined where it is at fault itself, so that nothing can be said of lift
+ * @param calibration - 'at-fault' likewise
+ */
 export function checkConfiguration(
   id: string,
   definition: AeroplaneDefinition,
-  calibration: AirspeedCalibration | undefined,
+  wingArea: number | undefined,
+  calibration: AirspeedCalibration | 'at-fault' | undefined,
   at: string,
 ): Fault[] {
   const given = definition.configurations[id] as ConfigurationOnWire;
@@ -48,8 +54,15 @@ export function checkConfiguration(
       });
     }
   }
-  const wingArea = si('area', definition.wing.area);
-  const lift = checkLift(given.maximumLift, wingArea, `${here}/maximumLift`, calibration, `${at}/airspeedCalibration`);
+  const indicated = 'stallSpeed' in given.maximumLift && given.maximumLift.type === 'ias';
+  if (wingArea === undefined || (calibration === 'at-fault' && indicated)) return faults;
+  const lift = checkLift(
+    given.maximumLift,
+    wingArea,
+    `${here}/maximumLift`,
+    calibration === 'at-fault' ? undefined : calibration,
+    `${at}/airspeedCalibration`,
+  );
   if ('faults' in lift) return [...faults, ...lift.faults];
   if (given.groundLiftCoefficient !== undefined && given.groundLiftCoefficient >= lift.coefficient) {
     faults.push({
@@ -75,8 +88,8 @@ function checkSpeeds(
     const speed = speeds[name];
     if (speed === undefined) continue;
     const ratio = stallRatio(speed, coefficient, wingArea);
-    ratios[name] = ratio;
-    if ('cas' in speed && (ratio < 1 || ratio > greatestStallRatio)) {
+    if ('stallRatio' in speed || (ratio >= 1 && ratio <= greatestStallRatio)) ratios[name] = ratio;
+    else {
       faults.push({
         pointer: `${at}/${name}/cas`,
         code: 'implausible',

@@ -13,10 +13,11 @@ export function checkTables({ propulsion, airspeedCalibration }: AeroplaneDefini
   }
   if (airspeedCalibration !== undefined) {
     const rows = `${at}/airspeedCalibration/rows`;
-    faults.push(
+    const disorder = [
       ...rising(airspeedCalibration.rows, 0, 'indicated', rows),
       ...rising(airspeedCalibration.rows, 1, 'calibrated', rows),
-    );
+    ];
+    if (disorder.length > 0) return [...faults, ...disorder];
     const { indicated, calibrated } = toCalibration(airspeedCalibration);
     const odd = indicated.findIndex((ias, i) => {
       const ratio = (calibrated[i] as number) / ias;

@@ -6,6 +6,25 @@ import { figure, written } from '../written.ts';
 /** Aspect ratios from a flying disc to a sailplane; our choice. */
 const aspectRatios = { lowest: 3, highest: 40 };
 
+/** Wing loadings of fixed-wing aeroplanes that carry people, with room to spare [kg/m2]; our choice. */
+const wingLoadings = { lowest: 10, highest: 800 };
+
+/** Wing area against the mass it carries: what is wrong here spoils every check that needs the area. */
+export function checkWingLoading({ masses, wing }: AeroplaneDefinition, at: string): Fault[] {
+  const loading = si('mass', masses.maximumTakeoff) / si('area', wing.area);
+  if (loading >= wingLoadings.lowest && loading <= wingLoadings.highest) return [];
+  return [
+    {
+      pointer: `${at}/wing/area`,
+      code: 'implausible',
+      message: `${written(masses.maximumTakeoff)} on ${written(wing.area)} is a wing loading of ${figure(loading)} kg/m2.`,
+      received: wing.area.value,
+      allowed: `${wingLoadings.lowest} to ${wingLoadings.highest} kg/m2`,
+      hint: 'Check the units of the wing area and of the mass.',
+    },
+  ];
+}
+
 /** The wing's own proportions. */
 export function checkWing({ wing }: AeroplaneDefinition, at: string): Fault[] {
   const faults: Fault[] = [];
