@@ -3,6 +3,7 @@ import { takeoffEstimate } from '../performance/takeoff/takeoff-estimate.ts';
 import type { TakeoffRun } from '../performance/takeoff/takeoff-run.ts';
 import type { Thrust } from '../physics/thrust/thrust.ts';
 import type { BandContribution, BandedDistance, Method } from './answer.ts';
+import { heldThrust } from './held-thrust.ts';
 import type { Surface } from './question.ts';
 import { frictionUncertainty, inputUncertainties, modelForm } from './rules/input-uncertainties.ts';
 import type { Reached } from './takeoff-runs.ts';
@@ -37,19 +38,20 @@ const step = 0.1;
  * ln s is scaled to one standard deviation; the parts add as squares, with the model form of the method. In the takeoff
  * distance roll and air distance move together.
  *
- * @param run - as stated
+ * @param stated - the run as stated
  * @param result - its distances, which weigh roll against air distance
  * @param surface - for the uncertainty of its friction
  * @param airAt - air and thrust at a temperature off by the first argument [K] and a pressure off by the second [Pa]
  * @see references.Judgement for the uncertainties
  */
 export function takeoffBand(
-  run: TakeoffRun,
+  stated: TakeoffRun,
   result: Reached,
   surface: Surface,
   method: Method,
   airAt: (temperatureOff: number, pressureOff: number) => OtherAir | undefined,
 ): Band {
+  const run = { ...stated, thrust: heldThrust(stated.thrust) };
   const base = takeoffEstimate(run);
   const u = inputUncertainties;
   const share = result.groundRoll / result.takeoffDistance;
@@ -67,7 +69,7 @@ export function takeoffBand(
   const inAir = (other: OtherAir | undefined): TakeoffRun | undefined => {
     if (other === undefined) return undefined;
     const speeds = Math.sqrt(run.density / other.density);
-    return faster({ ...run, density: other.density, thrust: other.thrust }, speeds);
+    return faster({ ...run, density: other.density, thrust: heldThrust(other.thrust) }, speeds);
   };
   const heavier = (by: number) => faster({ ...run, mass: run.mass * by }, Math.sqrt(by));
   const thrustBy = (by: number) => ({ ...run, thrust: scaled(run.thrust, by) });

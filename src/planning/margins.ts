@@ -5,9 +5,9 @@ import type { Requirement } from './rules/rule-set.ts';
 /** The distances that checks start from [m], each absent where it does not exist. */
 export interface StartingDistances {
   /** credited wind; paved, dry, level */
-  readonly reference?: number;
+  readonly reference: number | undefined;
   /** credited wind; the runway as it is */
-  readonly credited?: number;
+  readonly credited: number | undefined;
 }
 
 /** Below this a shortfall is the arithmetic's, not the runway's [m]: 600 x 1.3 x 1.15 is 896.9999999999999. */
@@ -43,7 +43,7 @@ export function checkOf(
   const { code, of, against, factor, source } = requirement;
   const overall = factor === undefined ? [] : [factor];
   const { taken, other } = readings(from, runwayFactors, overall);
-  const available = declared.credited[against as keyof DeclaredDistances['credited']];
+  const available = declared.credited[against];
   const { startsFrom, distance, factors, required } = taken;
   const alternative = otherReading(requirement, taken) ?? other;
   const shared = {

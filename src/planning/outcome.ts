@@ -7,15 +7,15 @@ export type ThinBecause = 'margin' | 'band';
 
 /** What decides the outcome of a takeoff or landing. */
 export interface Deciding {
-  readonly notReached?: NotReached;
+  readonly notReached: NotReached | undefined;
   /** why the rule set does not speak of the aeroplane */
-  readonly doesNotApply?: string;
+  readonly doesNotApply: string | undefined;
   /** whether neither factor nor physics speaks of the surface */
   readonly noSurface: boolean;
   readonly checks: readonly Check[];
   /** the roll as stated, without factors, and the length it has [m] */
-  readonly roll?: number;
-  readonly rollAvailable?: number;
+  readonly roll: number | undefined;
+  readonly rollAvailable: number | undefined;
   /** a margin over required below this is thin */
   readonly thinRatio: number;
   /** the high end of the band over the value, for what a check is of */

@@ -7,7 +7,7 @@ import { numberText } from './sentences/measure-text.ts';
 /** Rolling friction of the runway, and of the one that factors are meant to multiply. */
 export interface ResolvedFriction {
   /** absent where physics does not speak of the surface */
-  readonly actual?: number;
+  readonly actual: number | undefined;
   /** dry pavement */
   readonly reference: number;
   /** the surface in words: 'short wet grass' */
@@ -30,7 +30,12 @@ export function resolveFriction(surface: Surface, jet: boolean): ResolvedFrictio
   if (reference === 'no-data') throw new Error('dry pavement has no rolling friction');
   const known = rollingFriction(surface, jet);
   if (known === 'no-data') {
-    return { reference: reference.coefficient, surface: `${surface.kind}, ${surface.state}`, assumed: [] };
+    return {
+      actual: undefined,
+      reference: reference.coefficient,
+      surface: `${surface.kind}, ${surface.state}`,
+      assumed: [],
+    };
   }
   const shared = { reference: reference.coefficient, surface: known.because };
   const assumed = [...unstatedGrass(surface)];

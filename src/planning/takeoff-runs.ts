@@ -1,9 +1,9 @@
-import type { Aeroplane } from '../performance/aeroplane.ts';
 import { takeoff } from '../performance/takeoff/takeoff.ts';
 import type { TakeoffResult, TakeoffRun } from '../performance/takeoff/takeoff-run.ts';
 import { inducedDragFactor } from '../physics/drag.ts';
 import type { Thrust } from '../physics/thrust/thrust.ts';
 import type { TakeoffAnswer } from './answer.ts';
+import type { Question } from './question.ts';
 import type { ResolvedTakeoff } from './resolve-takeoff.ts';
 
 /** A takeoff that reached the screen. */
@@ -14,42 +14,40 @@ export type NotReached = Exclude<TakeoffResult, Reached>;
 /** The distances behind an answer; an absent one has no physics or is not asked for. */
 export interface TakeoffRuns {
   /** wind, surface and slope as given */
-  readonly stated?: TakeoffResult;
+  readonly stated: TakeoffResult | undefined;
   /** wind as the rule set credits it, surface and slope as given */
-  readonly credited?: TakeoffResult;
+  readonly credited: TakeoffResult | undefined;
   /** credited wind; paved, dry, level */
-  readonly reference?: TakeoffResult;
+  readonly reference: TakeoffResult | undefined;
 }
 
 /** What differs between the three. */
 export interface RunConditions {
   /** [m/s] */
-  readonly statedHeadwind: number;
   readonly creditedHeadwind: number;
-  readonly slope: number;
   /** of the actual surface; absent where physics does not speak of it */
-  readonly actualFriction?: number;
+  readonly actualFriction: number | undefined;
   readonly referenceFriction: number;
   /** whether the rule set multiplies the reference distance */
   readonly needsReference: boolean;
 }
 
-/**
- * The run on the runway as it is, in the wind as given.
- *
- * @param rollingFriction - of the surface
- * @returns what the integrations need
- */
+/** What of the weather and the runway a run needs beside its question. */
+export interface RunAir {
+  readonly thrust: Thrust;
+  /** [kg/m3] */
+  readonly density: number;
+  /** [m/s] */
+  readonly headwind: number;
+  readonly rollingFriction: number;
+}
+
+/** The run on the runway as it is, in the wind as given: all that the integrations need. */
 export function statedRun(
-  { wing, drag, certification }: Aeroplane,
-  mass: number,
+  { aeroplane: { wing, drag, certification }, mass, runway }: Pick<Question, 'aeroplane' | 'mass' | 'runway'>,
   resolved: ResolvedTakeoff,
   speeds: TakeoffAnswer['speeds'],
-  thrust: Thrust,
-  density: number,
-  headwind: number,
-  slope: number,
-  rollingFriction: number,
+  { thrust, density, headwind, rollingFriction }: RunAir,
 ): TakeoffRun {
   return {
     mass,
@@ -64,7 +62,7 @@ export function statedRun(
     thrust,
     density,
     headwind,
-    slope,
+    slope: runway.slope,
     rotationSpeed: speeds.rotation.tas,
     liftOffSpeed: speeds.liftOff.tas,
     screenSpeed: speeds.screen.tas,
@@ -74,18 +72,23 @@ export function statedRun(
   };
 }
 
+/** What a run came to, where it reached the screen. */
+export function reached(result: TakeoffResult | undefined): Reached | undefined {
+  return result?.outcome === 'reaches-screen' ? result : undefined;
+}
+
 /** Runs that are the same question are computed once. */
 export function takeoffRuns(run: TakeoffRun, conditions: RunConditions): TakeoffRuns {
-  const { statedHeadwind, creditedHeadwind, slope, actualFriction, referenceFriction, needsReference } = conditions;
+  const { creditedHeadwind, actualFriction, referenceFriction, needsReference } = conditions;
   const stated = actualFriction === undefined ? undefined : takeoff(run);
-  const sameWind = creditedHeadwind === statedHeadwind;
+  const sameWind = creditedHeadwind === run.headwind;
   const credited = actualFriction === undefined || sameWind ? stated : takeoff({ ...run, headwind: creditedHeadwind });
-  if (!needsReference) return runs(stated, credited, undefined);
-  const sameRunway = slope === 0 && actualFriction === referenceFriction;
+  if (!needsReference) return { stated, credited, reference: undefined };
+  const sameRunway = run.slope === 0 && actualFriction === referenceFriction;
   const reference = sameRunway
     ? credited
     : takeoff({ ...run, headwind: creditedHeadwind, slope: 0, rollingFriction: referenceFriction });
-  return runs(stated, credited, reference);
+  return { stated, credited, reference };
 }
 
 /** The first of the three that has no distance, in the order stated, credited, reference. */
@@ -94,16 +97,4 @@ export function notReached({ stated, credited, reference }: TakeoffRuns): NotRea
     if (result !== undefined && result.outcome !== 'reaches-screen') return result;
   }
   return undefined;
-}
-
-function runs(
-  stated: TakeoffResult | undefined,
-  credited: TakeoffResult | undefined,
-  reference: TakeoffResult | undefined,
-): TakeoffRuns {
-  return {
-    ...(stated === undefined ? {} : { stated }),
-    ...(credited === undefined ? {} : { credited }),
-    ...(reference === undefined ? {} : { reference }),
-  };
 }

@@ -88,3 +88,16 @@ function positive(angle: number): number {
   const rest = angle % turnAround;
   return rest < 0 ? rest + turnAround : rest;
 }
+
+/** The wind as an answer shows it. */
+export function windAnswer(
+  { headwind, crosswind, crosswindFrom }: WindAlong,
+  creditedHeadwind: number,
+): WindComponents {
+  return {
+    headwind,
+    ...(crosswind === undefined ? {} : { crosswind }),
+    ...(crosswindFrom === undefined ? {} : { crosswindFrom }),
+    creditedHeadwind,
+  };
+}

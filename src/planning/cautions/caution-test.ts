@@ -15,5 +15,25 @@ export interface CautionTest<Context> {
   /** the figure that decides, where one does */
   readonly threshold?: Measure | number;
   readonly source?: ReferenceKey;
-  readonly test: (context: Context) => Caution | undefined;
+  readonly test: (context: Context) => Raised | undefined;
+}
+
+/** What a test finds; code, severity, threshold and source are the caution's own unless it says otherwise. */
+export type Raised = Omit<Caution, 'code' | 'severity'> & { readonly severity?: Severity };
+
+/** The cautions that a list of tests raises in a context, in the order of the list. */
+export function raisedCautions<Context>(tests: readonly CautionTest<Context>[], context: Context): Caution[] {
+  const raised: Caution[] = [];
+  for (const { code, severity, threshold, source, test } of tests) {
+    const found = test(context);
+    if (found === undefined) continue;
+    raised.push({
+      code,
+      severity,
+      ...(threshold === undefined ? {} : { threshold }),
+      ...(source === undefined ? {} : { source }),
+      ...found,
+    });
+  }
+  return raised;
 }

@@ -1,5 +1,46 @@
+import { accelerationMarginal } from './acceleration-marginal.ts';
+import { assumptionMatters } from './assumption-matters.ts';
 import type { CautionTest } from './caution-test.ts';
+import { clearwayCapped } from './clearway-capped.ts';
+import { climbGradientMarginal } from './climb-gradient-marginal.ts';
+import { crosswindBeyondDemonstrated } from './crosswind-beyond-demonstrated.ts';
+import { densityAltitudeHigh } from './density-altitude-high.ts';
+import { gustNotCredited } from './gust-not-credited.ts';
+import { marginNegative } from './margin-negative.ts';
+import { marginThin } from './margin-thin.ts';
+import { massAboveMaximum } from './mass-above-maximum.ts';
+import { methodIsEstimate } from './method-is-estimate.ts';
+import { pressureAltitudeAboveLimit } from './pressure-altitude-above-limit.ts';
+import { pressureExtreme } from './pressure-extreme.ts';
+import { screenSpeedBelowLiftOff } from './screen-speed-below-lift-off.ts';
+import { slopeSteep } from './slope-steep.ts';
+import { tailwind } from './tailwind.ts';
+import { tailwindBeyondLimit } from './tailwind-beyond-limit.ts';
 import type { TakeoffContext } from './takeoff-context.ts';
+import { temperatureAboveLimit } from './temperature-above-limit.ts';
+import { temperatureFarFromStandard } from './temperature-far-from-standard.ts';
+import { windVariable } from './wind-variable.ts';
 
 /** Every caution a takeoff can raise, in the order in which it is shown. */
-export const takeoffCautions: readonly CautionTest<TakeoffContext>[] = [];
+export const takeoffCautions: readonly CautionTest<TakeoffContext>[] = [
+  marginNegative,
+  marginThin,
+  massAboveMaximum,
+  temperatureAboveLimit,
+  pressureAltitudeAboveLimit,
+  tailwindBeyondLimit,
+  tailwind,
+  crosswindBeyondDemonstrated,
+  windVariable,
+  gustNotCredited,
+  accelerationMarginal,
+  climbGradientMarginal,
+  densityAltitudeHigh,
+  temperatureFarFromStandard,
+  pressureExtreme,
+  slopeSteep,
+  clearwayCapped,
+  screenSpeedBelowLiftOff,
+  assumptionMatters,
+  methodIsEstimate,
+];

@@ -22,8 +22,8 @@ export interface ThinMargin {
 /** One comparison a rule asks for: a distance times its overall factor against one declared distance. */
 export interface Requirement {
   readonly code: string;
-  readonly of: 'groundRoll' | 'takeoffDistance' | 'landingDistance';
-  readonly against: 'tora' | 'toda' | 'asda' | 'lda';
+  readonly of: 'groundRoll' | 'takeoffDistance';
+  readonly against: 'tora' | 'toda' | 'asda';
   /** the overall factor, applied once; absent: 1 without a word */
   readonly factor?: Factor;
   /** another reading of the same rule, shown beside the one that decides */

@@ -26,9 +26,10 @@ export function measureText(family: UnitFamily, kind: Kind, si: number, directio
   return `${numberText(shown(family, kind, si, direction))} ${symbols[unit] ?? unit}`;
 }
 
-/** Per cent of a ratio with one decimal, such as '8.1 %'. */
-export function percentText(ratio: number): string {
-  return `${numberText(Math.round(ratio * 1000) / 10)} %`;
+/** Per cent of a ratio with so many decimals at most, such as '8.1 %'. */
+export function percentText(ratio: number, decimals = 1): string {
+  const scale = 10 ** decimals;
+  return `${numberText(Math.round(ratio * 100 * scale) / scale + 0)} %`;
 }
 
 /** A number with its thousands set apart by a space. */

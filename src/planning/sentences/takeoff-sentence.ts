@@ -1,5 +1,7 @@
 import type { UnitFamily } from '../../units/presentation.ts';
 import type { Check, Outcome } from '../answer.ts';
+import type { ThinBecause } from '../outcome.ts';
+import type { RuleSet } from '../rules/rule-set.ts';
 import type { Reached, TakeoffRuns } from '../takeoff-runs.ts';
 import { measureText } from './measure-text.ts';
 import { notReachedSentence } from './not-reached-sentence.ts';
@@ -9,18 +11,16 @@ import { thinSentence } from './thin-sentence.ts';
 export interface SentenceGround {
   readonly outcome: Outcome;
   readonly units: UnitFamily;
-  /** how the rule set is named: 'under class B factors' */
-  readonly phrase: string;
-  readonly title: string;
+  readonly ruleSet: RuleSet;
   readonly runs: TakeoffRuns;
-  readonly stated?: Reached;
+  readonly stated: Reached | undefined;
   readonly checks: readonly Check[];
-  readonly governing?: Check;
-  readonly rollAvailable?: number;
-  readonly doesNotApply?: string;
+  readonly governing: Check | undefined;
+  readonly rollAvailable: number | undefined;
+  readonly doesNotApply: string | undefined;
   /** the surface in words */
   readonly surface: string;
-  readonly thin?: { readonly because: 'margin' | 'band'; readonly ratio: number };
+  readonly thin: ThinBecause | undefined;
 }
 
 /** The answer in one plain sentence or two, made from its numbers, in the asked units. */
@@ -39,7 +39,7 @@ export function takeoffSentence(ground: SentenceGround): string {
     case 'roll-longer-than-runway':
       return `The ground roll alone is longer than the run: ${metres(ground.stated?.groundRoll ?? 0, 'up')} without factors, ${metres(ground.rollAvailable ?? 0, 'down')} of TORA available.`;
     case 'rule-set-does-not-apply':
-      return `The rules asked for do not apply (${ground.title}): ${ground.doesNotApply}. ${distance(ground)}`.trim();
+      return `The rules asked for do not apply (${ground.ruleSet.title}): ${ground.doesNotApply}. ${distance(ground)}`.trim();
     case 'no-data-for-this-surface':
       return `No data for this surface (${ground.surface}): neither a factor of the rules asked for nor physics speaks of it.`;
     default:
@@ -48,13 +48,13 @@ export function takeoffSentence(ground: SentenceGround): string {
 }
 
 /** 'needs 1 255 m of TORA under class B factors, 900 m available: short by 355 m' */
-function needs({ governing, units, phrase }: SentenceGround): string {
+function needs({ governing, units, ruleSet }: SentenceGround): string {
   const { required = 0, available = 0, margin = 0 } = governing ?? {};
   const passes = governing?.result === 'passes';
   const spare = passes ? Math.max(0, margin) : margin;
   const difference = measureText(units, 'distance', passes ? spare : -spare, passes ? 'down' : 'up');
   const text = (si: number, direction: 'up' | 'down') => measureText(units, 'distance', si, direction);
-  return `needs ${text(required, 'up')} of ${lengthName(governing)} ${phrase}, ${text(available, 'down')} available: ${passes ? 'spare' : 'short by'} ${difference}`;
+  return `needs ${text(required, 'up')} of ${lengthName(governing)} ${ruleSet.phrase}, ${text(available, 'down')} available: ${passes ? 'spare' : 'short by'} ${difference}`;
 }
 
 function lengthName(check: Check | undefined): string {

@@ -1,0 +1,28 @@
+import type { CautionTest } from './caution-test.ts';
+import { type ConditionsContext, textIn } from './takeoff-context.ts';
+
+/** A crosswind, gusts counted, beyond what was demonstrated or is allowed. */
+export const crosswindBeyondDemonstrated: CautionTest<ConditionsContext> = {
+  code: 'crosswind-beyond-demonstrated',
+  severity: 'strong',
+  meaning:
+    'The wind across the runway, gusts counted, is beyond what was demonstrated; beyond a limitation it is strong.',
+  source: 'Cfr23s233',
+  test: (context) => {
+    const { demonstratedCrosswind, crosswind: limitation } = context.question.aeroplane.limitations ?? {};
+    const mean = context.wind.crosswind;
+    const limit = limitation ?? demonstratedCrosswind;
+    if (mean === undefined || limit === undefined) return undefined;
+    const component = Math.max(mean, context.wind.gust?.crosswind ?? 0);
+    if (component <= limit + 1e-9) return undefined;
+    const gusts = component > mean ? ' in gusts' : '';
+    const name = limitation === undefined ? 'demonstrated' : 'limitation';
+    return {
+      severity: limitation === undefined ? 'caution' : 'strong',
+      message: `Crosswind ${textIn(context, 'speed', component)}${gusts} on runway ${context.question.runway.designator} is ${textIn(context, 'speed', component - limit)} beyond the ${name} ${textIn(context, 'speed', limit)}.`,
+      at: '/weather/wind',
+      value: { kind: 'speed', value: component },
+      threshold: { kind: 'speed', value: limit },
+    };
+  },
+};

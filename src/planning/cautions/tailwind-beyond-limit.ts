@@ -1,0 +1,30 @@
+import type { CautionTest } from './caution-test.ts';
+import { type ConditionsContext, textIn } from './takeoff-context.ts';
+
+/** Tailwind beyond which certification data seldom reach [m/s]: 10 kt. */
+const usualLimit = (10 * 1852) / 3600;
+
+/** A tailwind beyond the aeroplane's limitation, or beyond 10 kt. */
+export const tailwindBeyondLimit: CautionTest<ConditionsContext> = {
+  code: 'tailwind-beyond-limit',
+  severity: 'strong',
+  meaning: 'The tailwind is beyond the limitation of the aeroplane, or beyond 10 kt.',
+  threshold: { kind: 'speed', value: usualLimit },
+  source: 'Judgement',
+  test: (context) => {
+    const component = -context.wind.headwind;
+    const limitation = context.question.aeroplane.limitations?.tailwind;
+    const limit = Math.min(limitation ?? usualLimit, usualLimit);
+    if (component <= limit + 1e-9) return undefined;
+    const what =
+      limitation !== undefined && component > limitation
+        ? `the aeroplane's limitation of ${textIn(context, 'speed', limitation)}`
+        : `${textIn(context, 'speed', usualLimit)}, where data of aeroplanes usually end`;
+    return {
+      message: `Tailwind ${textIn(context, 'speed', component)} is ${textIn(context, 'speed', component - limit)} beyond ${what}.`,
+      at: '/weather/wind',
+      value: { kind: 'speed', value: component },
+      threshold: { kind: 'speed', value: limit },
+    };
+  },
+};
