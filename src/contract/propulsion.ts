@@ -88,8 +88,8 @@ const turboprop = z.strictObject({
   lapseExponent: z
     .number()
     .min(0)
-    .max(2)
-    .meta({ description: 'Exponent of the density ratio in the power beyond the flat rating.' })
+    .max(4)
+    .meta({ description: 'n in theta^-n, the fall of power with temperature beyond the flat rating; about 1.5 to 2.5.' })
     .exactOptional(),
   thrustFactor,
 });
