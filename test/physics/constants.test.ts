@@ -12,6 +12,8 @@ import {
   T0,
   tropopause,
   tropopauseTemperature,
+  vapourDeficit,
+  vapourMassRatio,
 } from '../../src/physics/constants.ts';
 import { references } from '../../src/references.ts';
 import { toSi } from '../../src/units/units.ts';
@@ -53,6 +55,11 @@ describe('constants of the air', () => {
 
   it('the pressure exponent is 5.2558798 [ISO 2533:1975, formula (12); computed]', () => {
     expectNear(pressureExponent, 5.2558798, 5e-8);
+  });
+
+  it('vapour weighs 18.01528/28.96546 of dry air, rounded to 0.622, and lacks the rest [CIPM-2007; secondary; 1e-4]', () => {
+    expectNear(vapourMassRatio, 18.01528 / 28.96546, 1e-4);
+    expect(vapourMassRatio + vapourDeficit).toBe(1);
   });
 
   it('each has a unit and a source in the bibliography', () => {

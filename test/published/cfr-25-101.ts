@@ -64,6 +64,36 @@ export const vapourPressures = figures(
       expected: 0.00778,
       tolerance: 0.0015,
     },
+    {
+      id: 'far25101-e-0',
+      inputs: { pressure_altitude_ft: 0, rh_percent: 80, isa_dev_C: 0 },
+      expected: 0.403,
+      tolerance: 0.0015,
+    },
+    {
+      id: 'far25101-e-2000',
+      inputs: { pressure_altitude_ft: 2000, rh_percent: 80, isa_dev_C: 0 },
+      expected: 0.311,
+      tolerance: 0.0015,
+    },
+    {
+      id: 'far25101-e-4000',
+      inputs: { pressure_altitude_ft: 4000, rh_percent: 80, isa_dev_C: 0 },
+      expected: 0.238,
+      tolerance: 0.0015,
+    },
+    {
+      id: 'far25101-e-8000',
+      inputs: { pressure_altitude_ft: 8000, rh_percent: 80, isa_dev_C: 0 },
+      expected: 0.1356,
+      tolerance: 0.0015,
+    },
+    {
+      id: 'far25101-e-15000',
+      inputs: { pressure_altitude_ft: 15000, rh_percent: 80, isa_dev_C: 0 },
+      expected: 0.0463,
+      tolerance: 0.0015,
+    },
   ],
 );
 
