@@ -95,6 +95,18 @@ export const takeoffQuestion = z
     description: 'The question as understood, with what was filled in. It can be sent again as it stands.',
   });
 
+const bandContribution = z
+  .strictObject({
+    of: z.string().meta({ description: 'What may be off.' }),
+    groundRollPercent: z.number(),
+    airDistancePercent: z.number(),
+    takeoffDistancePercent: z.number(),
+  })
+  .meta({
+    id: 'BandContribution',
+    description: 'By how much each distance moves when one input is one standard deviation less favourable.',
+  });
+
 export const takeoffResponse = z
   .strictObject({
     outcome: z.enum(outcomes).meta({ description: 'The answer, or the name of why there is none.' }),
@@ -134,6 +146,7 @@ export const takeoffResponse = z
     basis: z
       .strictObject({
         method,
+        band: z.array(bandContribution).meta({ description: 'What the 90 % bands are made of.' }).exactOptional(),
         assumed: z.array(assumption),
         notGiven: z.array(z.string()).meta({ description: 'JSON pointers of what could have been given.' }),
         sources,

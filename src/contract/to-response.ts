@@ -1,10 +1,10 @@
-import type { BandedDistance, Shortfall, TakeoffAnswer, WindComponents } from '../planning/answer.ts';
+import type { BandContribution, BandedDistance, Shortfall, TakeoffAnswer, WindComponents } from '../planning/answer.ts';
 import type { Question } from '../planning/question.ts';
 import type { ReferenceKey } from '../references.ts';
 import { shown, unitFor } from '../units/presentation.ts';
 import { asChosen } from './aeroplane-choice.ts';
 import { defaultRounding, defaultUnits } from './question-frame.ts';
-import { type Presentation, shownQuantity } from './shown-quantity.ts';
+import { type Presentation, shownPercent, shownQuantity } from './shown-quantity.ts';
 import type { TakeoffRequest } from './takeoff-request.ts';
 import type { TakeoffQuestion, TakeoffResponse } from './takeoff-response.ts';
 import { toAdvisory, toMeasure } from './to-advisory.ts';
@@ -45,6 +45,7 @@ export function toResponse(
     ...(shortfall === undefined ? {} : { shortfall: shortfall.map((one) => toShortfall(how, one)) }),
     basis: {
       method: basis.method,
+      ...(basis.band === undefined ? {} : { band: basis.band.map((one) => toBandContribution(how, one)) }),
       assumed: toAssumed(how, basis.assumed),
       notGiven: [...basis.notGiven],
       sources: toSources(basis.sources, citedBy(answer)),
@@ -82,6 +83,15 @@ function toBandedDistance({ units, rounding }: Presentation, { value, low, high,
     low: shown(units, 'distance', low, 'down', rounding),
     high: shown(units, 'distance', high, 'up', rounding),
     method,
+  };
+}
+
+function toBandContribution(how: Presentation, { of, groundRoll, airDistance, takeoffDistance }: BandContribution) {
+  return {
+    of,
+    groundRollPercent: shownPercent(how, groundRoll, 'nearest'),
+    airDistancePercent: shownPercent(how, airDistance, 'nearest'),
+    takeoffDistancePercent: shownPercent(how, takeoffDistance, 'nearest'),
   };
 }
 
