@@ -7,11 +7,14 @@ interface ParserError extends Error {
   readonly rawPacket?: unknown;
 }
 
+/** Sockets on which the last answer is written: what the parser finds behind it is not answered a second time. */
+export const lastAnswers = new WeakSet<object>();
+
 /** Answers bytes that never became a request: one problem, and the connection closes. */
 export function clientError(error: ParserError, socket: Socket): void {
   if (error.code === 'ECONNRESET' || socket.destroyed) return;
-  if (socket.writable) socket.end(rawProblem(parserProblem(error)), () => socket.destroy());
-  else socket.destroy();
+  if (socket.writable && !lastAnswers.has(socket)) socket.end(rawProblem(parserProblem(error)), () => socket.destroy());
+  else socket.destroySoon();
 }
 
 function parserProblem({ code, rawPacket }: ParserError): Problem {

@@ -1,6 +1,7 @@
 import type { FastifyInstance, FastifyRequest } from 'fastify';
 import { type Problem, problemOf } from '../../contract/problem.ts';
 import { rawProblem, sendProblem } from '../problems.ts';
+import { lastAnswers } from './client-error.ts';
 
 /** More header fields than these are refused; our choice, since no honest caller sends half as many. */
 const mostFields = 100;
@@ -13,8 +14,12 @@ const mostFields = 100;
 export function framing(app: FastifyInstance): void {
   app.addHook('onRequest', (request, reply, done) => {
     const problem = framingProblem(request);
-    if (problem === undefined) done();
-    else sendProblem(reply, problem, { connection: 'close' });
+    if (problem === undefined) {
+      done();
+      return;
+    }
+    lastAnswers.add(request.raw.socket);
+    sendProblem(reply, problem, { connection: 'close' });
   });
 
   app.server.on('checkExpectation', (_request, response) => {
@@ -41,8 +46,8 @@ function framingProblem({ raw }: FastifyRequest): Problem | undefined {
   }
   if (raw.url?.[0] !== '/') return problemOf('unreadable', 'The request target must be a path.');
   const coding = raw.headers['transfer-encoding'];
-  if (coding !== undefined && coding.toLowerCase() !== 'chunked') {
-    return problemOf('not-implemented', 'The only transfer coding known is chunked.');
-  }
-  return undefined;
+  if (coding === undefined || coding.toLowerCase() === 'chunked') return undefined;
+  return /(^|[, \t])chunked[ \t]*$/i.test(coding)
+    ? problemOf('not-implemented', 'The only transfer coding known is chunked.')
+    : problemOf('unreadable', 'The last transfer coding must be chunked.');
 }
