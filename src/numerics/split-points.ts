@@ -4,14 +4,22 @@
  * @param from - lower end
  * @param to - upper end, above from
  * @param jumps - where the integrand or its slope may jump, in any order; those outside or at an end do not count
- * @param others - one more such place each
- * @returns from, the places inside, to
+ * @returns from, the jumps inside, to
  */
-export function splitPoints(from: number, to: number, jumps: readonly number[], ...others: number[]): number[] {
+export function splitPoints(from: number, to: number, jumps: readonly number[]): number[] {
   const points = [from];
-  for (const point of jumps) if (point > from && point < to) points.push(point);
-  for (const point of others) if (point > from && point < to) points.push(point);
-  if (points.length > 2) points.sort((a, b) => a - b);
+  for (let i = 0; i < jumps.length; i++) {
+    const point = jumps[i] as number;
+    if (!(point > from && point < to)) continue;
+    let place = points.length;
+    points.push(point);
+    // insertion: the lists are short and mostly in order
+    while (place > 1 && (points[place - 1] as number) > point) {
+      points[place] = points[place - 1] as number;
+      place--;
+    }
+    points[place] = point;
+  }
   points.push(to);
   return points;
 }

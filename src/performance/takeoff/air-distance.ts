@@ -2,7 +2,7 @@ import { splitPoints } from '../../numerics/split-points.ts';
 import { addSettled, newPathIntegral, type PathIntegral } from '../path-integral.ts';
 import { type ClimbForces, climbForces, climbGradient } from './climb-forces.ts';
 import { addClimbPiece, climbJumps } from './climb-piece.ts';
-import { pullUpArcTime, pullUpArcTop, pullUpRadius } from './pull-up-arc.ts';
+import { pullUpArcDistance, pullUpArcTime, pullUpArcTop, pullUpRadius } from './pull-up-arc.ts';
 import type { TakeoffRun } from './takeoff-run.ts';
 
 /** The air path, or the name of why there is none. */
@@ -22,8 +22,8 @@ export type AirDistance =
 
 /** Least climb gradient at which a path with all engines is computed. @see references.HouseEnergyPath */
 export const neededWithAllEngines = 0.015;
-/** Below this share of the greatest gradient, 8 nodes a piece are not trusted unseen. */
-const fineBelowShare = 0.4;
+/** Below this share of the greatest gradient, 6 nodes a piece are not trusted unseen. */
+const fineBelowShare = 0.5;
 
 /**
  * Distance over the ground from lift-off to the screen height.
@@ -47,21 +47,16 @@ export function airDistance(run: TakeoffRun, needed = neededWithAllEngines): Air
   const forces = climbForces(run);
   const atLiftOff = climbGradient(forces, 0);
   const atScreen = climbGradient(forces, screenHeight);
-  const lesser = Math.min(atLiftOff, atScreen);
+  const lesser = leastAtKinks(forces, Math.min(atLiftOff, atScreen), screenHeight);
   if (!(lesser > needed)) return neverReaches(lesser, needed);
 
   const radius = pullUpRadius(run.liftOffSpeed, run.pullUpLoadFactor);
   const arcTop = pullUpArcTop(forces, radius, screenHeight, atLiftOff, atScreen);
-  const angle = 2 * Math.asin(Math.sqrt(arcTop / (2 * radius)));
-  const arcTime = pullUpArcTime(forces, radius, angle);
-
-  const jumps = climbJumps(forces);
-  const onArc = leastAt(forces, lesser, jumps, arcTop);
-  if (!(onArc > needed)) return neverReaches(onArc, needed);
+  const arcTime = pullUpArcTime(forces, radius, arcTop);
 
   let sum = newPathIntegral();
   if (arcTop < screenHeight) {
-    const ends = splitPoints(arcTop, screenHeight, jumps);
+    const ends = splitPoints(arcTop, screenHeight, climbJumps(forces));
     for (let i = 1; i < ends.length; i++) addClimbPiece(forces, ends[i - 1] as number, ends[i] as number, sum);
     if (!(sum.least > needed)) return neverReaches(sum.least, needed);
     if (sum.least < fineBelowShare * sum.most) {
@@ -77,16 +72,21 @@ export function airDistance(run: TakeoffRun, needed = neededWithAllEngines): Air
   const time = arcTime + sum.time;
   return {
     outcome: 'reaches-screen',
-    distance: radius * Math.sin(angle) + sum.distance - headwind * time,
+    distance: pullUpArcDistance(radius, arcTop) + sum.distance - headwind * time,
     time,
-    leastClimbGradient: Math.min(onArc, sum.least),
+    leastClimbGradient: Math.min(lesser, sum.least),
   };
 }
 
-/** The least of a gradient already found and those where its slope jumps below a height. */
-function leastAt(forces: ClimbForces, found: number, jumps: readonly number[], below: number): number {
+/** The least of a gradient already found and those at the thrust's kinks on the path. */
+function leastAtKinks(forces: ClimbForces, found: number, screenHeight: number): number {
+  const { square, growth, thrust } = forces;
   let least = found;
-  for (const height of jumps) if (height > 0 && height < below) least = Math.min(least, climbGradient(forces, height));
+  for (let i = 0; i < thrust.kinks.length; i++) {
+    const kink = thrust.kinks[i] as number;
+    const rise = kink * kink - square;
+    if (rise > 0 && rise < growth * screenHeight) least = Math.min(least, climbGradient(forces, rise / growth));
+  }
   return least;
 }
 

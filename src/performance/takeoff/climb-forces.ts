@@ -6,21 +6,21 @@ import type { TakeoffRun } from './takeoff-run.ts';
 /** What the path from lift-off to the screen is made of, as constants of one run. */
 export interface ClimbForces {
   readonly thrust: Thrust;
-  /** [N] */
-  readonly weight: number;
-  /** zero-lift drag over V^2 [N s2/m2], and induced drag out of ground effect times V^2 [N m2/s2] */
-  readonly zeroLiftDrag: number;
-  readonly inducedDrag: number;
-  /** [m] */
+  /** one over the weight [1/N] */
+  readonly perWeight: number;
+  /** over the weight: zero-lift drag over V^2 [s2/m2], and induced drag out of ground effect times V^2 [m2/s2] */
+  readonly zeroLift: number;
+  readonly induced: number;
+  /** [m], [1/m] */
   readonly wingHeight: number;
-  readonly span: number;
+  readonly perSpan: number;
   /** uphill slope, 0 where the runway falls */
   readonly uphill: number;
   /** square of the lift-off speed, and its growth with height [m2/s2], [m/s2] */
   readonly square: number;
   readonly growth: number;
-  /** kappa, energy height over height */
-  readonly energyRatio: number;
+  /** 1/kappa, height over energy height */
+  readonly perEnergyRatio: number;
 }
 
 /** The steepest path the energy may ask for, sin 45 degrees: beyond it the formula's lift = weight is not true. */
@@ -34,24 +34,23 @@ export function climbForces(run: TakeoffRun): ClimbForces {
   const growth = Math.max(0, run.screenSpeed * run.screenSpeed - square) / run.screenHeight;
   return {
     thrust: run.thrust,
-    weight,
-    zeroLiftDrag: halfRhoS * run.airDragCoefficient,
-    inducedDrag: (run.inducedDragFactor * weight * weight) / halfRhoS,
+    perWeight: 1 / weight,
+    zeroLift: (halfRhoS * run.airDragCoefficient) / weight,
+    induced: (run.inducedDragFactor * weight) / halfRhoS,
     wingHeight: run.wingHeight,
-    span: run.span,
+    perSpan: 1 / run.span,
     uphill: Math.max(0, run.slope),
     square,
     growth,
-    energyRatio: 1 + growth / (2 * g0),
+    perEnergyRatio: 1 / (1 + growth / (2 * g0)),
   };
 }
 
 /** (T - D)/W - max(slope, 0) at a height with the thrust known there, load factor 1. */
 export function climbGradientWith(forces: ClimbForces, height: number, thrust: number): number {
   const square = forces.square + forces.growth * height;
-  const phi = groundEffect((forces.wingHeight + height) / forces.span);
-  const drag = forces.zeroLiftDrag * square + (phi * forces.inducedDrag) / square;
-  return (thrust - drag) / forces.weight - forces.uphill;
+  const phi = groundEffect((forces.wingHeight + height) * forces.perSpan);
+  return thrust * forces.perWeight - forces.zeroLift * square - (phi * forces.induced) / square - forces.uphill;
 }
 
 /** The same, thrust included. */
@@ -61,5 +60,5 @@ export function climbGradient(forces: ClimbForces, height: number): number {
 
 /** Sine of the path angle that energy allows with a gradient. */
 export function energySine(forces: ClimbForces, gradient: number): number {
-  return Math.min(steepest, gradient / forces.energyRatio);
+  return Math.min(steepest, gradient * forces.perEnergyRatio);
 }

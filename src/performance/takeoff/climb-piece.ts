@@ -3,17 +3,14 @@ import { heightRatioWithoutEffect, leastHeightRatio } from '../../physics/ground
 import type { PathIntegral } from '../path-integral.ts';
 import { type ClimbForces, climbGradientWith, energySine } from './climb-forces.ts';
 
-/** Nodes of the rule and, with weight 0, the ends of the piece: a gradient is often least at an end. */
-const rule = gaussLegendre(8);
-const count = rule.order + 2;
-const nodes = Float64Array.from([-1, ...rule.nodes, 1]);
-const weights = Float64Array.from([0, ...rule.weights, 0]);
-const airspeeds = new Float64Array(count);
-const thrusts = new Float64Array(count);
+const { order, nodes, weights } = gaussLegendre(6);
+const heights = new Float64Array(order);
+const airspeeds = new Float64Array(order);
+const thrusts = new Float64Array(order);
 
 /**
  * Adds one smooth piece of the climb on the energy path: still-air distance, integral of cot(gamma) dh, and time, integral of
- * dh/(V sin gamma), 8 nodes.
+ * dh/(V sin gamma), 6 nodes.
  *
  * @param forces - of the climb
  * @param from - lower height [m]
@@ -25,15 +22,18 @@ export function addClimbPiece(forces: ClimbForces, from: number, to: number, sum
   const half = (to - from) / 2;
   const middle = from + half;
   const { square, growth } = forces;
-  for (let i = 0; i < count; i++) {
-    airspeeds[i] = Math.sqrt(square + growth * (middle + half * (nodes[i] as number)));
+  for (let i = 0; i < order; i++) {
+    const height = middle + half * (nodes[i] as number);
+    heights[i] = height;
+    airspeeds[i] = Math.sqrt(square + growth * height);
   }
-  forces.thrust.fill(airspeeds, count, thrusts);
+  forces.thrust.fill(airspeeds, order, thrusts);
   let distance = 0;
   let time = 0;
   let { least, leastAt, most } = sum;
-  for (let i = 0; i < count; i++) {
-    const height = middle + half * (nodes[i] as number);
+  for (let i = 0; i < order; i++) {
+    const height = heights[i] as number;
+    const airspeed = airspeeds[i] as number;
     const gradient = climbGradientWith(forces, height, thrusts[i] as number);
     if (gradient < least) {
       least = gradient;
@@ -41,9 +41,9 @@ export function addClimbPiece(forces: ClimbForces, from: number, to: number, sum
     }
     if (gradient > most) most = gradient;
     const sine = energySine(forces, gradient);
-    const share = (weights[i] as number) / sine;
-    distance += share * Math.sqrt(1 - sine * sine);
-    time += share / (airspeeds[i] as number);
+    const share = (weights[i] as number) / (airspeed * sine);
+    time += share;
+    distance += share * airspeed * Math.sqrt(1 - sine * sine);
   }
   sum.distance += half * distance;
   sum.time += half * time;
@@ -52,10 +52,10 @@ export function addClimbPiece(forces: ClimbForces, from: number, to: number, sum
   sum.most = most;
 }
 
-/** Heights [m] at which the slope of the climb gradient jumps: the thrust's kinks on the speed schedule, the ground effect's ends. */
+/** Heights [m] at which the slope of the climb gradient jumps: the ground effect's ends, the thrust's kinks on the speed schedule. */
 export function climbJumps(forces: ClimbForces): number[] {
-  const { square, growth, span, wingHeight } = forces;
-  const jumps = [heightRatioWithoutEffect * span - wingHeight, leastHeightRatio * span - wingHeight];
+  const { square, growth, perSpan, wingHeight } = forces;
+  const jumps = [heightRatioWithoutEffect / perSpan - wingHeight, leastHeightRatio / perSpan - wingHeight];
   if (growth > 0) for (const kink of forces.thrust.kinks) jumps.push((kink * kink - square) / growth);
   return jumps;
 }

@@ -2,7 +2,7 @@ import { splitPoints } from '../../numerics/split-points.ts';
 import { g0 } from '../../physics/constants.ts';
 import { addSettled, newPathIntegral, type PathIntegral } from '../path-integral.ts';
 import { type RollForces, rollAcceleration, rollForces } from './roll-forces.ts';
-import { addRollPiece } from './roll-piece.ts';
+import { addRollPiece, rollJumps } from './roll-piece.ts';
 import type { TakeoffRun } from './takeoff-run.ts';
 
 /** The roll, or the name of why there is none. */
@@ -24,9 +24,9 @@ export type GroundRoll =
 
 /** An acceleration over g that counts as none: at 1e-6 g a takeoff would last days. */
 const none = 1e-6;
-/** Below this acceleration over g, or this share of the greatest, 16 nodes a piece are not trusted unseen. */
+/** Below this acceleration over g, or this share of the greatest, 14 nodes a piece are not trusted unseen. */
 const fineBelow = 0.02;
-const fineBelowShare = 0.15;
+const fineBelowShare = 0.25;
 
 /**
  * Distance along the runway from brake release to lift-off.
@@ -34,7 +34,7 @@ const fineBelowShare = 0.15;
  * s = integral of (V - w)/a(V) dV from V = w to V_LOF, plus (V_R - w) t_R for the rotation; t = integral of dV/a, plus t_R;
  * m a = T(V) - q S C_Dg - mu max(0, W - q S C_Lg) - W slope, q = rho V|V|/2.
  *
- * Gauss-Legendre, 16 nodes a piece; a piece ends where V = 0, where lift reaches the weight and at the thrust's kinks. Where the
+ * Gauss-Legendre, 14 nodes a piece; a piece ends where V = 0, where lift reaches the weight and at the thrust's kinks. Where the
  * acceleration is small or falls by much, pieces are halved until they agree. The acceleration is integrated to V_LOF even where
  * V_R is lower, and the rotation comes on top: the longer reading of two.
  *
@@ -48,8 +48,7 @@ export function groundRoll(run: TakeoffRun): GroundRoll {
   const { headwind, liftOffSpeed } = run;
   if (headwind >= liftOffSpeed) return { outcome: 'ground-speed-not-positive', headwind, liftOffSpeed };
   const forces = rollForces(run);
-  const airborne = forces.lift > 0 ? Math.sqrt(forces.weight / forces.lift) : 0;
-  const ends = splitPoints(headwind, liftOffSpeed, forces.thrust.kinks, 0, airborne);
+  const ends = splitPoints(headwind, liftOffSpeed, rollJumps(forces));
   let sum = newPathIntegral();
   for (let i = 1; i < ends.length; i++) {
     addRollPiece(forces, headwind, ends[i - 1] as number, ends[i] as number, sum);

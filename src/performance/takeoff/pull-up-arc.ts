@@ -3,9 +3,9 @@ import { gaussLegendre } from '../../numerics/gauss-legendre.ts';
 import { g0 } from '../../physics/constants.ts';
 import { type ClimbForces, climbGradient, energySine } from './climb-forces.ts';
 
-/** The arc's end moves the distance only in second order: this share of the screen height leaves 1e-8 of it. */
-const arcTopTolerance = 1e-5;
-const rule = gaussLegendre(6);
+/** A last step of this share of the height leaves 1e-5 of it or less, which moves the distance only in second order. */
+const lastStep = 1e-3;
+const rule = gaussLegendre(5);
 
 /**
  * Radius of the pull-up after lift-off: R = V_LOF^2/(g (n - 1)).
@@ -41,13 +41,26 @@ export function pullUpArcTop(
   atScreen: number,
 ): number {
   if (arcHeight(radius, energySine(forces, atScreen)) >= screenHeight) return screenHeight;
-  const excess = (height: number) => arcHeight(radius, energySine(forces, climbGradient(forces, height))) - height;
-  const first = arcHeight(radius, energySine(forces, atLiftOff));
-  const second = Math.min(screenHeight, 1.2 * first);
-  const low = excess(0.8 * first) > 0 ? 0.8 * first : 0;
-  const high = excess(second) < 0 ? second : screenHeight;
-  const found = brent(excess, low, high, arcTopTolerance * screenHeight);
+  // secants from the ground: the allowed height changes slowly, so two or three steps are enough
+  let below = 0;
+  let excessBelow = arcHeight(radius, energySine(forces, atLiftOff));
+  let height = Math.min(excessBelow, screenHeight);
+  for (let i = 0; i < 6; i++) {
+    const excess = arcExcess(forces, radius, height);
+    const next = height - (excess * (height - below)) / (excess - excessBelow);
+    if (!(next > 0 && next < screenHeight)) break;
+    if (Math.abs(next - height) <= lastStep * height) return next;
+    below = height;
+    excessBelow = excess;
+    height = next;
+  }
+  const found = brent((at) => arcExcess(forces, radius, at), 0, screenHeight, 1e-6 * screenHeight);
   return found.outcome === 'not-bracketed' ? screenHeight : found.root;
+}
+
+/** How far above a height the arc may still be followed [m]. */
+function arcExcess(forces: ClimbForces, radius: number, height: number): number {
+  return arcHeight(radius, energySine(forces, climbGradient(forces, height))) - height;
 }
 
 /** R (1 - cos gamma) from sin gamma, without losing digits near the ground. */
@@ -57,19 +70,28 @@ function arcHeight(radius: number, sine: number): number {
 }
 
 /**
- * Time on the arc up to a path angle: R times the integral of d gamma/V, V^2 = V_LOF^2 + growth x R (1 - cos gamma).
+ * Time on the arc up to a height: R times the integral of d gamma/V, V^2 = V_LOF^2 + growth h.
  *
- * @param angle - [rad], 0 to pi/4 or a little more
+ * In x = sin(gamma/2) = sqrt(h/(2 R)) it is the integral of 2 R/sqrt((1 - x^2) (V_LOF^2 + 2 R growth x^2)) dx: no angle is needed.
+ *
+ * @param height - of the arc's end [m], up to the radius
  * @returns [s]
  * @see references.HouseEnergyPath
  */
-export function pullUpArcTime(forces: ClimbForces, radius: number, angle: number): number {
+export function pullUpArcTime(forces: ClimbForces, radius: number, height: number): number {
   const { square, growth } = forces;
-  const half = angle / 2;
+  const half = Math.sqrt(height / (8 * radius));
+  const rise = 2 * radius * growth;
   let sum = 0;
   for (let i = 0; i < rule.order; i++) {
-    const sine = Math.sin((half + half * (rule.nodes[i] as number)) / 2);
-    sum += (rule.weights[i] as number) / Math.sqrt(square + growth * 2 * radius * sine * sine);
+    const x = half + half * (rule.nodes[i] as number);
+    const xx = x * x;
+    sum += (rule.weights[i] as number) / Math.sqrt((1 - xx) * (square + rise * xx));
   }
-  return radius * half * sum;
+  return 2 * radius * half * sum;
+}
+
+/** Still-air distance along the arc up to a height: R sin gamma = sqrt(h (2 R - h)). */
+export function pullUpArcDistance(radius: number, height: number): number {
+  return Math.sqrt(height * (2 * radius - height));
 }

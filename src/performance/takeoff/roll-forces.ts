@@ -4,17 +4,18 @@ import { groundEffect } from '../../physics/ground-effect.ts';
 import type { Thrust } from '../../physics/thrust/thrust.ts';
 import type { TakeoffRun } from './takeoff-run.ts';
 
-/** What pushes and holds an aeroplane that rolls on its wheels, as constants of one run. */
+/** What pushes and holds an aeroplane that rolls on its wheels, by unit of mass, as constants of one run. */
 export interface RollForces {
   readonly thrust: Thrust;
-  readonly mass: number;
-  /** [N] */
+  /** one over the mass [1/kg] */
+  readonly perMass: number;
+  /** [m/s2] */
   readonly weight: number;
-  /** drag and lift over V|V| [N s2/m2] */
+  /** drag and lift over V|V| and mass [1/m] */
   readonly drag: number;
   readonly lift: number;
   readonly friction: number;
-  /** weight's part along the runway, uphill positive [N] */
+  /** gravity along the runway, uphill positive [m/s2] */
   readonly uphill: number;
 }
 
@@ -25,17 +26,17 @@ export interface RollForces {
  */
 export function rollForces(run: TakeoffRun): RollForces {
   const { mass, density, wingArea, groundLiftCoefficient } = run;
-  const halfRhoS = 0.5 * density * wingArea;
+  const perMass = 1 / mass;
+  const halfRhoS = 0.5 * density * wingArea * perMass;
   const phi = groundEffect(run.wingHeight / run.span);
-  const coefficient = dragCoefficient(run.groundDragCoefficient, run.inducedDragFactor, groundLiftCoefficient, phi);
   return {
     thrust: run.thrust,
-    mass,
-    weight: mass * g0,
-    drag: halfRhoS * coefficient,
+    perMass,
+    weight: g0,
+    drag: halfRhoS * dragCoefficient(run.groundDragCoefficient, run.inducedDragFactor, groundLiftCoefficient, phi),
     lift: halfRhoS * groundLiftCoefficient,
     friction: run.rollingFriction,
-    uphill: mass * g0 * run.slope,
+    uphill: g0 * run.slope,
   };
 }
 
@@ -49,5 +50,5 @@ export function accelerationWith(forces: RollForces, airspeed: number, thrust: n
   const square = airspeed * Math.abs(airspeed);
   const load = forces.weight - forces.lift * square;
   const held = load > 0 ? forces.friction * load : 0;
-  return (thrust - forces.drag * square - held - forces.uphill) / forces.mass;
+  return thrust * forces.perMass - forces.drag * square - held - forces.uphill;
 }

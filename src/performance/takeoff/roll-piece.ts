@@ -1,9 +1,10 @@
 import { gaussLegendre } from '../../numerics/gauss-legendre.ts';
+import { g0 } from '../../physics/constants.ts';
 import type { PathIntegral } from '../path-integral.ts';
 import { accelerationWith, type RollForces } from './roll-forces.ts';
 
 /** Nodes of the rule and, with weight 0, the ends of the piece: an acceleration is often least at an end. */
-const rule = gaussLegendre(16);
+const rule = gaussLegendre(14);
 const count = rule.order + 2;
 const nodes = Float64Array.from([-1, ...rule.nodes, 1]);
 const weights = Float64Array.from([0, ...rule.weights, 0]);
@@ -11,7 +12,7 @@ const airspeeds = new Float64Array(count);
 const thrusts = new Float64Array(count);
 
 /**
- * Adds one smooth piece of the roll: integral of (V - w)/a dV and of dV/a, 16 nodes.
+ * Adds one smooth piece of the roll: integral of (V - w)/a dV and of dV/a, 14 nodes.
  *
  * Where the thrust falls with the square root of the airspeed, V = u^2 makes the integrand smooth again.
  *
@@ -52,4 +53,12 @@ export function addRollPiece(forces: RollForces, headwind: number, from: number,
   sum.least = least;
   sum.leastAt = leastAt;
   sum.most = most;
+}
+
+/** Airspeeds [m/s] at which the slope of the acceleration jumps: still air, the wheels unloaded, the thrust's kinks. */
+export function rollJumps(forces: RollForces): number[] {
+  const jumps = [0];
+  if (forces.lift > 0) jumps.push(Math.sqrt(g0 / forces.lift));
+  for (const kink of forces.thrust.kinks) jumps.push(kink);
+  return jumps;
 }
