@@ -71,19 +71,25 @@ export function airOf(report: AirReport, elevation?: number): AirOutcome {
   const density = airDensity(pressure, temperature, vapourPressure);
   const densityAltitude = densityAltitudeOf(density);
   if (densityAltitude === 'outside-standard-atmosphere') return outside('densityAltitude');
+  const temperatureDeviation = temperature - standardTemperature(pressureAltitude);
+  const densityRatio = density / rho0;
+  const dry = { temperature, temperatureDeviation, pressure, pressureAltitude, density, densityRatio, densityAltitude };
+  if (dewPoint === undefined || vapourPressure === undefined) return { outcome: 'air', air: dry };
+  const relativeHumidity = vapourPressure / saturationVapourPressure(temperature);
+  // written out: a spread costs more than all the physics above
   return {
     outcome: 'air',
     air: {
       temperature,
-      temperatureDeviation: temperature - standardTemperature(pressureAltitude),
+      temperatureDeviation,
       pressure,
       pressureAltitude,
       density,
-      densityRatio: density / rho0,
+      densityRatio,
       densityAltitude,
-      ...(dewPoint !== undefined && vapourPressure !== undefined
-        ? { dewPoint, relativeHumidity: vapourPressure / saturationVapourPressure(temperature), vapourPressure }
-        : {}),
+      dewPoint,
+      relativeHumidity,
+      vapourPressure,
     },
   };
 }

@@ -84,7 +84,8 @@ export function speedOfSound(temperature: number): number {
  * @see references.Iso2533Add2
  */
 export function withinStandardAtmosphere(altitude: number): number | 'outside-standard-atmosphere' {
-  const held = Math.min(highestAltitude, Math.max(lowestAltitude, altitude));
+  if (altitude >= lowestAltitude && altitude <= highestAltitude) return altitude;
+  const held = altitude < lowestAltitude ? lowestAltitude : highestAltitude;
   return Math.abs(held - altitude) <= 1e-6 ? held : 'outside-standard-atmosphere';
 }
 

@@ -34,7 +34,7 @@ export function speedSet(
   const cas = casFromEas(eas, air.pressure);
   if (cas === 'not-subsonic') return cas;
   const tas = tasFromEas(eas, air.density);
+  const stallRatio = eas / stallEas;
   const ias = calibration === undefined ? 'outside' : indicatedFromCalibrated(calibration, cas);
-  const speeds = { cas, eas, tas, stallRatio: eas / stallEas };
-  return ias === 'outside' ? speeds : { ...speeds, ias };
+  return ias === 'outside' ? { cas, eas, tas, stallRatio } : { cas, eas, tas, ias, stallRatio };
 }
