@@ -19,3 +19,6 @@ export function present<T extends object>(members: Perhaps<T>): T {
 export function perhaps<A, B>(convert: (given: A) => B, given: A | undefined): B | undefined {
   return given === undefined ? undefined : convert(given);
 }
+
+/** An object under construction: its members are assigned in the order of the contract, absent ones not at all. */
+export type Draft<T> = { -readonly [K in keyof T]: T[K] };

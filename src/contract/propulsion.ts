@@ -89,7 +89,9 @@ const turboprop = z.strictObject({
     .number()
     .min(0)
     .max(4)
-    .meta({ description: 'n in theta^-n, the fall of power with temperature beyond the flat rating; about 1.5 to 2.5.' })
+    .meta({
+      description: 'n in theta^-n, the fall of power with temperature beyond the flat rating; about 1.5 to 2.5.',
+    })
     .exactOptional(),
   thrustFactor,
 });

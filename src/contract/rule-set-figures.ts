@@ -3,10 +3,10 @@ import type { RuleSet } from '../planning/rules/rule-set.ts';
 
 const slopes = [-0.02, 0, 0.01, 0.02];
 const lengths = [
-  { tora: 1000 },
+  { tora: 1000, toda: undefined, asda: undefined },
   { tora: 1000, toda: 1000, asda: 1000 },
-  { tora: 1000, toda: 1200 },
-  { tora: 1000, asda: 1200 },
+  { tora: 1000, toda: 1200, asda: undefined },
+  { tora: 1000, toda: undefined, asda: 1200 },
   { tora: 1000, toda: 1200, asda: 1200 },
 ];
 

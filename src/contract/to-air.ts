@@ -1,9 +1,14 @@
+import type { z } from 'zod';
 import type { Air } from '../planning/answer.ts';
+import type { air as airSchema } from './answer-parts.ts';
+import type { Draft } from './present.ts';
 import { type Presentation, shownQuantity, shownRatio } from './shown-quantity.ts';
+
+type ShownAir = z.infer<typeof airSchema>;
 
 /** The state of the air as an answer shows it. */
 export function toAir(how: Presentation, air: Air) {
-  return {
+  const shown: Draft<ShownAir> = {
     temperature: shownQuantity(how, 'temperature', air.temperature),
     temperatureDeviation: shownQuantity(how, 'temperatureDifference', air.temperatureDeviation),
     pressure: shownQuantity(how, 'pressure', air.pressure),
@@ -11,9 +16,8 @@ export function toAir(how: Presentation, air: Air) {
     density: shownQuantity(how, 'density', air.density),
     densityRatio: shownRatio(how, air.densityRatio),
     densityAltitude: shownQuantity(how, 'altitude', air.densityAltitude),
-    ...(air.dewPoint === undefined ? {} : { dewPoint: shownQuantity(how, 'temperature', air.dewPoint) }),
-    ...(air.relativeHumidity === undefined
-      ? {}
-      : { relativeHumidity: shownQuantity(how, 'gradient', air.relativeHumidity) }),
   };
+  if (air.dewPoint !== undefined) shown.dewPoint = shownQuantity(how, 'temperature', air.dewPoint);
+  if (air.relativeHumidity !== undefined) shown.relativeHumidity = shownQuantity(how, 'gradient', air.relativeHumidity);
+  return shown;
 }

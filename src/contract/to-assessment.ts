@@ -1,5 +1,9 @@
 import type { Check, Factor, TakeoffAnswer } from '../planning/answer.ts';
+import type { Draft } from './present.ts';
 import { type Presentation, shownPercent, shownQuantity, shownRatio } from './shown-quantity.ts';
+import type { TakeoffResponse } from './takeoff-response.ts';
+
+type ShownCheck = NonNullable<TakeoffResponse['assessment']>['checks'][number];
 
 /** The checks of the rule set: what is required rounded up, what is available and what is spare rounded down. */
 export function toAssessment(how: Presentation, given: NonNullable<TakeoffAnswer['assessment']>) {
@@ -10,31 +14,26 @@ export function toAssessment(how: Presentation, given: NonNullable<TakeoffAnswer
 
 function toCheck(how: Presentation, check: Check) {
   const { unit, distance, alternative, required, available, margin, marginRatio, why } = check;
-  return {
-    code: check.code,
-    of: check.of,
-    startsFrom: check.startsFrom,
-    ...(distance === undefined ? {} : { distance: shownQuantity(how, unit, distance, 'up') }),
-    factors: check.factors.map((factor) => toFactor(how, factor)),
-    ...(alternative === undefined
-      ? {}
-      : {
-          alternative: {
-            startsFrom: alternative.startsFrom,
-            distance: shownQuantity(how, unit, alternative.distance, 'up'),
-            factors: alternative.factors.map((factor) => toFactor(how, factor)),
-            required: shownQuantity(how, unit, alternative.required, 'up'),
-            because: alternative.because,
-          },
-        }),
-    ...(required === undefined ? {} : { required: shownQuantity(how, unit, required, 'up') }),
-    ...(available === undefined ? {} : { available: shownQuantity(how, unit, available, 'down') }),
-    ...(margin === undefined ? {} : { margin: shownQuantity(how, unit, margin, 'down') }),
-    ...(marginRatio === undefined ? {} : { marginPercent: shownPercent(how, marginRatio, 'down') }),
-    result: check.result,
-    ...(why === undefined ? {} : { why }),
-    source: check.source,
-  };
+  const shown = { code: check.code, of: check.of, startsFrom: check.startsFrom } as Draft<ShownCheck>;
+  if (distance !== undefined) shown.distance = shownQuantity(how, unit, distance, 'up');
+  shown.factors = check.factors.map((factor) => toFactor(how, factor));
+  if (alternative !== undefined) {
+    shown.alternative = {
+      startsFrom: alternative.startsFrom,
+      distance: shownQuantity(how, unit, alternative.distance, 'up'),
+      factors: alternative.factors.map((factor) => toFactor(how, factor)),
+      required: shownQuantity(how, unit, alternative.required, 'up'),
+      because: alternative.because,
+    };
+  }
+  if (required !== undefined) shown.required = shownQuantity(how, unit, required, 'up');
+  if (available !== undefined) shown.available = shownQuantity(how, unit, available, 'down');
+  if (margin !== undefined) shown.margin = shownQuantity(how, unit, margin, 'down');
+  if (marginRatio !== undefined) shown.marginPercent = shownPercent(how, marginRatio, 'down');
+  shown.result = check.result;
+  if (why !== undefined) shown.why = why;
+  shown.source = check.source;
+  return shown;
 }
 
 function toFactor(how: Presentation, { code, value, because, source, status }: Factor) {

@@ -1,7 +1,12 @@
+import type { z } from 'zod';
 import type { Assumption } from '../planning/answer.ts';
 import { type ReferenceKey, references } from '../references.ts';
+import type { assumption } from './answer-parts.ts';
+import type { Draft } from './present.ts';
 import { type Presentation, shownPercent } from './shown-quantity.ts';
 import { toMeasure } from './to-advisory.ts';
+
+type ShownAssumption = z.infer<typeof assumption>;
 
 /** What stands behind every number of the service: its version and the digest of its rules. */
 export interface Stamp {
@@ -12,13 +17,16 @@ export interface Stamp {
 
 /** Assumptions as an answer shows them. */
 export function toAssumed(how: Presentation, assumed: readonly Assumption[]) {
-  return assumed.map(({ at, value, because, effectRatio, source }) => ({
-    at,
-    value: typeof value === 'string' ? value : toMeasure(how, value),
-    because,
-    ...(effectRatio === undefined ? {} : { effectPercent: shownPercent(how, effectRatio, 'nearest') }),
-    ...(source === undefined ? {} : { source }),
-  }));
+  return assumed.map(({ at, value, because, effectRatio, source }) => {
+    const shown: Draft<ShownAssumption> = {
+      at,
+      value: typeof value === 'string' ? value : toMeasure(how, value),
+      because,
+    };
+    if (effectRatio !== undefined) shown.effectPercent = shownPercent(how, effectRatio, 'nearest');
+    if (source !== undefined) shown.source = source;
+    return shown;
+  });
 }
 
 /** Sources by name, each once, in the order they are given. */

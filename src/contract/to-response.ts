@@ -3,6 +3,7 @@ import type { Question } from '../planning/question.ts';
 import type { ReferenceKey } from '../references.ts';
 import { shown, unitFor } from '../units/presentation.ts';
 import { asChosen } from './aeroplane-choice.ts';
+import type { Draft } from './present.ts';
 import { defaultRounding, defaultUnits } from './question-frame.ts';
 import { type Presentation, shownPercent, shownQuantity } from './shown-quantity.ts';
 import type { TakeoffRequest } from './takeoff-request.ts';
@@ -28,40 +29,35 @@ export function toResponse(
   stamp: Stamp,
 ): TakeoffResponse {
   const how = { units: question.units, rounding: request.rounding ?? defaultRounding };
-  const { speeds, distances, assessment, shortfall, basis } = answer;
-  return {
+  const response = {
     outcome: answer.outcome,
     advisory: toAdvisory(how, answer.sentence, answer.cautions),
     air: toAir(how, answer.air),
     wind: toWind(how, answer.wind),
-    speeds: {
-      stall: toSpeedSet(how, speeds.stall),
-      rotation: toSpeedSet(how, speeds.rotation),
-      liftOff: toSpeedSet(how, speeds.liftOff),
-      screen: toSpeedSet(how, speeds.screen),
-    },
-    ...(distances === undefined ? {} : { distances: toDistances(how, distances) }),
-    ...(assessment === undefined ? {} : { assessment: toAssessment(how, assessment) }),
-    ...(shortfall === undefined ? {} : { shortfall: shortfall.map((one) => toShortfall(how, one)) }),
-    basis: {
-      method: basis.method,
-      ...(basis.band === undefined ? {} : { band: basis.band.map((one) => toBandContribution(how, one)) }),
-      assumed: toAssumed(how, basis.assumed),
-      notGiven: [...basis.notGiven],
-      sources: toSources(basis.sources, citedBy(answer)),
-      modelVersion: stamp.modelVersion,
-      digests: { aeroplane: question.aeroplaneDigest, rules: stamp.rulesDigest },
-    },
-    question: asUnderstood(request, question.aeroplane.revision),
-  };
+    speeds: toSpeeds(how, answer.speeds),
+  } as Draft<TakeoffResponse>;
+  if (answer.distances !== undefined) response.distances = toDistances(how, answer.distances);
+  if (answer.assessment !== undefined) response.assessment = toAssessment(how, answer.assessment);
+  if (answer.shortfall !== undefined) response.shortfall = answer.shortfall.map((one) => toShortfall(how, one));
+  response.basis = toBasis(how, answer, question.aeroplaneDigest, stamp);
+  response.question = asUnderstood(request, question.aeroplane.revision);
+  return response;
 }
 
 function toWind(how: Presentation, { headwind, crosswind, crosswindFrom, creditedHeadwind }: WindComponents) {
+  const wind = { headwind: shownQuantity(how, 'speed', headwind) } as Draft<TakeoffResponse['wind']>;
+  if (crosswind !== undefined) wind.crosswind = shownQuantity(how, 'speed', crosswind);
+  if (crosswindFrom !== undefined) wind.crosswindFrom = crosswindFrom;
+  wind.creditedHeadwind = shownQuantity(how, 'speed', creditedHeadwind);
+  return wind;
+}
+
+function toSpeeds(how: Presentation, { stall, rotation, liftOff, screen }: TakeoffAnswer['speeds']) {
   return {
-    headwind: shownQuantity(how, 'speed', headwind),
-    ...(crosswind === undefined ? {} : { crosswind: shownQuantity(how, 'speed', crosswind) }),
-    ...(crosswindFrom === undefined ? {} : { crosswindFrom }),
-    creditedHeadwind: shownQuantity(how, 'speed', creditedHeadwind),
+    stall: toSpeedSet(how, stall),
+    rotation: toSpeedSet(how, rotation),
+    liftOff: toSpeedSet(how, liftOff),
+    screen: toSpeedSet(how, screen),
   };
 }
 
@@ -96,14 +92,25 @@ function toBandContribution(how: Presentation, { of, groundRoll, airDistance, ta
 }
 
 function toShortfall(how: Presentation, { at, axis, table, given, bound, side }: Shortfall) {
-  return {
-    at,
-    ...(axis === undefined ? {} : { axis }),
-    ...(table === undefined ? {} : { table }),
-    given: toMeasure(how, given),
-    bound: toMeasure(how, bound),
-    side,
-  };
+  const shortfall = { at } as Draft<NonNullable<TakeoffResponse['shortfall']>[number]>;
+  if (axis !== undefined) shortfall.axis = axis;
+  if (table !== undefined) shortfall.table = table;
+  shortfall.given = toMeasure(how, given);
+  shortfall.bound = toMeasure(how, bound);
+  shortfall.side = side;
+  return shortfall;
+}
+
+function toBasis(how: Presentation, answer: TakeoffAnswer, aeroplaneDigest: string, stamp: Stamp) {
+  const { method, band, assumed, notGiven, sources } = answer.basis;
+  const basis = { method } as Draft<TakeoffResponse['basis']>;
+  if (band !== undefined) basis.band = band.map((one) => toBandContribution(how, one));
+  basis.assumed = toAssumed(how, assumed);
+  basis.notGiven = [...notGiven];
+  basis.sources = toSources(sources, citedBy(answer));
+  basis.modelVersion = stamp.modelVersion;
+  basis.digests = { aeroplane: aeroplaneDigest, rules: stamp.rulesDigest };
+  return basis;
 }
 
 /** Sources that checks, factors, cautions and assumptions name: an answer names no key that it does not list. */
@@ -121,18 +128,18 @@ function citedBy({ assessment, cautions, basis }: TakeoffAnswer): ReferenceKey[]
 
 /** The request with what was filled in, in the order of its schema; it can be sent again as it stands. */
 function asUnderstood(request: TakeoffRequest, revision: string): TakeoffQuestion {
-  const { reference, asOf, aeroplane, stage } = request;
-  return {
-    ...(reference === undefined ? {} : { reference }),
-    ...(asOf === undefined ? {} : { asOf }),
-    aeroplane: asChosen(aeroplane, revision),
-    mass: request.mass,
-    configuration: request.configuration,
-    runway: request.runway,
-    weather: request.weather,
-    ruleSet: request.ruleSet,
-    ...(stage === undefined ? {} : { stage }),
-    units: request.units ?? defaultUnits,
-    rounding: request.rounding ?? defaultRounding,
-  };
+  const { reference, asOf, stage, units = defaultUnits, rounding = defaultRounding } = request;
+  const question = {} as Draft<TakeoffQuestion>;
+  if (reference !== undefined) question.reference = reference;
+  if (asOf !== undefined) question.asOf = asOf;
+  question.aeroplane = asChosen(request.aeroplane, revision);
+  question.mass = request.mass;
+  question.configuration = request.configuration;
+  question.runway = request.runway;
+  question.weather = request.weather;
+  question.ruleSet = request.ruleSet;
+  if (stage !== undefined) question.stage = stage;
+  question.units = units;
+  question.rounding = rounding;
+  return question;
 }

@@ -1,23 +1,25 @@
-import type { Declared, Runway, Surface } from '../planning/question.ts';
+import type { Declared, Runway } from '../planning/question.ts';
+import type { Draft } from './present.ts';
 import { si } from './quantity.ts';
 import type { RunwayOnWire } from './runway.ts';
 
 /** The runway in SI. */
 export function toRunway(given: RunwayOnWire): Runway {
-  return {
+  const runway = {
     designator: given.designator,
     direction: si('angle', given.direction),
     directionReference: given.directionReference,
-    ...(given.magneticVariation === undefined ? {} : { magneticVariation: si('angle', given.magneticVariation) }),
     elevation: si('length', given.elevation),
     slope: si('proportion', given.slope),
-    surface: given.surface satisfies Surface,
+    surface: given.surface,
     start: toStart(given.start),
-    ...(given.lineUp === undefined
-      ? {}
-      : { lineUp: { tora: si('length', given.lineUp.tora), asda: si('length', given.lineUp.asda) } }),
-    ...(given.declared === undefined ? {} : { declared: toDeclared(given.declared) }),
-  };
+  } satisfies Runway as Draft<Runway>;
+  if (given.magneticVariation !== undefined) runway.magneticVariation = si('angle', given.magneticVariation);
+  if (given.lineUp !== undefined) {
+    runway.lineUp = { tora: si('length', given.lineUp.tora), asda: si('length', given.lineUp.asda) };
+  }
+  if (given.declared !== undefined) runway.declared = toDeclared(given.declared);
+  return runway;
 }
 
 function toStart(given: RunwayOnWire['start']): Runway['start'] {
@@ -28,10 +30,10 @@ function toStart(given: RunwayOnWire['start']): Runway['start'] {
 }
 
 function toDeclared({ tora, toda, asda, lda }: NonNullable<RunwayOnWire['declared']>): Declared {
-  return {
-    ...(tora === undefined ? {} : { tora: si('length', tora) }),
-    ...(toda === undefined ? {} : { toda: si('length', toda) }),
-    ...(asda === undefined ? {} : { asda: si('length', asda) }),
-    ...(lda === undefined ? {} : { lda: si('length', lda) }),
-  };
+  const declared: Draft<Declared> = {};
+  if (tora !== undefined) declared.tora = si('length', tora);
+  if (toda !== undefined) declared.toda = si('length', toda);
+  if (asda !== undefined) declared.asda = si('length', asda);
+  if (lda !== undefined) declared.lda = si('length', lda);
+  return declared;
 }

@@ -1,44 +1,52 @@
 import type { AirReport } from '../performance/air.ts';
 import type { Weather, Wind } from '../planning/question.ts';
+import type { Draft } from './present.ts';
 import { si } from './quantity.ts';
 import type { StillWeatherOnWire, WeatherOnWire, WindOnWire } from './weather.ts';
 
 /** Air and wind in SI. */
 export function toWeather(given: WeatherOnWire): Weather {
-  return { ...toAirReport(given), wind: toWind(given.wind) };
+  const weather: Draft<Weather> = {
+    temperature: si('temperature', given.temperature),
+    pressure: toPressure(given.pressure),
+    wind: toWind(given.wind),
+  };
+  if (given.dewPoint !== undefined) weather.dewPoint = si('temperature', given.dewPoint);
+  return weather;
 }
 
 /** The air in SI. */
 export function toAirReport({ temperature, dewPoint, pressure }: StillWeatherOnWire): AirReport {
-  return {
-    temperature: si('temperature', temperature),
-    ...(dewPoint === undefined ? {} : { dewPoint: si('temperature', dewPoint) }),
-    pressure:
-      'qnh' in pressure
-        ? { kind: 'qnh', value: si('pressure', pressure.qnh) }
-        : 'pressureAltitude' in pressure
-          ? { kind: 'pressureAltitude', value: si('length', pressure.pressureAltitude) }
-          : { kind: 'stationPressure', value: si('pressure', pressure.stationPressure) },
-  };
+  const report: Draft<AirReport> = { temperature: si('temperature', temperature), pressure: toPressure(pressure) };
+  if (dewPoint !== undefined) report.dewPoint = si('temperature', dewPoint);
+  return report;
+}
+
+function toPressure(given: StillWeatherOnWire['pressure']): AirReport['pressure'] {
+  if ('qnh' in given) return { kind: 'qnh', value: si('pressure', given.qnh) };
+  return 'pressureAltitude' in given
+    ? { kind: 'pressureAltitude', value: si('length', given.pressureAltitude) }
+    : { kind: 'stationPressure', value: si('pressure', given.stationPressure) };
 }
 
 function toWind(given: WindOnWire): Wind {
   if (given === 'calm') return { kind: 'calm' };
   if ('headwind' in given) {
-    return {
+    const wind: Draft<Extract<Wind, { kind: 'components' }>> = {
       kind: 'components',
       headwind: si('speed', given.headwind),
-      ...(given.crosswind === undefined ? {} : { crosswind: si('speed', given.crosswind) }),
     };
+    if (given.crosswind !== undefined) wind.crosswind = si('speed', given.crosswind);
+    return wind;
   }
-  return {
+  const { gust, variable } = given;
+  const wind: Draft<Extract<Wind, { kind: 'from' }>> = {
     kind: 'from',
     from: si('angle', given.from),
     fromReference: given.fromReference,
     speed: si('speed', given.speed),
-    ...(given.gust === undefined ? {} : { gust: si('speed', given.gust) }),
-    ...(given.variable === undefined
-      ? {}
-      : { variable: { from: si('angle', given.variable.from), to: si('angle', given.variable.to) } }),
   };
+  if (gust !== undefined) wind.gust = si('speed', gust);
+  if (variable !== undefined) wind.variable = { from: si('angle', variable.from), to: si('angle', variable.to) };
+  return wind;
 }

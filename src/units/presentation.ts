@@ -1,4 +1,4 @@
-import { fromSi, type Quantity, type Unit, type UnitOf } from './units.ts';
+import { type Quantity, scaleOf, type Unit, type UnitOf } from './units.ts';
 
 /** The unit families an answer can be asked in. */
 export const unitFamilies = ['m-kt-kg', 'ft-kt-lb', 'si'] as const;
@@ -27,14 +27,16 @@ export type Kind =
 export type Direction = 'up' | 'down' | 'nearest';
 
 interface Form {
-  readonly quantity: Quantity;
   readonly unit: Unit;
+  /** value in the unit = SI / factor - offset; kept here because an answer shows a hundred numbers */
+  readonly factor: number;
+  readonly offset: number;
   /** decimals shown; a negative step of 5 ft is written as step 5 */
   readonly step: number;
 }
 
 function form<Q extends Quantity>(quantity: Q, unit: UnitOf<Q>, step: number): Form {
-  return { quantity, unit: unit as Unit, step };
+  return { unit: unit as Unit, ...scaleOf(quantity, unit), step };
 }
 
 const metres = form('length', 'm', 1);
@@ -120,8 +122,8 @@ export function shown(
   direction: Direction = 'nearest',
   rounding: 'safe' | 'none' = 'safe',
 ): number {
-  const { quantity, unit, step } = forms[family][kind];
-  const value = fromSi(quantity, si, unit as never);
+  const { factor, offset, step } = forms[family][kind];
+  const value = si / factor - offset;
   return rounding === 'none' ? value + 0 : roundTo(value, step, direction);
 }
 

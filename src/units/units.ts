@@ -66,6 +66,16 @@ export function fromSi<Q extends Quantity>(quantity: Q, si: number, unit: UnitOf
   return si / factor(quantity as keyof Scales, unit);
 }
 
+/** How a unit stands to SI: SI = (value + offset) x factor. */
+export function scaleOf<Q extends Quantity>(
+  quantity: Q,
+  unit: UnitOf<Q>,
+): { readonly offset: number; readonly factor: number } {
+  return quantity === 'temperature'
+    ? temperatureScales[unit as TemperatureUnit]
+    : { offset: 0, factor: factor(quantity as keyof Scales, unit) };
+}
+
 function factor(quantity: keyof Scales, unit: string): number {
   return (scales[quantity] as Record<string, number>)[unit] as number;
 }

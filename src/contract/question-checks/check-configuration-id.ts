@@ -8,14 +8,14 @@ import { unknownId } from '../unknown-id.ts';
  * @param use - what it must be for; absent: either
  */
 export function checkConfigurationId(given: string, aeroplane: Aeroplane, use?: 'takeoff' | 'landing'): Fault[] {
+  const found = Object.hasOwn(aeroplane.configurations, given) ? aeroplane.configurations[given] : undefined;
+  if (found !== undefined && (use === undefined || found.for.includes(use))) return [];
   const configurations = Object.entries(aeroplane.configurations);
   const made = configurations
     .filter(([, configuration]) => use === undefined || configuration.for.includes(use))
     .map(([id]) => id);
-  const found = configurations.find(([id]) => id === given)?.[1];
   const kind = use === undefined ? 'configuration' : `${use} configuration`;
   if (found === undefined) return [unknownId('/configuration', `${kind} of ${aeroplane.id}`, given, made)];
-  if (use === undefined || found.for.includes(use)) return [];
   return [
     {
       pointer: '/configuration',
