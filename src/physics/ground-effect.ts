@@ -16,6 +16,6 @@ export const heightRatioWithoutEffect = 1 / 1.32;
  */
 export function groundEffect(heightRatio: number): number {
   if (heightRatio >= heightRatioWithoutEffect) return 1;
-  const r = heightRatio > leastHeightRatio ? heightRatio : leastHeightRatio;
+  const r = Math.max(heightRatio, leastHeightRatio);
   return 1 - (1 - 1.32 * r) / (1.05 + 7.4 * r);
 }
