@@ -37,10 +37,10 @@ export interface Caution {
   readonly severity: Severity;
   readonly message: string;
   /** pointer into the request */
-  readonly at?: string;
-  readonly value?: Measure | number;
-  readonly threshold?: Measure | number;
-  readonly source?: ReferenceKey;
+  readonly at?: string | undefined;
+  readonly value?: Measure | number | undefined;
+  readonly threshold?: Measure | number | undefined;
+  readonly source?: ReferenceKey | undefined;
 }
 
 export interface Air {
@@ -102,21 +102,23 @@ export interface Check {
   readonly distance?: number;
   readonly factors: readonly Factor[];
   /** another reading of the rule, shown and not chosen */
-  readonly alternative?: {
-    readonly startsFrom: 'reference' | 'credited' | 'flight-manual';
-    readonly distance: number;
-    readonly factors: readonly Factor[];
-    readonly required: number;
-    readonly because: string;
-  };
+  readonly alternative?:
+    | {
+        readonly startsFrom: 'reference' | 'credited' | 'flight-manual';
+        readonly distance: number;
+        readonly factors: readonly Factor[];
+        readonly required: number;
+        readonly because: string;
+      }
+    | undefined;
   readonly unit: Kind;
   readonly required?: number;
-  readonly available?: number;
-  readonly margin?: number;
+  readonly available?: number | undefined;
+  readonly margin?: number | undefined;
   /** margin as per cent of required, a ratio here: 0.1 is 10 % */
-  readonly marginRatio?: number;
+  readonly marginRatio?: number | undefined;
   readonly result: 'passes' | 'fails' | 'not-assessed';
-  readonly why?: string;
+  readonly why?: string | undefined;
   readonly source: ReferenceKey;
 }
 
@@ -139,7 +141,7 @@ export interface Shortfall {
   readonly side: 'above' | 'below';
 }
 
-/** What one input adds to the bands: the share by which each distance moves for one standard deviation of it, with its sign. */
+/** What one input adds to the bands: the share by which each distance moves when it is one standard deviation less favourable. */
 export interface BandContribution {
   readonly of: string;
   readonly groundRoll: number;
@@ -150,7 +152,7 @@ export interface BandContribution {
 export interface Basis {
   readonly method: Method;
   /** absent where there are no distances */
-  readonly band?: readonly BandContribution[];
+  readonly band?: readonly BandContribution[] | undefined;
   readonly assumed: readonly Assumption[];
   readonly notGiven: readonly string[];
   readonly sources: readonly ReferenceKey[];
@@ -168,20 +170,24 @@ export interface TakeoffAnswer {
     readonly liftOff: SpeedSet;
     readonly screen: SpeedSet;
   };
-  readonly distances?: {
-    readonly screenHeight: number;
-    readonly groundRoll: BandedDistance;
-    readonly airDistance: BandedDistance;
-    readonly takeoffDistance: BandedDistance;
-    readonly groundRollTime: number;
-    readonly airTime: number;
-  };
-  readonly assessment?: {
-    readonly ruleSet: string;
-    readonly checks: readonly Check[];
-    /** code of the governing check */
-    readonly governing?: string;
-  };
-  readonly shortfall?: readonly Shortfall[];
+  readonly distances?:
+    | {
+        readonly screenHeight: number;
+        readonly groundRoll: BandedDistance;
+        readonly airDistance: BandedDistance;
+        readonly takeoffDistance: BandedDistance;
+        readonly groundRollTime: number;
+        readonly airTime: number;
+      }
+    | undefined;
+  readonly assessment?:
+    | {
+        readonly ruleSet: string;
+        readonly checks: readonly Check[];
+        /** code of the governing check */
+        readonly governing?: string | undefined;
+      }
+    | undefined;
+  readonly shortfall?: readonly Shortfall[] | undefined;
   readonly basis: Basis;
 }

@@ -1,4 +1,3 @@
-import type { TakeoffEstimate } from '../performance/takeoff/takeoff-estimate.ts';
 import { takeoffEstimate } from '../performance/takeoff/takeoff-estimate.ts';
 import type { TakeoffRun } from '../performance/takeoff/takeoff-run.ts';
 import type { Thrust } from '../physics/thrust/thrust.ts';
@@ -28,6 +27,8 @@ export interface OtherAir {
   readonly thrust: Thrust;
 }
 
+type Changing = { -readonly [K in keyof TakeoffRun]: TakeoffRun[K] };
+
 /** A tenth of a standard deviation: small enough for a slope, and an estimate near its end still exists. */
 const step = 0.1;
 
@@ -51,7 +52,8 @@ export function takeoffBand(
   method: Method,
   airAt: (temperatureOff: number, pressureOff: number) => OtherAir | undefined,
 ): Band {
-  const run = { ...stated, thrust: heldThrust(stated.thrust) };
+  const thrust = heldThrust(stated.thrust);
+  const run: Changing = { ...stated, thrust };
   const base = takeoffEstimate(run);
   const u = inputUncertainties;
   const share = result.groundRoll / result.takeoffDistance;
@@ -61,29 +63,50 @@ export function takeoffBand(
     const takeoffDistance = groundRoll * share + airDistance * (1 - share);
     contributions.push({ of, groundRoll, airDistance, takeoffDistance });
   }
-  function moved(of: string, other: TakeoffRun | undefined, back?: TakeoffRun): void {
-    const one = slopes(base, other);
-    const change = one ?? slopes(base, back);
-    add(of, change?.groundRoll ?? modelForm[method], change?.airDistance ?? modelForm[method]);
+  /** Better by a tenth of a standard deviation, or worse: where one estimate does not exist the other does. */
+  function moved(of: string, change: (by: number) => void): void {
+    let groundRoll = Number.NaN;
+    let airDistance = Number.NaN;
+    for (const by of [-step, step]) {
+      if (Number.isFinite(groundRoll) && Number.isFinite(airDistance)) break;
+      change(by);
+      const other = takeoffEstimate(run);
+      groundRoll = Math.log(other.groundRoll / base.groundRoll) / by;
+      airDistance = Math.log(other.airDistance / base.airDistance) / by;
+      restore(run, stated, thrust);
+    }
+    const form = modelForm[method];
+    add(of, Number.isFinite(groundRoll) ? groundRoll : form, Number.isFinite(airDistance) ? airDistance : form);
   }
-  const inAir = (other: OtherAir | undefined): TakeoffRun | undefined => {
-    if (other === undefined) return undefined;
-    const speeds = Math.sqrt(run.density / other.density);
-    return faster({ ...run, density: other.density, thrust: heldThrust(other.thrust) }, speeds);
+  const inAir = (other: OtherAir | undefined): void => {
+    if (other === undefined) {
+      run.density = Number.NaN;
+      return;
+    }
+    run.density = other.density;
+    run.thrust = heldThrust(other.thrust);
+    faster(run, Math.sqrt(stated.density / other.density));
   };
-  const heavier = (by: number) => faster({ ...run, mass: run.mass * by }, Math.sqrt(by));
-  const thrustBy = (by: number) => ({ ...run, thrust: scaled(run.thrust, by) });
 
   const form = modelForm[method];
+  const friction = frictionUncertainty(surface);
   add('model form', form, form);
-  moved('temperature', inAir(airAt(-step * u.temperature, 0)), inAir(airAt(step * u.temperature, 0)));
-  moved('pressure', inAir(airAt(0, step * u.pressure)), inAir(airAt(0, -step * u.pressure)));
-  moved('wind', { ...run, headwind: run.headwind - step * u.wind }, { ...run, headwind: run.headwind + step * u.wind });
-  moved('mass', heavier(1 - step * u.mass), heavier(1 + step * u.mass));
-  moved('thrust', thrustBy(1 + step * u.thrust), thrustBy(1 - step * u.thrust));
-  moved('speeds', faster(run, 1 + step * u.speed), faster(run, 1 - step * u.speed));
-  const friction = step * frictionUncertainty(surface);
-  moved('rolling friction', { ...run, rollingFriction: run.rollingFriction + friction });
+  moved('temperature', (by) => inAir(airAt(by * u.temperature, 0)));
+  moved('pressure', (by) => inAir(airAt(0, -by * u.pressure)));
+  moved('wind', (by) => {
+    run.headwind -= by * u.wind;
+  });
+  moved('mass', (by) => {
+    run.mass *= 1 + by * u.mass;
+    faster(run, Math.sqrt(1 + by * u.mass));
+  });
+  moved('thrust', (by) => {
+    run.thrust = { ...thrust, at: (airspeed) => (1 - by * u.thrust) * thrust.at(airspeed) };
+  });
+  moved('speeds', (by) => faster(run, 1 + by * u.speed));
+  moved('rolling friction', (by) => {
+    run.rollingFriction += by * friction;
+  });
   add('technique', 0, u.technique);
   const metres = u.startPoint;
   contributions.push({
@@ -111,18 +134,6 @@ export function highOver(deviation: number): number {
   return Math.exp(ninetyPerCent * deviation);
 }
 
-/** Change of ln s for one standard deviation, with its sign; undefined where either estimate does not exist. */
-function slopes(
-  base: TakeoffEstimate,
-  run: TakeoffRun | undefined,
-): { readonly groundRoll: number; readonly airDistance: number } | undefined {
-  if (run === undefined) return undefined;
-  const other = takeoffEstimate(run);
-  const groundRoll = Math.log(other.groundRoll / base.groundRoll) / step;
-  const airDistance = Math.log(other.airDistance / base.airDistance) / step;
-  return Number.isFinite(groundRoll) && Number.isFinite(airDistance) ? { groundRoll, airDistance } : undefined;
-}
-
 function together(
   contributions: readonly BandContribution[],
   of: 'groundRoll' | 'airDistance' | 'takeoffDistance',
@@ -132,15 +143,20 @@ function together(
   return Math.min(widest, Math.sqrt(squares));
 }
 
-function faster(run: TakeoffRun, by: number): TakeoffRun {
-  return {
-    ...run,
-    rotationSpeed: run.rotationSpeed * by,
-    liftOffSpeed: run.liftOffSpeed * by,
-    screenSpeed: run.screenSpeed * by,
-  };
+function faster(run: Changing, by: number): void {
+  run.rotationSpeed *= by;
+  run.liftOffSpeed *= by;
+  run.screenSpeed *= by;
 }
 
-function scaled(thrust: Thrust, by: number): Thrust {
-  return { ...thrust, at: (airspeed) => by * thrust.at(airspeed) };
+/** Undoes what a change may have moved. */
+function restore(run: Changing, stated: TakeoffRun, thrust: Thrust): void {
+  run.thrust = thrust;
+  run.density = stated.density;
+  run.mass = stated.mass;
+  run.headwind = stated.headwind;
+  run.rollingFriction = stated.rollingFriction;
+  run.rotationSpeed = stated.rotationSpeed;
+  run.liftOffSpeed = stated.liftOffSpeed;
+  run.screenSpeed = stated.screenSpeed;
 }

@@ -1,10 +1,11 @@
+import { arithmeticSlack } from './arithmetic-slack.ts';
 import type { Runway } from './question.ts';
 
 /** Lengths from the start point [m]; an absent one is not known and is not taken from another. */
 export interface Lengths {
-  readonly tora?: number;
-  readonly toda?: number;
-  readonly asda?: number;
+  readonly tora: number | undefined;
+  readonly toda: number | undefined;
+  readonly asda: number | undefined;
 }
 
 /** The declared lengths of a takeoff, and what of them counts. */
@@ -13,8 +14,8 @@ export interface DeclaredDistances {
   readonly published: Lengths;
   /** what is compared: line-up loss taken off, clearway capped; never below 0 */
   readonly credited: Lengths;
-  /** the part of the clearway that does not count [m], where there is one */
-  readonly clearwayNotCredited?: number;
+  /** the part of the clearway that does not count [m]; undefined where all of it does */
+  readonly clearwayNotCredited?: number | undefined;
 }
 
 /**
@@ -35,24 +36,19 @@ export function declaredDistances(
 ): DeclaredDistances {
   const { tora, toda, asda } = runway.declared ?? {};
   const offset = runway.start.kind === 'offset' ? runway.start.offset : 0;
-  const published = lengths(less(tora, offset), less(toda, offset), less(asda, offset));
+  const published = { tora: less(tora, offset), toda: less(toda, offset), asda: less(asda, offset) };
   const runLoss = runway.lineUp?.tora ?? 0;
   const run = less(published.tora, runLoss);
   const whole = less(published.toda, runLoss);
+  const stop = less(published.asda, runway.lineUp?.asda ?? 0);
   const limit = run === undefined ? undefined : run * (1 + clearwayShare);
-  const capped = whole !== undefined && limit !== undefined && whole > limit + 1e-6;
-  const credited = lengths(run, capped ? limit : whole, less(published.asda, runway.lineUp?.asda ?? 0));
-  return capped ? { published, credited, clearwayNotCredited: whole - limit } : { published, credited };
+  const beyond = whole === undefined || limit === undefined ? 0 : whole - limit;
+  if (beyond <= arithmeticSlack) {
+    return { published, credited: { tora: run, toda: whole, asda: stop }, clearwayNotCredited: undefined };
+  }
+  return { published, credited: { tora: run, toda: limit, asda: stop }, clearwayNotCredited: beyond };
 }
 
 function less(length: number | undefined, loss: number): number | undefined {
   return length === undefined ? undefined : Math.max(0, length - loss);
-}
-
-function lengths(tora: number | undefined, toda: number | undefined, asda: number | undefined): Lengths {
-  return {
-    ...(tora === undefined ? {} : { tora }),
-    ...(toda === undefined ? {} : { toda }),
-    ...(asda === undefined ? {} : { asda }),
-  };
 }

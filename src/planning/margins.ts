@@ -1,4 +1,5 @@
 import type { Check, Factor } from './answer.ts';
+import { arithmeticSlack } from './arithmetic-slack.ts';
 import type { DeclaredDistances } from './declared-distances.ts';
 import type { Requirement } from './rules/rule-set.ts';
 
@@ -9,9 +10,6 @@ export interface StartingDistances {
   /** credited wind; the runway as it is */
   readonly credited: number | undefined;
 }
-
-/** Below this a shortfall is the arithmetic's, not the runway's [m]: 600 x 1.3 x 1.15 is 896.9999999999999. */
-export const arithmeticSlack = 1e-6;
 
 type Start = 'reference' | 'credited';
 interface Reading {
@@ -45,28 +43,22 @@ export function checkOf(
   const { taken, other } = readings(from, runwayFactors, overall);
   const available = declared.credited[against];
   const { startsFrom, distance, factors, required } = taken;
-  const alternative = otherReading(requirement, taken) ?? other;
-  const shared = {
+  const margin = available === undefined ? undefined : available - required;
+  return {
     code,
     of,
     startsFrom,
     distance,
     factors,
-    ...(alternative === undefined ? {} : { alternative }),
+    alternative: otherReading(requirement, taken) ?? other,
     unit: 'distance',
     required,
-    source,
-  } as const;
-  if (available === undefined) {
-    return { ...shared, result: 'not-assessed', why: `${against.toUpperCase()} is not declared` };
-  }
-  const margin = available - required;
-  return {
-    ...shared,
     available,
     margin,
-    marginRatio: margin / required,
-    result: -margin <= arithmeticSlack ? 'passes' : 'fails',
+    marginRatio: margin === undefined ? undefined : margin / required,
+    result: margin === undefined ? 'not-assessed' : -margin <= arithmeticSlack ? 'passes' : 'fails',
+    why: margin === undefined ? `${against.toUpperCase()} is not declared` : undefined,
+    source,
   };
 }
 
@@ -86,15 +78,20 @@ function readings(
   if (byFactors === undefined) return { taken: byPhysics as Reading };
   if (byPhysics === undefined || byPhysics.required === byFactors.required) return { taken: byFactors };
   return byPhysics.required > byFactors.required
-    ? { taken: byPhysics, other: { ...byFactors, because: 'the factors on a paved, dry, level runway ask for less' } }
-    : { taken: byFactors, other: { ...byPhysics, because: 'physics on the runway as it is asks for less' } };
+    ? { taken: byPhysics, other: beside(byFactors, 'the factors on a paved, dry, level runway ask for less') }
+    : { taken: byFactors, other: beside(byPhysics, 'physics on the runway as it is asks for less') };
 }
 
 /** The rule's other reading, from the same distance with its own overall factor. */
 function otherReading({ alternative, factor }: Requirement, taken: Reading): Check['alternative'] {
   if (alternative === undefined) return undefined;
   const factors = [...taken.factors.filter((one) => one !== factor), alternative.factor];
-  return { ...reading(taken.startsFrom, taken.distance, factors), because: alternative.because };
+  return beside(reading(taken.startsFrom, taken.distance, factors), alternative.because);
+}
+
+/** A reading that is shown and not taken. */
+function beside({ startsFrom, distance, factors, required }: Reading, because: string): Check['alternative'] {
+  return { startsFrom, distance, factors, required, because };
 }
 
 function reading(startsFrom: Start, distance: number, factors: readonly Factor[]): Reading {

@@ -1,5 +1,5 @@
 import type { Check, Outcome } from './answer.ts';
-import { arithmeticSlack } from './margins.ts';
+import { arithmeticSlack } from './arithmetic-slack.ts';
 import type { NotReached } from './takeoff-runs.ts';
 
 /** Why an answer that passes is thin. */

@@ -38,7 +38,7 @@ const method = 'stated';
  * @returns the answer, or every fault that the question's own values bring about
  */
 export function planTakeoff(question: Question): TakeoffAnswer | Refused {
-  const { aeroplane, aeroplaneAt, mass, runway, weather, units } = question;
+  const { aeroplane, aeroplaneAt, mass, runway, weather } = question;
   const ruleSet = chosenRuleSet(question.ruleSet);
   const configuration = chosenConfiguration(question, 'takeoff');
   const air = airAtRunway(question);
@@ -111,39 +111,41 @@ export function planTakeoff(question: Question): TakeoffAnswer | Refused {
     stated && run,
     (propulsion, factor) => thrustIn(air, propulsion, factor),
   );
-  const said = { outcome, checks, governing, stated, thin, ruleSet, runs, rollAvailable, doesNotApply };
+  const context = {
+    question,
+    ruleSet,
+    air,
+    wind,
+    speeds,
+    surface: friction.surface,
+    run: stated && run,
+    runs,
+    stated,
+    distances,
+    declared,
+    doesNotApply,
+    checks,
+    governing,
+    outcome,
+    thin,
+    assumed,
+  };
   return {
     outcome,
-    sentence: takeoffSentence({ ...said, units, surface: friction.surface }),
-    cautions: raisedCautions(takeoffCautions, {
-      ...said,
-      question,
-      air,
-      wind,
-      speeds,
-      declared,
-      assumed,
-      distances,
-      run: stated && run,
-    }),
+    sentence: takeoffSentence(context),
+    cautions: raisedCautions(takeoffCautions, context),
     air,
     wind: windAnswer(wind, creditedHeadwind),
     speeds,
-    ...(distances === undefined ? {} : { distances }),
-    ...(isAssessed ? { assessment: { ruleSet: ruleSet.id, checks, ...named(governing?.code) } } : {}),
-    ...(notReached === undefined
-      ? {}
-      : { shortfall: shortfalls(notReached, aeroplanePointer(aeroplaneAt, '/propulsion')) }),
+    distances,
+    assessment: isAssessed ? { ruleSet: ruleSet.id, checks, governing: governing?.code } : undefined,
+    shortfall: notReached && shortfalls(notReached, aeroplanePointer(aeroplaneAt, '/propulsion')),
     basis: {
       method,
-      ...(band === undefined ? {} : { band: band.contributions }),
+      band: band?.contributions,
       assumed: [...assumed.map(({ assumption }) => assumption), ...defaulted(question)],
       notGiven: notGiven(question),
       sources: [ruleSet.source, ruleSet.windCredit.source],
     },
   };
-}
-
-function named(governing: string | undefined): { readonly governing?: string } {
-  return governing === undefined ? {} : { governing };
 }

@@ -37,10 +37,11 @@ export function resolveFriction(surface: Surface, jet: boolean): ResolvedFrictio
       assumed: [],
     };
   }
-  const shared = { reference: reference.coefficient, surface: known.because };
-  const assumed = [...unstatedGrass(surface)];
+  const assumed = unstatedGround(surface);
   const given = surface.rollingFrictionCoefficient;
-  if (given !== undefined) return { ...shared, actual: given, assumed };
+  if (given !== undefined) {
+    return { actual: given, reference: reference.coefficient, surface: known.because, assumed };
+  }
   const other = known.coefficient + 2 * frictionUncertainty(surface);
   assumed.unshift({
     name: 'rolling friction',
@@ -57,13 +58,14 @@ export function resolveFriction(surface: Surface, jet: boolean): ResolvedFrictio
       text: numberText(Math.round(other * 1000) / 1000),
     },
   });
-  return { ...shared, actual: known.coefficient, assumed };
+  return { actual: known.coefficient, reference: reference.coefficient, surface: known.because, assumed };
 }
 
-/** What is taken of grass whose length and subsoil nobody stated; its friction says what it is worth. */
-function* unstatedGrass({ kind, grass, firmness }: Surface): Generator<Assumed> {
+/** What is taken of ground whose grass or subsoil nobody stated; its friction says what that is worth. */
+function unstatedGround({ kind, grass, firmness }: Surface): Assumed[] {
+  const assumed: Assumed[] = [];
   if (kind === 'grass' && grass === undefined && firmness !== 'soft') {
-    yield {
+    assumed.push({
       name: 'the length of the grass',
       assumption: {
         at: '/runway/surface/grass',
@@ -71,12 +73,13 @@ function* unstatedGrass({ kind, grass, firmness }: Surface): Generator<Assumed> 
         because: 'not stated; the longer takeoff',
         source: 'Judgement',
       },
-    };
+    });
   }
-  if (kind !== 'paved' && firmness === undefined) {
-    yield {
+  if (kind !== 'paved' && kind !== 'ice' && firmness === undefined) {
+    assumed.push({
       name: 'the subsoil',
       assumption: { at: '/runway/surface/firmness', value: 'firm', because: 'not stated', source: 'Judgement' },
-    };
+    });
   }
+  return assumed;
 }

@@ -29,10 +29,12 @@ export function raisedCautions<Context>(tests: readonly CautionTest<Context>[], 
     if (found === undefined) continue;
     raised.push({
       code,
-      severity,
-      ...(threshold === undefined ? {} : { threshold }),
-      ...(source === undefined ? {} : { source }),
-      ...found,
+      severity: found.severity ?? severity,
+      message: found.message,
+      at: found.at,
+      value: found.value,
+      threshold: found.threshold ?? threshold,
+      source: found.source ?? source,
     });
   }
   return raised;

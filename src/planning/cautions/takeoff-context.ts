@@ -8,7 +8,7 @@ import type { ThinBecause } from '../outcome.ts';
 import type { Question } from '../question.ts';
 import type { RuleSet } from '../rules/rule-set.ts';
 import { measureText } from '../sentences/measure-text.ts';
-import type { Reached } from '../takeoff-runs.ts';
+import type { Reached, TakeoffRuns } from '../takeoff-runs.ts';
 import type { WindAlong } from '../wind-along.ts';
 
 /** What the cautions of any answer may look at. */
@@ -24,6 +24,11 @@ export interface TakeoffContext extends ConditionsContext {
   readonly speeds: TakeoffAnswer['speeds'];
   readonly declared: DeclaredDistances;
   readonly outcome: Outcome;
+  readonly runs: TakeoffRuns;
+  /** the surface in words: 'short wet grass' */
+  readonly surface: string;
+  /** why the rule set does not speak of the aeroplane */
+  readonly doesNotApply: string | undefined;
   readonly checks: readonly Check[];
   readonly governing: Check | undefined;
   readonly thin: ThinBecause | undefined;

@@ -34,7 +34,13 @@ export function percentText(ratio: number, decimals = 1): string {
 
 /** A number with its thousands set apart by a space. */
 export function numberText(value: number): string {
-  const [whole = '', decimals] = String(value).split('.');
-  const grouped = whole.replace(/\B(?=(\d{3})+$)/g, ' ');
-  return decimals === undefined ? grouped : `${grouped}.${decimals}`;
+  const text = String(value);
+  if (value > -1000 && value < 1000) return text;
+  const point = text.indexOf('.');
+  const whole = point < 0 ? text : text.slice(0, point);
+  let grouped = point < 0 ? '' : text.slice(point);
+  const first = whole.startsWith('-') ? 1 : 0;
+  let end = whole.length;
+  for (; end - first > 3; end -= 3) grouped = ` ${whole.slice(end - 3, end)}${grouped}`;
+  return whole.slice(0, end) + grouped;
 }

@@ -1,54 +1,36 @@
-import type { UnitFamily } from '../../units/presentation.ts';
-import type { Check, Outcome } from '../answer.ts';
-import type { ThinBecause } from '../outcome.ts';
-import type { RuleSet } from '../rules/rule-set.ts';
-import type { Reached, TakeoffRuns } from '../takeoff-runs.ts';
+import type { Check } from '../answer.ts';
+import type { TakeoffContext } from '../cautions/takeoff-context.ts';
 import { measureText } from './measure-text.ts';
 import { notReachedSentence } from './not-reached-sentence.ts';
 import { thinSentence } from './thin-sentence.ts';
 
-/** What the sentence over a takeoff answer is made from. */
-export interface SentenceGround {
-  readonly outcome: Outcome;
-  readonly units: UnitFamily;
-  readonly ruleSet: RuleSet;
-  readonly runs: TakeoffRuns;
-  readonly stated: Reached | undefined;
-  readonly checks: readonly Check[];
-  readonly governing: Check | undefined;
-  readonly rollAvailable: number | undefined;
-  readonly doesNotApply: string | undefined;
-  /** the surface in words */
-  readonly surface: string;
-  readonly thin: ThinBecause | undefined;
-}
-
 /** The answer in one plain sentence or two, made from its numbers, in the asked units. */
-export function takeoffSentence(ground: SentenceGround): string {
-  const { outcome, units } = ground;
+export function takeoffSentence(context: TakeoffContext): string {
+  const { outcome } = context;
+  const { units } = context.question;
   const metres = (si: number, direction: 'up' | 'down') => measureText(units, 'distance', si, direction);
   switch (outcome) {
     case 'enough':
-      return `Enough: ${needs(ground)}.`;
+      return `Enough: ${needs(context)}.`;
     case 'enough-but-thin':
-      return `Enough but thin: ${needs(ground)}. ${thinSentence(ground)}`;
+      return `Enough but thin: ${needs(context)}. ${thinSentence(context)}`;
     case 'not-enough':
-      return `Not enough: ${needs(ground)}.`;
+      return `Not enough: ${needs(context)}.`;
     case 'nothing-to-compare':
-      return `Nothing to compare with in full: ${missing(ground)}. ${distance(ground)}${passing(ground)}`;
+      return `Nothing to compare with in full: ${missing(context)}. ${distance(context)}${passing(context)}`;
     case 'roll-longer-than-runway':
-      return `The ground roll alone is longer than the run: ${metres(ground.stated?.groundRoll ?? 0, 'up')} without factors, ${metres(ground.rollAvailable ?? 0, 'down')} of TORA available.`;
+      return `The ground roll alone is longer than the run: ${metres(context.stated?.groundRoll ?? 0, 'up')} without factors, ${metres(context.declared.credited.tora ?? 0, 'down')} of TORA available.`;
     case 'rule-set-does-not-apply':
-      return `The rules asked for do not apply (${ground.ruleSet.title}): ${ground.doesNotApply}. ${distance(ground)}`.trim();
+      return `The rules asked for do not apply (${context.ruleSet.title}): ${context.doesNotApply}. ${distance(context)}`.trim();
     case 'no-data-for-this-surface':
-      return `No data for this surface (${ground.surface}): neither a factor of the rules asked for nor physics speaks of it.`;
+      return `No data for this surface (${context.surface}): neither a factor of the rules asked for nor physics speaks of it.`;
     default:
-      return notReachedSentence(ground.runs, units);
+      return notReachedSentence(context.runs, units);
   }
 }
 
 /** 'needs 1 255 m of TORA under class B factors, 900 m available: short by 355 m' */
-function needs({ governing, units, ruleSet }: SentenceGround): string {
+function needs({ governing, question: { units }, ruleSet }: TakeoffContext): string {
   const { required = 0, available = 0, margin = 0 } = governing ?? {};
   const passes = governing?.result === 'passes';
   const spare = passes ? Math.max(0, margin) : margin;
@@ -68,12 +50,12 @@ function lengthName(check: Check | undefined): string {
   }
 }
 
-function missing({ checks }: SentenceGround): string {
+function missing({ checks }: TakeoffContext): string {
   const whys = checks.filter(({ result }) => result === 'not-assessed').map(({ why }) => why);
   return whys.length === 0 ? 'no length is declared' : whys.join(', ');
 }
 
-function passing({ checks, units }: SentenceGround): string {
+function passing({ checks, question: { units } }: TakeoffContext): string {
   const passed = checks.filter(({ result }) => result === 'passes');
   if (passed.length === 0) return '';
   const each = passed.map(
@@ -83,7 +65,7 @@ function passing({ checks, units }: SentenceGround): string {
   return ` ${each.join(', ')}.`;
 }
 
-function distance({ stated, units }: SentenceGround): string {
+function distance({ stated, question: { units } }: TakeoffContext): string {
   return stated === undefined
     ? ''
     : `The takeoff distance is ${measureText(units, 'distance', stated.takeoffDistance, 'up')} without factors.`;

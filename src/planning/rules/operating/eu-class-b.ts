@@ -61,25 +61,27 @@ function slopeFactor(slope: number): readonly Factor[] {
   ];
 }
 
+const shared = { of: 'takeoffDistance', source: 'EuAirOps305' } as const;
+const alone: readonly Requirement[] = [{ ...shared, code: 'takeoff-run', against: 'tora', factor: runAlone }];
+const withMore: readonly Requirement[] = [
+  {
+    ...shared,
+    code: 'takeoff-run',
+    against: 'tora',
+    factor: runWithMore,
+    alternative: { factor: runAlone, because: 'the reading without stopway and clearway, (b)(1)' },
+  },
+  { ...shared, code: 'takeoff-distance', against: 'toda', factor: distance },
+  { ...shared, code: 'accelerate-stop', against: 'asda', factor: stop },
+];
+
 /**
  * CAT.POL.A.305(b): 1.25 against TORA where nothing lies beyond the run; else 1.00, 1.15 and 1.30 against TORA, TODA and ASDA.
  * What is multiplied is the takeoff distance to the screen, also against TORA.
  */
 function requirements({ published: { tora, toda, asda } }: DeclaredDistances): readonly Requirement[] {
   const nothingBeyond = (toda === undefined && asda === undefined) || (toda === tora && asda === tora);
-  const shared = { of: 'takeoffDistance', source: 'EuAirOps305' } as const;
-  if (nothingBeyond) return [{ ...shared, code: 'takeoff-run', against: 'tora', factor: runAlone }];
-  return [
-    {
-      ...shared,
-      code: 'takeoff-run',
-      against: 'tora',
-      factor: runWithMore,
-      alternative: { factor: runAlone, because: 'the reading without stopway and clearway, (b)(1)' },
-    },
-    { ...shared, code: 'takeoff-distance', against: 'toda', factor: distance },
-    { ...shared, code: 'accelerate-stop', against: 'asda', factor: stop },
-  ];
+  return nothingBeyond ? alone : withMore;
 }
 
 function doesNotApply({ category, masses }: Aeroplane): string | undefined {

@@ -1,6 +1,11 @@
 import { clearwayShare } from '../clearway-share.ts';
-import type { RuleSet } from '../rule-set.ts';
+import type { Requirement, RuleSet } from '../rule-set.ts';
 import { thinMargin } from '../thin-margin.ts';
+
+const requirements: readonly Requirement[] = [
+  { code: 'takeoff-run', of: 'groundRoll', against: 'tora', source: 'Annex14' },
+  { code: 'takeoff-distance', of: 'takeoffDistance', against: 'toda', source: 'Annex14' },
+];
 
 /** No rule at all: the computed distances against the declared ones, wind as given. */
 export const unfactored: RuleSet = {
@@ -15,9 +20,6 @@ export const unfactored: RuleSet = {
     startsFrom: 'credited',
     clearwayShare,
     runwayFactors: () => undefined,
-    requirements: () => [
-      { code: 'takeoff-run', of: 'groundRoll', against: 'tora', source: 'Annex14' },
-      { code: 'takeoff-distance', of: 'takeoffDistance', against: 'toda', source: 'Annex14' },
-    ],
+    requirements: () => requirements,
   },
 };
