@@ -1,9 +1,15 @@
 import type { Check, Outcome } from './answer.ts';
 import { arithmeticSlack } from './arithmetic-slack.ts';
+import { governingCheck } from './margins.ts';
 import type { NotReached } from './takeoff-runs.ts';
 
-/** Why an answer that passes is thin. */
-export type ThinBecause = 'margin' | 'band';
+/** Why an answer that passes is thin, and which check shows it. */
+export interface ThinBecause {
+  readonly kind: 'margin' | 'band';
+  readonly check: Check;
+  /** what that check would require at the high end of the band, with the same factors [m] */
+  readonly requiredAtHigh: number;
+}
 
 /** What decides the outcome of a takeoff or landing. */
 export interface Deciding {
@@ -53,10 +59,19 @@ export function thinBecause(
   thinRatio: number,
   highOver: (of: string) => number,
 ): ThinBecause | undefined {
-  if (checks.some(({ marginRatio }) => marginRatio !== undefined && marginRatio < thinRatio - 1e-9)) return 'margin';
-  const beyond = checks.some(
-    ({ of, required, available }) =>
-      required !== undefined && available !== undefined && required * highOver(of) - available > arithmeticSlack,
-  );
-  return beyond ? 'band' : undefined;
+  const governing = governingCheck(checks);
+  if (governing?.marginRatio === undefined) return undefined;
+  const atHigh = (check: Check) => (check.required ?? 0) * highOver(check.of);
+  if (governing.marginRatio < thinRatio - 1e-9) {
+    return { kind: 'margin', check: governing, requiredAtHigh: atHigh(governing) };
+  }
+  let least = -arithmeticSlack;
+  let thin: ThinBecause | undefined;
+  for (const check of checks) {
+    const left = (check.available ?? 0) - atHigh(check);
+    if (left >= least) continue;
+    least = left;
+    thin = { kind: 'band', check, requiredAtHigh: atHigh(check) };
+  }
+  return thin;
 }

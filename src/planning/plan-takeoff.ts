@@ -68,7 +68,7 @@ export function planTakeoff(question: Question): TakeoffAnswer | Refused {
   const doesNotApply = ruleSet.doesNotApply(aeroplane);
   const rules = ruleSet.takeoff;
   const runs = takeoffRuns(run, {
-    creditedHeadwind,
+    creditedHeadwind: doesNotApply === undefined ? creditedHeadwind : wind.headwind,
     actualFriction: friction.actual,
     referenceFriction: friction.reference,
     needsReference:

@@ -10,23 +10,23 @@ export const marginThin: CautionTest<TakeoffContext> = {
     'Every check passes, but the least margin is under the figure of the rule set (10 % where it has none), or the high end of the 90 % band with the same factors would not pass.',
   source: 'Judgement',
   test: (context) => {
-    const { thin, governing, ruleSet, question, distances } = context;
-    if (thin === undefined || governing?.margin === undefined) return undefined;
-    const { margin, marginRatio = 0, available = 0, required = 0 } = governing;
-    const shared = { at: '/runway/declared', value: marginRatio } as const;
-    if (thin === 'margin') {
+    const { thin, ruleSet, question } = context;
+    if (thin === undefined) return undefined;
+    const { check, requiredAtHigh } = thin;
+    const { margin = 0, marginRatio = 0, available = 0, required = 0 } = check;
+    if (thin.kind === 'margin') {
       return {
-        ...shared,
-        message: `The check ${governing.code} passes with ${measureDown(context, Math.max(0, margin))} spare, ${percentText(Math.max(0, marginRatio))} of what is required; under ${percentText(ruleSet.thinMargin.ratio)} is thin on runway ${question.runway.designator}.`,
+        message: `The check ${check.code} passes with ${measureDown(context, Math.max(0, margin))} spare on runway ${question.runway.designator}, ${percentText(Math.max(0, marginRatio))} of what is required. Under ${percentText(ruleSet.thinMargin.ratio)} a small change uses it up.`,
+        at: '/runway/declared',
+        value: marginRatio,
         threshold: ruleSet.thinMargin.ratio,
       };
     }
-    const band = governing.of === 'groundRoll' ? distances?.groundRoll : distances?.takeoffDistance;
-    const high = band === undefined ? required : (required * band.high) / band.value;
     return {
-      ...shared,
-      message: `At the high end of the 90 % band, with the same factors, the check ${governing.code} would require ${textIn(context, 'distance', high)}; ${measureDown(context, available)} is available.`,
-      threshold: high / required - 1,
+      message: `At the high end of the 90 % band, with the same factors, the check ${check.code} would require ${textIn(context, 'distance', requiredAtHigh)}; ${measureDown(context, available)} is available.`,
+      at: '/runway/declared',
+      value: marginRatio,
+      threshold: requiredAtHigh / required - 1,
     };
   },
 };

@@ -7,6 +7,6 @@ export function thinSentence({
   governing,
   ruleSet,
 }: Pick<TakeoffContext, 'thin' | 'governing' | 'ruleSet'>): string {
-  if (thin === 'band') return 'The high end of the 90 % band would not pass.';
+  if (thin?.kind === 'band') return 'The high end of the 90 % band would not pass.';
   return `That is ${percentText(Math.max(0, governing?.marginRatio ?? 0))} of what is required, under ${percentText(ruleSet.thinMargin.ratio)}.`;
 }
