@@ -34,6 +34,8 @@ export function ruleSetFigures({ id, source, windCredit, thinMargin, takeoff }: 
           ) ?? 'none',
       ),
     ),
-    requirements: lengths.map((published) => takeoff.requirements({ published, credited: published })),
+    requirements: lengths.map((published) =>
+      takeoff.requirements({ published, credited: published, clearwayNotCredited: undefined }),
+    ),
   };
 }

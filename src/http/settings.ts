@@ -6,4 +6,4 @@ export interface Settings {
   readonly warmUpRounds: number;
 }
 
-export const defaultSettings: Settings = { bodyLimit: 64 * 1024, warmUpRounds: 40 };
+export const defaultSettings: Settings = { bodyLimit: 64 * 1024, warmUpRounds: 12 };

@@ -140,10 +140,8 @@ describe('while the service closes', () => {
     const [inHand, late, ...more] = answersIn(text);
     expect(more).toEqual([]);
     expect(inHand).toMatchObject({ statusCode: 200, body: 'done' });
-    {
-      expectProblem(late, 'busy');
-      expect(late.headers).toMatchObject({ connection: 'close', 'retry-after': '1' });
-    }
+    expectProblem(late as NonNullable<typeof late>, 'busy');
+    expect(late?.headers).toMatchObject({ connection: 'close', 'retry-after': '1' });
     await closed;
   });
 });

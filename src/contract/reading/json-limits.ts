@@ -21,6 +21,23 @@ export interface JsonCount {
 const quote = 0x22;
 const backslash = 0x5c;
 
+/** What a byte outside strings is: part of a scalar, or one of those that end one. */
+const scalar = 0;
+const blank = 1;
+const opening = 2;
+const closing = 3;
+const colon = 4;
+const string = 5;
+const kinds = new Uint8Array(256);
+kinds.fill(blank, 0, 0x21);
+kinds[0x2c] = blank;
+kinds[0x7b] = opening;
+kinds[0x5b] = opening;
+kinds[0x7d] = closing;
+kinds[0x5d] = closing;
+kinds[0x3a] = colon;
+kinds[quote] = string;
+
 /**
  * Counts levels, tokens and colons in one pass over the bytes, before anything is built from them.
  *
@@ -29,44 +46,36 @@ const backslash = 0x5c;
  *
  * @param bytes - UTF-8
  */
-export function countJson(bytes: Uint8Array, limits: JsonLimits): JsonCount {
+export function countJson(bytes: Uint8Array, { depth: mostDepth, tokens: mostTokens }: JsonLimits): JsonCount {
   let level = 0;
   let depth = 0;
   let tokens = 0;
   let colons = 0;
   let odd = false;
-  let inScalar = false;
   const end = bytes.length;
-  for (let i = 0; i < end; i++) {
-    const byte = bytes[i] as number;
-    if (byte === quote) {
+  let i = 0;
+  while (i < end && depth <= mostDepth && tokens <= mostTokens) {
+    const kind = kinds[bytes[i] as number];
+    i++;
+    if (kind === string) {
       tokens++;
-      inScalar = false;
-      for (i++; i < end; i++) {
-        const inside = bytes[i] as number;
-        if (inside === quote) break;
+      for (let inside = bytes[i]; i < end && inside !== quote; inside = bytes[i]) {
         if (inside === backslash) {
           odd = true;
           i++;
         } else if (inside === 0x7f || inside === 0xc2) odd = true;
+        i++;
       }
-    } else if (byte === 0x3a) {
-      colons++;
-      inScalar = false;
-    } else if (byte === 0x7b || byte === 0x5b) {
+      i++;
+    } else if (kind === scalar) {
       tokens++;
-      inScalar = false;
+      while (i < end && kinds[bytes[i] as number] === scalar) i++;
+    } else if (kind === colon) colons++;
+    else if (kind === opening) {
+      tokens++;
       level++;
       if (level > depth) depth = level;
-    } else if (byte === 0x7d || byte === 0x5d) {
-      level--;
-      inScalar = false;
-    } else if (byte === 0x2c || byte <= 0x20) inScalar = false;
-    else if (!inScalar) {
-      inScalar = true;
-      tokens++;
-    }
-    if (depth > limits.depth || tokens > limits.tokens) break;
+    } else if (kind === closing) level--;
   }
   return { depth, tokens, colons, odd };
 }

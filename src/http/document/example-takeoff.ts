@@ -6,7 +6,7 @@ export const exampleTakeoff: z.input<typeof takeoffRequest> = {
   reference: 'afternoon lesson',
   aeroplane: { id: 'pellibrin-trainer' },
   mass: { value: 720, unit: 'kg' },
-  configuration: 'takeoff-10',
+  configuration: 'takeoff-12',
   runway: {
     designator: '07',
     direction: { value: 68, unit: 'deg' },

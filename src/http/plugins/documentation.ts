@@ -45,7 +45,11 @@ export async function documentPages(app: FastifyInstance): Promise<void> {
     return reply.type('application/json; charset=utf-8').header('x-content-type-options', 'nosniff').send(text);
   });
   await app.register(async (pages) => {
-    await pages.register(helmet);
+    // served over plain HTTP inside a hangar as well: asking browsers for HTTPS would leave the page empty there
+    await pages.register(helmet, {
+      contentSecurityPolicy: { directives: { upgradeInsecureRequests: null } },
+      strictTransportSecurity: false,
+    });
     await pages.register(swaggerUi, { routePrefix: '/docs' });
   });
 }

@@ -10,7 +10,7 @@ import { takeoffStates } from '../takeoff-states.ts';
 const example = {
   aeroplane: { id: 'pellibrin-trainer' },
   mass: { value: 720, unit: 'kg' },
-  configuration: 'takeoff-10',
+  configuration: 'takeoff-12',
   weather: {
     temperature: { value: 24, unit: 'degC' },
     dewPoint: { value: 13, unit: 'degC' },
