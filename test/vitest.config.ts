@@ -6,6 +6,8 @@ export default defineConfig({
     include: ['test/**/*.test.ts'],
     exclude: ['test/long/**'],
     pool: 'threads',
+    isolate: false,
+    setupFiles: ['test/support/setup.ts'],
     maxWorkers: 2,
     testTimeout: 20_000,
   },
