@@ -1,0 +1,34 @@
+import { describe, expect, it } from 'vitest';
+import { answerTakeoff } from '../../src/contract/answer-takeoff.ts';
+import { takeoffResponse } from '../../src/contract/takeoff-response.ts';
+import { isRefused } from '../../src/planning/fault.ts';
+import { unitFamilies } from '../../src/units/presentation.ts';
+import { inOtherUnits, numbersIn } from '../support/in-other-units.ts';
+import { named, sampleDefinition, sampleLookup, sampleTakeoff, withMember } from '../support/sample-questions.ts';
+
+const stamp = { modelVersion: '1', rulesDigest: 'r' };
+const lookup = sampleLookup(sampleDefinition());
+
+describe('a takeoff from gate to gate', () => {
+  it.each(unitFamilies)('is in its own form in %s', (units) => {
+    const answer = answerTakeoff({ ...sampleTakeoff(), units }, lookup, stamp);
+    expect(takeoffResponse.safeParse(answer).error).toBeUndefined();
+  });
+
+  it('is refused by the gate before anything is planned', () => {
+    const answer = answerTakeoff(withMember(sampleTakeoff(), '/ruleSet', 'nobodys'), lookup, stamp);
+    expect(isRefused(answer) && named(answer.refused)).toEqual(['unknown-id /ruleSet']);
+  });
+
+  it('is the same takeoff in other units before rounding, to 1e-12', () => {
+    const request = { ...sampleTakeoff(), rounding: 'none', units: 'si' } as const;
+    const ours = answerTakeoff(request, lookup, stamp);
+    const theirs = answerTakeoff(inOtherUnits(request), lookup, stamp);
+    if (isRefused(ours) || isRefused(theirs)) throw new Error('refused');
+    const others = numbersIn(theirs.distances);
+    expect(others.length).toBeGreaterThan(8);
+    numbersIn(ours.distances).forEach(([path, value], i) => {
+      expect(Math.abs((others[i]?.[1] as number) / value - 1), path).toBeLessThanOrEqual(1e-12);
+    });
+  });
+});
