@@ -1,4 +1,7 @@
-import type { Aeroplane } from '../../src/performance/aeroplane.ts';
+import type { Aeroplane, Configuration } from '../../src/performance/aeroplane.ts';
+import type { TakeoffAnswer } from '../../src/planning/answer.ts';
+import { isRefused } from '../../src/planning/fault.ts';
+import { planTakeoff } from '../../src/planning/plan-takeoff.ts';
 import type { Question } from '../../src/planning/question.ts';
 
 const ft = 0.3048;
@@ -102,4 +105,37 @@ export function fourReadings(tora: number): Question {
     },
     ruleSet: 'eu-class-b',
   };
+}
+
+/** What a question may be changed in; a member given replaces the whole of it. */
+export interface Changes {
+  readonly aeroplane?: Partial<Aeroplane>;
+  readonly configuration?: Partial<Configuration>;
+  readonly runway?: Partial<Question['runway']>;
+  readonly weather?: Partial<Question['weather']>;
+  readonly question?: Partial<Question>;
+}
+
+/** A question with some of it changed. */
+export function changed(base: Question, { aeroplane, configuration, runway, weather, question }: Changes): Question {
+  const takeoff = { ...(base.aeroplane.configurations['takeoff'] as Configuration), ...configuration };
+  return {
+    ...base,
+    aeroplane: {
+      ...base.aeroplane,
+      configurations: { ...base.aeroplane.configurations, takeoff },
+      ...aeroplane,
+    },
+    runway: { ...base.runway, ...runway },
+    weather: { ...base.weather, ...weather },
+    ...question,
+  };
+}
+
+/** The answer, where the question must have one. */
+export function answered(question: Question): TakeoffAnswer {
+  const answer = planTakeoff(question);
+  if (isRefused(answer))
+    throw new Error(answer.refused.map(({ pointer, message }) => `${pointer}: ${message}`).join('; '));
+  return answer;
 }
