@@ -205,14 +205,7 @@ describe('the gate out', () => {
 
   it('lists every source that it names, once', () => {
     const keys = shownAs({ units: 'si' }).basis.sources.map(({ key }) => key);
-    expect(keys).toEqual([
-      'Iso2533',
-      'EuAirOps305',
-      'EuAirOps305Amc2',
-      'EuAirOps305Amc1',
-      'Judgement',
-      'Raymer',
-    ]);
+    expect(keys).toEqual(['Iso2533', 'EuAirOps305', 'EuAirOps305Amc2', 'EuAirOps305Amc1', 'Judgement', 'Raymer']);
   });
 
   it('echoes a question that can be sent again and means the same', () => {
