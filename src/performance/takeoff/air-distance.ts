@@ -1,4 +1,5 @@
 import { splitPoints } from '../../numerics/split-points.ts';
+import { heightRatioWithoutEffect } from '../../physics/ground-effect.ts';
 import { addSettled, newPathIntegral, type PathIntegral } from '../path-integral.ts';
 import { type ClimbForces, climbForces, climbGradient } from './climb-forces.ts';
 import { addClimbPiece, climbJumps } from './climb-piece.ts';
@@ -47,7 +48,7 @@ export function airDistance(run: TakeoffRun, needed = neededWithAllEngines): Air
   const forces = climbForces(run);
   const atLiftOff = climbGradient(forces, 0);
   const atScreen = climbGradient(forces, screenHeight);
-  const lesser = leastAtKinks(forces, Math.min(atLiftOff, atScreen), screenHeight);
+  const lesser = leastAtJumps(forces, Math.min(atLiftOff, atScreen), screenHeight);
   if (!(lesser > needed)) return neverReaches(lesser, needed);
 
   const radius = pullUpRadius(run.liftOffSpeed, run.pullUpLoadFactor);
@@ -78,10 +79,11 @@ export function airDistance(run: TakeoffRun, needed = neededWithAllEngines): Air
   };
 }
 
-/** The least of a gradient already found and those at the thrust's kinks on the path. */
-function leastAtKinks(forces: ClimbForces, found: number, screenHeight: number): number {
-  const { square, growth, thrust } = forces;
-  let least = found;
+/** The least of a gradient already found and those where its slope jumps on the path. */
+function leastAtJumps(forces: ClimbForces, found: number, screenHeight: number): number {
+  const { square, growth, thrust, perSpan, wingHeight } = forces;
+  const effectEnd = heightRatioWithoutEffect / perSpan - wingHeight;
+  let least = effectEnd > 0 && effectEnd < screenHeight ? Math.min(found, climbGradient(forces, effectEnd)) : found;
   for (let i = 0; i < thrust.kinks.length; i++) {
     const kink = thrust.kinks[i] as number;
     const rise = kink * kink - square;
