@@ -55,6 +55,6 @@ export function unknownMember(pointer: string, name: string, known: readonly str
     code: 'unknown-member',
     message: `There is no member ${shortened(name)} here.`,
     allowed: list(known, 'and'),
-    ...(meant === undefined ? {} : { hint: `did you mean ${meant}?` }),
+    ...(meant === undefined ? {} : { hint: `Perhaps ${meant}.` }),
   };
 }

@@ -13,7 +13,7 @@ import { unitMeant } from './unit-meant.ts';
 export function quantityFaults(form: UnionForm, value: unknown, pointer: string, collection: Collection): void {
   const { faults } = collection;
   if (!isPlainObject(value)) {
-    const hint = typeof value === 'number' ? 'a number travels with its unit' : undefined;
+    const hint = typeof value === 'number' ? 'A number travels with its unit.' : undefined;
     faults.push(wrongType(pointer, value, allowedBy(form), hint));
     return;
   }
@@ -44,7 +44,7 @@ function unknownUnit(fault: Fault, units: readonly string[]): Fault {
     ...rest,
     code: 'unknown-unit',
     message: `${JSON.stringify(received)} is not a unit of this quantity.`,
-    ...(meant === undefined ? {} : { hint: `did you mean "${meant}"?` }),
+    ...(meant === undefined ? {} : { hint: `Perhaps "${meant}".` }),
   };
 }
 
@@ -59,6 +59,6 @@ function outOfRange(fault: Fault, unit: string, branches: readonly ObjectForm[],
     ...fault,
     message: `${number} ${unit} is outside the range.`,
     allowed: `${fault.allowed}, in ${unit}`,
-    ...(fitting.length === 0 ? {} : { hint: `${number} would fit in ${fitting.join(' or ')}` }),
+    ...(fitting.length === 0 ? {} : { hint: `${number} would fit in ${fitting.join(' or ')}.` }),
   };
 }

@@ -41,7 +41,7 @@ export function numberFault(form: Form, value: unknown, pointer: string): Fault[
   const allowed = allowedBy(form);
   if (typeof value !== 'number') {
     const numeric = typeof value === 'string' && value.trim() !== '' && Number.isFinite(Number(value));
-    return [wrongType(pointer, value, allowed, numeric ? 'write the number without quotation marks' : undefined)];
+    return [wrongType(pointer, value, allowed, numeric ? 'Write the number without quotation marks.' : undefined)];
   }
   if (!Number.isFinite(value)) {
     return [{ pointer, code: 'not-finite', message: 'The number is too large to be held.', allowed }];
@@ -92,6 +92,6 @@ export function unknownWord(pointer: string, value: unknown, words: readonly unk
     message: `${quoted(typeof value === 'string' ? shortened(value) : value)} is not in the closed list.`,
     ...receivedOf(value),
     allowed,
-    ...(near.length === 0 ? {} : { hint: `did you mean ${near.map(quoted).join(' or ')}?` }),
+    ...(near.length === 0 ? {} : { hint: `Perhaps ${near.map(quoted).join(' or ')}.` }),
   };
 }

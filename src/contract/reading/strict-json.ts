@@ -24,7 +24,7 @@ const utf8 = new TextDecoder('utf-8', { fatal: true, ignoreBOM: true });
 export function readStrictJson(bytes: Uint8Array, limits: JsonLimits = questionLimits): StrictJson | Refused {
   if (bytes.length === 0) return unreadable('The body is empty.');
   if (bytes[0] === 0xef && bytes[1] === 0xbb && bytes[2] === 0xbf) {
-    return unreadable('The body begins with a byte order mark.', 'send UTF-8 without a byte order mark');
+    return unreadable('The body begins with a byte order mark.', 'Send UTF-8 without a byte order mark.');
   }
   const text = decoded(bytes);
   if (text === undefined) return unreadable('The body is not UTF-8.');
@@ -70,7 +70,7 @@ function placed(text: string): Refused {
   if (slip?.kind === 'duplicate') {
     return refusal('duplicate-member', `The member ${slip.pointer} appears twice in one object.`, {
       pointer: slip.pointer,
-      hint: `the second one begins at character ${slip.position}`,
+      hint: `The second one begins at character ${slip.position}.`,
     });
   }
   return refusal(

@@ -40,10 +40,10 @@ describe('reader', () => {
 
   const slips: [string, string, unknown, Partial<Fault>][] = [
     ['a number beyond its bounds', '/mass/value', 900_000, { code: 'out-of-range', pointer: '/mass/value' }],
-    ['a wrong unit', '/mass/unit', 'lbs', { code: 'unknown-unit', pointer: '/mass/unit', hint: 'did you mean "lb"?' }],
+    ['a wrong unit', '/mass/unit', 'lbs', { code: 'unknown-unit', pointer: '/mass/unit', hint: 'Perhaps "lb".' }],
     ['a unit of another quantity', '/mass/unit', 'ft', { code: 'unknown-unit', pointer: '/mass/unit', received: 'ft' }],
     ['a missing unit', '/mass/unit', undefined, { code: 'missing', pointer: '/mass/unit' }],
-    ['a bare number', '/mass', 1010, { code: 'wrong-type', pointer: '/mass', hint: 'a number travels with its unit' }],
+    ['a bare number', '/mass', 1010, { code: 'wrong-type', pointer: '/mass', hint: 'A number travels with its unit.' }],
     [
       'digits in quotation marks',
       '/mass/value',
@@ -59,9 +59,9 @@ describe('reader', () => {
     ['two forms at once', '/weather/pressure/pressureAltitude', { value: 0, unit: 'ft' }, { code: 'exactly-one-of' }],
     ['none of the forms', '/weather/pressure', {}, { code: 'exactly-one-of', pointer: '/weather/pressure' }],
     ['two winds at once', '/weather/wind/headwind', { value: 1, unit: 'kt' }, { code: 'exactly-one-of' }],
-    ['a misspelt word for the wind', '/weather/wind', 'clam', { code: 'unknown-id', hint: 'did you mean "calm"?' }],
-    ['a word not in the list', '/runway/surface/kind', 'gras', { code: 'unknown-id', hint: 'did you mean "grass"?' }],
-    ['a slip inside a form', '/weather/wind/speed/unit', 'knots', { code: 'unknown-unit', hint: 'did you mean "kt"?' }],
+    ['a misspelt word for the wind', '/weather/wind', 'clam', { code: 'unknown-id', hint: 'Perhaps "calm".' }],
+    ['a word not in the list', '/runway/surface/kind', 'gras', { code: 'unknown-id', hint: 'Perhaps "grass".' }],
+    ['a slip inside a form', '/weather/wind/speed/unit', 'knots', { code: 'unknown-unit', hint: 'Perhaps "kt".' }],
     [
       'a missing member of a form',
       '/weather/wind/fromReference',
@@ -83,7 +83,7 @@ describe('reader', () => {
   it('tells a misspelt member once and reads its value as if rightly spelt', () => {
     const wind = { from: { value: 70, unit: 'deg' }, fromReference: 'true', sped: { value: 8, unit: 'kt' } };
     expect(faultsOf(changed('/weather/wind', wind))).toMatchObject([
-      { code: 'unknown-member', pointer: '/weather/wind/sped', hint: 'did you mean speed?' },
+      { code: 'unknown-member', pointer: '/weather/wind/sped', hint: 'Perhaps speed.' },
     ]);
     const wrong = { ...wind, sped: { value: 8, unit: 'kg' } };
     expect(faultsOf(changed('/weather/wind', wrong)).map(({ code }) => code)).toEqual([
@@ -91,13 +91,28 @@ describe('reader', () => {
       'unknown-unit',
     ]);
     expect(faultsOf(changed('/weather/wind', { headwnd: { value: 8, unit: 'kt' } }))).toMatchObject([
-      { code: 'unknown-member', pointer: '/weather/wind/headwnd', hint: 'did you mean headwind?' },
+      { code: 'unknown-member', pointer: '/weather/wind/headwnd', hint: 'Perhaps headwind.' },
     ]);
+  });
+
+  it('tells a list that is too short or too long, and faults of its items where its length is right', () => {
+    const definition = (configuration: Json) => {
+      const [, question] = sampleQuestions() as [Json, Json];
+      const inline = (question['aeroplane'] as Json)['definition'] as Json;
+      Object.assign((inline['configurations'] as Json)['clean'] as Json, configuration);
+      return question;
+    };
+    const pointer = '/aeroplane/definition/configurations/clean/for';
+    expect(faultsOf(definition({ for: [] }))).toMatchObject([{ code: 'out-of-range', pointer }]);
+    const thrice = ['takeoff', 'takeoff', 'takeoff'];
+    expect(faultsOf(definition({ for: thrice }))).toMatchObject([{ code: 'out-of-range', pointer }]);
+    expect(faultsOf(definition({ for: ['takeof'] }))).toMatchObject([{ code: 'unknown-id', pointer: `${pointer}/0` }]);
+    expect(faultsOf(definition({ for: 'takeoff' }))).toMatchObject([{ code: 'wrong-type', pointer }]);
   });
 
   it('tells in which units a number out of range would fit', () => {
     expect(faultsOf(changed('/weather/pressure/qnh', { value: 1009, unit: 'inHg' }))).toMatchObject([
-      { code: 'out-of-range', pointer: '/weather/pressure/qnh/value', received: 1009, hint: '1009 would fit in hPa' },
+      { code: 'out-of-range', pointer: '/weather/pressure/qnh/value', received: 1009, hint: '1009 would fit in hPa.' },
     ]);
   });
 
