@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import type * as z from 'zod';
 
 /** A schema as its definition shows it, told apart by `_zod.def.type`. */
 export type Form = z.core.$ZodTypes;
@@ -54,8 +54,4 @@ export function membersOf(form: Form): string[] {
   if (isObject(form)) return Object.keys(form._zod.def.shape);
   if (form._zod.def.type !== 'union') return [];
   return [...new Set(branchesOf(form as UnionForm).flatMap(membersOf))];
-}
-
-export function describedAs(schema: Schema): string | undefined {
-  return z.globalRegistry.get(schema)?.description;
 }
