@@ -16,7 +16,7 @@ export const marginThin: CautionTest<TakeoffContext> = {
     const { margin = 0, marginRatio = 0, available = 0, required = 0 } = check;
     if (thin.kind === 'margin') {
       return {
-        message: `The check ${check.code} passes with ${measureDown(context, Math.max(0, margin))} spare on runway ${question.runway.designator}, ${percentText(Math.max(0, marginRatio))} of what is required. Under ${percentText(ruleSet.thinMargin.ratio)} a small change uses it up.`,
+        message: `The check ${check.code} passes with ${measureDown(context, Math.max(0, margin))} spare on runway ${question.runway.designator}, ${percentText(Math.max(0, marginRatio), 1, 'down')} of what is required. Under ${percentText(ruleSet.thinMargin.ratio)} a small change uses it up.`,
         at: '/runway/declared',
         value: marginRatio,
         threshold: ruleSet.thinMargin.ratio,

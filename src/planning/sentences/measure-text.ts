@@ -1,4 +1,4 @@
-import { type Direction, type Kind, shown, type UnitFamily, unitFor } from '../../units/presentation.ts';
+import { type Direction, type Kind, roundTo, shown, type UnitFamily, unitFor } from '../../units/presentation.ts';
 
 const symbols: Readonly<Record<string, string>> = {
   degC: '°C',
@@ -26,10 +26,9 @@ export function measureText(family: UnitFamily, kind: Kind, si: number, directio
   return `${numberText(shown(family, kind, si, direction))} ${symbols[unit] ?? unit}`;
 }
 
-/** Per cent of a ratio with so many decimals at most, such as '8.1 %'. */
-export function percentText(ratio: number, decimals = 1): string {
-  const scale = 10 ** decimals;
-  return `${numberText(Math.round(ratio * 100 * scale) / scale + 0)} %`;
+/** Per cent of a ratio with so many decimals at most, such as '8.1 %'; a margin goes down. */
+export function percentText(ratio: number, decimals = 1, direction: Direction = 'nearest'): string {
+  return `${numberText(roundTo(ratio * 100, 10 ** -decimals, direction))} %`;
 }
 
 /** A number with its thousands set apart by a space. */

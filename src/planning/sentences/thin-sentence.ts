@@ -8,5 +8,5 @@ export function thinSentence({
   ruleSet,
 }: Pick<TakeoffContext, 'thin' | 'governing' | 'ruleSet'>): string {
   if (thin?.kind === 'band') return 'The high end of the 90 % band would not pass.';
-  return `That is ${percentText(Math.max(0, governing?.marginRatio ?? 0))} of what is required, under ${percentText(ruleSet.thinMargin.ratio)}.`;
+  return `That is ${percentText(Math.max(0, governing?.marginRatio ?? 0), 1, 'down')} of what is required, under ${percentText(ruleSet.thinMargin.ratio)}.`;
 }

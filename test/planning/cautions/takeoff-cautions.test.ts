@@ -1,0 +1,338 @@
+import { describe, expect, it } from 'vitest';
+import { takeoffCautions } from '../../../src/planning/cautions/takeoff-cautions.ts';
+import { references } from '../../../src/references.ts';
+import { answered, type Changes, changed, plainQuestion } from '../../support/takeoff-question.ts';
+
+const kt = 1852 / 3600;
+const ft = 0.3048;
+const along = (knots: number): Changes => ({ weather: { wind: { kind: 'components', headwind: knots * kt } } });
+const across = (knots: number): Changes => ({
+  weather: { wind: { kind: 'components', headwind: 0, crosswind: knots * kt } },
+});
+const limit = (limitations: object): Changes => ({ aeroplane: { limitations } });
+const both = (one: Changes, other: Changes): Changes => ({
+  aeroplane: { ...one.aeroplane, ...other.aeroplane },
+  configuration: { ...one.configuration, ...other.configuration },
+  runway: { ...one.runway, ...other.runway },
+  weather: { ...one.weather, ...other.weather },
+  question: { ...one.question, ...other.question },
+});
+const declared = (tora: number, toda = tora): Changes => ({ runway: { declared: { tora, toda, asda: tora } } });
+const from = (degrees: number, speed: number, more: object = {}): Changes => ({
+  weather: {
+    wind: { kind: 'from', from: (degrees * Math.PI) / 180, fromReference: 'true', speed: speed * kt, ...more },
+  },
+});
+const dragging = (rollingFrictionCoefficient: number): Changes => ({
+  runway: {
+    surface: { kind: 'grass', state: 'wet', firmness: 'soft', rollingFrictionCoefficient },
+    declared: { tora: 9000, toda: 9000 },
+  },
+});
+const steep = both({ question: { mass: 1250 } }, declared(9000));
+const hot = (altitude: number, temperature: number): Changes => ({
+  runway: { elevation: altitude * ft },
+  weather: { temperature, dewPoint: 250, pressure: { kind: 'pressureAltitude', value: altitude * ft } },
+});
+const screenAt = (ratio: number): Changes => ({
+  configuration: {
+    speeds: {
+      rotation: { kind: 'stall-ratio', ratio: 1.15 },
+      liftOff: { kind: 'stall-ratio', ratio: 1.15 },
+      screen: { kind: 'stall-ratio', ratio },
+    },
+  },
+});
+
+interface Pair {
+  readonly code: string;
+  readonly severity: string;
+  /** differs from the other in one figure only, on the other side of what decides */
+  readonly raised: Changes;
+  readonly silent: Changes;
+  readonly says: RegExp;
+}
+
+const pairs: readonly Pair[] = [
+  {
+    code: 'margin-negative',
+    severity: 'caution',
+    raised: declared(420),
+    silent: declared(421),
+    says: /^The check takeoff-distance is short by 1 m: 421 m required, 420 m available\.$/,
+  },
+  {
+    code: 'margin-negative',
+    severity: 'caution',
+    raised: declared(200),
+    silent: declared(421),
+    says: /2 checks fail\.$/,
+  },
+  {
+    code: 'margin-thin',
+    severity: 'caution',
+    raised: declared(462),
+    silent: declared(596),
+    says: /^The check takeoff-distance passes with 41 m spare on runway 07, 9\.9 % of what is required/,
+  },
+  {
+    code: 'margin-thin',
+    severity: 'caution',
+    raised: declared(594),
+    silent: declared(596),
+    says: /^At the high end of the 90 % band, with the same factors, the check takeoff-distance would require 595 m; 594 m is available\.$/,
+  },
+  {
+    code: 'mass-above-maximum',
+    severity: 'strong',
+    raised: { question: { mass: 1051 } },
+    silent: { question: { mass: 1050 } },
+    says: /^Mass 1 051 kg is 1 kg above the maximum takeoff mass of 1 050 kg\./,
+  },
+  {
+    code: 'temperature-above-limit',
+    severity: 'strong',
+    raised: { weather: { temperature: 313.25 } },
+    silent: { weather: { temperature: 313.15 } },
+    says: /^Temperature 40\.1 °C is 0\.1 °C above the aeroplane's maximum of 40 °C\./,
+  },
+  {
+    code: 'temperature-above-limit',
+    severity: 'strong',
+    raised: both({ weather: { temperature: 303.15 } }, limit({ maximumTemperature: 300 })),
+    silent: both({ weather: { temperature: 303.15 } }, limit({})),
+    says: /^Temperature 30 °C/,
+  },
+  {
+    code: 'pressure-altitude-above-limit',
+    severity: 'strong',
+    raised: hot(10_001, 268),
+    silent: hot(10_000, 268),
+    says: /^Pressure altitude 10 001 ft is 1 ft above the aeroplane's maximum of 10 000 ft\./,
+  },
+  {
+    code: 'pressure-altitude-above-limit',
+    severity: 'strong',
+    raised: both(hot(5000, 268), limit({ maximumPressureAltitude: 1000 })),
+    silent: both(hot(5000, 268), limit({})),
+    says: /above the aeroplane's maximum of 3 281 ft/,
+  },
+  {
+    code: 'tailwind-beyond-limit',
+    severity: 'strong',
+    raised: along(-10.1),
+    silent: along(-10),
+    says: /^Tailwind 10\.1 kt is 0\.1 kt beyond 10 kt, where data of aeroplanes usually end\.$/,
+  },
+  {
+    code: 'tailwind-beyond-limit',
+    severity: 'strong',
+    raised: both(along(-5.1), limit({ tailwind: 5 * kt })),
+    silent: both(along(-5), limit({ tailwind: 5 * kt })),
+    says: /^Tailwind 5\.1 kt is 0\.1 kt beyond the aeroplane's limitation of 5 kt\.$/,
+  },
+  {
+    code: 'tailwind',
+    severity: 'caution',
+    raised: along(-0.06),
+    silent: along(-0.04),
+    says: /^Tailwind 0\.1 kt on runway 07\. It lengthens the ground roll from 215 m to 215 m\.$/,
+  },
+  {
+    code: 'tailwind',
+    severity: 'caution',
+    raised: both(along(-6), { runway: { surface: { kind: 'snow', state: 'dry' } } }),
+    silent: both(along(6), { runway: { surface: { kind: 'snow', state: 'dry' } } }),
+    says: /^Tailwind 6 kt on runway 07\. It raises the speed over the ground at lift-off by as much\.$/,
+  },
+  {
+    code: 'crosswind-beyond-demonstrated',
+    severity: 'caution',
+    raised: across(15.1),
+    silent: across(15),
+    says: /^Crosswind 15\.1 kt on runway 07 is 0\.1 kt beyond the demonstrated 15 kt\.$/,
+  },
+  {
+    code: 'crosswind-beyond-demonstrated',
+    severity: 'caution',
+    raised: from(160, 12, { gust: 16 * kt }),
+    silent: from(160, 12),
+    says: /^Crosswind 16 kt in gusts on runway 07 is 1 kt beyond the demonstrated 15 kt\.$/,
+  },
+  {
+    code: 'crosswind-beyond-demonstrated',
+    severity: 'strong',
+    raised: both(across(21), limit({ crosswind: 20 * kt, demonstratedCrosswind: 15 * kt })),
+    silent: both(across(20), limit({ crosswind: 20 * kt, demonstratedCrosswind: 15 * kt })),
+    says: /beyond the limitation 20 kt\.$/,
+  },
+  {
+    code: 'crosswind-beyond-demonstrated',
+    severity: 'caution',
+    raised: across(30),
+    silent: both(across(30), limit({})),
+    says: /^Crosswind 30 kt/,
+  },
+  {
+    code: 'wind-variable',
+    severity: 'note',
+    raised: from(70, 10, { variable: { from: (40 * Math.PI) / 180, to: (130 * Math.PI) / 180 } }),
+    silent: from(70, 10),
+    says: /The least favourable of the sector is taken: headwind 5 kt\.$/,
+  },
+  {
+    code: 'gust-not-credited',
+    severity: 'note',
+    raised: from(70, 10, { gust: 20 * kt }),
+    silent: from(70, 10, { gust: 10 * kt }),
+    says: /^Gusts of 20 kt, 10 kt over the mean wind\. Distances count the mean of 10 kt only\.$/,
+  },
+  {
+    code: 'gust-not-credited',
+    severity: 'note',
+    raised: from(250, 5, { gust: 9 * kt }),
+    silent: from(250, 5),
+    says: /in a gust the tailwind is 9 kt, the mean is 5 kt\.$/,
+  },
+  {
+    code: 'acceleration-marginal',
+    severity: 'strong',
+    raised: dragging(0.22),
+    silent: dragging(0.21),
+    says: /^The least acceleration of the ground roll is [01]\.\d+ % of that of gravity\./,
+  },
+  {
+    code: 'climb-gradient-marginal',
+    severity: 'caution',
+    raised: both(steep, hot(6200, 300)),
+    silent: both(steep, hot(1000, 288)),
+    says: /^The least climb gradient on the way to the screen is [12]\.\d+ %\./,
+  },
+  {
+    code: 'density-altitude-high',
+    severity: 'caution',
+    raised: hot(4950, 280),
+    silent: hot(4500, 280),
+    says: /^Density altitude 5 \d+ ft, \d+ ft above the elevation of runway 07\. The lift-off speed of 53\.4 kt calibrated is \d+\.?\d* kt true\.$/,
+  },
+  {
+    code: 'density-altitude-high',
+    severity: 'note',
+    raised: hot(1000, 304.5),
+    silent: hot(1000, 301),
+    says: /^Density altitude 3 \d+ ft, 2 \d+ ft above/,
+  },
+  {
+    code: 'temperature-far-from-standard',
+    severity: 'caution',
+    raised: both(hot(0, 318.2), limit({})),
+    silent: both(hot(0, 318.1), limit({})),
+    says: /^Temperature 45\.1 °C is 30\.1 °C above standard\. The air is 9\.4 % thinner than on a standard day\.$/,
+  },
+  {
+    code: 'temperature-far-from-standard',
+    severity: 'caution',
+    raised: hot(0, 258.05),
+    silent: hot(0, 258.2),
+    says: /30\.1 °C below standard/,
+  },
+  {
+    code: 'pressure-extreme',
+    severity: 'caution',
+    raised: { weather: { pressure: { kind: 'qnh', value: 94_990 } } },
+    silent: { weather: { pressure: { kind: 'qnh', value: 95_000 } } },
+    says: /^QNH 949\.9 hPa is below 950 hPa\. It puts the pressure altitude 1 77\d ft above the elevation\.$/,
+  },
+  {
+    code: 'pressure-extreme',
+    severity: 'caution',
+    raised: { weather: { pressure: { kind: 'qnh', value: 105_010 } } },
+    silent: { weather: { pressure: { kind: 'qnh', value: 105_000 } } },
+    says: /^QNH 1 050\.1 hPa is above 1 050 hPa\. It puts the pressure altitude 99\d ft below the elevation\.$/,
+  },
+  {
+    code: 'pressure-extreme',
+    severity: 'caution',
+    raised: { weather: { pressure: { kind: 'qnh', value: 94_000 } } },
+    silent: { weather: { pressure: { kind: 'stationPressure', value: 94_000 } } },
+    says: /^QNH 940 hPa/,
+  },
+  {
+    code: 'slope-steep',
+    severity: 'caution',
+    raised: { runway: { slope: 0.0201 } },
+    silent: { runway: { slope: 0.02 } },
+    says: /^Runway 07 slopes 2\.01 % uphill/,
+  },
+  {
+    code: 'slope-steep',
+    severity: 'caution',
+    raised: { runway: { slope: -0.0201 } },
+    silent: { runway: { slope: -0.02 } },
+    says: /^Runway 07 slopes 2\.01 % downhill/,
+  },
+  {
+    code: 'clearway-capped',
+    severity: 'caution',
+    raised: declared(1000, 1510),
+    silent: declared(1000, 1500),
+    says: /10 m of the declared TODA is not counted: 1 500 m is available\.$/,
+  },
+  {
+    code: 'screen-speed-below-lift-off',
+    severity: 'caution',
+    raised: screenAt(1.14),
+    silent: screenAt(1.15),
+    says: /^The speed at the screen, 52\.9 kt calibrated, is below the lift-off speed of 53\.4 kt\./,
+  },
+  {
+    code: 'assumption-matters',
+    severity: 'caution',
+    raised: { runway: { surface: { kind: 'paved', state: 'dry' } } },
+    silent: { runway: { surface: { kind: 'paved', state: 'dry', rollingFrictionCoefficient: 0.03 } } },
+    says: /^One assumed value moves the takeoff distance by more than 1 %: rolling friction, taken as 0\.03\. At 0\.04 the distance is [\d.]+ % longer\.$/,
+  },
+  {
+    code: 'method-is-estimate',
+    severity: 'caution',
+    raised: {},
+    silent: { runway: { surface: { kind: 'snow', state: 'dry' } } },
+    says: /The takeoff distance of 421 m has a 90 % band from 29\d m to 59\d m\.$/,
+  },
+];
+
+describe('the cautions of a takeoff', () => {
+  it.each(pairs)('$code ($severity): raised on one side and silent on the other: $says', (pair) => {
+    const { code, severity, raised, silent, says } = pair;
+    const found = answered(changed(plainQuestion, raised)).cautions.find((one) => one.code === code);
+    expect(found?.message).toMatch(says);
+    expect(found?.severity).toBe(severity);
+    expect(found?.at).toMatch(/^\//);
+    expect(answered(changed(plainQuestion, silent)).cautions.map((one) => one.code)).not.toContain(code);
+  });
+
+  it('has a pair for every caution there is', () => {
+    expect([...new Set(pairs.map(({ code }) => code))].sort()).toEqual(takeoffCautions.map(({ code }) => code).sort());
+  });
+  it('is quiet about a plain question but for the method', () => {
+    expect(answered(plainQuestion).cautions.map(({ code }) => code)).toEqual(['method-is-estimate']);
+  });
+  it('writes codes in kebab-case, each once, with a meaning and a known source', () => {
+    const codes = takeoffCautions.map(({ code }) => code);
+    expect(new Set(codes).size).toBe(codes.length);
+    for (const { code, meaning, source } of takeoffCautions) {
+      expect(code).toMatch(/^[a-z]+(-[a-z]+)*$/);
+      expect(meaning).toMatch(/^[A-Z].*\.$/);
+      expect(Object.keys(references)).toContain(source);
+    }
+  });
+  it('writes facts with numbers: no orders, capitals or exclamation marks', () => {
+    for (const { raised } of pairs) {
+      for (const { message } of answered(changed(plainQuestion, raised)).cautions) {
+        expect(message).toMatch(/\d/);
+        expect(message).toMatch(/^[A-Z].*\.$/);
+        expect(message).not.toMatch(/!|must|should|do not|NaN|undefined|go\/no/i);
+      }
+    }
+  });
+});
