@@ -1,0 +1,3 @@
+import { physicsBench } from './physics-bench.ts';
+
+physicsBench((line) => console.log(line));
