@@ -50,6 +50,17 @@ export const references = entries({
     status: 'secondary',
   },
   EuAirOps305Amc2: { title: 'AMC2 CAT.POL.A.305, runway slope (ED Decision 2014/015/R)', status: 'read' },
+  EuAirOps330: { title: 'Regulation (EU) No 965/2012, CAT.POL.A.330, landing of class B aeroplanes', status: 'read' },
+  EuAirOps330Amc1: { title: 'AMC1 CAT.POL.A.330, landing on grass (ED Decision 2014/015/R)', status: 'secondary' },
+  EuAirOps330Amc2: {
+    title: 'AMC2 CAT.POL.A.330, runway slope on landing (ED Decision 2014/015/R)',
+    status: 'secondary',
+  },
+  EuAirOps335: {
+    title: 'Regulation (EU) No 965/2012, CAT.POL.A.335, landing of class B aeroplanes on wet runways',
+    status: 'read',
+  },
+  EuAirOps335Gm1: { title: 'GM1 CAT.POL.A.335(a), landing on wet grass (ED Decision 2014/015/R)', status: 'read' },
   EuAirOps340: { title: 'Regulation (EU) No 965/2012, CAT.POL.A.340, climb of class B aeroplanes', status: 'read' },
   Wmo306: {
     title: 'WMO-No. 306, Manual on Codes, FM 15 METAR, regulations 15.5 (wind) and 15.11 (temperature)',

@@ -1,41 +1,47 @@
-import { surfaceKinds, surfaceStates } from '../planning/question.ts';
-import type { RuleSet } from '../planning/rules/rule-set.ts';
+import { type Surface, surfaceKinds, surfaceStates } from '../planning/question.ts';
+import type { PhaseRules, RuleSet } from '../planning/rules/rule-set.ts';
 
-const slopes = [-0.02, 0, 0.01, 0.02];
+const slopes = [-0.02, -0.01, 0, 0.01, 0.02];
 const lengths = [
   { tora: 1000, toda: undefined, asda: undefined },
   { tora: 1000, toda: 1000, asda: 1000 },
   { tora: 1000, toda: 1200, asda: undefined },
   { tora: 1000, toda: undefined, asda: 1200 },
   { tora: 1000, toda: 1200, asda: 1200 },
+].map((published) => ({ ...published, lda: 1000 }));
+const grounds: readonly Pick<Surface, 'grass' | 'firmness'>[] = [
+  {},
+  { firmness: 'firm' },
+  { firmness: 'soft' },
+  { grass: 'short' },
+  { grass: 'long' },
 ];
+const surfaces: readonly Surface[] = surfaceKinds.flatMap((kind) =>
+  surfaceStates.flatMap((state) => grounds.map((ground) => ({ kind, state, ...ground }))),
+);
 
 /**
  * Every figure of a rule set in one tree: what is written down, and what its functions give over all surfaces, some slopes
  * and each pattern of declared distances. A changed figure changes the tree, and so the digest that answers carry.
  */
-export function ruleSetFigures({ id, source, windCredit, thinMargin, takeoff }: RuleSet) {
-  const surfaces = surfaceKinds.flatMap((kind) =>
-    surfaceStates.flatMap((state) => [undefined, 'firm', 'soft'].map((firmness) => ({ kind, state, firmness }))),
-  );
+export function ruleSetFigures({ id, source, windCredit, thinMargin, takeoff, landing }: RuleSet) {
   return {
     id,
     source,
     windCredit,
     thinMargin,
     clearwayShare: takeoff.clearwayShare,
-    startsFrom: takeoff.startsFrom,
-    runwayFactors: surfaces.flatMap(({ kind, state, firmness }) =>
-      slopes.map(
-        (slope) =>
-          takeoff.runwayFactors(
-            { kind, state, ...(firmness === 'firm' || firmness === 'soft' ? { firmness } : {}) },
-            slope,
-          ) ?? 'none',
-      ),
-    ),
+    takeoff: phaseFigures(takeoff),
+    landing: phaseFigures(landing),
+  };
+}
+
+function phaseFigures({ startsFrom, runwayFactors, requirements }: PhaseRules) {
+  return {
+    startsFrom,
+    runwayFactors: surfaces.flatMap((surface) => slopes.map((slope) => runwayFactors(surface, slope) ?? 'none')),
     requirements: lengths.map((published) =>
-      takeoff.requirements({ published, credited: published, clearwayNotCredited: undefined }),
+      requirements({ published, credited: published, clearwayNotCredited: undefined }),
     ),
   };
 }

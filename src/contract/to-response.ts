@@ -82,12 +82,12 @@ function toBandedDistance({ units, rounding }: Presentation, { value, low, high,
   };
 }
 
-function toBandContribution(how: Presentation, { of, groundRoll, airDistance, takeoffDistance }: BandContribution) {
+function toBandContribution(how: Presentation, { of, groundRoll, airDistance, wholeDistance }: BandContribution) {
   return {
     of,
     groundRollPercent: shownPercent(how, groundRoll, 'nearest'),
     airDistancePercent: shownPercent(how, airDistance, 'nearest'),
-    takeoffDistancePercent: shownPercent(how, takeoffDistance, 'nearest'),
+    takeoffDistancePercent: shownPercent(how, wholeDistance, 'nearest'),
   };
 }
 

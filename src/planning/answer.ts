@@ -146,7 +146,8 @@ export interface BandContribution {
   readonly of: string;
   readonly groundRoll: number;
   readonly airDistance: number;
-  readonly takeoffDistance: number;
+  /** the takeoff or landing distance */
+  readonly wholeDistance: number;
 }
 
 export interface Basis {
@@ -158,28 +159,13 @@ export interface Basis {
   readonly sources: readonly ReferenceKey[];
 }
 
-export interface TakeoffAnswer {
+/** What the answers to a takeoff and to a landing share. */
+export interface Answer {
   readonly outcome: Outcome;
   readonly sentence: string;
   readonly cautions: readonly Caution[];
   readonly air: Air;
   readonly wind: WindComponents;
-  readonly speeds: {
-    readonly stall: SpeedSet;
-    readonly rotation: SpeedSet;
-    readonly liftOff: SpeedSet;
-    readonly screen: SpeedSet;
-  };
-  readonly distances?:
-    | {
-        readonly screenHeight: number;
-        readonly groundRoll: BandedDistance;
-        readonly airDistance: BandedDistance;
-        readonly takeoffDistance: BandedDistance;
-        readonly groundRollTime: number;
-        readonly airTime: number;
-      }
-    | undefined;
   readonly assessment?:
     | {
         readonly ruleSet: string;
@@ -190,4 +176,49 @@ export interface TakeoffAnswer {
     | undefined;
   readonly shortfall?: readonly Shortfall[] | undefined;
   readonly basis: Basis;
+}
+
+/** Distances without factors, all engines running, each with its band [m]; times [s]. */
+export interface Distances {
+  readonly screenHeight: number;
+  readonly groundRoll: BandedDistance;
+  readonly airDistance: BandedDistance;
+  readonly groundRollTime: number;
+  readonly airTime: number;
+}
+
+export interface TakeoffAnswer extends Answer {
+  readonly speeds: {
+    readonly stall: SpeedSet;
+    readonly rotation: SpeedSet;
+    readonly liftOff: SpeedSet;
+    readonly screen: SpeedSet;
+  };
+  readonly distances?: (Distances & { readonly takeoffDistance: BandedDistance }) | undefined;
+}
+
+/** The climb after a balked landing: all engines at full power, in the landing configuration, at the landing reference speed. */
+export type BalkedLanding =
+  | {
+      readonly outcome: 'computed';
+      /** height over distance in still air, below 0 where the aeroplane sinks */
+      readonly gradient: number;
+      /** [m/s] */
+      readonly rate: number;
+    }
+  | {
+      readonly outcome: 'outside-stated-data';
+      /** true airspeed at which the thrust is asked for, and where its data end [m/s] */
+      readonly airspeed: number;
+      readonly bound: number;
+    };
+
+export interface LandingAnswer extends Answer {
+  readonly speeds: {
+    readonly stall: SpeedSet;
+    readonly landingReference: SpeedSet;
+    readonly touchdown: SpeedSet;
+  };
+  readonly distances?: (Distances & { readonly landingDistance: BandedDistance }) | undefined;
+  readonly balkedLanding: BalkedLanding;
 }

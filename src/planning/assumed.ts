@@ -2,22 +2,21 @@ import type { Propulsion } from '../performance/aeroplane.ts';
 import type { TakeoffRun } from '../performance/takeoff/takeoff-run.ts';
 import type { Assumption } from './answer.ts';
 
-type NumberMember = {
-  [K in keyof TakeoffRun]: TakeoffRun[K] extends number ? K : never;
-}[keyof TakeoffRun];
+/** The members of a run that are bare numbers. */
+export type NumberMember<Run> = { [K in keyof Run]: Run[K] extends number ? K : never }[keyof Run];
 
 /** How to put the other end of an assumption's plausible range into a run. */
-export type OtherEnd =
+export type OtherEnd<Run = TakeoffRun> =
   | {
       /** 'run-increment': the value comes on top of the run's own */
       readonly kind: 'run' | 'run-increment';
-      readonly member: NumberMember;
+      readonly member: NumberMember<Run>;
       readonly value: number;
       readonly text: string;
     }
   | {
       readonly kind: 'speed';
-      readonly member: 'liftOffSpeed' | 'screenSpeed';
+      readonly member: NumberMember<Run>;
       readonly factor: number;
       readonly text: string;
     }
@@ -29,10 +28,13 @@ export type OtherEnd =
     };
 
 /** Something taken without being told, and what else it could have been. */
-export interface Assumed {
+export interface Assumed<Other extends { readonly text: string } = OtherEnd> {
   readonly assumption: Assumption;
   /** what it is, for a sentence: 'pull-up load factor' */
   readonly name: string;
   /** absent where nothing numeric hangs on it */
-  readonly otherEnd?: OtherEnd;
+  readonly otherEnd?: Other;
 }
+
+/** An assumption as it is said, whatever it is about. */
+export type AnyAssumed = Assumed<{ readonly text: string }>;

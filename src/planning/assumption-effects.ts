@@ -1,52 +1,37 @@
-import type { Propulsion } from '../performance/aeroplane.ts';
-import type { TakeoffEstimate } from '../performance/takeoff/takeoff-estimate.ts';
-import { takeoffEstimate } from '../performance/takeoff/takeoff-estimate.ts';
-import type { TakeoffRun } from '../performance/takeoff/takeoff-run.ts';
-import type { Thrust } from '../physics/thrust/thrust.ts';
 import type { Assumed, OtherEnd } from './assumed.ts';
-import { heldThrust } from './held-thrust.ts';
 
 /**
- * What each assumption is worth: the change of the takeoff distance, by the mean-acceleration estimate, when the other end of
- * its plausible range is taken.
+ * What each assumption is worth: the change of the whole distance when the other end of its plausible range is taken.
  *
  * @param assumed - in the order in which they were made
- * @param run - as stated; undefined where the screen is not reached
- * @param thrustOf - thrust of another definition in the same air
+ * @param wholeWith - a cheap estimate of the distance [m] as stated, or with an other end in its place
  * @returns the same assumptions, with effectRatio where the estimate exists on both sides
  */
-export function assumptionEffects(
-  assumed: readonly Assumed[],
-  run: TakeoffRun | undefined,
-  thrustOf: (propulsion: Propulsion, thrustFactor: number) => Thrust,
-): readonly Assumed[] {
-  if (run === undefined) return assumed;
-  const held = { ...run, thrust: heldThrust(run.thrust) };
-  const base = whole(takeoffEstimate(held));
+export function assumptionEffects<Other extends { readonly text: string }>(
+  assumed: readonly Assumed<Other>[],
+  wholeWith: (other?: Other) => number,
+): readonly Assumed<Other>[] {
+  const base = wholeWith();
   return assumed.map((one) => {
     if (one.otherEnd === undefined) return one;
-    const effectRatio = whole(takeoffEstimate(withOtherEnd(held, one.otherEnd, thrustOf))) / base - 1;
+    const effectRatio = wholeWith(one.otherEnd) / base - 1;
     return Number.isFinite(effectRatio) ? { ...one, assumption: { ...one.assumption, effectRatio } } : one;
   });
 }
 
-function whole({ groundRoll, airDistance }: TakeoffEstimate): number {
-  return groundRoll + airDistance;
-}
-
-function withOtherEnd(
-  run: TakeoffRun,
-  other: OtherEnd,
-  thrustOf: (propulsion: Propulsion, thrustFactor: number) => Thrust,
-): TakeoffRun {
+/** A run with the other end of a bare number in its place. */
+export function withNumber<Run extends object>(
+  run: Run,
+  other: Exclude<OtherEnd<Run>, { readonly kind: 'propulsion' }>,
+): Run {
+  const { member } = other;
+  const own = run[member] as number;
   switch (other.kind) {
     case 'run':
-      return { ...run, [other.member]: other.value };
+      return { ...run, [member]: other.value };
     case 'run-increment':
-      return { ...run, [other.member]: run[other.member] + other.value };
+      return { ...run, [member]: own + other.value };
     case 'speed':
-      return { ...run, [other.member]: run[other.member] * other.factor };
-    case 'propulsion':
-      return { ...run, thrust: heldThrust(thrustOf(other.propulsion, other.thrustFactor)) };
+      return { ...run, [member]: own * other.factor };
   }
 }

@@ -1,7 +1,6 @@
 import type { Check, Outcome } from './answer.ts';
 import { arithmeticSlack } from './arithmetic-slack.ts';
 import { governingCheck } from './margins.ts';
-import type { NotReached } from './takeoff-runs.ts';
 
 /** Why an answer that passes is thin, and which check shows it. */
 export interface ThinBecause {
@@ -13,7 +12,8 @@ export interface ThinBecause {
 
 /** What decides the outcome of a takeoff or landing. */
 export interface Deciding {
-  readonly notReached: NotReached | undefined;
+  /** why there are no distances */
+  readonly notReached: { readonly outcome: Outcome } | undefined;
   /** why the rule set does not speak of the aeroplane */
   readonly doesNotApply: string | undefined;
   /** whether neither factor nor physics speaks of the surface */

@@ -1,32 +1,32 @@
 import type { Propulsion } from '../performance/aeroplane.ts';
 import type { Air } from '../performance/air.ts';
 import { propulsionThrust } from '../performance/propulsion.ts';
+import { takeoff } from '../performance/takeoff/takeoff.ts';
 import { aeroplanePointer } from './aeroplane-pointer.ts';
 import { airBeside } from './air-beside.ts';
 import type { TakeoffAnswer } from './answer.ts';
-import { assessTakeoff } from './assess-takeoff.ts';
-import { assumptionEffects } from './assumption-effects.ts';
-import { highOver, takeoffBand } from './band.ts';
+import { assess } from './assess.ts';
 import { raisedCautions } from './cautions/caution-test.ts';
 import { takeoffCautions } from './cautions/takeoff-cautions.ts';
-import { airAtRunway, chosenConfiguration, chosenRuleSet, isFault } from './chosen.ts';
+import { isFault } from './chosen.ts';
+import { conditionsOf } from './conditions.ts';
 import { declaredDistances } from './declared-distances.ts';
 import { defaulted } from './defaulted.ts';
-import type { Refused } from './fault.ts';
-import { governingCheck } from './margins.ts';
+import { isRefused, type Refused } from './fault.ts';
 import { notGiven } from './not-given.ts';
-import { outcomeOf, thinBecause } from './outcome.ts';
-import type { Question } from './question.ts';
+import type { TakeoffQuestion } from './question.ts';
 import { resolveFriction } from './resolve-friction.ts';
 import { resolveTakeoff } from './resolve-takeoff.ts';
 import { resolveThrust } from './resolve-thrust.ts';
-import { takeoffSentence } from './sentences/takeoff-sentence.ts';
+import { answerSentence } from './sentences/answer-sentence.ts';
+import { notReachedSentence } from './sentences/not-reached-sentence.ts';
 import { shortfalls } from './shortfalls.ts';
+import { takeoffBand } from './takeoff-band.ts';
 import { takeoffDistances } from './takeoff-distances.ts';
-import { notReached as notReachedOf, reached, statedRun, takeoffRuns } from './takeoff-runs.ts';
+import { takeoffEffects } from './takeoff-effects.ts';
+import { checkedTakeoffs, notReached as notReachedOf, reached, statedRun, takeoffRuns } from './takeoff-runs.ts';
 import { takeoffSpeeds } from './takeoff-speeds.ts';
-import { windAlong, windAnswer } from './wind-along.ts';
-import { windCredit } from './wind-credit.ts';
+import { windAnswer } from './wind-along.ts';
 
 /** Distances come from the stated figures of the definition by physics. */
 const method = 'stated';
@@ -37,16 +37,11 @@ const method = 'stated';
  *
  * @returns the answer, or every fault that the question's own values bring about
  */
-export function planTakeoff(question: Question): TakeoffAnswer | Refused {
-  const { aeroplane, aeroplaneAt, mass, runway, weather } = question;
-  const ruleSet = chosenRuleSet(question.ruleSet);
-  const configuration = chosenConfiguration(question, 'takeoff');
-  const air = airAtRunway(question);
-  const wind = windAlong(runway, weather.wind);
-  if (isFault(ruleSet) || isFault(configuration) || isFault(air) || isFault(wind)) {
-    return { refused: [ruleSet, configuration, air, wind].filter(isFault) };
-  }
-  const creditedHeadwind = windCredit(wind.headwind, ruleSet.windCredit);
+export function planTakeoff(question: TakeoffQuestion): TakeoffAnswer | Refused {
+  const { aeroplane, aeroplaneAt, mass, runway, weather, units } = question;
+  const conditions = conditionsOf(question, 'takeoff');
+  if (isRefused(conditions)) return conditions;
+  const { ruleSet, configuration, air, wind, creditedHeadwind, doesNotApply } = conditions;
 
   const resolved = resolveTakeoff(question, configuration);
   const speeds = takeoffSpeeds(question, configuration, resolved, air);
@@ -65,7 +60,6 @@ export function planTakeoff(question: Question): TakeoffAnswer | Refused {
     rollingFriction: friction.actual ?? friction.reference,
   });
 
-  const doesNotApply = ruleSet.doesNotApply(aeroplane);
   const rules = ruleSet.takeoff;
   const runs = takeoffRuns(run, {
     creditedHeadwind: doesNotApply === undefined ? creditedHeadwind : wind.headwind,
@@ -78,7 +72,6 @@ export function planTakeoff(question: Question): TakeoffAnswer | Refused {
   });
   const notReached = notReachedOf(runs);
   const stated = notReached === undefined ? reached(runs.stated) : undefined;
-  const noSurface = runs.credited === undefined && runs.reference === undefined;
   const band =
     stated &&
     takeoffBand(run, stated, runway.surface, method, (temperatureOff, pressureOff) => {
@@ -88,57 +81,54 @@ export function planTakeoff(question: Question): TakeoffAnswer | Refused {
   const distances = stated && band && takeoffDistances(stated, band, aeroplane.certification.screenHeight, method);
 
   const declared = declaredDistances(runway, rules.clearwayShare);
-  const isAssessed = notReached === undefined && doesNotApply === undefined && !noSurface;
-  const checks = isAssessed ? assessTakeoff(rules, runs, runway, declared) : [];
-  const governing = governingCheck(checks);
-  const high = (of: string) => highOver((of === 'groundRoll' ? band?.groundRoll : band?.takeoffDistance) ?? 0);
-  const thinRatio = ruleSet.thinMargin.ratio;
   const rollAvailable = declared.credited.tora;
-  const outcome = outcomeOf({
+  const { outcome, checks, governing, thin } = assess({
+    conditions,
+    rules,
+    runway,
+    declared,
     notReached,
-    doesNotApply,
-    noSurface,
-    checks,
-    roll: stated?.groundRoll,
+    distances: checkedTakeoffs(runs),
+    band,
     rollAvailable,
-    thinRatio,
-    highOver: high,
   });
-  const thin = outcome === 'enough-but-thin' ? thinBecause(checks, thinRatio, high) : undefined;
 
-  const assumed = assumptionEffects(
+  const assumed = takeoffEffects(
     [...resolved.assumed, ...power.assumed, ...friction.assumed],
     stated && run,
     (propulsion, factor) => thrustIn(air, propulsion, factor),
   );
   const context = {
+    phase: 'takeoff' as const,
     question,
     ruleSet,
     air,
     wind,
     speeds,
     surface: friction.surface,
-    run: stated && run,
-    runs,
-    stated,
-    distances,
     declared,
     doesNotApply,
-    checks,
-    governing,
     outcome,
+    checks: checks ?? [],
+    governing,
     thin,
     assumed,
+    wheelSpeed: speeds.liftOff,
+    stated,
+    roll: stated?.groundRoll,
+    rollInStillAir: () => reached(takeoff({ ...run, headwind: 0 }))?.groundRoll,
+    rollAvailable,
+    wholeDistance: distances?.takeoffDistance,
   };
   return {
     outcome,
-    sentence: takeoffSentence(context),
+    sentence: answerSentence(context, () => notReachedSentence(runs, units)),
     cautions: raisedCautions(takeoffCautions, context),
     air,
     wind: windAnswer(wind, creditedHeadwind),
     speeds,
     distances,
-    assessment: isAssessed ? { ruleSet: ruleSet.id, checks, governing: governing?.code } : undefined,
+    assessment: checks && { ruleSet: ruleSet.id, checks, governing: governing?.code },
     shortfall: notReached && shortfalls(notReached, aeroplanePointer(aeroplaneAt, '/propulsion')),
     basis: {
       method,

@@ -1,7 +1,10 @@
 import type { Aeroplane } from '../performance/aeroplane.ts';
 import type { UnitFamily } from '../units/presentation.ts';
 
-/** A question in SI, as the contract's gate hands it in. Angles in rad, clockwise from north where they are directions. */
+/**
+ * What every question of a field length holds, in SI, as the contract's gate hands it in. Angles in rad, clockwise from north
+ * where they are directions.
+ */
 export interface Question {
   readonly aeroplane: Aeroplane;
   /** SHA-256 of the definition, hex */
@@ -19,6 +22,32 @@ export interface Question {
   readonly units: UnitFamily;
   /** pointers of members that the gate filled in (units, rounding ...): said under basis.assumed */
   readonly defaulted: readonly string[];
+}
+
+/** How a takeoff is flown; a member that is absent takes the configuration's own figure, and full power. */
+export interface TakeoffProcedure {
+  /** id of a power setting of the propulsion */
+  readonly power?: string;
+  readonly start?: 'standing' | 'rolling';
+}
+
+export interface TakeoffQuestion extends Question {
+  readonly procedure?: TakeoffProcedure;
+}
+
+/** How a landing is flown; a member that is absent takes the configuration's own figure, and no reverse thrust. */
+export interface LandingProcedure {
+  /** on top of the landing reference speed, CAS [m/s] */
+  readonly approachSpeedIncrement?: number;
+  readonly approachAngle?: number;
+  readonly reverse?: boolean;
+  readonly antiSkid?: 'operative' | 'inoperative';
+  /** touchdown to brakes [s] */
+  readonly reactionTime?: number;
+}
+
+export interface LandingQuestion extends Question {
+  readonly procedure?: LandingProcedure;
 }
 
 export const surfaceKinds = ['paved', 'grass', 'gravel', 'dirt', 'snow', 'ice'] as const;

@@ -13,7 +13,7 @@ export function takeoffDistances(
     screenHeight,
     groundRoll: banded(stated.groundRoll, band.groundRoll, method),
     airDistance: banded(stated.airDistance, band.airDistance, method),
-    takeoffDistance: banded(stated.takeoffDistance, band.takeoffDistance, method),
+    takeoffDistance: banded(stated.takeoffDistance, band.wholeDistance, method),
     groundRollTime: stated.groundRollTime,
     airTime: stated.airTime,
   };

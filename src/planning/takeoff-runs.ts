@@ -3,23 +3,18 @@ import type { TakeoffResult, TakeoffRun } from '../performance/takeoff/takeoff-r
 import { inducedDragFactor } from '../physics/drag.ts';
 import type { Thrust } from '../physics/thrust/thrust.ts';
 import type { TakeoffAnswer } from './answer.ts';
+import type { Checked } from './assess.ts';
 import type { Question } from './question.ts';
 import type { ResolvedTakeoff } from './resolve-takeoff.ts';
+import { firstWithout, type Runs, runsOf } from './runs.ts';
 
 /** A takeoff that reached the screen. */
 export type Reached = Extract<TakeoffResult, { outcome: 'reaches-screen' }>;
 /** The name of why there are no distances. */
 export type NotReached = Exclude<TakeoffResult, Reached>;
 
-/** The distances behind an answer; an absent one has no physics or is not asked for. */
-export interface TakeoffRuns {
-  /** wind, surface and slope as given */
-  readonly stated: TakeoffResult | undefined;
-  /** wind as the rule set credits it, surface and slope as given */
-  readonly credited: TakeoffResult | undefined;
-  /** credited wind; paved, dry, level */
-  readonly reference: TakeoffResult | undefined;
-}
+/** The distances behind an answer to a takeoff. */
+export type TakeoffRuns = Runs<TakeoffResult>;
 
 /** What differs between the three. */
 export interface RunConditions {
@@ -74,27 +69,37 @@ export function statedRun(
 
 /** What a run came to, where it reached the screen. */
 export function reached(result: TakeoffResult | undefined): Reached | undefined {
-  return result?.outcome === 'reaches-screen' ? result : undefined;
+  return result !== undefined && isReached(result) ? result : undefined;
 }
 
-/** Runs that are the same question are computed once. */
+/** The three runs behind an answer. */
 export function takeoffRuns(run: TakeoffRun, conditions: RunConditions): TakeoffRuns {
   const { creditedHeadwind, actualFriction, referenceFriction, needsReference } = conditions;
-  const stated = actualFriction === undefined ? undefined : takeoff(run);
-  const sameWind = creditedHeadwind === run.headwind;
-  const credited = actualFriction === undefined || sameWind ? stated : takeoff({ ...run, headwind: creditedHeadwind });
-  if (!needsReference) return { stated, credited, reference: undefined };
-  const sameRunway = run.slope === 0 && actualFriction === referenceFriction;
-  const reference = sameRunway
-    ? credited
-    : takeoff({ ...run, headwind: creditedHeadwind, slope: 0, rollingFriction: referenceFriction });
-  return { stated, credited, reference };
+  return runsOf(takeoff, run, {
+    known: actualFriction !== undefined,
+    creditedHeadwind,
+    reference: needsReference
+      ? { ...run, headwind: creditedHeadwind, slope: 0, rollingFriction: referenceFriction }
+      : undefined,
+    sameRunway: run.slope === 0 && actualFriction === referenceFriction,
+  });
 }
 
 /** The first of the three that has no distance, in the order stated, credited, reference. */
-export function notReached({ stated, credited, reference }: TakeoffRuns): NotReached | undefined {
-  for (const result of [stated, credited, reference]) {
-    if (result !== undefined && result.outcome !== 'reaches-screen') return result;
-  }
-  return undefined;
+export function notReached(runs: TakeoffRuns): NotReached | undefined {
+  return firstWithout(runs, isReached);
+}
+
+/** What checks are of, of each run that has distances. */
+export function checkedTakeoffs(runs: TakeoffRuns): Runs<Checked> {
+  return { stated: checked(runs.stated), credited: checked(runs.credited), reference: checked(runs.reference) };
+}
+
+function checked(result: TakeoffResult | undefined): Checked | undefined {
+  const found = reached(result);
+  return found && { groundRoll: found.groundRoll, wholeDistance: found.takeoffDistance };
+}
+
+function isReached(result: TakeoffResult): result is Reached {
+  return result.outcome === 'reaches-screen';
 }

@@ -99,7 +99,7 @@ export function sampleAnswer(): TakeoffAnswer {
     ],
     basis: {
       method: 'stated',
-      band: [{ of: 'wind', groundRoll: 0.07823, airDistance: 0.04171, takeoffDistance: 0.06639 }],
+      band: [{ of: 'wind', groundRoll: 0.07823, airDistance: 0.04171, wholeDistance: 0.06639 }],
       assumed: [
         {
           at: '/aeroplane#/configurations/takeoff-10/pullUpLoadFactor',

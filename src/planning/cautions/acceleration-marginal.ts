@@ -1,6 +1,7 @@
 import { percentText } from '../sentences/measure-text.ts';
+import { textIn } from './answer-context.ts';
 import type { CautionTest } from './caution-test.ts';
-import { type TakeoffContext, textIn } from './takeoff-context.ts';
+import type { TakeoffContext } from './takeoff-context.ts';
 
 /** Least acceleration over g below which small changes move the roll a long way. */
 const marginal = 0.02;

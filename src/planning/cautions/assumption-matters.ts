@@ -1,18 +1,18 @@
 import { percentText } from '../sentences/measure-text.ts';
+import type { AnswerContext } from './answer-context.ts';
 import type { CautionTest } from './caution-test.ts';
-import type { TakeoffContext } from './takeoff-context.ts';
 
-/** Change of the takeoff distance, as a ratio, above which an assumption is named. */
+/** Change of the distance, as a ratio, above which an assumption is named. */
 const matters = 0.01;
 
 /** Assumed values that move the distance; the largest is named, all are listed under the basis. */
-export const assumptionMatters: CautionTest<TakeoffContext> = {
+export const assumptionMatters: CautionTest<AnswerContext> = {
   code: 'assumption-matters',
   severity: 'caution',
-  meaning: 'A value that was assumed moves the takeoff distance by more than 1 % over its plausible range.',
+  meaning: 'A value that was assumed moves the takeoff or landing distance by more than 1 % over its plausible range.',
   threshold: matters,
   source: 'Judgement',
-  test: ({ assumed }) => {
+  test: ({ assumed, phase }) => {
     const heavy = assumed.filter(({ assumption }) => size(assumption.effectRatio) > matters);
     const [first, ...rest] = heavy;
     if (first === undefined) return undefined;
@@ -23,8 +23,8 @@ export const assumptionMatters: CautionTest<TakeoffContext> = {
     const effect = largest.assumption.effectRatio ?? 0;
     const many =
       heavy.length === 1
-        ? 'One assumed value moves the takeoff distance by more than 1 %'
-        : `${heavy.length} assumed values each move the takeoff distance by more than 1 %; the most`;
+        ? `One assumed value moves the ${phase} distance by more than 1 %`
+        : `${heavy.length} assumed values each move the ${phase} distance by more than 1 %; the most`;
     return {
       message: `${many}: ${largest.name}, ${taken(largest.assumption.value)}. At ${largest.otherEnd?.text} the distance is ${percentText(size(effect))} ${effect > 0 ? 'longer' : 'shorter'}.`,
       at: largest.assumption.at,

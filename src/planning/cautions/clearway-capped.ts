@@ -1,8 +1,8 @@
+import { type AnswerContext, measureDown, textIn } from './answer-context.ts';
 import type { CautionTest } from './caution-test.ts';
-import { measureDown, type TakeoffContext, textIn } from './takeoff-context.ts';
 
 /** A clearway longer than counts. */
-export const clearwayCapped: CautionTest<TakeoffContext> = {
+export const clearwayCapped: CautionTest<AnswerContext> = {
   code: 'clearway-capped',
   severity: 'caution',
   meaning: 'The clearway is longer than half the run available; what is beyond does not count.',

@@ -1,5 +1,5 @@
+import { type ConditionsContext, textIn } from './answer-context.ts';
 import type { CautionTest } from './caution-test.ts';
-import { type ConditionsContext, textIn } from './takeoff-context.ts';
 
 /** A crosswind, gusts counted, beyond what was demonstrated or is allowed. */
 export const crosswindBeyondDemonstrated: CautionTest<ConditionsContext> = {

@@ -1,5 +1,5 @@
+import { type ConditionsContext, textIn } from './answer-context.ts';
 import type { CautionTest } from './caution-test.ts';
-import { type ConditionsContext, textIn } from './takeoff-context.ts';
 
 /** A gust, which no distance counts. */
 export const gustNotCredited: CautionTest<ConditionsContext> = {

@@ -1,8 +1,8 @@
+import { type AnswerContext, measureDown, textIn } from './answer-context.ts';
 import type { CautionTest } from './caution-test.ts';
-import { measureDown, type TakeoffContext, textIn } from './takeoff-context.ts';
 
 /** A check that fails. */
-export const marginNegative: CautionTest<TakeoffContext> = {
+export const marginNegative: CautionTest<AnswerContext> = {
   code: 'margin-negative',
   severity: 'caution',
   meaning: 'More is required than is available in at least one check.',

@@ -1,9 +1,9 @@
 import { percentText } from '../sentences/measure-text.ts';
+import { type AnswerContext, measureDown, textIn } from './answer-context.ts';
 import type { CautionTest } from './caution-test.ts';
-import { measureDown, type TakeoffContext, textIn } from './takeoff-context.ts';
 
 /** Every check passes, one of them narrowly. */
-export const marginThin: CautionTest<TakeoffContext> = {
+export const marginThin: CautionTest<AnswerContext> = {
   code: 'margin-thin',
   severity: 'caution',
   meaning:

@@ -1,8 +1,8 @@
+import { type AnswerContext, textIn } from './answer-context.ts';
 import type { CautionTest } from './caution-test.ts';
-import { type TakeoffContext, textIn } from './takeoff-context.ts';
 
 /** A mass above the aeroplane's maximum takeoff mass. */
-export const massAboveMaximum: CautionTest<TakeoffContext> = {
+export const massAboveMaximum: CautionTest<AnswerContext> = {
   code: 'mass-above-maximum',
   severity: 'strong',
   meaning: 'The mass is above the maximum takeoff mass of the aeroplane.',

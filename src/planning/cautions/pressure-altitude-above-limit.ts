@@ -1,5 +1,5 @@
+import { type ConditionsContext, textIn } from './answer-context.ts';
 import type { CautionTest } from './caution-test.ts';
-import { type ConditionsContext, textIn } from './takeoff-context.ts';
 
 /** A pressure altitude above the aeroplane's limitation. */
 export const pressureAltitudeAboveLimit: CautionTest<ConditionsContext> = {

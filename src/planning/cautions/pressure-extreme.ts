@@ -1,5 +1,5 @@
+import { type ConditionsContext, textIn } from './answer-context.ts';
 import type { CautionTest } from './caution-test.ts';
-import { type ConditionsContext, textIn } from './takeoff-context.ts';
 
 /** Outside these a slip is more likely than the weather [Pa]. */
 const lowest = 95_000;

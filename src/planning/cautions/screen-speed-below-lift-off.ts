@@ -1,5 +1,6 @@
+import { textIn } from './answer-context.ts';
 import type { CautionTest } from './caution-test.ts';
-import { type TakeoffContext, textIn } from './takeoff-context.ts';
+import type { TakeoffContext } from './takeoff-context.ts';
 
 /** A speed schedule that falls after lift-off. */
 export const screenSpeedBelowLiftOff: CautionTest<TakeoffContext> = {

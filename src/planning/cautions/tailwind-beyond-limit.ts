@@ -1,5 +1,5 @@
+import { type ConditionsContext, textIn } from './answer-context.ts';
 import type { CautionTest } from './caution-test.ts';
-import { type ConditionsContext, textIn } from './takeoff-context.ts';
 
 /** Tailwind beyond which certification data seldom reach [m/s]: 10 kt. */
 const usualLimit = (10 * 1852) / 3600;

@@ -1,5 +1,5 @@
+import { type ConditionsContext, textIn } from './answer-context.ts';
 import type { CautionTest } from './caution-test.ts';
-import { type ConditionsContext, textIn } from './takeoff-context.ts';
 
 /** A variable wind direction, of which the least favourable is taken. */
 export const windVariable: CautionTest<ConditionsContext> = {

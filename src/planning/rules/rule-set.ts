@@ -22,8 +22,8 @@ export interface ThinMargin {
 /** One comparison a rule asks for: a distance times its overall factor against one declared distance. */
 export interface Requirement {
   readonly code: string;
-  readonly of: 'groundRoll' | 'takeoffDistance';
-  readonly against: 'tora' | 'toda' | 'asda';
+  readonly of: 'groundRoll' | 'takeoffDistance' | 'landingDistance';
+  readonly against: 'tora' | 'toda' | 'asda' | 'lda';
   /** the overall factor, applied once; absent: 1 without a word */
   readonly factor?: Factor;
   /** another reading of the same rule, shown beside the one that decides */
@@ -31,8 +31,8 @@ export interface Requirement {
   readonly source: ReferenceKey;
 }
 
-/** The takeoff side of a rule set. */
-export interface TakeoffRules {
+/** What a rule set holds for takeoffs, or for landings. */
+export interface PhaseRules {
   /**
    * The distance that the set's surface and slope factors multiply. 'reference': credited wind on a paved, dry, level runway;
    * 'credited': the set has no such factors and physics on the actual runway stands alone.
@@ -40,10 +40,14 @@ export interface TakeoffRules {
   readonly startsFrom: 'reference' | 'credited';
   /** factors of the surface and the slope on the reference distance; undefined where the set does not speak of the surface */
   readonly runwayFactors: (surface: Surface, slope: number) => readonly Factor[] | undefined;
-  /** the most that counts of a clearway, over the run */
-  readonly clearwayShare: number;
   /** the comparisons, which may depend on which distances are declared */
   readonly requirements: (declared: DeclaredDistances) => readonly Requirement[];
+}
+
+/** The takeoff side of a rule set. */
+export interface TakeoffRules extends PhaseRules {
+  /** the most that counts of a clearway, over the run */
+  readonly clearwayShare: number;
 }
 
 /** A set of operating rules as figures with their sources; numbers somebody decided live in these files and nowhere else. */
@@ -58,4 +62,5 @@ export interface RuleSet {
   readonly windCredit: WindCredit;
   readonly thinMargin: ThinMargin;
   readonly takeoff: TakeoffRules;
+  readonly landing: PhaseRules;
 }

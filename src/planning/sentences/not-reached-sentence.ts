@@ -1,13 +1,14 @@
 import type { UnitFamily } from '../../units/presentation.ts';
 import { notReached, type TakeoffRuns } from '../takeoff-runs.ts';
 import { measureText, percentText } from './measure-text.ts';
+import { whichRun } from './which-run.ts';
 
 /** Why there are no distances, in words and numbers. */
 export function notReachedSentence(runs: TakeoffRuns, units: UnitFamily): string {
   const result = notReached(runs);
   if (result === undefined) return 'There are no distances.';
   const speed = (si: number) => measureText(units, 'speed', si);
-  const where = whereOf(runs, result);
+  const where = whichRun(runs, result);
   switch (result.outcome) {
     case 'never-reaches-lift-off-speed':
       return `Never reaches the lift-off speed${where}: at ${speed(result.atAirspeed)} true airspeed the acceleration is ${percentText(result.leastAccelerationRatio, 2)} of that of gravity.`;
@@ -18,12 +19,4 @@ export function notReachedSentence(runs: TakeoffRuns, units: UnitFamily): string
     case 'outside-stated-data':
       return `Outside the stated thrust: ${speed(result.airspeed)} true airspeed is asked for, and the data end at ${speed(result.bound)}.`;
   }
-}
-
-/** Which of the runs it is, where it is not the one as stated. */
-function whereOf(runs: TakeoffRuns, result: unknown): string {
-  if (result === runs.stated) return '';
-  return result === runs.credited
-    ? ' in the wind that the rules credit'
-    : ' on the paved, dry, level runway that the rules start from';
 }

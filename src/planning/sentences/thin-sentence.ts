@@ -1,4 +1,4 @@
-import type { TakeoffContext } from '../cautions/takeoff-context.ts';
+import type { AnswerContext } from '../cautions/answer-context.ts';
 import { percentText } from './measure-text.ts';
 
 /** Why an answer that passes is thin, in words. */
@@ -6,7 +6,7 @@ export function thinSentence({
   thin,
   governing,
   ruleSet,
-}: Pick<TakeoffContext, 'thin' | 'governing' | 'ruleSet'>): string {
+}: Pick<AnswerContext, 'thin' | 'governing' | 'ruleSet'>): string {
   if (thin?.kind === 'band') return 'The high end of the 90 % band would not pass.';
   return `That is ${percentText(Math.max(0, governing?.marginRatio ?? 0), 1, 'down')} of what is required, under ${percentText(ruleSet.thinMargin.ratio)}.`;
 }

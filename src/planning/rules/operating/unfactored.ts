@@ -2,9 +2,13 @@ import { clearwayShare } from '../clearway-share.ts';
 import type { Requirement, RuleSet } from '../rule-set.ts';
 import { thinMargin } from '../thin-margin.ts';
 
-const requirements: readonly Requirement[] = [
+const takeoff: readonly Requirement[] = [
   { code: 'takeoff-run', of: 'groundRoll', against: 'tora', source: 'Annex14' },
   { code: 'takeoff-distance', of: 'takeoffDistance', against: 'toda', source: 'Annex14' },
+];
+
+const landing: readonly Requirement[] = [
+  { code: 'landing-distance', of: 'landingDistance', against: 'lda', source: 'Annex14' },
 ];
 
 /** No rule at all: the computed distances against the declared ones, wind as given. */
@@ -20,6 +24,7 @@ export const unfactored: RuleSet = {
     startsFrom: 'credited',
     clearwayShare,
     runwayFactors: () => undefined,
-    requirements: () => requirements,
+    requirements: () => takeoff,
   },
+  landing: { startsFrom: 'credited', runwayFactors: () => undefined, requirements: () => landing },
 };

@@ -1,12 +1,15 @@
 import type { Check } from '../answer.ts';
-import type { TakeoffContext } from '../cautions/takeoff-context.ts';
+import type { AnswerContext } from '../cautions/answer-context.ts';
 import { measureText } from './measure-text.ts';
-import { notReachedSentence } from './not-reached-sentence.ts';
 import { thinSentence } from './thin-sentence.ts';
 
-/** The answer in one plain sentence or two, made from its numbers, in the asked units. */
-export function takeoffSentence(context: TakeoffContext): string {
-  const { outcome } = context;
+/**
+ * The answer in one plain sentence or two, made from its numbers, in the asked units.
+ *
+ * @param notReached - why there are no distances, in words
+ */
+export function answerSentence(context: AnswerContext, notReached: () => string): string {
+  const { outcome, phase } = context;
   const { units } = context.question;
   const metres = (si: number, direction: 'up' | 'down') => measureText(units, 'distance', si, direction);
   switch (outcome) {
@@ -19,18 +22,18 @@ export function takeoffSentence(context: TakeoffContext): string {
     case 'nothing-to-compare':
       return `Nothing to compare with in full: ${missing(context)}. ${distance(context)}${passing(context)}`;
     case 'roll-longer-than-runway':
-      return `The ground roll alone is longer than the run: ${metres(context.stated?.groundRoll ?? 0, 'up')} without factors, ${metres(context.declared.credited.tora ?? 0, 'down')} of TORA available.`;
+      return `The ground roll alone is longer than the ${phase === 'takeoff' ? 'run' : 'runway'}: ${metres(context.roll ?? 0, 'up')} without factors, ${metres(context.rollAvailable ?? 0, 'down')} of ${phase === 'takeoff' ? 'TORA' : 'LDA'} available.`;
     case 'rule-set-does-not-apply':
       return `The rules asked for do not apply (${context.ruleSet.title}): ${context.doesNotApply}. ${distance(context)}`.trim();
     case 'no-data-for-this-surface':
       return `No data for this surface (${context.surface}): neither a factor of the rules asked for nor physics speaks of it.`;
     default:
-      return notReachedSentence(context.runs, units);
+      return notReached();
   }
 }
 
 /** 'needs 1 255 m of TORA under class B factors, 900 m available: short by 355 m' */
-function needs({ governing, question: { units }, ruleSet }: TakeoffContext): string {
+function needs({ governing, question: { units }, ruleSet }: AnswerContext): string {
   const { required = 0, available = 0, margin = 0 } = governing ?? {};
   const passes = governing?.result === 'passes';
   const spare = passes ? Math.max(0, margin) : margin;
@@ -45,17 +48,19 @@ function lengthName(check: Check | undefined): string {
       return 'TODA';
     case 'accelerate-stop':
       return 'ASDA';
+    case 'landing-distance':
+      return 'LDA';
     default:
       return 'TORA';
   }
 }
 
-function missing({ checks }: TakeoffContext): string {
+function missing({ checks }: AnswerContext): string {
   const whys = checks.filter(({ result }) => result === 'not-assessed').map(({ why }) => why);
   return whys.length === 0 ? 'no length is declared' : whys.join(', ');
 }
 
-function passing({ checks, question: { units } }: TakeoffContext): string {
+function passing({ checks, question: { units } }: AnswerContext): string {
   const passed = checks.filter(({ result }) => result === 'passes');
   if (passed.length === 0) return '';
   const each = passed.map(
@@ -65,8 +70,8 @@ function passing({ checks, question: { units } }: TakeoffContext): string {
   return ` ${each.join(', ')}.`;
 }
 
-function distance({ stated, question: { units } }: TakeoffContext): string {
-  return stated === undefined
+function distance({ phase, wholeDistance, question: { units } }: AnswerContext): string {
+  return wholeDistance === undefined
     ? ''
-    : `The takeoff distance is ${measureText(units, 'distance', stated.takeoffDistance, 'up')} without factors.`;
+    : `The ${phase} distance is ${measureText(units, 'distance', wholeDistance.value, 'up')} without factors.`;
 }
