@@ -355,7 +355,8 @@ describe('the basis', () => {
     ]);
     const at = (end: string) => assumed.find((one) => one.at.endsWith(end));
     expect(at('rotationTime')?.value).toEqual({ kind: 'time', value: 0 });
-    expect(at('groundLiftCoefficient')?.value).toBe(0.35);
+    const values = ['liftOff', 'screen', 'pullUpLoadFactor', 'groundLiftCoefficient', 'groundDragIncrementCoefficient'];
+    expect(values.map((end) => at(end)?.value)).toEqual([1.15, 1.2, 1.1, 0.35, 0]);
     expect(at('pullUpLoadFactor')?.effectRatio ?? 0).toBeGreaterThan(0.05);
     expect(at('speeds/rotation')?.effectRatio).toBeUndefined();
   });

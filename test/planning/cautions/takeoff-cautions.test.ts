@@ -204,8 +204,8 @@ const pairs: readonly Pair[] = [
   {
     code: 'climb-gradient-marginal',
     severity: 'caution',
-    raised: both(steep, hot(6200, 300)),
-    silent: both(steep, hot(1000, 288)),
+    raised: both(steep, hot(5000, 295)),
+    silent: both(steep, hot(4800, 295)),
     says: /^The least climb gradient on the way to the screen is [12]\.\d+ %\./,
   },
   {
