@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import { antiSkids, categories, certificationBases } from '../performance/aeroplane.ts';
+import { antiSkids, categories, certificationBases, wheelArrangements } from '../performance/aeroplane.ts';
 import { configuration } from './configuration.ts';
 import { propulsion } from './propulsion.ts';
 import {
@@ -11,6 +11,7 @@ import {
   screenHeight,
   span,
   temperature,
+  thrust,
   tyrePressure,
   windSpeed,
   wingAngle,
@@ -69,6 +70,13 @@ const brakes = z
     energyLimit: brakeEnergy.exactOptional(),
   })
   .meta({ id: 'Brakes', description: 'The brakes.' });
+
+const reverseThrust = z
+  .strictObject({
+    thrust: thrust.meta({ description: 'Backward thrust of the whole aeroplane.' }),
+    cutOffSpeed: airspeed.meta({ description: 'Ground speed below which reverse is not used.' }),
+  })
+  .meta({ id: 'ReverseThrust', description: 'Reverse thrust in the landing roll.' });
 
 const engineOut = z
   .strictObject({
@@ -135,12 +143,17 @@ export const aeroplaneDefinition = z
     propulsion,
     wheels: z
       .strictObject({
+        arrangement: z
+          .enum(wheelArrangements)
+          .meta({ description: 'Whether the third wheel is at the nose or at the tail.' })
+          .exactOptional(),
         tyrePressure: tyrePressure.exactOptional(),
         tyreSpeedLimit: airspeed.meta({ description: 'Greatest ground speed of the tyres.' }).exactOptional(),
       })
       .meta({ id: 'Wheels', description: 'Wheels and tyres.' })
       .exactOptional(),
     brakes: brakes.exactOptional(),
+    reverseThrust: reverseThrust.exactOptional(),
     engineOut: engineOut.exactOptional(),
     limitations: limitations.exactOptional(),
     airspeedCalibration: airspeedCalibration.exactOptional(),

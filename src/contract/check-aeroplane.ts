@@ -1,5 +1,6 @@
 import type { Fault } from '../planning/fault.ts';
 import { checkConfiguration } from './aeroplane-checks/check-configuration.ts';
+import { checkCounts, mostConfigurations } from './aeroplane-checks/check-counts.ts';
 import { checkMasses } from './aeroplane-checks/check-masses.ts';
 import { checkPowerplant } from './aeroplane-checks/check-powerplant.ts';
 import { checkTables } from './aeroplane-checks/check-tables.ts';
@@ -8,9 +9,6 @@ import type { AeroplaneDefinition } from './aeroplane-definition.ts';
 import { perhaps } from './present.ts';
 import { si } from './quantity.ts';
 import { toCalibration } from './to-aeroplane.ts';
-
-/** So many configurations at most; our choice. */
-export const mostConfigurations = 24;
 
 /**
  * What a definition says against itself or against what aeroplanes are.
@@ -22,25 +20,13 @@ export const mostConfigurations = 24;
 export function checkAeroplane(definition: AeroplaneDefinition, at: string): Fault[] {
   const ids = Object.keys(definition.configurations);
   const tables = checkTables(definition, at);
-  const count: Fault[] =
-    ids.length >= 1 && ids.length <= mostConfigurations
-      ? []
-      : [
-          {
-            pointer: `${at}/configurations`,
-            code: ids.length === 0 ? 'missing' : 'out-of-range',
-            message: `${ids.length} configurations are given.`,
-            received: ids.length,
-            allowed: `1 to ${mostConfigurations} configurations`,
-          },
-        ];
   const loading = checkWingLoading(definition, at);
   const wingArea = loading.length > 0 ? undefined : si('area', definition.wing.area);
   const calibration = tables.some(({ pointer }) => pointer.startsWith(`${at}/airspeedCalibration`))
     ? 'at-fault'
     : perhaps(toCalibration, definition.airspeedCalibration);
   return [
-    ...count,
+    ...checkCounts(definition, at),
     ...checkMasses(definition, at),
     ...(wingArea === undefined ? loading : checkWing(definition, at)),
     ...checkPowerplant(definition, at),

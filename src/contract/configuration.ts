@@ -1,6 +1,6 @@
 import { z } from 'zod';
 import { maximumLift, scheduledSpeed } from './lift.ts';
-import { approachAngle, flapAngle, idleThrust, shortTime } from './quantities.ts';
+import { approachAngle, flapAngle, idleThrust, runwayLength, shortTime } from './quantities.ts';
 
 const dragIncrement = z.number().min(-0.05).max(0.5);
 const loadFactor = z.number().min(1.01).max(2);
@@ -39,6 +39,11 @@ export const configuration = z
       .exactOptional(),
     rotationTime: shortTime.meta({ description: 'From rotation to lift-off.' }).exactOptional(),
     pullUpLoadFactor: loadFactor.meta({ description: 'Load factor in the arc after lift-off.' }).exactOptional(),
+    rollingStartAllowance: runwayLength
+      .meta({
+        description: 'What a rolling start takes over one from standing at full power, added to the ground roll.',
+      })
+      .exactOptional(),
     approachAngle: approachAngle.exactOptional(),
     flareLoadFactor: loadFactor.meta({ description: 'Load factor in the flare.' }).exactOptional(),
     freeRollTime: shortTime.meta({ description: 'From touchdown to braking.' }).exactOptional(),

@@ -1,11 +1,34 @@
 import { z } from 'zod';
 import { airDensity, dimension, power, pressureAltitude, temperatureAboveStandard, thrust } from './quantities.ts';
+import { id } from './text.ts';
 
 const thrustFactor = z
   .number()
   .min(0.3)
   .max(1.5)
   .meta({ description: 'Multiplies the thrust: a worn engine or a finding from trials.' })
+  .exactOptional();
+
+/** So many power settings at most; our choice. */
+export const mostPowerSettings = 8;
+
+const powerSettings = z
+  .record(
+    id,
+    z
+      .strictObject({
+        fullPowerRatio: z.number().min(0.4).max(1).meta({
+          description:
+            'Power over full power, or thrust over full thrust where the definition gives thrust; at every altitude and temperature.',
+        }),
+      })
+      .meta({ id: 'PowerSetting', description: 'A setting below full power that the flight manual has figures for.' }),
+  )
+  .meta({
+    description: 'Power settings by id, 1 to 8 of them; full power needs none.',
+    minProperties: 1,
+    maxProperties: mostPowerSettings,
+  })
   .exactOptional();
 
 const lapse = {
@@ -27,7 +50,6 @@ const lapse = {
     .max(5)
     .meta({ description: 'Multiplies the loss of power to moisture; 0 switches it off.' })
     .exactOptional(),
-  thrustFactor,
 };
 
 const disc = {
@@ -49,6 +71,8 @@ const disc = {
     .exactOptional(),
 };
 
+const shared = { thrustFactor, powerSettings };
+
 const shaftPower = power.meta({
   description: 'Greatest continuous takeoff power of one engine, at sea level on a standard day.',
 });
@@ -68,6 +92,7 @@ const fixedPitch = z.strictObject({
     .meta({ description: 'Size of the slope of the linear propeller polar.' })
     .exactOptional(),
   ...lapse,
+  ...shared,
 });
 
 const constantSpeed = z.strictObject({
@@ -78,6 +103,7 @@ const constantSpeed = z.strictObject({
     .meta({ description: 'Pressure altitude up to which the turbocharger keeps full power.' })
     .exactOptional(),
   ...lapse,
+  ...shared,
 });
 
 const turboprop = z.strictObject({
@@ -93,7 +119,7 @@ const turboprop = z.strictObject({
       description: 'n in theta^-n, the fall of power with temperature beyond the flat rating; about 1.5 to 2.5.',
     })
     .exactOptional(),
-  thrustFactor,
+  ...shared,
 });
 
 const jet = z.strictObject({
@@ -101,10 +127,10 @@ const jet = z.strictObject({
   staticThrust: thrust.meta({ description: 'Static thrust of one engine at sea level on a standard day.' }),
   flatRating,
   bypassRatio: z.number().min(0).max(15).meta({ description: 'Bypass ratio of the engine.' }).exactOptional(),
-  thrustFactor,
+  ...shared,
 });
 
-const electric = z.strictObject({ kind: z.literal('electric'), power: shaftPower, ...disc, thrustFactor });
+const electric = z.strictObject({ kind: z.literal('electric'), power: shaftPower, ...disc, ...shared });
 
 const measured = z.strictObject({
   kind: z.literal('measured'),
@@ -121,7 +147,7 @@ const measured = z.strictObject({
     .meta({ description: 'Thrust of one engine at rising true airspeeds.' }),
   density: airDensity.meta({ description: 'Density of the air in which the thrust was measured.' }),
   densityExponent: z.number().min(0).max(2).meta({ description: 'Exponent of the density ratio in the thrust.' }),
-  thrustFactor,
+  ...shared,
 });
 
 export const propulsion = z

@@ -37,6 +37,7 @@ export function toAeroplane(definition: AeroplaneDefinition): Aeroplane {
     propulsion: toPropulsion(definition.propulsion),
     wheels: perhaps(toWheels, definition.wheels),
     brakes: perhaps(toBrakes, definition.brakes),
+    reverseThrust: perhaps(toReverseThrust, definition.reverseThrust),
     engineOut: perhaps(toEngineOut, definition.engineOut),
     limitations: perhaps(toLimitations, definition.limitations),
     airspeedCalibration: calibration,
@@ -71,6 +72,7 @@ function toWing(given: Given<'wing'>): Made<'wing'> {
 
 function toWheels(given: Given<'wheels'>): Made<'wheels'> {
   return present<Made<'wheels'>>({
+    arrangement: given.arrangement,
     tyrePressure: perhaps((pressure) => si('pressure', pressure), given.tyrePressure),
     tyreSpeedLimit: perhaps(metresPerSecond, given.tyreSpeedLimit),
   });
@@ -83,6 +85,10 @@ function toBrakes(given: Given<'brakes'>): Made<'brakes'> {
     antiSkid: given.antiSkid,
     energyLimit: perhaps((energy) => si('energy', energy), given.energyLimit),
   });
+}
+
+function toReverseThrust(given: Given<'reverseThrust'>): Made<'reverseThrust'> {
+  return { thrust: si('force', given.thrust), cutOffSpeed: si('speed', given.cutOffSpeed) };
 }
 
 function toEngineOut(given: Given<'engineOut'>): Made<'engineOut'> {

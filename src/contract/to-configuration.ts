@@ -17,6 +17,7 @@ export function toConfiguration(given: ConfigurationOnWire, calibration?: Airspe
     speeds: perhaps(toSpeeds, given.speeds),
     rotationTime: perhaps(seconds, given.rotationTime),
     pullUpLoadFactor: given.pullUpLoadFactor,
+    rollingStartAllowance: perhaps((length) => si('length', length), given.rollingStartAllowance),
     approachAngle: perhaps((angle) => si('angle', angle), given.approachAngle),
     flareLoadFactor: given.flareLoadFactor,
     freeRollTime: perhaps(seconds, given.freeRollTime),

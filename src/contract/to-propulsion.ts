@@ -16,6 +16,7 @@ export function toPropulsion(given: PropulsionOnWire): Propulsion {
         propellerDiameter: si('length', given.propellerDiameter),
         polarSlopeCoefficient: given.polarSlopeCoefficient,
         ...lapse(given),
+        ...shared(given),
       });
     case 'constant-speed':
       return present<Of<'constant-speed'>>({
@@ -24,6 +25,7 @@ export function toPropulsion(given: PropulsionOnWire): Propulsion {
         ...disc(given),
         criticalAltitude: perhaps((altitude) => si('length', altitude), given.criticalAltitude),
         ...lapse(given),
+        ...shared(given),
       });
     case 'turboprop':
       return present<Of<'turboprop'>>({
@@ -32,7 +34,7 @@ export function toPropulsion(given: PropulsionOnWire): Propulsion {
         ...disc(given),
         flatRating: perhaps(difference, given.flatRating),
         lapseExponent: given.lapseExponent,
-        thrustFactor: given.thrustFactor,
+        ...shared(given),
       });
     case 'jet':
       return present<Of<'jet'>>({
@@ -40,14 +42,14 @@ export function toPropulsion(given: PropulsionOnWire): Propulsion {
         staticThrust: si('force', given.staticThrust),
         flatRating: perhaps(difference, given.flatRating),
         bypassRatio: given.bypassRatio,
-        thrustFactor: given.thrustFactor,
+        ...shared(given),
       });
     case 'electric':
       return present<Of<'electric'>>({
         kind: given.kind,
         power: si('power', given.power),
         ...disc(given),
-        thrustFactor: given.thrustFactor,
+        ...shared(given),
       });
     case 'measured':
       return present<Of<'measured'>>({
@@ -56,7 +58,7 @@ export function toPropulsion(given: PropulsionOnWire): Propulsion {
         thrusts: given.rows.map(([, thrust]) => toSi('force', thrust, given.columns[1].unit) + 0),
         density: si('density', given.density),
         densityExponent: given.densityExponent,
-        thrustFactor: given.thrustFactor,
+        ...shared(given),
       });
   }
 }
@@ -65,12 +67,15 @@ function difference(given: Q<'deltaC' | 'deltaF'>): number {
   return si('temperatureDifference', given);
 }
 
+function shared({ thrustFactor, powerSettings }: PropulsionOnWire) {
+  return { thrustFactor, powerSettings };
+}
+
 function lapse(given: Extract<PropulsionOnWire, { kind: 'fixed-pitch' | 'constant-speed' }>) {
   return {
     altitudeLapseCoefficient: given.altitudeLapseCoefficient,
     temperatureExponent: given.temperatureExponent,
     humidityFactor: given.humidityFactor,
-    thrustFactor: given.thrustFactor,
   };
 }
 

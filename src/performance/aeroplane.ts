@@ -31,13 +31,19 @@ export interface Aeroplane {
   readonly drag: { readonly zeroLiftCoefficient: number; readonly oswaldFactor: number };
   readonly configurations: Readonly<Record<string, Configuration>>;
   readonly propulsion: Propulsion;
-  readonly wheels?: { readonly tyrePressure?: number; readonly tyreSpeedLimit?: number };
+  readonly wheels?: {
+    readonly arrangement?: WheelArrangement;
+    readonly tyrePressure?: number;
+    readonly tyreSpeedLimit?: number;
+  };
   readonly brakes?: {
     readonly brakingFrictionCoefficient?: number;
     readonly loadFactor?: number;
     readonly antiSkid?: AntiSkid;
     readonly energyLimit?: number;
   };
+  /** of the whole aeroplane, backwards [N], above a ground speed [m/s] */
+  readonly reverseThrust?: { readonly thrust: number; readonly cutOffSpeed: number };
   readonly engineOut?: {
     readonly vmc?: number;
     readonly vmcg?: number;
@@ -56,6 +62,9 @@ export interface Aeroplane {
 
 export const antiSkids = ['none', 'on-off', 'quasi-modulating', 'fully-modulating'] as const;
 export type AntiSkid = (typeof antiSkids)[number];
+
+export const wheelArrangements = ['tricycle', 'tailwheel'] as const;
+export type WheelArrangement = (typeof wheelArrangements)[number];
 
 export interface Wing {
   readonly area: number;
@@ -104,6 +113,8 @@ export interface Configuration {
   };
   readonly rotationTime?: number;
   readonly pullUpLoadFactor?: number;
+  /** what a rolling start takes over one from standing at full power [m] */
+  readonly rollingStartAllowance?: number;
   readonly approachAngle?: number;
   readonly flareLoadFactor?: number;
   readonly freeRollTime?: number;
@@ -121,14 +132,25 @@ export interface Lapse {
 /** Power, static thrust and measured thrust are of one engine. */
 export type Propulsion = FixedPitch | ConstantSpeed | Turboprop | Jet | Electric | MeasuredThrust;
 
-export interface FixedPitch extends Lapse {
+/** A setting below full power that the flight manual has figures for. */
+export interface PowerSetting {
+  /** of full power, or of full thrust where the definition gives thrust; at every altitude and temperature */
+  readonly fullPowerRatio: number;
+}
+
+/** Settings by id; full power needs none. */
+export interface PowerSettings {
+  readonly powerSettings?: Readonly<Record<string, PowerSetting>>;
+}
+
+export interface FixedPitch extends Lapse, PowerSettings {
   readonly kind: 'fixed-pitch';
   readonly staticThrust: number;
   readonly propellerDiameter: number;
   /** |b| of the linear propeller polar; absent: 0.056 */
   readonly polarSlopeCoefficient?: number;
 }
-export interface Disc {
+export interface Disc extends PowerSettings {
   readonly propellerDiameter: number;
   readonly profileFactor?: number;
   readonly inducedFactor?: number;
@@ -147,7 +169,7 @@ export interface Turboprop extends Disc {
   readonly lapseExponent?: number;
   readonly thrustFactor?: number;
 }
-export interface Jet {
+export interface Jet extends PowerSettings {
   readonly kind: 'jet';
   readonly staticThrust: number;
   readonly flatRating?: number;
@@ -159,7 +181,7 @@ export interface Electric extends Disc {
   readonly power: number;
   readonly thrustFactor?: number;
 }
-export interface MeasuredThrust {
+export interface MeasuredThrust extends PowerSettings {
   readonly kind: 'measured';
   /** true airspeeds [m/s], rising, and the thrust of one engine at each [N] */
   readonly airspeeds: readonly number[];

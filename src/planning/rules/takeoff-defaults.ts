@@ -1,12 +1,4 @@
-import type { ReferenceKey } from '../../references.ts';
-
-/** A figure taken where a definition has none, with the less favourable end of its plausible range. */
-export interface TakeoffDefault {
-  readonly value: number;
-  readonly otherEnd: number;
-  readonly because: string;
-  readonly source: ReferenceKey;
-}
+import type { StandingDefault } from './standing-default.ts';
 
 /**
  * What a takeoff takes for the members that a configuration leaves out: ratios, coefficients and seconds.
@@ -29,6 +21,7 @@ export const takeoffDefaults = {
   rotationTime: {
     value: 0,
     otherEnd: 1,
+    kind: 'time',
     because: 'no rotation time is stated, so lift-off comes with rotation; about 1 s is usual for a light aeroplane',
     source: 'Raymer',
   },
@@ -62,4 +55,4 @@ export const takeoffDefaults = {
     because: 'no drag of flap and gear in the air is stated beside the zero-lift drag',
     source: 'Judgement',
   },
-} as const satisfies Record<string, TakeoffDefault>;
+} as const satisfies Record<string, StandingDefault>;
