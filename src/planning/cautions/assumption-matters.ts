@@ -4,6 +4,8 @@ import type { CautionTest } from './caution-test.ts';
 
 /** Change of the distance, as a ratio, above which an assumption is named. */
 const matters = 0.01;
+/** The change above which it may change the decision; below it is worth knowing. */
+const mayDecide = 0.05;
 
 /** Assumed values that move the distance; the largest is named, all are listed under the basis. */
 export const assumptionMatters: CautionTest<AnswerContext> = {
@@ -29,6 +31,7 @@ export const assumptionMatters: CautionTest<AnswerContext> = {
       message: `${many}: ${largest.name}, ${taken(largest.assumption.value)}. At ${largest.otherEnd?.text} the distance is ${percentText(size(effect))} ${effect > 0 ? 'longer' : 'shorter'}.`,
       at: largest.assumption.at,
       value: effect,
+      severity: size(effect) > mayDecide ? 'caution' : 'note',
     };
   },
 };

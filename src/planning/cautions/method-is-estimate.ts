@@ -4,7 +4,7 @@ import type { CautionTest } from './caution-test.ts';
 /** Distances from stated figures and physics, not from the flight manual. */
 export const methodIsEstimate: CautionTest<AnswerContext> = {
   code: 'method-is-estimate',
-  severity: 'caution',
+  severity: 'note',
   meaning:
     "The distances are computed from the aeroplane's stated figures by physics, not read from its flight manual.",
   source: 'SpaEfbAmc5',

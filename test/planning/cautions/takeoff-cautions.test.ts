@@ -287,14 +287,21 @@ const pairs: readonly Pair[] = [
   },
   {
     code: 'assumption-matters',
-    severity: 'caution',
+    severity: 'note',
     raised: { runway: { surface: { kind: 'paved', state: 'dry' } } },
     silent: { runway: { surface: { kind: 'paved', state: 'dry', rollingFrictionCoefficient: 0.03 } } },
     says: /^One assumed value moves the takeoff distance by more than 1 %: rolling friction, taken as 0\.03\. At 0\.04 the distance is [\d.]+ % longer\.$/,
   },
   {
-    code: 'method-is-estimate',
+    code: 'assumption-matters',
     severity: 'caution',
+    raised: { runway: { surface: { kind: 'grass', state: 'wet', grass: 'short' } } },
+    silent: { runway: { surface: { kind: 'paved', state: 'dry', rollingFrictionCoefficient: 0.03 } } },
+    says: /rolling friction, taken as 0\.08\./,
+  },
+  {
+    code: 'method-is-estimate',
+    severity: 'note',
     raised: {},
     silent: { runway: { surface: { kind: 'snow', state: 'dry' } } },
     says: /The takeoff distance of 421 m has a 90 % band from 29\d m to 59\d m\.$/,
