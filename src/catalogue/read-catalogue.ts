@@ -13,6 +13,8 @@ export interface Catalogue {
   readonly list: () => readonly CatalogueEntry[];
   /** SHA-256 over the ids and digests of all aeroplanes, hex: one figure for the state of the catalogue */
   readonly digest: string;
+  /** how many of them came with the service, and how many from the operator's folder */
+  readonly aeroplanes: { readonly builtIn: number; readonly own: number };
 }
 
 /** Where aeroplanes come from. With neither, only definitions in the question itself are answered. */
@@ -32,19 +34,24 @@ const builtInFolder = fileURLToPath(new URL('./aeroplanes/', import.meta.url));
  */
 export function readCatalogue({ builtIn, folder }: CatalogueSource): Catalogue {
   const entries = new Map<string, CatalogueEntry>();
-  for (const from of [...(builtIn ? [builtInFolder] : []), ...(folder === undefined ? [] : [folder])]) {
-    for (const [name, bytes] of sealedFiles(from)) {
-      const entry = aeroplaneFile(name, bytes);
-      if (isRefused(entry)) throw new CatalogueFault(from, `${name}: ${faultLine(entry.refused)}`);
-      const { id } = entry.definition;
-      if (entries.has(id)) throw new CatalogueFault(from, `${name}: the id ${id} is one of the built-in aeroplanes`);
-      entries.set(id, entry);
-    }
-  }
+  if (builtIn) addAeroplanes(builtInFolder, entries);
+  const fromService = entries.size;
+  if (folder !== undefined) addAeroplanes(folder, entries);
   const list = [...entries.keys()].sort().map((id) => entries.get(id) as CatalogueEntry);
   return {
     get: (id) => entries.get(id),
     list: () => list,
     digest: sha256(JSON.stringify(list.map(({ definition, digest }) => [definition.id, digest]))),
+    aeroplanes: { builtIn: fromService, own: entries.size - fromService },
   };
+}
+
+function addAeroplanes(folder: string, entries: Map<string, CatalogueEntry>): void {
+  for (const [name, bytes] of sealedFiles(folder)) {
+    const entry = aeroplaneFile(name, bytes);
+    if (isRefused(entry)) throw new CatalogueFault(folder, `${name}: ${faultLine(entry.refused)}`);
+    const { id } = entry.definition;
+    if (entries.has(id)) throw new CatalogueFault(folder, `${name}: the id ${id} is one of the built-in aeroplanes`);
+    entries.set(id, entry);
+  }
 }

@@ -16,6 +16,15 @@ export const version = z
     service: z.string().meta({ description: 'Name of the service.' }),
     version: z.string().meta({ description: 'Version of the service.' }),
     modelVersion: z.string().meta({ description: 'Changes whenever any number of any answer changes.' }),
+    aeroplanes: z
+      .strictObject({
+        builtIn: z
+          .int()
+          .min(0)
+          .meta({ description: 'Invented ones that come with the service; 0 where switched off.' }),
+        own: z.int().min(0).meta({ description: "Those of the operator's own folder." }),
+      })
+      .meta({ description: 'How many aeroplanes are on file.' }),
     digests: z
       .strictObject({ catalogue: z.string().meta({ description: 'SHA-256 over all aeroplanes on file, hex.' }) })
       .meta({ description: 'Digests of what the service was started with.' }),

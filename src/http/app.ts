@@ -70,12 +70,7 @@ export async function buildApp({ catalogue, logger = false, settings }: House): 
   sources(app);
   const lookup = aeroplaneLookup(catalogue);
   const ours = stamp();
-  const warmUps = [
-    takeoff(app, catalogue, lookup, ours),
-    speeds(app, catalogue, lookup, ours),
-    airspeed(app, lookup, ours),
-    air(app, ours),
-  ];
+  const warmUps = [takeoff(app, lookup, ours), speeds(app, lookup, ours), airspeed(app, lookup, ours), air(app, ours)];
   await documentPages(app);
 
   app.addHook('onReady', (done) => {

@@ -9,10 +9,13 @@ export const builtInFolder = join(root, 'src', 'catalogue', 'aeroplanes');
 /** Runs a test on a folder of its own, empty or with the built-in aeroplanes in it, and takes it away afterwards. */
 export function inFolder<T>(content: 'empty' | 'built-in', run: (folder: string) => T): T {
   const folder = mkdtempSync(join(tmpdir(), 'catalogue-'));
+  const takeAway = () => rmSync(folder, { recursive: true, force: true });
+  let result: T | undefined;
   try {
     if (content === 'built-in') cpSync(builtInFolder, folder, { recursive: true });
-    return run(folder);
+    result = run(folder);
+    return result instanceof Promise ? (result.finally(takeAway) as T) : result;
   } finally {
-    rmSync(folder, { recursive: true, force: true });
+    if (!(result instanceof Promise)) takeAway();
   }
 }

@@ -20,9 +20,9 @@ export function sourceFiles(folder: string): SourceFile[] {
     .map((file) => ({ path: relative(root, file).replaceAll('\\', '/'), text: readFileSync(file, 'utf8') }));
 }
 
-/** The specifiers a file imports or re-exports, types included. */
+/** The specifiers a file imports or re-exports, types included, at once or later. */
 export function importsOf(text: string): string[] {
-  const pattern = /^\s*(?:import|export)\b(?:[^'";]*?\bfrom)?\s*['"]([^'"]+)['"]/gm;
+  const pattern = /(?:^\s*(?:import|export)\b(?:[^'";]*?\bfrom)?\s*|\bimport\()['"]([^'"]+)['"]/gm;
   return [...text.matchAll(pattern)].map((match) => match[1] as string);
 }
 

@@ -11,7 +11,8 @@ export function aeroplanes(app: FastifyInstance, catalogue: Catalogue): void {
     url: '/v1/aeroplanes',
     operationId: 'listAeroplanes',
     summary: 'Which aeroplanes are on file?',
-    description: 'The aeroplanes that a question may name by id. All of them are invented.',
+    description:
+      "The aeroplanes that a question may name by id: the invented ones that come with the service, unless they are switched off, and those of the operator's own folder.",
     tag: 'lists',
     response: aeroplaneList,
     answer: { aeroplanes: entries.map(({ definition, digest }) => toListedAeroplane(definition, digest)) },

@@ -36,6 +36,7 @@ export function service(app: FastifyInstance, catalogue: Catalogue): void {
       service: serviceName,
       version: serviceVersion,
       modelVersion,
+      aeroplanes: catalogue.aeroplanes,
       digests: { catalogue: catalogue.digest },
     },
   });

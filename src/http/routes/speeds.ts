@@ -1,11 +1,10 @@
 import type { FastifyInstance } from 'fastify';
-import type { Catalogue } from '../../catalogue/read-catalogue.ts';
 import type { AeroplaneLookup } from '../../contract/aeroplane-lookup.ts';
 import { answerSpeeds } from '../../contract/answer-speeds.ts';
 import { speedsRequest, speedsResponse } from '../../contract/speeds.ts';
 import type { Stamp } from '../../contract/to-basis.ts';
 import { addOperation, type WarmUp } from '../operation.ts';
-import { takeoffStates } from '../takeoff-states.ts';
+import { warmUpStates } from '../warm-up-states.ts';
 
 const example = {
   aeroplane: { id: 'pellibrin-trainer' },
@@ -19,7 +18,7 @@ const example = {
   bank: { value: 30, unit: 'deg' },
 };
 
-export function speeds(app: FastifyInstance, catalogue: Catalogue, lookup: AeroplaneLookup, stamp: Stamp): WarmUp {
+export function speeds(app: FastifyInstance, lookup: AeroplaneLookup, stamp: Stamp): WarmUp {
   return addOperation(app, {
     url: '/v1/speeds',
     operationId: 'speeds',
@@ -29,7 +28,7 @@ export function speeds(app: FastifyInstance, catalogue: Catalogue, lookup: Aerop
     request: speedsRequest,
     response: speedsResponse,
     example,
-    warmUp: takeoffStates(catalogue).map((state) => ({ ...example, ...state })),
+    warmUp: warmUpStates('takeoff').map((state) => ({ ...example, ...state })),
     answer: (request) => answerSpeeds(request, lookup, stamp),
   });
 }

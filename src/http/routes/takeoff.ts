@@ -1,5 +1,4 @@
 import type { FastifyInstance } from 'fastify';
-import type { Catalogue } from '../../catalogue/read-catalogue.ts';
 import type { AeroplaneLookup } from '../../contract/aeroplane-lookup.ts';
 import { answerTakeoff } from '../../contract/answer-takeoff.ts';
 import { takeoffRequest } from '../../contract/takeoff-request.ts';
@@ -7,10 +6,10 @@ import { takeoffResponse } from '../../contract/takeoff-response.ts';
 import type { Stamp } from '../../contract/to-basis.ts';
 import { exampleTakeoff } from '../document/example-takeoff.ts';
 import { addOperation, type WarmUp } from '../operation.ts';
-import { takeoffStates } from '../takeoff-states.ts';
+import { warmUpStates } from '../warm-up-states.ts';
 
-/** The takeoff; warmed up with each aeroplane on file, since each kind of propulsion has its own arithmetic. */
-export function takeoff(app: FastifyInstance, catalogue: Catalogue, lookup: AeroplaneLookup, stamp: Stamp): WarmUp {
+/** The takeoff; warmed up with each kind of propulsion. */
+export function takeoff(app: FastifyInstance, lookup: AeroplaneLookup, stamp: Stamp): WarmUp {
   return addOperation(app, {
     url: '/v1/takeoff',
     operationId: 'takeoff',
@@ -21,7 +20,7 @@ export function takeoff(app: FastifyInstance, catalogue: Catalogue, lookup: Aero
     request: takeoffRequest,
     response: takeoffResponse,
     example: exampleTakeoff,
-    warmUp: takeoffStates(catalogue).map((state) => ({ ...exampleTakeoff, ...state, ruleSet: 'unfactored' })),
+    warmUp: warmUpStates('takeoff').map((state) => ({ ...exampleTakeoff, ...state, ruleSet: 'unfactored' })),
     answer: (request) => answerTakeoff(request, lookup, stamp),
   });
 }
