@@ -12,3 +12,12 @@
 export function aeroplanePointer(aeroplaneAt: string, member: string): string {
   return aeroplaneAt.endsWith('/definition') ? `${aeroplaneAt}${member}` : `${aeroplaneAt}#${member}`;
 }
+
+/** Where a member of the asked configuration stands in the request. */
+export function configurationPointer(
+  { aeroplaneAt, configuration }: { readonly aeroplaneAt: string; readonly configuration: string },
+  member: string,
+): string {
+  const id = configuration.replaceAll('~', '~0').replaceAll('/', '~1');
+  return aeroplanePointer(aeroplaneAt, `/configurations/${id}/${member}`);
+}

@@ -1,5 +1,5 @@
 import type { ScheduledSpeed } from '../performance/aeroplane.ts';
-import { aeroplanePointer } from './aeroplane-pointer.ts';
+import { configurationPointer } from './aeroplane-pointer.ts';
 import type { Assumption } from './answer.ts';
 import type { Assumed, NumberMember, OtherEnd } from './assumed.ts';
 import type { Question } from './question.ts';
@@ -32,17 +32,16 @@ export interface FigureOfSpeed<Run> {
 /** The figures of a configuration: as stated, or the default, said with where it would be stated and what else it could be. */
 export class ConfigurationFigures<Run> {
   readonly assumed: Assumed<OtherEnd<Run>>[] = [];
-  readonly #aeroplaneAt: string;
-  readonly #id: string;
+  readonly #question: Pick<Question, 'aeroplaneAt' | 'configuration'>;
 
-  constructor({ aeroplaneAt, configuration }: Pick<Question, 'aeroplaneAt' | 'configuration'>) {
-    this.#aeroplaneAt = aeroplaneAt;
-    this.#id = configuration.replaceAll('~', '~0').replaceAll('/', '~1');
+  /** @param question - for the pointers */
+  constructor(question: Pick<Question, 'aeroplaneAt' | 'configuration'>) {
+    this.#question = question;
   }
 
   /** Pointer to a member of the configuration. */
   at(member: string): string {
-    return aeroplanePointer(this.#aeroplaneAt, `/configurations/${this.#id}/${member}`);
+    return configurationPointer(this.#question, member);
   }
 
   figure({ member, name, stated, standing, runMember, increment = false }: Figure<Run>): number {

@@ -1,0 +1,154 @@
+import type { Aeroplane, Configuration, ScheduledSpeed } from '../performance/aeroplane.ts';
+import type { LandingRun } from '../performance/landing/landing-run.ts';
+import type { Assumed, OtherEnd } from './assumed.ts';
+import { ConfigurationFigures } from './configuration-figures.ts';
+import type { LandingQuestion } from './question.ts';
+import { referenceSpeedRules } from './rules/certification/reference-speed.ts';
+import { idleThrustShare, landingDefaults } from './rules/landing-defaults.ts';
+import { measureText } from './sentences/measure-text.ts';
+
+/** How to put the other end of an assumption of a landing into a run. */
+export type LandingOtherEnd =
+  | OtherEnd<LandingRun>
+  | {
+      /** idle thrust in the roll [N] */
+      readonly kind: 'idle-thrust';
+      readonly value: number;
+      readonly text: string;
+    }
+  | {
+      readonly kind: 'braking-friction';
+      readonly factor: number;
+      readonly text: string;
+    };
+
+export type LandingAssumed = Assumed<LandingOtherEnd>;
+
+/** A landing configuration with nothing left out, and the procedure, in SI. */
+export interface ResolvedLanding {
+  /** undefined: the speed of the certification basis */
+  readonly landingReference: ScheduledSpeed | undefined;
+  readonly touchdown: ScheduledSpeed;
+  /** CAS on top of the landing reference speed [m/s] */
+  readonly approachSpeedIncrement: number;
+  readonly approachAngle: number;
+  readonly flareLoadFactor: number;
+  readonly freeRollTime: number;
+  /** of the whole aeroplane [N] */
+  readonly idleThrust: number;
+  readonly groundLiftCoefficient: number;
+  readonly groundDragIncrement: number;
+  readonly airDragIncrement: number;
+  readonly assumed: readonly LandingAssumed[];
+}
+
+/**
+ * Fills in what a configuration and the procedure leave out, each as an assumption with where it would be stated and what else
+ * it could be.
+ *
+ * @param question - for the procedure and the pointers
+ * @param configuration - of the aeroplane, for landing
+ * @param staticThrust - full thrust of the whole aeroplane at rest in this air [N]
+ * @see references.Raymer for touchdown, flare and free roll; references.Judgement for the rest
+ */
+export function resolveLanding(
+  question: Pick<LandingQuestion, 'aeroplane' | 'aeroplaneAt' | 'configuration' | 'procedure' | 'units'>,
+  configuration: Configuration,
+  staticThrust: number,
+): ResolvedLanding {
+  const figures = new ConfigurationFigures<LandingRun>(question);
+  const d = landingDefaults;
+  const { speeds, flap } = configuration;
+  const { procedure = {} } = question;
+  if (speeds?.landingReference === undefined) sayReference(figures, question.aeroplane);
+  const touchdown = figures.speed({
+    member: 'touchdown',
+    name: 'the touchdown speed over the stall speed',
+    stated: speeds?.touchdown,
+    standing: d.touchdownStallRatio,
+    runMember: 'touchdownSpeed',
+  });
+  const resolved = {
+    landingReference: speeds?.landingReference,
+    touchdown,
+    approachSpeedIncrement: procedure.approachSpeedIncrement ?? 0,
+    approachAngle: figures.figure({
+      member: 'approachAngle',
+      name: 'the approach angle',
+      stated: procedure.approachAngle ?? configuration.approachAngle,
+      standing: d.approachAngle,
+      runMember: 'approachAngle',
+    }),
+    flareLoadFactor: figures.figure({
+      member: 'flareLoadFactor',
+      name: 'the load factor of the flare',
+      stated: configuration.flareLoadFactor,
+      standing: d.flareLoadFactor,
+      runMember: 'flareLoadFactor',
+    }),
+    freeRollTime: figures.figure({
+      member: 'freeRollTime',
+      name: 'the time from touchdown to braking',
+      stated: procedure.reactionTime ?? configuration.freeRollTime,
+      standing: d.freeRollTime,
+      runMember: 'freeRollTime',
+    }),
+    groundLiftCoefficient: figures.figure({
+      member: 'groundLiftCoefficient',
+      name: 'the lift coefficient of the roll',
+      stated: configuration.groundLiftCoefficient,
+      standing: flap > 0 ? d.groundLiftFlap : d.groundLiftClean,
+      runMember: 'groundLiftCoefficient',
+    }),
+    groundDragIncrement: figures.figure({
+      member: 'groundDragIncrementCoefficient',
+      name: 'the drag increment on the ground',
+      stated: configuration.groundDragIncrementCoefficient,
+      standing: d.groundDragIncrement,
+      runMember: 'groundDragCoefficient',
+      increment: true,
+    }),
+    airDragIncrement: figures.figure({
+      member: 'airDragIncrementCoefficient',
+      name: 'the drag increment in the air',
+      stated: configuration.airDragIncrementCoefficient,
+      standing: flap > 0 ? d.airDragFlap : d.airDragClean,
+    }),
+  };
+  const idle = configuration.idleThrust;
+  const assumed: LandingAssumed[] = figures.assumed;
+  if (idle === undefined) assumed.push(assumedIdle(figures.at('idleThrust'), staticThrust, question.units));
+  return { ...resolved, idleThrust: idle ?? idleThrustShare.value * staticThrust, assumed };
+}
+
+function sayReference(figures: ConfigurationFigures<LandingRun>, { certification }: Aeroplane): void {
+  const { phrase, stallRatio, source } = referenceSpeedRules[certification.basis];
+  figures.say(
+    'the landing reference speed over the stall speed',
+    {
+      at: figures.at('speeds/landingReference'),
+      value: stallRatio,
+      because: `no landing reference speed is stated; ${phrase}`,
+      source,
+    },
+    {
+      kind: 'speed',
+      member: 'referenceSpeed',
+      factor: (stallRatio + 0.1) / stallRatio,
+      text: String(Math.round((stallRatio + 0.1) * 100) / 100),
+    },
+  );
+}
+
+function assumedIdle(at: string, staticThrust: number, units: LandingQuestion['units']): LandingAssumed {
+  const { value, otherEnd, because, source } = idleThrustShare;
+  return {
+    name: 'the idle thrust',
+    assumption: { at, value: { kind: 'force', value: value * staticThrust }, because, source },
+    otherEnd: {
+      kind: 'idle-thrust',
+      value: otherEnd * staticThrust,
+      text: measureText(units, 'force', otherEnd * staticThrust),
+    },
+  };
+}
