@@ -1,3 +1,6 @@
+/** Prints every speed as a ratio or beside a calibration loop of the same run: `npm run bench`. */
+import { benchHttp } from './http.ts';
 import { physicsBench } from './physics-bench.ts';
 
 physicsBench((line) => console.log(line));
+await benchHttp(['plain-cool-sea-level', 'hot-high-wet-grass', 'jet-in-feet']);
