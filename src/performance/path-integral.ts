@@ -18,8 +18,12 @@ export function newPathIntegral(): PathIntegral {
   return { distance: 0, time: 0, least: Number.POSITIVE_INFINITY, leastAt: 0, most: Number.NEGATIVE_INFINITY };
 }
 
-/** Change on halving, as a share of the sum, at which a piece is taken. */
-const agreement = 1e-10;
+/** Change on halving, as a share of the sum, at which a piece is taken: ten times the rounding of the least acceleration used. */
+const agreement = 1e-9;
+/** A change that is none: a nanometre, a nanosecond. A tailwind of 1e-300 m/s makes pieces of no length. */
+const negligible = 1e-9;
+/** Pieces a path may be cut into; a pole as near as 1e-6 of a piece needs some forty. */
+const mostPieces = 500;
 
 /**
  * Adds a piece by halving it until its halves agree with the whole: for integrands that nearly reach infinity.
@@ -28,28 +32,45 @@ const agreement = 1e-10;
  * @param from - lower end
  * @param to - upper end
  * @param sum - receives the piece
- * @param halvings - how often a piece may be halved
- * @returns false where that does not settle it, or what drives the path is not positive somewhere
+ * @returns false where 500 pieces do not settle it, or what drives the path is not positive somewhere
  */
-export function addSettled(add: AddPiece, from: number, to: number, sum: PathIntegral, halvings = 40): boolean {
-  const middle = from + (to - from) / 2;
-  const whole = newPathIntegral();
-  const halves = newPathIntegral();
-  add(from, to, whole);
-  add(from, middle, halves);
-  add(middle, to, halves);
-  if (!(whole.least > 0 && halves.least > 0)) {
-    gather(sum, whole.least < halves.least ? whole : halves);
-    return false;
+export function addSettled(add: AddPiece, from: number, to: number, sum: PathIntegral): boolean {
+  const pending: [from: number, to: number, whole: PathIntegral][] = [[from, to, pieceOf(add, from, to)]];
+  for (let pieces = 0; pieces < mostPieces; pieces++) {
+    const next = pending.pop();
+    if (next === undefined) return true;
+    const [low, high, whole] = next;
+    const middle = low + (high - low) / 2;
+    const lower = pieceOf(add, low, middle);
+    const upper = pieceOf(add, middle, high);
+    if (!(whole.least > 0 && lower.least > 0 && upper.least > 0)) {
+      gather(
+        sum,
+        whole.least < lower.least && whole.least < upper.least ? whole : lower.least < upper.least ? lower : upper,
+      );
+      return false;
+    }
+    if (
+      agree(lower.distance + upper.distance, whole.distance, sum.distance) &&
+      agree(lower.time + upper.time, whole.time, sum.time)
+    ) {
+      gather(sum, lower);
+      gather(sum, upper);
+    } else {
+      pending.push([middle, high, upper], [low, middle, lower]);
+    }
   }
-  const settled =
-    Math.abs(halves.distance - whole.distance) <= agreement * (halves.distance + sum.distance) &&
-    Math.abs(halves.time - whole.time) <= agreement * (halves.time + sum.time);
-  if (settled || halvings === 0) {
-    gather(sum, halves);
-    return settled;
-  }
-  return addSettled(add, from, middle, sum, halvings - 1) && addSettled(add, middle, to, sum, halvings - 1);
+  return pending.length === 0;
+}
+
+function pieceOf(add: AddPiece, from: number, to: number): PathIntegral {
+  const piece = newPathIntegral();
+  add(from, to, piece);
+  return piece;
+}
+
+function agree(halves: number, whole: number, before: number): boolean {
+  return Math.abs(halves - whole) <= agreement * (halves + before) + negligible;
 }
 
 function gather(sum: PathIntegral, part: PathIntegral): void {

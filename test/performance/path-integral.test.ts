@@ -59,4 +59,16 @@ describe('addSettled', () => {
     ).toBe(false);
     expect(sum.least).toBeLessThan(0);
   });
+
+  it('gives up after a bounded effort where rounding or noise never lets the halves agree', () => {
+    let calls = 0;
+    const noisy: AddPiece = (from, to, sum) => {
+      calls++;
+      sum.least = Math.min(sum.least, 1);
+      sum.distance += (to - from) * (1 + 1e-3 * Math.sin(1e6 * calls));
+      sum.time += to - from;
+    };
+    expect(addSettled(noisy, 0, 1, newPathIntegral())).toBe(false);
+    expect(calls).toBeLessThan(1500);
+  });
 });

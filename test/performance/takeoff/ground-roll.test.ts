@@ -136,4 +136,10 @@ describe('groundRoll', () => {
     const expected = (10 / Math.sqrt(2 * k)) * Math.atan(10 * Math.sqrt(k / 2)) - Math.log1p((100 * k) / 2) / (2 * k);
     expect(behind).toBeCloseTo(expected, 6);
   });
+
+  it('takes a tailwind of no size as none where the acceleration is small', () => {
+    const weak = { groundDragCoefficient: (2 * (2 - 0.01)) / 900 };
+    const still = roll(plainRun(weak)).distance;
+    expect(roll(plainRun({ ...weak, headwind: -4e-323 })).distance).toBeCloseTo(still, 6);
+  });
 });
