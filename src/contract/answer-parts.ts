@@ -22,6 +22,7 @@ export const temperatureDifference = shownSchema(
 export const pressure = shownSchema('AnsweredPressure', 'pressure', 'A pressure.');
 export const density = shownSchema('AnsweredDensity', 'density', 'A density of the air.');
 export const percent = shownSchema('AnsweredPercent', 'gradient', 'A proportion in per cent.');
+export const rateOfClimb = shownSchema('AnsweredRateOfClimb', 'rateOfClimb', 'A rate of climb.');
 export const time = shownSchema('AnsweredTime', 'time', 'A time.');
 
 const kinds: readonly Kind[] = [

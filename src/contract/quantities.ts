@@ -137,6 +137,14 @@ export const airspeed = quantitySchema(
   5,
   150,
 );
+export const speedIncrement = quantitySchema(
+  'SpeedIncrement',
+  'What is flown on top of a speed of the procedure.',
+  'speed',
+  airspeedUnits,
+  0,
+  20,
+);
 export const flightSpeed = quantitySchema(
   'FlightSpeed',
   'An airspeed in flight, of the kind named by its member.',

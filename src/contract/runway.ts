@@ -21,6 +21,15 @@ export const surface = z
         description: 'Friction of free-rolling wheels over their load, instead of the one for this kind and state.',
       })
       .exactOptional(),
+    brakingFrictionCoefficient: z
+      .number()
+      .min(0)
+      .max(1)
+      .meta({
+        description:
+          'Braking force over the load on all wheels, brakes and anti-skid as they are, instead of the one for this kind and state.',
+      })
+      .exactOptional(),
   })
   .meta({ id: 'Surface', description: 'The surface of the runway and its state.' });
 

@@ -1,12 +1,12 @@
-import type { Check, Factor, TakeoffAnswer } from '../planning/answer.ts';
+import type { Answer, Check, Factor } from '../planning/answer.ts';
+import type { AssessmentOnWire } from './assessment.ts';
 import type { Draft } from './present.ts';
 import { type Presentation, shownPercent, shownQuantity, shownRatio } from './shown-quantity.ts';
-import type { TakeoffResponse } from './takeoff-response.ts';
 
-type ShownCheck = NonNullable<TakeoffResponse['assessment']>['checks'][number];
+type ShownCheck = AssessmentOnWire['checks'][number];
 
 /** The checks of the rule set: what is required rounded up, what is available and what is spare rounded down. */
-export function toAssessment(how: Presentation, given: NonNullable<TakeoffAnswer['assessment']>) {
+export function toAssessment(how: Presentation, given: NonNullable<Answer['assessment']>) {
   const { ruleSet, governing } = given;
   const checks = given.checks.map((check) => toCheck(how, check));
   return governing === undefined ? { ruleSet, checks } : { ruleSet, checks, governing };

@@ -1,7 +1,8 @@
 import type { z } from 'zod';
-import type { Assumption } from '../planning/answer.ts';
+import type { Answer, Assumption, BandContribution } from '../planning/answer.ts';
 import { type ReferenceKey, references } from '../references.ts';
 import type { assumption } from './answer-parts.ts';
+import type { BasisOnWire } from './basis.ts';
 import type { Draft } from './present.ts';
 import { type Presentation, shownPercent } from './shown-quantity.ts';
 import { toMeasure } from './to-advisory.ts';
@@ -40,4 +41,49 @@ export function toSources(...keys: readonly (readonly ReferenceKey[])[]) {
 export function namedSource(key: ReferenceKey) {
   const { title, status } = references[key];
   return { key, title, status };
+}
+
+/** By how much ground roll and air distance move with one input. */
+export function toContribution(how: Presentation, { of, groundRoll, airDistance }: BandContribution) {
+  return {
+    of,
+    groundRollPercent: shownPercent(how, groundRoll, 'nearest'),
+    airDistancePercent: shownPercent(how, airDistance, 'nearest'),
+  };
+}
+
+/**
+ * What an answer rests on.
+ *
+ * @param toBand - an entry of the band as this kind of answer writes it
+ */
+export function toBasis<Band>(
+  how: Presentation,
+  answer: Answer,
+  aeroplaneDigest: string,
+  stamp: Stamp,
+  toBand: (contribution: BandContribution) => Band,
+) {
+  const { method, band, assumed, notGiven, sources } = answer.basis;
+  const basis = { method } as Draft<BasisOnWire<Band>>;
+  if (band !== undefined) basis.band = band.map(toBand);
+  basis.assumed = toAssumed(how, assumed);
+  basis.notGiven = [...notGiven];
+  basis.sources = toSources(sources, citedBy(answer));
+  basis.modelVersion = stamp.modelVersion;
+  basis.digests = { aeroplane: aeroplaneDigest, rules: stamp.rulesDigest };
+  return basis;
+}
+
+/** Sources that checks, factors, cautions and assumptions name: an answer names no key that it does not list. */
+function citedBy({ assessment, cautions, basis }: Answer): ReferenceKey[] {
+  const keys: ReferenceKey[] = [];
+  for (const check of assessment?.checks ?? []) {
+    keys.push(check.source);
+    for (const factor of check.factors) keys.push(factor.source);
+    for (const factor of check.alternative?.factors ?? []) keys.push(factor.source);
+  }
+  for (const { source } of cautions) if (source !== undefined) keys.push(source);
+  for (const { source } of basis.assumed) if (source !== undefined) keys.push(source);
+  return keys;
 }

@@ -1,4 +1,4 @@
-import type { PowerSetting, Propulsion } from './aeroplane.ts';
+import type { Propulsion } from './aeroplane.ts';
 
 /**
  * The propulsion at a setting below full power.
@@ -7,10 +7,11 @@ import type { PowerSetting, Propulsion } from './aeroplane.ts';
  * with the ratio to the power 2/3, as an actuator disc's does.
  *
  * @param propulsion - at full power
- * @param setting - fullPowerRatio above 0, at most 1
+ * @param fullPowerRatio - above 0, at most 1
  * @see references.GudmundssonGa for static thrust and power
  */
-export function propulsionAtSetting(propulsion: Propulsion, { fullPowerRatio }: PowerSetting): Propulsion {
+export function propulsionAtSetting(propulsion: Propulsion, fullPowerRatio: number): Propulsion {
+  if (fullPowerRatio === 1) return propulsion;
   if (!(fullPowerRatio > 0 && fullPowerRatio <= 1)) {
     throw new RangeError(`fullPowerRatio must be above 0 and at most 1: ${fullPowerRatio}`);
   }

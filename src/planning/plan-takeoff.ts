@@ -1,7 +1,7 @@
 import type { Propulsion } from '../performance/aeroplane.ts';
 import type { Air } from '../performance/air.ts';
+import { propulsionAtSetting } from '../performance/power-setting.ts';
 import { propulsionThrust } from '../performance/propulsion.ts';
-import { takeoff } from '../performance/takeoff/takeoff.ts';
 import { aeroplanePointer } from './aeroplane-pointer.ts';
 import { airBeside } from './air-beside.ts';
 import type { TakeoffAnswer } from './answer.ts';
@@ -14,6 +14,8 @@ import { declaredDistances } from './declared-distances.ts';
 import { defaulted } from './defaulted.ts';
 import { isRefused, type Refused } from './fault.ts';
 import { notGiven } from './not-given.ts';
+import { flownTakeoff } from './procedure/flown-takeoff.ts';
+import { takeoffProcedureFaults } from './procedure/takeoff-procedure-faults.ts';
 import type { TakeoffQuestion } from './question.ts';
 import { resolveFriction } from './resolve-friction.ts';
 import { resolveTakeoff } from './resolve-takeoff.ts';
@@ -24,7 +26,14 @@ import { shortfalls } from './shortfalls.ts';
 import { takeoffBand } from './takeoff-band.ts';
 import { takeoffDistances } from './takeoff-distances.ts';
 import { takeoffEffects } from './takeoff-effects.ts';
-import { checkedTakeoffs, notReached as notReachedOf, reached, statedRun, takeoffRuns } from './takeoff-runs.ts';
+import {
+  checkedTakeoffs,
+  notReached as notReachedOf,
+  reached,
+  statedRun,
+  takeoffOf,
+  takeoffRuns,
+} from './takeoff-runs.ts';
 import { takeoffSpeeds } from './takeoff-speeds.ts';
 import { windAnswer } from './wind-along.ts';
 
@@ -41,7 +50,10 @@ export function planTakeoff(question: TakeoffQuestion): TakeoffAnswer | Refused 
   const { aeroplane, aeroplaneAt, mass, runway, weather, units } = question;
   const conditions = conditionsOf(question, 'takeoff');
   if (isRefused(conditions)) return conditions;
+  const unflyable = takeoffProcedureFaults(question);
+  if (unflyable.length > 0) return { refused: unflyable };
   const { ruleSet, configuration, air, wind, creditedHeadwind, doesNotApply } = conditions;
+  const { fullPowerRatio, rollingStartAllowance } = flownTakeoff(question, configuration);
 
   const resolved = resolveTakeoff(question, configuration);
   const speeds = takeoffSpeeds(question, configuration, resolved, air);
@@ -50,7 +62,7 @@ export function planTakeoff(question: TakeoffQuestion): TakeoffAnswer | Refused 
   const liftOffAtMaximumMass = speeds.liftOff.eas * Math.sqrt(aeroplane.masses.maximumTakeoff / mass);
   const power = resolveThrust(aeroplane, aeroplaneAt, liftOffAtMaximumMass, weather.dewPoint !== undefined);
   const thrustIn = (state: Air, propulsion: Propulsion, factor: number) =>
-    propulsionThrust(propulsion, aeroplane.engines, state, factor);
+    propulsionThrust(propulsionAtSetting(propulsion, fullPowerRatio), aeroplane.engines, state, factor);
   const thrust = thrustIn(air, aeroplane.propulsion, power.thrustFactor);
   const friction = resolveFriction(runway.surface, aeroplane.propulsion.kind === 'jet');
   const run = statedRun(question, resolved, speeds, {
@@ -65,6 +77,7 @@ export function planTakeoff(question: TakeoffQuestion): TakeoffAnswer | Refused 
     creditedHeadwind: doesNotApply === undefined ? creditedHeadwind : wind.headwind,
     actualFriction: friction.actual,
     referenceFriction: friction.reference,
+    rollingStartAllowance,
     needsReference:
       doesNotApply === undefined &&
       rules.startsFrom === 'reference' &&
@@ -116,7 +129,13 @@ export function planTakeoff(question: TakeoffQuestion): TakeoffAnswer | Refused 
     wheelSpeed: speeds.liftOff,
     stated,
     roll: stated?.groundRoll,
-    rollInStillAir: () => reached(takeoff({ ...run, headwind: 0 }))?.groundRoll,
+    rollInStillAir: () => reached(takeoffOf({ ...run, headwind: 0 }, rollingStartAllowance))?.groundRoll,
+    fullPowerRatio,
+    wholeAtFullPower: () => {
+      const full = propulsionThrust(aeroplane.propulsion, aeroplane.engines, air, power.thrustFactor);
+      return reached(takeoffOf({ ...run, thrust: full }, rollingStartAllowance))?.takeoffDistance;
+    },
+    rollingStartAllowance,
     rollAvailable,
     wholeDistance: distances?.takeoffDistance,
   };

@@ -23,6 +23,8 @@ export interface RunConditions {
   /** of the actual surface; absent where physics does not speak of it */
   readonly actualFriction: number | undefined;
   readonly referenceFriction: number;
+  /** added to each ground roll [m] */
+  readonly rollingStartAllowance: number;
   /** whether the rule set multiplies the reference distance */
   readonly needsReference: boolean;
 }
@@ -72,10 +74,26 @@ export function reached(result: TakeoffResult | undefined): Reached | undefined 
   return result !== undefined && isReached(result) ? result : undefined;
 }
 
+/**
+ * What comes of a run whose start is not from standing at full power.
+ *
+ * @param rollingStartAllowance - added to the ground roll [m]
+ */
+export function takeoffOf(run: TakeoffRun, rollingStartAllowance: number): TakeoffResult {
+  const result = takeoff(run);
+  if (rollingStartAllowance === 0 || result.outcome !== 'reaches-screen') return result;
+  return {
+    ...result,
+    groundRoll: result.groundRoll + rollingStartAllowance,
+    takeoffDistance: result.takeoffDistance + rollingStartAllowance,
+  };
+}
+
 /** The three runs behind an answer. */
 export function takeoffRuns(run: TakeoffRun, conditions: RunConditions): TakeoffRuns {
-  const { creditedHeadwind, actualFriction, referenceFriction, needsReference } = conditions;
-  return runsOf(takeoff, run, {
+  const { creditedHeadwind, actualFriction, referenceFriction, rollingStartAllowance, needsReference } = conditions;
+  const compute = (other: TakeoffRun) => takeoffOf(other, rollingStartAllowance);
+  return runsOf(compute, run, {
     known: actualFriction !== undefined,
     creditedHeadwind,
     reference: needsReference

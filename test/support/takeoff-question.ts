@@ -2,7 +2,7 @@ import type { Aeroplane, Configuration } from '../../src/performance/aeroplane.t
 import type { TakeoffAnswer } from '../../src/planning/answer.ts';
 import { isRefused } from '../../src/planning/fault.ts';
 import { planTakeoff } from '../../src/planning/plan-takeoff.ts';
-import type { Question } from '../../src/planning/question.ts';
+import type { TakeoffQuestion } from '../../src/planning/question.ts';
 
 const ft = 0.3048;
 const kt = 1852 / 3600;
@@ -59,7 +59,7 @@ export const statedTrainer: Aeroplane = {
 };
 
 /** A calm, cool, dry, long, paved runway near sea level: nothing to say but that the method is an estimate. */
-export const plainQuestion: Question = {
+export const plainQuestion: TakeoffQuestion = {
   aeroplane: statedTrainer,
   aeroplaneDigest: '0'.repeat(64),
   aeroplaneAt: '/aeroplane/definition',
@@ -87,7 +87,7 @@ export const plainQuestion: Question = {
 };
 
 /** The worked case of four readings: hot, wet short grass, uphill, a tailwind of 11.9 kt. */
-export function fourReadings(tora: number): Question {
+export function fourReadings(tora: number): TakeoffQuestion {
   return {
     ...plainQuestion,
     runway: {
@@ -111,13 +111,16 @@ export function fourReadings(tora: number): Question {
 export interface Changes {
   readonly aeroplane?: Partial<Aeroplane>;
   readonly configuration?: Partial<Configuration>;
-  readonly runway?: Partial<Question['runway']>;
-  readonly weather?: Partial<Question['weather']>;
-  readonly question?: Partial<Question>;
+  readonly runway?: Partial<TakeoffQuestion['runway']>;
+  readonly weather?: Partial<TakeoffQuestion['weather']>;
+  readonly question?: Partial<TakeoffQuestion>;
 }
 
 /** A question with some of it changed. */
-export function changed(base: Question, { aeroplane, configuration, runway, weather, question }: Changes): Question {
+export function changed(
+  base: TakeoffQuestion,
+  { aeroplane, configuration, runway, weather, question }: Changes,
+): TakeoffQuestion {
   const takeoff = { ...(base.aeroplane.configurations['takeoff'] as Configuration), ...configuration };
   return {
     ...base,
@@ -133,7 +136,7 @@ export function changed(base: Question, { aeroplane, configuration, runway, weat
 }
 
 /** The answer, where the question must have one. */
-export function answered(question: Question): TakeoffAnswer {
+export function answered(question: TakeoffQuestion): TakeoffAnswer {
   const answer = planTakeoff(question);
   if (isRefused(answer))
     throw new Error(answer.refused.map(({ pointer, message }) => `${pointer}: ${message}`).join('; '));

@@ -3,11 +3,12 @@ import { si } from '../quantity.ts';
 import type { RunwayOnWire } from '../runway.ts';
 import { written } from '../written.ts';
 
-const takeoffDistances = ['tora', 'toda', 'asda'] as const;
+/** The declared distances that count in each phase. */
+const counting = { takeoff: ['tora', 'toda', 'asda'], landing: ['lda'] } as const;
 
 /** Members of a runway against each other. */
-export function checkRunway(runway: RunwayOnWire): Fault[] {
-  return [...checkDeclared(runway.declared ?? {}), ...checkStart(runway), ...checkSurface(runway.surface)];
+export function checkRunway(runway: RunwayOnWire, phase: 'takeoff' | 'landing'): Fault[] {
+  return [...checkDeclared(runway.declared ?? {}), ...checkStart(runway, phase), ...checkSurface(runway.surface)];
 }
 
 function checkDeclared({ tora, toda, asda }: NonNullable<RunwayOnWire['declared']>): Fault[] {
@@ -31,11 +32,11 @@ function checkDeclared({ tora, toda, asda }: NonNullable<RunwayOnWire['declared'
 }
 
 /** What a start offset and lining up take must leave something of each declared distance. */
-function checkStart({ start, lineUp, declared = {} }: RunwayOnWire): Fault[] {
+function checkStart({ start, lineUp, declared = {} }: RunwayOnWire, phase: 'takeoff' | 'landing'): Fault[] {
   const faults: Fault[] = [];
   const offset = typeof start === 'object' && 'offset' in start ? start.offset : undefined;
   const offsetLength = offset === undefined ? 0 : si('length', offset);
-  for (const name of takeoffDistances) {
+  for (const name of counting[phase]) {
     const length = declared[name];
     if (length === undefined) continue;
     const published = si('length', length);
@@ -49,7 +50,7 @@ function checkStart({ start, lineUp, declared = {} }: RunwayOnWire): Fault[] {
       });
       break;
     }
-    if (lineUp === undefined) continue;
+    if (lineUp === undefined || name === 'lda') continue;
     const member = name === 'asda' ? 'asda' : 'tora';
     const loss = si('length', lineUp[member]);
     if (loss > 0 && offsetLength + loss >= published) {

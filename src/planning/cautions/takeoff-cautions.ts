@@ -12,6 +12,8 @@ import { massAboveMaximum } from './mass-above-maximum.ts';
 import { methodIsEstimate } from './method-is-estimate.ts';
 import { pressureAltitudeAboveLimit } from './pressure-altitude-above-limit.ts';
 import { pressureExtreme } from './pressure-extreme.ts';
+import { reducedPower } from './reduced-power.ts';
+import { rollingStart } from './rolling-start.ts';
 import { screenSpeedBelowLiftOff } from './screen-speed-below-lift-off.ts';
 import { slopeSteep } from './slope-steep.ts';
 import { tailwind } from './tailwind.ts';
@@ -41,6 +43,8 @@ export const takeoffCautions: readonly CautionTest<TakeoffContext>[] = [
   slopeSteep,
   clearwayCapped,
   screenSpeedBelowLiftOff,
+  reducedPower,
+  rollingStart,
   assumptionMatters,
   methodIsEstimate,
 ];

@@ -7,4 +7,10 @@ export interface TakeoffContext extends AnswerContext {
   readonly speeds: TakeoffAnswer['speeds'];
   /** what came of the run as stated, where physics speaks of the surface and the screen is reached */
   readonly stated: Reached | undefined;
+  /** 1 at full power */
+  readonly fullPowerRatio: number;
+  /** the takeoff distance at full power [m] */
+  readonly wholeAtFullPower: () => number | undefined;
+  /** [m]; 0 from standing */
+  readonly rollingStartAllowance: number;
 }

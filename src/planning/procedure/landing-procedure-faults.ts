@@ -1,4 +1,5 @@
 import type { Configuration } from '../../performance/aeroplane.ts';
+import { chosenConfiguration, isFault } from '../chosen.ts';
 import type { Fault } from '../fault.ts';
 import type { LandingQuestion } from '../question.ts';
 import { steepestWithoutData } from '../rules/landing-defaults.ts';
@@ -6,16 +7,15 @@ import { noDataFault } from './no-data-fault.ts';
 
 type Asked = Pick<LandingQuestion, 'aeroplane' | 'aeroplaneAt' | 'configuration' | 'procedure'>;
 
-/** What of the procedure the aeroplane has no data for, or what goes against the data it has. */
-export function landingProcedureFaults(question: Asked, configuration: Configuration): Fault[] {
+/**
+ * What of the procedure the aeroplane has no data for, or what goes against the data it has; of a configuration that is not there
+ * nothing is said.
+ */
+export function landingProcedureFaults(question: Asked): Fault[] {
   const { aeroplane, configuration: id, procedure = {} } = question;
   const { approachSpeedIncrement, reverse, antiSkid } = procedure;
   const faults: Fault[] = [];
-  const inConfiguration = (member: string) => `/configurations/${id}/${member}`;
-  if (approachSpeedIncrement !== undefined && configuration.speeds?.landingReference === undefined) {
-    const needed = inConfiguration('speeds/landingReference');
-    faults.push(noDataFault(question, 'approachSpeedIncrement', undefined, needed));
-  }
+  const configuration = chosenConfiguration(question, 'landing');
   if (reverse && aeroplane.reverseThrust === undefined) {
     faults.push(noDataFault(question, 'reverse', reverse, '/reverseThrust'));
   }
@@ -30,6 +30,11 @@ export function landingProcedureFaults(question: Asked, configuration: Configura
       received: antiSkid,
       allowed: 'inoperative, or nothing',
     });
+  }
+  if (isFault(configuration)) return faults;
+  if (approachSpeedIncrement !== undefined && configuration.speeds?.landingReference === undefined) {
+    const needed = `/configurations/${id}/speeds/landingReference`;
+    faults.push(noDataFault(question, 'approachSpeedIncrement', undefined, needed));
   }
   return [...faults, ...angleFaults(question, configuration), ...reactionFaults(question, configuration)];
 }

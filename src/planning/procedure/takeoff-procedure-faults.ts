@@ -1,12 +1,12 @@
-import type { Configuration } from '../../performance/aeroplane.ts';
+import { chosenConfiguration, isFault } from '../chosen.ts';
 import type { Fault } from '../fault.ts';
 import type { TakeoffQuestion } from '../question.ts';
 import { noDataFault } from './no-data-fault.ts';
 
 type Asked = Pick<TakeoffQuestion, 'aeroplane' | 'aeroplaneAt' | 'configuration' | 'procedure'>;
 
-/** What of the procedure the aeroplane has no data for. */
-export function takeoffProcedureFaults(question: Asked, configuration: Configuration): Fault[] {
+/** What of the procedure the aeroplane has no data for; of a configuration that is not there nothing is said. */
+export function takeoffProcedureFaults(question: Asked): Fault[] {
   const { aeroplane, configuration: id, procedure = {} } = question;
   const { power, start } = procedure;
   const faults: Fault[] = [];
@@ -24,6 +24,8 @@ export function takeoffProcedureFaults(question: Asked, configuration: Configura
       hint: 'Leave power away for full power.',
     });
   }
+  const configuration = chosenConfiguration(question, 'takeoff');
+  if (isFault(configuration)) return faults;
   if (start === 'rolling' && configuration.rollingStartAllowance === undefined) {
     faults.push(noDataFault(question, 'start', start, `/configurations/${id}/rollingStartAllowance`));
   }

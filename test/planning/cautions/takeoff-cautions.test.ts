@@ -44,6 +44,16 @@ const screenAt = (ratio: number): Changes => ({
   },
 });
 
+const { propulsion } = plainQuestion.aeroplane;
+const atPower = (fullPowerRatio: number): Changes => ({
+  aeroplane: { propulsion: { ...propulsion, powerSettings: { reduced: { fullPowerRatio } } } },
+  question: { procedure: { power: 'reduced' } },
+});
+const rolling = (start: 'standing' | 'rolling'): Changes => ({
+  configuration: { rollingStartAllowance: 45 },
+  question: { procedure: { start } },
+});
+
 interface Pair {
   readonly code: string;
   readonly severity: string;
@@ -284,6 +294,20 @@ const pairs: readonly Pair[] = [
     raised: screenAt(1.14),
     silent: screenAt(1.15),
     says: /^The speed at the screen, 52\.9 kt calibrated, is below the lift-off speed of 53\.4 kt\./,
+  },
+  {
+    code: 'reduced-power',
+    severity: 'note',
+    raised: atPower(0.9),
+    silent: atPower(1),
+    says: /^The takeoff is at 90 % of full power\. It lengthens the takeoff distance from 421 m to 4[6-9]\d m\.$/,
+  },
+  {
+    code: 'rolling-start',
+    severity: 'note',
+    raised: rolling('rolling'),
+    silent: rolling('standing'),
+    says: /^Rolling start: 45 m are added to the ground roll/,
   },
   {
     code: 'assumption-matters',

@@ -1,0 +1,31 @@
+import { asChosen } from './aeroplane-choice.ts';
+import type { LandingRequest } from './landing-request.ts';
+import type { LandingQuestion } from './landing-response.ts';
+import type { Draft } from './present.ts';
+import { defaultRounding, defaultUnits } from './question-frame.ts';
+import type { TakeoffRequest } from './takeoff-request.ts';
+import type { TakeoffQuestion } from './takeoff-response.ts';
+
+/** The request with what was filled in, in the order of its schema; it can be sent again as it stands. */
+export function asUnderstood(request: TakeoffRequest, revision: string): TakeoffQuestion;
+export function asUnderstood(request: LandingRequest, revision: string): LandingQuestion;
+export function asUnderstood(
+  request: TakeoffRequest | LandingRequest,
+  revision: string,
+): TakeoffQuestion | LandingQuestion {
+  const { reference, asOf, procedure, stage, units = defaultUnits, rounding = defaultRounding } = request;
+  const question = {} as Draft<TakeoffQuestion | LandingQuestion>;
+  if (reference !== undefined) question.reference = reference;
+  if (asOf !== undefined) question.asOf = asOf;
+  question.aeroplane = asChosen(request.aeroplane, revision);
+  question.mass = request.mass;
+  question.configuration = request.configuration;
+  question.runway = request.runway;
+  question.weather = request.weather;
+  if (procedure !== undefined) question.procedure = procedure;
+  question.ruleSet = request.ruleSet;
+  if (stage !== undefined) question.stage = stage;
+  question.units = units;
+  question.rounding = rounding;
+  return question;
+}

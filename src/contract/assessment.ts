@@ -1,0 +1,49 @@
+import { z } from 'zod';
+import { quantity, source } from './answer-parts.ts';
+import { id } from './text.ts';
+
+const factor = z
+  .strictObject({ code: z.string(), value: z.number(), because: z.string(), source, status: z.string() })
+  .meta({ id: 'Factor', description: 'A factor of the rule set and what it is for.' });
+
+const startsFrom = z.enum(['reference', 'credited', 'flight-manual']).meta({
+  description:
+    'The distance the factors multiply: credited wind on a paved, dry, level runway; credited wind on the runway as given; or the flight manual.',
+});
+
+const check = z
+  .strictObject({
+    code: z.string().meta({ description: 'Stable name of the check.' }),
+    of: z.string().meta({ description: 'What is compared.' }),
+    startsFrom,
+    distance: quantity.meta({ description: 'Before factors.' }).exactOptional(),
+    factors: z.array(factor),
+    alternative: z
+      .strictObject({
+        startsFrom,
+        distance: quantity,
+        factors: z.array(factor),
+        required: quantity,
+        because: z.string(),
+      })
+      .meta({ id: 'AlternativeReading', description: 'Another reading of the rule, shown and not chosen.' })
+      .exactOptional(),
+    required: quantity.exactOptional(),
+    available: quantity.exactOptional(),
+    margin: quantity.meta({ description: 'Available less required.' }).exactOptional(),
+    marginPercent: z.number().meta({ description: 'The margin as per cent of required.' }).exactOptional(),
+    result: z.enum(['passes', 'fails', 'not-assessed']),
+    why: z.string().meta({ description: 'Why it is not assessed.' }).exactOptional(),
+    source,
+  })
+  .meta({ id: 'Check', description: 'One comparison of the rule set.' });
+
+export const assessment = z
+  .strictObject({
+    ruleSet: id,
+    checks: z.array(check),
+    governing: z.string().meta({ description: 'Code of the check with the least margin.' }).exactOptional(),
+  })
+  .meta({ id: 'Assessment', description: 'What the rule set asks and whether it is met.' });
+
+export type AssessmentOnWire = z.infer<typeof assessment>;

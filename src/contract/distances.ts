@@ -1,0 +1,25 @@
+import { z } from 'zod';
+import { altitude, time } from './answer-parts.ts';
+
+export const method = z.enum(['flight-manual', 'fitted', 'stated', 'geometry']).meta({
+  description:
+    "The flight manual's own table, physics fitted to it, physics on stated figures, or on the wing's geometry.",
+});
+
+export const bandedDistance = z
+  .strictObject({
+    value: z.number(),
+    unit: z.enum(['m', 'ft']),
+    low: z.number().meta({ description: 'Lower end of the 90 % band.' }),
+    high: z.number().meta({ description: 'Upper end of the 90 % band.' }),
+    method,
+  })
+  .meta({ id: 'BandedDistance', description: 'A distance as stated, without any factor, with its 90 % band.' });
+
+/** Distances that the answers to a takeoff and to a landing share. */
+export const distancesShape = {
+  screenHeight: altitude,
+  groundRoll: bandedDistance,
+  airDistance: bandedDistance,
+};
+export const timesShape = { groundRollTime: time, airTime: time };

@@ -1,0 +1,28 @@
+import { z } from 'zod';
+import { aeroplaneChoice } from './aeroplane-choice.ts';
+import { mass } from './quantities.ts';
+import { asOf, reference, rounding, units } from './question-frame.ts';
+import { runway } from './runway.ts';
+import { id } from './text.ts';
+import { weather } from './weather.ts';
+
+/** The members of a question of a field length, in the order in which it is read. */
+export function questionShape<Procedure extends z.ZodType>(phase: 'takeoff' | 'landing', procedure: Procedure) {
+  return {
+    reference: reference.exactOptional(),
+    asOf: asOf.exactOptional(),
+    aeroplane: aeroplaneChoice,
+    mass: mass.meta({ description: `${phase === 'takeoff' ? 'Takeoff' : 'Landing'} mass.` }),
+    configuration: id.meta({ description: `One of the aeroplane's ${phase} configurations.` }),
+    runway,
+    weather,
+    procedure: z.exactOptional(procedure),
+    ruleSet: id.meta({ description: 'The rule set to assess by; GET /v1/rule-sets lists them.' }),
+    stage: z
+      .enum(['dispatch', 'in-flight'])
+      .meta({ description: 'Whether the question is asked before departure or in flight.' })
+      .exactOptional(),
+    units: units.exactOptional(),
+    rounding: rounding.exactOptional(),
+  };
+}

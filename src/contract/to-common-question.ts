@@ -1,0 +1,92 @@
+import type { Fault } from '../planning/fault.ts';
+import type { Question } from '../planning/question.ts';
+import { ruleSetOf, ruleSets } from '../planning/rules/rule-sets.ts';
+import type { KnownAeroplane } from './aeroplane-lookup.ts';
+import type { LandingRequest } from './landing-request.ts';
+import { si } from './quantity.ts';
+import { checkAir } from './question-checks/check-air.ts';
+import { checkConfigurationId } from './question-checks/check-configuration-id.ts';
+import { checkMass } from './question-checks/check-mass.ts';
+import { checkRunway } from './question-checks/check-runway.ts';
+import { checkWind } from './question-checks/check-wind.ts';
+import { defaultUnits } from './question-frame.ts';
+import type { TakeoffRequest } from './takeoff-request.ts';
+import { aeroplaneAt } from './to-known-aeroplane.ts';
+import { toRunway } from './to-runway.ts';
+import { toWeather } from './to-weather.ts';
+import { unknownId } from './unknown-id.ts';
+
+/** What a takeoff and a landing are asked alike. */
+export type CommonRequest = Omit<TakeoffRequest, 'procedure'> & Omit<LandingRequest, 'procedure'>;
+
+/**
+ * Faults of meaning in what a takeoff and a landing are asked alike.
+ *
+ * @param known - the aeroplane, or its own faults
+ * @param phase - what the configuration must be for, and which declared distances count
+ */
+export function commonFaults(
+  request: CommonRequest,
+  known: KnownAeroplane | Fault[],
+  phase: 'takeoff' | 'landing',
+): Fault[] {
+  return [
+    ...('aeroplane' in known
+      ? [
+          ...checkMass(request.mass, known.aeroplane),
+          ...checkConfigurationId(request.configuration, known.aeroplane, phase),
+        ]
+      : known),
+    ...checkRunway(request.runway, phase),
+    ...checkAir(request.weather, request.runway.elevation),
+    ...checkWind(request.weather.wind, request.runway),
+    ...checkRuleSet(request.ruleSet),
+  ];
+}
+
+/** What a procedure is checked against. */
+export function asked({ aeroplane, configuration }: CommonRequest, known: KnownAeroplane) {
+  return { aeroplane: known.aeroplane, aeroplaneAt: aeroplaneAt(aeroplane), configuration };
+}
+
+/** What a takeoff and a landing share, in SI. */
+export function toCommonQuestion(request: CommonRequest, known: KnownAeroplane): Question {
+  return {
+    aeroplane: known.aeroplane,
+    aeroplaneDigest: known.digest,
+    aeroplaneAt: aeroplaneAt(request.aeroplane),
+    mass: si('mass', request.mass),
+    configuration: request.configuration,
+    runway: toRunway(request.runway),
+    weather: toWeather(request.weather),
+    ruleSet: request.ruleSet,
+    ...(request.stage === undefined ? {} : { stage: request.stage }),
+    units: request.units ?? defaultUnits,
+    defaulted: defaulted(request),
+  };
+}
+
+function checkRuleSet(given: string): Fault[] {
+  return ruleSetOf(given) === undefined
+    ? [
+        unknownId(
+          '/ruleSet',
+          'rule set',
+          given,
+          ruleSets.map(({ id }) => id),
+        ),
+      ]
+    : [];
+}
+
+/** Pointers of what the gate fills in. */
+function defaulted({ units, rounding, aeroplane, configuration }: CommonRequest): string[] {
+  const pointers: string[] = [];
+  if (units === undefined) pointers.push('/units');
+  if (rounding === undefined) pointers.push('/rounding');
+  const lift = 'definition' in aeroplane && aeroplane.definition.configurations[configuration]?.maximumLift;
+  if (lift && 'stallSpeed' in lift && lift.kind === undefined) {
+    pointers.push(`/aeroplane/definition/configurations/${configuration}/maximumLift/kind`);
+  }
+  return pointers;
+}

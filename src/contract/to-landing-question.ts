@@ -1,0 +1,39 @@
+import type { Refused } from '../planning/fault.ts';
+import { landingProcedureFaults } from '../planning/procedure/landing-procedure-faults.ts';
+import type { LandingProcedure, LandingQuestion } from '../planning/question.ts';
+import type { AeroplaneLookup } from './aeroplane-lookup.ts';
+import type { LandingRequest } from './landing-request.ts';
+import type { Draft } from './present.ts';
+import type { LandingProcedureOnWire } from './procedure.ts';
+import { si } from './quantity.ts';
+import { asked, commonFaults, toCommonQuestion } from './to-common-question.ts';
+import { toKnownAeroplane } from './to-known-aeroplane.ts';
+
+/**
+ * The gate in: a landing request as planning's question, in SI.
+ *
+ * @param request - read by its schema
+ * @returns the question, or every fault of meaning in the request at once
+ */
+export function toLandingQuestion(request: LandingRequest, lookup: AeroplaneLookup): LandingQuestion | Refused {
+  const known = toKnownAeroplane(request.aeroplane, lookup);
+  const faults = commonFaults(request, known, 'landing');
+  if (!('aeroplane' in known)) return { refused: faults };
+  const procedure = request.procedure && toLandingProcedure(request.procedure);
+  if (procedure !== undefined) faults.push(...landingProcedureFaults({ ...asked(request, known), procedure }));
+  if (faults.length > 0) return { refused: faults };
+  const question = toCommonQuestion(request, known);
+  return procedure === undefined ? question : { ...question, procedure };
+}
+
+function toLandingProcedure(given: LandingProcedureOnWire): LandingProcedure {
+  const procedure: Draft<LandingProcedure> = {};
+  if (given.approachSpeedIncrement !== undefined) {
+    procedure.approachSpeedIncrement = si('speed', given.approachSpeedIncrement);
+  }
+  if (given.approachAngle !== undefined) procedure.approachAngle = si('angle', given.approachAngle);
+  if (given.reverse !== undefined) procedure.reverse = given.reverse;
+  if (given.antiSkid !== undefined) procedure.antiSkid = given.antiSkid;
+  if (given.reactionTime !== undefined) procedure.reactionTime = si('time', given.reactionTime);
+  return procedure;
+}
