@@ -104,6 +104,11 @@ export const references = entries({
   },
   Raymer: { title: 'Raymer, Aircraft Design: A Conceptual Approach, ch. 17', status: 'secondary' },
   AndersonPerformance: { title: 'Anderson, Aircraft Performance and Design, 1999, ch. 6', status: 'read' },
+  Cfr25s109: {
+    title: '14 CFR 25.109(c), wet runway braking coefficient and anti-skid efficiency',
+    status: 'secondary',
+  },
+  Ac25s32: { title: 'FAA AC 25-32, Landing Performance Data for Time-of-Arrival Assessments, 2015', status: 'memory' },
   HouseFriction: {
     title: 'Rolling and braking friction by surface: the long-distance end of the published ranges',
     status: 'judgement',

@@ -1,65 +1,79 @@
-/** All that the integrations of a landing need, in SI, nothing assumed any more. */
-export interface LandingRun {
+import type { BrakingFriction } from '../../physics/braking-friction.ts';
+
+/** What the stop from a speed on the wheels needs, in SI. */
+export interface BrakedRun {
   /** [kg] */
   readonly mass: number;
-  /** [m2], [m], [m] */
+  /** [m2] */
   readonly wingArea: number;
+  /** span [m] and height of the wing's quarter chord above the runway [m] */
   readonly span: number;
   readonly wingHeight: number;
   /** K = 1/(pi A e) out of ground effect */
   readonly inducedDragFactor: number;
-  /** zero-lift drag coefficient on the ground and in the air, flap, gear and spoilers included */
+  /** zero-lift drag coefficient and lift coefficient held in the roll, flap, gear and spoilers as they then are */
   readonly groundDragCoefficient: number;
-  readonly airDragCoefficient: number;
-  /** lift coefficient held in the roll */
   readonly groundLiftCoefficient: number;
+  /** effective: on the whole weight, share of the braked wheels included */
+  readonly braking: BrakingFriction;
+  /** of all running engines, forward positive [N] */
+  readonly idleThrust: number;
   /** [kg/m3] */
   readonly density: number;
   /** along the runway [m/s], on the nose positive */
   readonly headwind: number;
   /** uphill positive, dimensionless */
   readonly slope: number;
-  /** true airspeeds over the screen and at touchdown [m/s] */
+}
+
+/** All that the integrations of a landing need, in SI, nothing assumed any more. */
+export interface LandingRun extends BrakedRun {
+  /** true airspeeds [m/s] at the screen and at touchdown */
   readonly referenceSpeed: number;
   readonly touchdownSpeed: number;
-  /** [m] */
-  readonly screenHeight: number;
-  /** approach path below the horizon, in the air and against the runway plane [rad] */
+  /** to the runway's plane, down positive [rad] */
   readonly approachAngle: number;
-  /** load factor of the flare, above 1 */
+  /** of the flare's arc, above 1 */
   readonly flareLoadFactor: number;
-  /** how the air distance is taken: the arc alone (a fitted aeroplane), or the longer of arc and seven seconds, and the float */
-  readonly airMethod: 'arc' | 'unfitted';
-  /** (D - T)/W while floating, dimensionless; used by 'unfitted' */
-  readonly floatDeceleration: number;
-  /** touchdown to brakes [s] */
+  /** [m]; 15.24 */
+  readonly screenHeight: number;
+  /** between touchdown and full braking [s] */
   readonly freeRollTime: number;
-  /** effective braking friction of the braked wheels against ground speed [m/s], load factor and anti-skid included */
-  readonly brakingFriction: (groundSpeed: number) => number;
-  /** ground speeds at which that friction or the reverse thrust jumps [m/s] */
-  readonly brakingKinks: readonly number[];
-  /** thrust of the whole aeroplane in the roll against ground speed [N]: idle positive, reverse negative */
-  readonly rollThrust: (groundSpeed: number) => number;
+  /**
+   * (D - T)/W in the float, about 0.12: an aeroplane nobody has fitted takes at least seven seconds to touch down and floats from
+   * 0.96 of the reference speed; absent: the arc alone, for an aeroplane whose flare was fitted
+   */
+  readonly floatDecelerationRatio?: number;
 }
 
 /** What came of it: the distances, or the name of why there are none with the number that shows it. */
 export type LandingResult =
   | {
       readonly outcome: 'stops';
-      /** screen to touchdown: straight approach and flare, and the float on top [m], [s] */
+      /** screen to touchdown, float included [m], [s] */
       readonly airDistance: number;
-      readonly floatDistance: number;
       readonly airTime: number;
+      /** the part of it floated off [m], 0 where none */
+      readonly floatDistance: number;
+      /** which of the two readings of the air distance was the longer */
+      readonly airDistanceFrom: 'arc' | 'seven-seconds';
+      /** the flare's arc begins above the screen: the approach has no straight part */
+      readonly flareAboveScreen: boolean;
+      /** touchdown to full braking [m], [s] */
       readonly freeRoll: number;
+      readonly freeRollTime: number;
+      /** full braking to the stop [m], [s] */
       readonly brakedRoll: number;
       readonly brakedRollTime: number;
-      /** free and braked roll together */
       readonly groundRoll: number;
       readonly landingDistance: number;
-      /** least deceleration over g while braking */
+      /** least deceleration over g, dimensionless */
       readonly leastDecelerationRatio: number;
-      /** true where the flare would begin above the screen */
-      readonly flareAboveScreen: boolean;
     }
-  | { readonly outcome: 'never-stops'; readonly atGroundSpeed: number; readonly leastDecelerationRatio: number }
+  | {
+      readonly outcome: 'never-stops';
+      /** ground speed [m/s] at which the deceleration is first gone while slowing down, and the least over g */
+      readonly atGroundSpeed: number;
+      readonly leastDecelerationRatio: number;
+    }
   | { readonly outcome: 'ground-speed-not-positive'; readonly headwind: number; readonly touchdownSpeed: number };
