@@ -1,6 +1,6 @@
-import { type AeroplaneDefinition, aeroplaneDefinition } from '../contract/aeroplane-definition.ts';
+import type { AeroplaneDefinition } from '../contract/aeroplane-definition.ts';
 import { checkAeroplane } from '../contract/check-aeroplane.ts';
-import { reader } from '../contract/reading/reader.ts';
+import { readDefinition } from '../contract/read-definition.ts';
 import { readStrictJson } from '../contract/reading/strict-json.ts';
 import { toAeroplane } from '../contract/to-aeroplane.ts';
 import type { Aeroplane } from '../performance/aeroplane.ts';
@@ -15,8 +15,6 @@ export interface CatalogueEntry {
   /** SHA-256 of the definition, hex */
   readonly digest: string;
 }
-
-const readDefinition = reader(aeroplaneDefinition);
 
 /**
  * An aeroplane file, read as strictly as a definition that comes in a question.

@@ -1,28 +1,48 @@
 import { z } from 'zod';
+import type { Aeroplane } from '../performance/aeroplane.ts';
+import type { AeroplaneChanges } from '../planning/question.ts';
 import { aeroplaneDefinition } from './aeroplane-definition.ts';
-import { id, shortText } from './text.ts';
+import { id, reason, shortText } from './text.ts';
 
-export const aeroplaneChoice = z
-  .union([
-    z.strictObject({
-      id,
-      revision: shortText.meta({ description: 'If given, the revision must be the one on file.' }).exactOptional(),
-    }),
-    z.strictObject({ definition: aeroplaneDefinition }),
-  ])
-  .meta({ id: 'Aeroplane', description: 'The aeroplane: an id of the catalogue or a whole definition.' });
+const revision = shortText.meta({ description: 'If given, the revision must be the one on file.' }).exactOptional();
+const inline = z.strictObject({ definition: aeroplaneDefinition });
+const changed = {
+  basedOn: id.meta({ description: 'An id of the catalogue.' }),
+  revision,
+  changes: z.record(z.string().max(64), z.unknown()).meta({
+    description: 'JSON merge patch (RFC 7396) of its definition; null takes a member out.',
+    minProperties: 1,
+    maxProperties: 24,
+  }),
+  because: reason.meta({ description: 'Why the aeroplane is changed; repeated in a caution.' }),
+};
 
-/** The aeroplane as an answer echoes it: by id always with its revision. */
+export const aeroplaneChoice = z.union([z.strictObject({ id, revision }), inline, z.strictObject(changed)]).meta({
+  id: 'Aeroplane',
+  description: 'The aeroplane: an id of the catalogue, a whole definition, or one of the catalogue with changes.',
+});
+
+/** The aeroplane as an answer echoes it: one of the catalogue always with its revision. */
 export const aeroplaneUnderstood = z
-  .union([z.strictObject({ id, revision: shortText }), z.strictObject({ definition: aeroplaneDefinition })])
+  .union([z.strictObject({ id, revision: shortText }), inline, z.strictObject({ ...changed, revision: shortText })])
   .meta({
     id: 'AeroplaneUnderstood',
-    description: 'The aeroplane: an id of the catalogue with its revision, or the definition.',
+    description: 'The aeroplane: an id of the catalogue with its revision, the definition, or the id with the changes.',
   });
 
-/** The echo of a choice. */
-export function asChosen(choice: AeroplaneChoice, revision: string): z.infer<typeof aeroplaneUnderstood> {
-  return 'id' in choice ? { id: choice.id, revision } : choice;
+export type AeroplaneChoice = z.infer<typeof aeroplaneChoice>;
+export type ChangedAeroplaneChoice = Extract<AeroplaneChoice, { basedOn: string }>;
+
+/** The aeroplane of a choice, and the changes it came to it by. */
+export interface Chosen {
+  readonly aeroplane: Pick<Aeroplane, 'revision'>;
+  readonly changes?: Pick<AeroplaneChanges, 'revision'>;
 }
 
-export type AeroplaneChoice = z.infer<typeof aeroplaneChoice>;
+/** The echo of a choice. */
+export function asChosen(choice: AeroplaneChoice, { aeroplane, changes }: Chosen): z.infer<typeof aeroplaneUnderstood> {
+  if ('id' in choice) return { id: choice.id, revision: aeroplane.revision };
+  if ('definition' in choice) return choice;
+  const { basedOn, changes: patch, because } = choice;
+  return { basedOn, revision: (changes ?? aeroplane).revision, changes: patch, because };
+}

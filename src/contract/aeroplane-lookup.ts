@@ -1,10 +1,14 @@
 import type { Aeroplane } from '../performance/aeroplane.ts';
+import type { AeroplaneChanges } from '../planning/question.ts';
 import type { AeroplaneDefinition } from './aeroplane-definition.ts';
 
-/** An aeroplane on file, in SI, with the SHA-256 of its definition in hex. */
+/** An aeroplane as its definition says and in SI, with the SHA-256 of the definition in hex. */
 export interface KnownAeroplane {
+  readonly definition: AeroplaneDefinition;
   readonly aeroplane: Aeroplane;
   readonly digest: string;
+  /** where it is one on file with changes */
+  readonly changes?: AeroplaneChanges;
 }
 
 /** What the gate in needs of a catalogue. */

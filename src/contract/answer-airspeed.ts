@@ -10,6 +10,7 @@ import type { AeroplaneLookup, KnownAeroplane } from './aeroplane-lookup.ts';
 import type { AirspeedRequest, AirspeedResponse } from './airspeed.ts';
 import { airSources, assumedDry, notGivenAir } from './answer-air.ts';
 import { assumedPresentation, presentationOf } from './assumed-presentation.ts';
+import { changedCautions } from './changed-cautions.ts';
 import { foundAir } from './found-air.ts';
 import { si } from './quantity.ts';
 import { type Presentation, shownQuantity, shownRatio } from './shown-quantity.ts';
@@ -48,7 +49,7 @@ export function answerAirspeed(
   const { reference, asOf, aeroplane, speed, elevation, weather } = request;
   return {
     outcome: found.outcome,
-    advisory: toAdvisory(how, sentenceOf(found, how.units), []),
+    advisory: toAdvisory(how, sentenceOf(found, how.units), changedCautions(known)),
     air: toAir(how, air),
     ...(found.outcome === 'computed' ? { speed: toKinds(how, found) } : {}),
     basis: {
@@ -61,9 +62,7 @@ export function answerAirspeed(
     question: {
       ...(reference === undefined ? {} : { reference }),
       ...(asOf === undefined ? {} : { asOf }),
-      ...(aeroplane === undefined || known === undefined
-        ? {}
-        : { aeroplane: asChosen(aeroplane, known.aeroplane.revision) }),
+      ...(aeroplane === undefined || known === undefined ? {} : { aeroplane: asChosen(aeroplane, known) }),
       speed,
       ...(elevation === undefined ? {} : { elevation }),
       weather,

@@ -5,6 +5,7 @@ import { asChosen } from './aeroplane-choice.ts';
 import type { AeroplaneLookup } from './aeroplane-lookup.ts';
 import { airSources, assumedDry, notGivenAir } from './answer-air.ts';
 import { assumedPresentation, presentationOf } from './assumed-presentation.ts';
+import { changedCautions } from './changed-cautions.ts';
 import { foundAir } from './found-air.ts';
 import { type FoundSpeeds, foundSpeeds } from './found-speeds.ts';
 import { si } from './quantity.ts';
@@ -42,7 +43,7 @@ export function answerSpeeds(request: SpeedsRequest, lookup: AeroplaneLookup, st
   const how = presentationOf(request);
   return {
     outcome: 'computed',
-    advisory: toAdvisory(how, sentenceOf(how, found, configured.mass, configuration), []),
+    advisory: toAdvisory(how, sentenceOf(how, found, configured.mass, configuration), changedCautions(known)),
     air: toAir(how, air),
     ...(loadFactor === undefined ? {} : { loadFactor: shownRatio(how, loadFactor) }),
     speeds: toSpeeds(how, found.speeds),
@@ -60,7 +61,7 @@ export function answerSpeeds(request: SpeedsRequest, lookup: AeroplaneLookup, st
     question: {
       ...(reference === undefined ? {} : { reference }),
       ...(asOf === undefined ? {} : { asOf }),
-      aeroplane: asChosen(aeroplane, known.aeroplane.revision),
+      aeroplane: asChosen(aeroplane, known),
       mass,
       configuration,
       ...(elevation === undefined ? {} : { elevation }),

@@ -1,4 +1,4 @@
-import { asChosen } from './aeroplane-choice.ts';
+import { asChosen, type Chosen } from './aeroplane-choice.ts';
 import type { LandingRequest } from './landing-request.ts';
 import type { LandingQuestion } from './landing-response.ts';
 import type { Draft } from './present.ts';
@@ -7,17 +7,17 @@ import type { TakeoffRequest } from './takeoff-request.ts';
 import type { TakeoffQuestion } from './takeoff-response.ts';
 
 /** The request with what was filled in, in the order of its schema; it can be sent again as it stands. */
-export function asUnderstood(request: TakeoffRequest, revision: string): TakeoffQuestion;
-export function asUnderstood(request: LandingRequest, revision: string): LandingQuestion;
+export function asUnderstood(request: TakeoffRequest, known: Chosen): TakeoffQuestion;
+export function asUnderstood(request: LandingRequest, known: Chosen): LandingQuestion;
 export function asUnderstood(
   request: TakeoffRequest | LandingRequest,
-  revision: string,
+  known: Chosen,
 ): TakeoffQuestion | LandingQuestion {
   const { reference, asOf, procedure, stage, units = defaultUnits, rounding = defaultRounding } = request;
   const question = {} as Draft<TakeoffQuestion | LandingQuestion>;
   if (reference !== undefined) question.reference = reference;
   if (asOf !== undefined) question.asOf = asOf;
-  question.aeroplane = asChosen(request.aeroplane, revision);
+  question.aeroplane = asChosen(request.aeroplane, known);
   question.mass = request.mass;
   question.configuration = request.configuration;
   question.runway = request.runway;

@@ -1,6 +1,7 @@
 import type { Fault } from '../planning/fault.ts';
 import type { Question } from '../planning/question.ts';
 import { ruleSetOf, ruleSets } from '../planning/rules/rule-sets.ts';
+import type { AeroplaneDefinition } from './aeroplane-definition.ts';
 import type { KnownAeroplane } from './aeroplane-lookup.ts';
 import type { LandingRequest } from './landing-request.ts';
 import { si } from './quantity.ts';
@@ -55,6 +56,7 @@ export function toCommonQuestion(request: CommonRequest, known: KnownAeroplane):
     aeroplane: known.aeroplane,
     aeroplaneDigest: known.digest,
     aeroplaneAt: aeroplaneAt(request.aeroplane),
+    ...(known.changes === undefined ? {} : { changes: known.changes }),
     mass: si('mass', request.mass),
     configuration: request.configuration,
     runway: toRunway(request.runway),
@@ -62,7 +64,7 @@ export function toCommonQuestion(request: CommonRequest, known: KnownAeroplane):
     ruleSet: request.ruleSet,
     ...(request.stage === undefined ? {} : { stage: request.stage }),
     units: request.units ?? defaultUnits,
-    defaulted: defaulted(request),
+    defaulted: defaulted(request, known.definition),
   };
 }
 
@@ -80,13 +82,16 @@ function checkRuleSet(given: string): Fault[] {
 }
 
 /** Pointers of what the gate fills in. */
-function defaulted({ units, rounding, aeroplane, configuration }: CommonRequest): string[] {
+function defaulted(
+  { units, rounding, aeroplane, configuration }: CommonRequest,
+  { configurations }: AeroplaneDefinition,
+): string[] {
   const pointers: string[] = [];
   if (units === undefined) pointers.push('/units');
   if (rounding === undefined) pointers.push('/rounding');
-  const lift = 'definition' in aeroplane && aeroplane.definition.configurations[configuration]?.maximumLift;
+  const lift = 'id' in aeroplane ? undefined : configurations[configuration]?.maximumLift;
   if (lift && 'stallSpeed' in lift && lift.kind === undefined) {
-    pointers.push(`/aeroplane/definition/configurations/${configuration}/maximumLift/kind`);
+    pointers.push(`${aeroplaneAt(aeroplane)}/configurations/${configuration}/maximumLift/kind`);
   }
   return pointers;
 }

@@ -42,7 +42,7 @@ export function toLandingResponse(
     ...toContribution(how, one),
     landingDistancePercent: shownPercent(how, one.wholeDistance, 'nearest'),
   }));
-  response.question = asUnderstood(request, question.aeroplane.revision);
+  response.question = asUnderstood(request, question);
   return response;
 }
 

@@ -37,7 +37,7 @@ export function toResponse(
     ...toContribution(how, one),
     takeoffDistancePercent: shownPercent(how, one.wholeDistance, 'nearest'),
   }));
-  response.question = asUnderstood(request, question.aeroplane.revision);
+  response.question = asUnderstood(request, question);
   return response;
 }
 

@@ -1,7 +1,8 @@
 /**
  * Where a member of the aeroplane's definition stands in the request.
  *
- * An inline definition has a pointer like any other member: '/aeroplane/definition/propulsion/thrustFactor'. An aeroplane named by
+ * An inline definition has a pointer like any other member: '/aeroplane/definition/propulsion/thrustFactor', and so have changes to
+ * one on file: '/aeroplane/changes/propulsion/thrustFactor'. An aeroplane named by
  * id has no such member in the request, so the pointer into its definition follows the request's own after a '#':
  * '/aeroplane#/propulsion/thrustFactor'.
  *
@@ -10,7 +11,7 @@
  * @see references.Rfc6901
  */
 export function aeroplanePointer(aeroplaneAt: string, member: string): string {
-  return aeroplaneAt.endsWith('/definition') ? `${aeroplaneAt}${member}` : `${aeroplaneAt}#${member}`;
+  return /\/(definition|changes)$/.test(aeroplaneAt) ? `${aeroplaneAt}${member}` : `${aeroplaneAt}#${member}`;
 }
 
 /** Where a member of the asked configuration stands in the request. */

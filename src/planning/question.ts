@@ -9,8 +9,10 @@ export interface Question {
   readonly aeroplane: Aeroplane;
   /** SHA-256 of the definition, hex */
   readonly aeroplaneDigest: string;
-  /** pointer to the aeroplane in the request: '/aeroplane' by id, '/aeroplane/definition' inline */
+  /** pointer to the aeroplane in the request: '/aeroplane' by id, '/aeroplane/definition' inline, '/aeroplane/changes' */
   readonly aeroplaneAt: string;
+  /** where the aeroplane is one on file with changes */
+  readonly changes?: AeroplaneChanges;
   readonly mass: number;
   /** id of a configuration; may not exist in the aeroplane: planning refuses it with the list */
   readonly configuration: string;
@@ -22,6 +24,16 @@ export interface Question {
   readonly units: UnitFamily;
   /** pointers of members that the gate filled in (units, rounding ...): said under basis.assumed */
   readonly defaulted: readonly string[];
+}
+
+/** What was changed of an aeroplane on file, in words. */
+export interface AeroplaneChanges {
+  readonly basedOn: string;
+  /** of the aeroplane on file */
+  readonly revision: string;
+  readonly because: string;
+  /** one text a change: 'wing/area 13.4 m2 in place of 12.9 m2' */
+  readonly changed: readonly string[];
 }
 
 /** How a takeoff is flown; a member that is absent takes the configuration's own figure, and full power. */

@@ -142,7 +142,7 @@ export function sampleLookup(...definitions: readonly AeroplaneDefinition[]): Ae
   const known = new Map(
     definitions.map((definition) => [
       definition.id,
-      { aeroplane: toAeroplane(definition), digest: `digest of ${definition.id}` },
+      { aeroplane: toAeroplane(definition), definition, digest: `digest of ${definition.id}` },
     ]),
   );
   return { get: (id) => known.get(id), ids: [...known.keys()], digestOf: (definition) => `digest of ${definition.id}` };

@@ -1,4 +1,5 @@
 import { accelerationMarginal } from './acceleration-marginal.ts';
+import { aeroplaneChanged } from './aeroplane-changed.ts';
 import { assumptionMatters } from './assumption-matters.ts';
 import type { CautionTest } from './caution-test.ts';
 import { clearwayCapped } from './clearway-capped.ts';
@@ -45,6 +46,7 @@ export const takeoffCautions: readonly CautionTest<TakeoffContext>[] = [
   screenSpeedBelowLiftOff,
   reducedPower,
   rollingStart,
+  aeroplaneChanged,
   assumptionMatters,
   methodIsEstimate,
 ];

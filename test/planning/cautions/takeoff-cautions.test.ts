@@ -310,6 +310,22 @@ const pairs: readonly Pair[] = [
     says: /^Rolling start: 45 m are added to the ground roll/,
   },
   {
+    code: 'aeroplane-changed',
+    severity: 'note',
+    raised: {
+      question: {
+        changes: {
+          basedOn: 'plain-trainer',
+          revision: '1',
+          because: 'a new propeller',
+          changed: ['propulsion/staticThrust 2366 N in place of 2300 N'],
+        },
+      },
+    },
+    silent: {},
+    says: /^The aeroplane is plain-trainer, revision 1, with changes: propulsion\/staticThrust 2366 N in place of 2300 N\. The reason given: "a new propeller"\./,
+  },
+  {
     code: 'assumption-matters',
     severity: 'note',
     raised: { runway: { surface: { kind: 'paved', state: 'dry' } } },

@@ -1,0 +1,96 @@
+import { type Fault, isRefused } from '../planning/fault.ts';
+import type { ChangedAeroplaneChoice } from './aeroplane-choice.ts';
+import type { AeroplaneLookup, KnownAeroplane } from './aeroplane-lookup.ts';
+import { type ChangedMember, changedMembers, changeText } from './changed-members.ts';
+import { checkAeroplane } from './check-aeroplane.ts';
+import { mergePatch } from './merge-patch.ts';
+import { readDefinition } from './read-definition.ts';
+import { nearestNames } from './reading/nearest-name.ts';
+import { isPlainObject } from './reading/object-faults.ts';
+import { shortened } from './reading/scalar-faults.ts';
+import { toAeroplane } from './to-aeroplane.ts';
+
+/** Where the changes stand in the request: faults and assumptions about the changed aeroplane point there. */
+export const changesAt = '/aeroplane/changes';
+
+/**
+ * An aeroplane on file with changes merged into its definition, read as strictly as a whole definition.
+ *
+ * A change must change something, and what is taken out must be there: a misspelt name would otherwise leave the aeroplane as
+ * it is, unseen.
+ *
+ * @param base - the aeroplane on file
+ * @returns the changed aeroplane, or every fault, each at the change that brings it about
+ * @see references.Rfc7396
+ */
+export function toChangedAeroplane(
+  { basedOn, changes, because }: ChangedAeroplaneChoice,
+  base: KnownAeroplane,
+  lookup: AeroplaneLookup,
+): KnownAeroplane | Fault[] {
+  const merged = mergePatch(base.definition, changes);
+  const members = changedMembers(base.definition, changes, merged);
+  const idle = idleFaults(members, base);
+  const read = readDefinition(merged);
+  if (isRefused(read)) return [...idle, ...read.refused.map((fault) => atChange(fault, changes))];
+  const faults = [...idle, ...checkAeroplane(read.value, '').map((fault) => atChange(fault, changes))];
+  if (faults.length > 0) return faults;
+  return {
+    definition: read.value,
+    aeroplane: toAeroplane(read.value),
+    digest: lookup.digestOf(read.value),
+    changes: { basedOn, revision: base.aeroplane.revision, because, changed: members.filter(differs).map(changeText) },
+  };
+}
+
+/** Changes that change nothing. */
+function idleFaults(members: readonly ChangedMember[], { aeroplane, definition }: KnownAeroplane): Fault[] {
+  const faults = members.filter(({ before, change }) => change === null && before === undefined).map(nothingToTakeOut);
+  if (faults.length > 0 || members.some(differs)) return faults;
+  return [
+    {
+      pointer: changesAt,
+      code: members.length === 0 ? 'missing' : 'contradiction',
+      message: `The changes leave ${aeroplane.id} as it is on file.`,
+      allowed: `at least one change of ${Object.keys(definition).join(', ')}`,
+    },
+  ];
+
+  function nothingToTakeOut({ at }: ChangedMember): Fault {
+    const path = at.split('/').slice(1);
+    const name = path.pop() as string;
+    const parent = path.reduce<unknown>((node, step) => (isPlainObject(node) ? node[step] : undefined), definition);
+    const near = nearestNames(name, isPlainObject(parent) ? Object.keys(parent) : [], 1);
+    return {
+      pointer: `${changesAt}${at}`,
+      code: 'unknown-member',
+      message: `${aeroplane.id} has no member ${shortened(name)} here that could be taken out.`,
+      ...(near.length === 0 ? {} : { hint: `Perhaps ${near[0]}.` }),
+    };
+  }
+}
+
+function differs({ before, after }: ChangedMember): boolean {
+  return JSON.stringify(before) !== JSON.stringify(after);
+}
+
+/** A fault of the changed definition, at the change that it comes from, or at the nearest one above it. */
+function atChange(fault: Fault, changes: ChangedAeroplaneChoice['changes']): Fault {
+  let node: unknown = changes;
+  let pointer = changesAt;
+  for (const step of fault.pointer.split('/').slice(1)) {
+    const name = step.replaceAll('~1', '/').replaceAll('~0', '~');
+    if (!isPlainObject(node) || !Object.hasOwn(node, name)) {
+      const hint = fault.hint ?? (fault.code === 'unknown-member' ? 'A change to null takes a member out.' : undefined);
+      return {
+        ...fault,
+        pointer,
+        message: `${fault.message} (${fault.pointer} of the changed aeroplane)`,
+        ...(hint === undefined ? {} : { hint }),
+      };
+    }
+    node = node[name];
+    pointer = `${pointer}/${step}`;
+  }
+  return { ...fault, pointer };
+}

@@ -1,0 +1,22 @@
+/** Test cases published with RFC 7396, appendix A; from memory, exact. */
+export const mergeCases: readonly { target: unknown; patch: unknown; result: unknown; status: 'memory' }[] = [
+  [{ a: 'b' }, { a: 'c' }, { a: 'c' }],
+  [{ a: 'b' }, { b: 'c' }, { a: 'b', b: 'c' }],
+  [{ a: 'b' }, { a: null }, {}],
+  [{ a: 'b', b: 'c' }, { a: null }, { b: 'c' }],
+  [{ a: ['b'] }, { a: 'c' }, { a: 'c' }],
+  [{ a: 'c' }, { a: ['b'] }, { a: ['b'] }],
+  [{ a: { b: 'c' } }, { a: { b: 'd', c: null } }, { a: { b: 'd' } }],
+  [{ a: [{ b: 'c' }] }, { a: [1] }, { a: [1] }],
+  [
+    ['a', 'b'],
+    ['c', 'd'],
+    ['c', 'd'],
+  ],
+  [{ a: 'b' }, ['c'], ['c']],
+  [{ a: 'foo' }, null, null],
+  [{ a: 'foo' }, 'bar', 'bar'],
+  [{ e: null }, { a: 1 }, { e: null, a: 1 }],
+  [[1, 2], { a: 'b', c: null }, { a: 'b' }],
+  [{}, { a: { bb: { ccc: null } } }, { a: { bb: {} } }],
+].map(([target, patch, result]) => ({ target, patch, result, status: 'memory' }));
