@@ -1,4 +1,5 @@
 import type { Propulsion } from '../../src/performance/aeroplane.ts';
+import { landing } from '../../src/performance/landing/landing.ts';
 import { propulsionThrust } from '../../src/performance/propulsion.ts';
 import { airDistance } from '../../src/performance/takeoff/air-distance.ts';
 import { groundRoll } from '../../src/performance/takeoff/ground-roll.ts';
@@ -6,7 +7,9 @@ import { rollAcceleration, rollForces } from '../../src/performance/takeoff/roll
 import { takeoff } from '../../src/performance/takeoff/takeoff.ts';
 import { takeoffEstimate } from '../../src/performance/takeoff/takeoff-estimate.ts';
 import type { TakeoffRun } from '../../src/performance/takeoff/takeoff-run.ts';
+import { landingVectors } from '../published/landing-vectors.ts';
 import { takeoffVectors } from '../published/takeoff-vectors.ts';
+import { landingVectorRun } from '../support/landing-runs.ts';
 import { odex } from '../support/odex.ts';
 import { standardAir } from '../support/standard-air.ts';
 import { vectorRun } from '../support/vector-run.ts';
@@ -124,6 +127,13 @@ export function physicsBench(print: Print): void {
     const cost = microseconds(takeoff, around(run), 400).toFixed(2);
     const estimate = microseconds(takeoffEstimate, around(run), 1000).toFixed(2);
     print(`  ${kind.padEnd(15)} ${cost.padStart(6)}   estimate for the bands ${estimate}`);
+  }
+  print('');
+  print('one landing, air distance to standstill [us]');
+  for (const vector of landingVectors) {
+    const { stallSpeed: _, ...run } = landingVectorRun(vector);
+    const runs = Array.from({ length: 8 }, (__, i) => ({ ...run, mass: run.mass * (1 + i * 1e-3) }));
+    print(`  ${vector.id.padEnd(15)} ${microseconds(landing, runs, 400).toFixed(2).padStart(6)}`);
   }
   for (const kind of ['fixed-pitch', 'constant-speed'] as const) {
     const { run, truth } = published(kind);

@@ -20,7 +20,7 @@ export function odex(
   const solver = new Solver(2);
   solver.absoluteTolerance = tolerance;
   solver.relativeTolerance = tolerance;
-  solver.maxSteps = 1_000_000;
+  solver.maxSteps = 20_000;
   const { y } = solver.solve(f, from, [0, 0], to);
   return [y[0] as number, y[1] as number];
 }

@@ -1,3 +1,4 @@
+import type { Thrust } from '../../physics/thrust/thrust.ts';
 import { climbForces, climbGradient, energySine } from './climb-forces.ts';
 import { pullUpArcDistance, pullUpRadius } from './pull-up-arc.ts';
 import { rollAcceleration, rollForces } from './roll-forces.ts';
@@ -20,12 +21,14 @@ const faster = Math.sqrt((1 + Math.sqrt(1 / 3)) / 2);
  * plus (V_R - w) t_R; s_A = R tan(gamma/2) + h_s/tan(gamma) - w t (the chord sqrt(h_s (2R - h_s)) where the arc reaches the screen),
  * gamma from the energy at half the screen height.
  *
- * @param run - as for takeoff; thrust must be known between w and the screen speed
+ * @param run - as for takeoff; a thrust with a domain is held at its ends, where a small change of the run leads just past them
  * @returns [m] each; not an answer by itself: within 2 % of the roll and 12 % of the air distance where the least acceleration
  * is above 0.06 g and the least climb gradient above 0.05
  * @see references.AndersonIntroduction, ch. 6 for the mean at 0.7 of the lift-off speed; references.Raymer, ch. 17 for the arc
  */
 export function takeoffEstimate(run: TakeoffRun): TakeoffEstimate {
+  const { domain } = run.thrust;
+  if (domain !== undefined) run = { ...run, thrust: heldInside(run.thrust, domain) };
   const { headwind, liftOffSpeed, screenHeight } = run;
   const gain = liftOffSpeed - headwind;
   const forces = rollForces(run);
@@ -47,4 +50,8 @@ export function takeoffEstimate(run: TakeoffRun): TakeoffEstimate {
       : pullUpArcDistance(radius, screenHeight);
   const speed = Math.sqrt(climb.square + (climb.growth * screenHeight) / 2);
   return { groundRoll, airDistance: still * (1 - headwind / speed) };
+}
+
+function heldInside(thrust: Thrust, [lowest, highest]: readonly [number, number]): Thrust {
+  return { ...thrust, at: (airspeed) => thrust.at(Math.min(highest, Math.max(lowest, airspeed))) };
 }

@@ -54,7 +54,7 @@ export type TakeoffResult =
     }
   | {
       readonly outcome: 'never-reaches-lift-off-speed';
-      /** true airspeed [m/s] at which the acceleration is least or gone, and that acceleration over g */
+      /** true airspeed [m/s] at which the acceleration is first gone, and the least acceleration met over g */
       readonly atAirspeed: number;
       readonly leastAccelerationRatio: number;
     }

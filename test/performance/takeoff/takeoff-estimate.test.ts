@@ -3,8 +3,10 @@ import { describe, expect, it } from 'vitest';
 import { takeoff } from '../../../src/performance/takeoff/takeoff.ts';
 import { takeoffEstimate } from '../../../src/performance/takeoff/takeoff-estimate.ts';
 import type { TakeoffRun } from '../../../src/performance/takeoff/takeoff-run.ts';
+import { measuredThrust } from '../../../src/physics/thrust/measured.ts';
 import { executiveJet } from '../../support/executive-jet.ts';
-import { easyFigures, runOf } from '../../support/takeoff-runs.ts';
+import { standardAir } from '../../support/standard-air.ts';
+import { easyFigures, type Figures, runOf } from '../../support/takeoff-runs.ts';
 
 describe('takeoffEstimate', () => {
   it('is within 2 % of the roll above 0.06 g and 12 % of the air distance above a gradient of 0.05 [computed]', () => {
@@ -67,5 +69,20 @@ describe('takeoffEstimate', () => {
     const weak = { ...executiveJet, groundLiftCoefficient: 0, rollingFriction: 0.5 };
     expect(takeoffEstimate(weak).groundRoll).toBe(Number.POSITIVE_INFINITY);
     expect(takeoffEstimate({ ...weak, airDragCoefficient: 0.5 }).airDistance).toBe(Number.POSITIVE_INFINITY);
+  });
+
+  it('holds measured thrust at its ends, so that a small change never leads outside the data', () => {
+    const figures = fc.sample(easyFigures, { numRuns: 1, seed: 5 })[0] as Figures;
+    const run = runOf({ ...figures, kind: 'measured', headwindRatio: 0 });
+    const airspeeds = [0, run.screenSpeed];
+    const thrusts = airspeeds.map((airspeed) => run.thrust.at(airspeed));
+    const thrust = measuredThrust(
+      { airspeeds, thrusts, density: 1, densityExponent: 0, thrustFactor: 1 },
+      1,
+      standardAir(0),
+    );
+    const faster = { ...run, thrust, liftOffSpeed: run.liftOffSpeed * 1.5, screenSpeed: run.screenSpeed * 1.5 };
+    expect(Number.isFinite(takeoffEstimate(faster).groundRoll)).toBe(true);
+    expect(() => takeoffEstimate({ ...faster, headwind: -3 })).not.toThrow();
   });
 });
