@@ -1,6 +1,3 @@
-import type { Propulsion } from '../performance/aeroplane.ts';
-import type { Air } from '../performance/air.ts';
-import { propulsionAtSetting } from '../performance/power-setting.ts';
 import { propulsionThrust } from '../performance/propulsion.ts';
 import { aeroplanePointer } from './aeroplane-pointer.ts';
 import { airBeside } from './air-beside.ts';
@@ -8,33 +5,19 @@ import type { TakeoffAnswer } from './answer.ts';
 import { assess } from './assess.ts';
 import { raisedCautions } from './cautions/caution-test.ts';
 import { takeoffCautions } from './cautions/takeoff-cautions.ts';
-import { isFault } from './chosen.ts';
-import { conditionsOf } from './conditions.ts';
 import { declaredDistances } from './declared-distances.ts';
 import { defaulted } from './defaulted.ts';
 import { isRefused, type Refused } from './fault.ts';
 import { notGiven } from './not-given.ts';
-import { flownTakeoff } from './procedure/flown-takeoff.ts';
-import { takeoffProcedureFaults } from './procedure/takeoff-procedure-faults.ts';
+import { prepareTakeoff } from './prepare-takeoff.ts';
 import type { TakeoffQuestion } from './question.ts';
-import { resolveFriction } from './resolve-friction.ts';
-import { resolveTakeoff } from './resolve-takeoff.ts';
-import { resolveThrust } from './resolve-thrust.ts';
 import { answerSentence } from './sentences/answer-sentence.ts';
 import { notReachedSentence } from './sentences/not-reached-sentence.ts';
 import { shortfalls } from './shortfalls.ts';
 import { takeoffBand } from './takeoff-band.ts';
 import { takeoffDistances } from './takeoff-distances.ts';
 import { takeoffEffects } from './takeoff-effects.ts';
-import {
-  checkedTakeoffs,
-  notReached as notReachedOf,
-  reached,
-  statedRun,
-  takeoffOf,
-  takeoffRuns,
-} from './takeoff-runs.ts';
-import { takeoffSpeeds } from './takeoff-speeds.ts';
+import { checkedTakeoffs, notReached as notReachedOf, reached, takeoffOf, takeoffRuns } from './takeoff-runs.ts';
 import { windAnswer } from './wind-along.ts';
 
 /** Distances come from the stated figures of the definition by physics. */
@@ -47,42 +30,15 @@ const method = 'stated';
  * @returns the answer, or every fault that the question's own values bring about
  */
 export function planTakeoff(question: TakeoffQuestion): TakeoffAnswer | Refused {
-  const { aeroplane, aeroplaneAt, mass, runway, weather, units } = question;
-  const conditions = conditionsOf(question, 'takeoff');
-  if (isRefused(conditions)) return conditions;
-  const unflyable = takeoffProcedureFaults(question);
-  if (unflyable.length > 0) return { refused: unflyable };
-  const { ruleSet, configuration, air, wind, creditedHeadwind, doesNotApply } = conditions;
-  const { fullPowerRatio, rollingStartAllowance } = flownTakeoff(question, configuration);
-
-  const resolved = resolveTakeoff(question, configuration);
-  const speeds = takeoffSpeeds(question, configuration, resolved, air);
-  if (isFault(speeds)) return { refused: [speeds] };
-
-  const liftOffAtMaximumMass = speeds.liftOff.eas * Math.sqrt(aeroplane.masses.maximumTakeoff / mass);
-  const power = resolveThrust(aeroplane, aeroplaneAt, liftOffAtMaximumMass, weather.dewPoint !== undefined);
-  const thrustIn = (state: Air, propulsion: Propulsion, factor: number) =>
-    propulsionThrust(propulsionAtSetting(propulsion, fullPowerRatio), aeroplane.engines, state, factor);
-  const thrust = thrustIn(air, aeroplane.propulsion, power.thrustFactor);
-  const friction = resolveFriction(runway.surface, aeroplane.propulsion.kind === 'jet');
-  const run = statedRun(question, resolved, speeds, {
-    thrust,
-    density: air.density,
-    headwind: wind.headwind,
-    rollingFriction: friction.actual ?? friction.reference,
-  });
+  const { aeroplane, aeroplaneAt, runway, units } = question;
+  const prepared = prepareTakeoff(question);
+  if (isRefused(prepared)) return prepared;
+  const { conditions, resolved, speeds, power, thrustIn, friction, run } = prepared;
+  const { ruleSet, air, wind, creditedHeadwind, doesNotApply } = conditions;
+  const { fullPowerRatio, rollingStartAllowance } = prepared.flown;
 
   const rules = ruleSet.takeoff;
-  const runs = takeoffRuns(run, {
-    creditedHeadwind: doesNotApply === undefined ? creditedHeadwind : wind.headwind,
-    actualFriction: friction.actual,
-    referenceFriction: friction.reference,
-    rollingStartAllowance,
-    needsReference:
-      doesNotApply === undefined &&
-      rules.startsFrom === 'reference' &&
-      rules.runwayFactors(runway.surface, runway.slope) !== undefined,
-  });
+  const runs = takeoffRuns(run, prepared.runConditions);
   const notReached = notReachedOf(runs);
   const stated = notReached === undefined ? reached(runs.stated) : undefined;
   const band =

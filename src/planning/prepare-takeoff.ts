@@ -1,0 +1,78 @@
+import type { Propulsion } from '../performance/aeroplane.ts';
+import type { Air } from '../performance/air.ts';
+import { propulsionAtSetting } from '../performance/power-setting.ts';
+import { propulsionThrust } from '../performance/propulsion.ts';
+import type { TakeoffRun } from '../performance/takeoff/takeoff-run.ts';
+import type { Thrust } from '../physics/thrust/thrust.ts';
+import type { TakeoffAnswer } from './answer.ts';
+import { isFault } from './chosen.ts';
+import { type Conditions, conditionsOf } from './conditions.ts';
+import { isRefused, type Refused } from './fault.ts';
+import { type FlownTakeoff, flownTakeoff } from './procedure/flown-takeoff.ts';
+import { takeoffProcedureFaults } from './procedure/takeoff-procedure-faults.ts';
+import type { TakeoffQuestion } from './question.ts';
+import { type ResolvedFriction, resolveFriction } from './resolve-friction.ts';
+import { type ResolvedTakeoff, resolveTakeoff } from './resolve-takeoff.ts';
+import { type ResolvedThrust, resolveThrust } from './resolve-thrust.ts';
+import { type RunConditions, statedRun } from './takeoff-runs.ts';
+import { takeoffSpeeds } from './takeoff-speeds.ts';
+
+/** A takeoff before anything is integrated. */
+export interface PreparedTakeoff {
+  readonly conditions: Conditions;
+  readonly flown: FlownTakeoff;
+  readonly resolved: ResolvedTakeoff;
+  readonly speeds: TakeoffAnswer['speeds'];
+  readonly power: ResolvedThrust;
+  /** thrust of another definition in other air, at the setting that is flown */
+  readonly thrustIn: (air: Air, propulsion: Propulsion, thrustFactor: number) => Thrust;
+  readonly friction: ResolvedFriction;
+  /** on the runway as it is, in the wind as given */
+  readonly run: TakeoffRun;
+  /** what the other runs have for it */
+  readonly runConditions: RunConditions;
+}
+
+/**
+ * The takeoff up to its runs, in the order of the work: air, wind, procedure, speeds, thrust, friction.
+ *
+ * @returns what the runs need, or every fault that the question's own values bring about
+ */
+export function prepareTakeoff(question: TakeoffQuestion): PreparedTakeoff | Refused {
+  const { aeroplane, aeroplaneAt, mass, runway, weather } = question;
+  const conditions = conditionsOf(question, 'takeoff');
+  if (isRefused(conditions)) return conditions;
+  const unflyable = takeoffProcedureFaults(question);
+  if (unflyable.length > 0) return { refused: unflyable };
+  const { ruleSet, configuration, air, wind, creditedHeadwind, doesNotApply } = conditions;
+  const flown = flownTakeoff(question, configuration);
+
+  const resolved = resolveTakeoff(question, configuration);
+  const speeds = takeoffSpeeds(question, configuration, resolved, air);
+  if (isFault(speeds)) return { refused: [speeds] };
+
+  const liftOffAtMaximumMass = speeds.liftOff.eas * Math.sqrt(aeroplane.masses.maximumTakeoff / mass);
+  const power = resolveThrust(aeroplane, aeroplaneAt, liftOffAtMaximumMass, weather.dewPoint !== undefined);
+  const thrustIn = (state: Air, propulsion: Propulsion, factor: number) =>
+    propulsionThrust(propulsionAtSetting(propulsion, flown.fullPowerRatio), aeroplane.engines, state, factor);
+  const friction = resolveFriction(runway.surface, aeroplane.propulsion.kind === 'jet');
+  const run = statedRun(question, resolved, speeds, {
+    thrust: thrustIn(air, aeroplane.propulsion, power.thrustFactor),
+    density: air.density,
+    headwind: wind.headwind,
+    rollingFriction: friction.actual ?? friction.reference,
+  });
+
+  const rules = ruleSet.takeoff;
+  const runConditions = {
+    creditedHeadwind: doesNotApply === undefined ? creditedHeadwind : wind.headwind,
+    actualFriction: friction.actual,
+    referenceFriction: friction.reference,
+    rollingStartAllowance: flown.rollingStartAllowance,
+    needsReference:
+      doesNotApply === undefined &&
+      rules.startsFrom === 'reference' &&
+      rules.runwayFactors(runway.surface, runway.slope) !== undefined,
+  };
+  return { conditions, flown, resolved, speeds, power, thrustIn, friction, run, runConditions };
+}
