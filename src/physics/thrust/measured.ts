@@ -14,6 +14,9 @@ export interface MeasuredEngine {
   readonly thrustFactor: number;
 }
 
+/** Beyond its rows by less than this share a speed is the end row itself: sums of speeds do not come back to the last digit. */
+const rounding = 1e-12;
+
 /**
  * Thrust by a measured curve, linear between its rows: T = N k (rho/rho_measured)^x T_row(V).
  *
@@ -31,8 +34,7 @@ export function measuredThrust(engine: MeasuredEngine, engines: number, air: Eng
   const highest = axis[axis.length - 1] as number;
 
   const at = (airspeed: number): number => {
-    const speed = Math.max(airspeed, 0);
-    if (!(speed >= lowest && speed <= highest)) throw outside(speed, lowest, highest);
+    const speed = within(Math.max(airspeed, 0), lowest, highest);
     let row = 1;
     while ((axis[row] as number) < speed) row++;
     return between(axis, values, row, speed);
@@ -40,8 +42,7 @@ export function measuredThrust(engine: MeasuredEngine, engines: number, air: Eng
   const fill = (airspeeds: Float64Array, n: number, out: Float64Array): void => {
     let row = 1;
     for (let i = 0; i < n; i++) {
-      const speed = Math.max(0, airspeeds[i] as number);
-      if (!(speed >= lowest && speed <= highest)) throw outside(speed, lowest, highest);
+      const speed = within(Math.max(0, airspeeds[i] as number), lowest, highest);
       while ((axis[row] as number) < speed) row++;
       out[i] = between(axis, values, row, speed);
     }
@@ -62,6 +63,9 @@ function requireRows(axis: Float64Array, values: Float64Array): void {
   }
 }
 
-function outside(speed: number, lowest: number, highest: number): RangeError {
-  return new RangeError(`airspeed must lie between ${lowest} and ${highest} m/s: ${speed}`);
+function within(speed: number, lowest: number, highest: number): number {
+  if (speed >= lowest && speed <= highest) return speed;
+  const end = speed < lowest ? lowest : highest;
+  if (Math.abs(speed - end) <= rounding * highest) return end;
+  throw new RangeError(`airspeed must lie between ${lowest} and ${highest} m/s: ${speed}`);
 }

@@ -38,6 +38,15 @@ describe('measuredThrust', () => {
     expect(() => thrust.fill(Float64Array.from([20, 81]), 2, new Float64Array(2))).toThrow(/airspeed/);
   });
 
+  it('takes a speed that rounding has put beyond an end as that end', () => {
+    const thrust = measuredThrust({ ...engine, airspeeds: [10, 20, 40, 80] }, 1, standardAir(0));
+    const speeds = Float64Array.from([10 * (1 - Number.EPSILON), 80 * (1 + Number.EPSILON)]);
+    const filled = new Float64Array(2);
+    thrust.fill(speeds, 2, filled);
+    expect([...filled]).toEqual([thrust.at(10), thrust.at(80)]);
+    expect([thrust.at(speeds[0] as number), thrust.at(speeds[1] as number)]).toEqual([...filled]);
+  });
+
   it('refuses rows that do not rise', () => {
     expect(() => measuredThrust({ ...engine, airspeeds: [0, 20, 20, 80] }, 1, standardAir(0))).toThrow(/airspeeds/);
     expect(() => measuredThrust({ ...engine, thrusts: [1, 2] }, 1, standardAir(0))).toThrow(/airspeeds/);
