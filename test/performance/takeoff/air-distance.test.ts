@@ -1,8 +1,10 @@
 import { describe, expect, it } from 'vitest';
+import { brent } from '../../../src/numerics/brent.ts';
 import { airDistance } from '../../../src/performance/takeoff/air-distance.ts';
 import type { TakeoffRun } from '../../../src/performance/takeoff/takeoff-run.ts';
 import { jetEnergyPaths, lightEnergyPaths } from '../../published/textbook-takeoffs.ts';
 import { lightSingle } from '../../support/light-single.ts';
+import { odex } from '../../support/odex.ts';
 import { plainRun, quadraticThrust } from '../../support/plain-run.ts';
 
 function air(run: TakeoffRun) {
@@ -115,5 +117,21 @@ describe('airDistance', () => {
 
   it('refuses an arc that does not pull up', () => {
     expect(() => airDistance(lightSingle({ pullUpLoadFactor: 1 }))).toThrow(/loadFactor/);
+  });
+
+  it('follows a gradient that nearly vanishes at the screen to 1e-9 [odex 2.0.4 at 1e-13; computed]', () => {
+    // gradient linear in height from 0.5 at lift-off to 1e-5 above nothing at the screen
+    const growth = (0.5 - 1e-5) / (60 ** 2 - 30 ** 2);
+    const thrust = quadraticThrust((0.5 + growth * 900) * 9.80665, -growth * 9.80665);
+    const run = plainRun({ thrust, screenSpeed: 60, pullUpLoadFactor: 1.3 });
+    const found = airDistance(run, 0);
+    if (found.outcome !== 'reaches-screen') throw new Error(found.outcome);
+    const kappa = 1 + (60 ** 2 - 30 ** 2) / (2 * 9.80665 * 15.24);
+    const radius = 900 / (0.3 * 9.80665);
+    const sine = (height: number) => (0.5 - ((0.5 - 1e-5) * height) / 15.24) / kappa;
+    const top = brent((h) => radius * (1 - Math.sqrt(1 - sine(h) ** 2)) - h, 0, 15.24, 1e-13);
+    if (top.outcome !== 'root') throw new Error(top.outcome);
+    const [rest] = odex((h) => [Math.sqrt(1 - sine(h) ** 2) / sine(h), 1], top.root, 15.24, 1e-13);
+    expect(found.distance / (Math.sqrt(top.root * (2 * radius - top.root)) + rest)).toBeCloseTo(1, 8);
   });
 });
