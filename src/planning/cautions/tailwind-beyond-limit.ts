@@ -14,12 +14,12 @@ export const tailwindBeyondLimit: CautionTest<ConditionsContext> = {
   test: (context) => {
     const component = -context.wind.headwind;
     const limitation = context.question.aeroplane.limitations?.tailwind;
-    const limit = Math.min(limitation ?? usualLimit, usualLimit);
+    const isLimited = limitation !== undefined && component > limitation + 1e-9;
+    const limit = isLimited ? limitation : usualLimit;
     if (component <= limit + 1e-9) return undefined;
-    const what =
-      limitation !== undefined && component > limitation
-        ? `the aeroplane's limitation of ${textIn(context, 'speed', limitation)}`
-        : `${textIn(context, 'speed', usualLimit)}, where data of aeroplanes usually end`;
+    const what = isLimited
+      ? `the aeroplane's limitation of ${textIn(context, 'speed', limitation)}`
+      : `${textIn(context, 'speed', usualLimit)}, where data of aeroplanes usually end`;
     return {
       message: `Tailwind ${textIn(context, 'speed', component)} is ${textIn(context, 'speed', component - limit)} beyond ${what}.`,
       at: '/weather/wind',

@@ -142,6 +142,13 @@ const pairs: readonly Pair[] = [
     says: /^Tailwind 5\.1 kt is 0\.1 kt beyond the aeroplane's limitation of 5 kt\.$/,
   },
   {
+    code: 'tailwind-beyond-limit',
+    severity: 'strong',
+    raised: both(along(-13), limit({ tailwind: 12 * kt })),
+    silent: both(along(-10), limit({ tailwind: 12 * kt })),
+    says: /^Tailwind 13 kt is 1 kt beyond the aeroplane's limitation of 12 kt\.$/,
+  },
+  {
     code: 'tailwind',
     severity: 'caution',
     raised: along(-0.06),
