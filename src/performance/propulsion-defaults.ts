@@ -2,7 +2,7 @@ import { T0 } from '../physics/constants.ts';
 import type { ReferenceKey } from '../references.ts';
 import type { Propulsion } from './aeroplane.ts';
 
-/** A figure the definition left out and the thrust needs. */
+/** A figure the definition left out and the thrust needs. Its source is where the figure comes from, not the formula. */
 export interface PropulsionDefault {
   /** the member of the definition's propulsion that would state it */
   readonly member: string;
@@ -24,16 +24,16 @@ const factor = (value: number, otherEnd: number, because: string, source: Refere
 });
 const installed = factor(0.85, 0.8, 'a propeller nobody has fitted, its installation included', 'HouseThrustFactor');
 const asStated = (of: string) => factor(1, 0.93, `${of} as stated; engines in service give less`, 'HouseThrustFactor');
-const profileFactor = factor(0.88, 0.82, 'share left by the profile drag of the blades', 'McCormick1995');
-const inducedFactor = factor(1.15, 1.25, 'excess of the induced power over the ideal disc', 'McCormick1995');
-const humidityFactor = factor(1.5, 2, 'loss of piston power by moisture, mixture enrichment included', 'Cfr25s101');
+const profileFactor = factor(0.88, 0.82, 'share left by the profile drag of the blades', 'Judgement');
+const inducedFactor = factor(1.15, 1.25, 'excess of the induced power over the ideal disc', 'Judgement');
+const humidityFactor = factor(1.5, 2, 'loss of piston power by moisture, mixture enrichment included', 'Judgement');
 
 /** T0 (1.15^(1/n) - 1): the standard-day excess that makes the thermodynamic power 1.15 of the flat rating. */
 const flatRatingOf = (reserve: number, exponent: number) => T0 * (reserve ** (1 / exponent) - 1);
 
 const lists: { readonly [K in Propulsion['kind']]: Readonly<Record<string, Row>> } = {
   'fixed-pitch': {
-    polarSlopeCoefficient: factor(0.056, 0.07, 'slope of the propeller polar, usual range 0.04 to 0.07', 'Lowry1995'),
+    polarSlopeCoefficient: factor(0.056, 0.07, 'slope of the propeller polar, usual range 0.04 to 0.07', 'Judgement'),
     altitudeLapseCoefficient: factor(0.18, 0.25, 'fits to published trainer tables', 'HousePistonLapse'),
     temperatureExponent: factor(0.9, 1.1, 'fits to published trainer tables', 'HousePistonLapse'),
     humidityFactor,
@@ -43,7 +43,7 @@ const lists: { readonly [K in Propulsion['kind']]: Readonly<Record<string, Row>>
     profileFactor,
     inducedFactor,
     altitudeLapseCoefficient: factor(0.12, 0.18, 'piston power against density', 'GaggFerrar1934'),
-    temperatureExponent: factor(0.7, 0.9, 'between engine charts and whole-aeroplane tables', 'HousePistonLapse'),
+    temperatureExponent: factor(0.7, 0.9, 'between engine charts and whole-aeroplane tables', 'Judgement'),
     humidityFactor,
     thrustFactor: installed,
   },
@@ -59,7 +59,13 @@ const lists: { readonly [K in Propulsion['kind']]: Readonly<Record<string, Row>>
     thrustFactor: installed,
   },
   jet: {
-    flatRating: factor(0, 15, 'no reserve above the standard temperature', 'Mattingly2002'),
+    flatRating: factor(0, 15, 'no reserve above the standard temperature', 'Judgement'),
+    bypassRatio: factor(
+      4,
+      10,
+      'the general form of a high bypass ratio, the same for any ratio below 5',
+      'Mattingly2002',
+    ),
     thrustFactor: asStated('static thrust'),
   },
   electric: { profileFactor, inducedFactor, thrustFactor: installed },

@@ -77,6 +77,7 @@ const names: Readonly<Record<string, string>> = {
   inducedFactor: "the induced factor of the propeller's disc",
   lapseExponent: "the fall of the turbine's power with temperature",
   flatRating: 'the flat rating',
+  bypassRatio: 'the bypass ratio',
 };
 
 function nameOf(member: string): string {

@@ -58,6 +58,41 @@ describe('propulsionThrust', () => {
     expect(factors).toEqual([1, 0.85, 0.85, 1, 0.85, 1]);
   });
 
+  it('says every figure it chooses: none cites the document of the formula for a value that is not in it', () => {
+    const sources = Object.fromEntries(
+      bare.map((propulsion) => [
+        propulsion.kind,
+        Object.fromEntries(propulsionDefaults(propulsion).map(({ member, source }) => [member, source])),
+      ]),
+    );
+    const disc = { profileFactor: 'Judgement', inducedFactor: 'Judgement' };
+    expect(sources).toEqual({
+      'fixed-pitch': {
+        polarSlopeCoefficient: 'Judgement',
+        altitudeLapseCoefficient: 'HousePistonLapse',
+        temperatureExponent: 'HousePistonLapse',
+        humidityFactor: 'Judgement',
+        thrustFactor: 'HouseThrustFactor',
+      },
+      'constant-speed': {
+        ...disc,
+        altitudeLapseCoefficient: 'GaggFerrar1934',
+        temperatureExponent: 'Judgement',
+        humidityFactor: 'Judgement',
+        thrustFactor: 'HouseThrustFactor',
+      },
+      turboprop: {
+        ...disc,
+        flatRating: 'HouseTurbineLapse',
+        lapseExponent: 'HouseTurbineLapse',
+        thrustFactor: 'HouseThrustFactor',
+      },
+      jet: { flatRating: 'Judgement', bypassRatio: 'Mattingly2002', thrustFactor: 'HouseThrustFactor' },
+      electric: { ...disc, thrustFactor: 'HouseThrustFactor' },
+      measured: { thrustFactor: 'HouseThrustFactor' },
+    });
+  });
+
   it('multiplies by the factor handed in, which goes before the definition', () => {
     for (const propulsion of bare) {
       const one = propulsionThrust({ ...propulsion, thrustFactor: 1 }, 1, standardAir(0)).at(20);

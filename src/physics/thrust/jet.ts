@@ -14,7 +14,7 @@ export interface JetEngine {
   readonly thrustFactor: number;
 }
 
-/** Share of sqrt(M) lost: 0.49 in general, 0.43 + 0.014 BPR from 5 to 15. @see references.Mattingly2002, sec. 2.3 */
+/** Share of sqrt(M) lost: 0.49 in general, 0.43 + 0.014 BPR from 5 to 15. @see references.Mattingly2002, sec. 2.3; references.GudmundssonGa */
 function machLapse(bypassRatio: number | undefined): number {
   return bypassRatio === undefined || bypassRatio < 5 ? 0.49 : 0.43 + 0.014 * Math.min(15, bypassRatio);
 }
