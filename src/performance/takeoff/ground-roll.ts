@@ -1,8 +1,7 @@
-import { splitPoints } from '../../numerics/split-points.ts';
 import { g0 } from '../../physics/constants.ts';
-import { addSettled, newPathIntegral, type PathIntegral } from '../path-integral.ts';
+import { profiledRoll } from './profiled-roll.ts';
+import { noAcceleration, rollBetween } from './roll-between.ts';
 import { type RollForces, rollAcceleration, rollForces } from './roll-forces.ts';
-import { addRollPiece, rollJumps } from './roll-piece.ts';
 import type { TakeoffRun } from './takeoff-run.ts';
 
 /** The roll, or the name of why there is none. */
@@ -22,21 +21,14 @@ export type GroundRoll =
     }
   | { readonly outcome: 'ground-speed-not-positive'; readonly headwind: number; readonly liftOffSpeed: number };
 
-/** An acceleration over g that counts as none: at 1e-6 g a takeoff would last days. */
-const none = 1e-6;
-/** Below this acceleration over g, or this share of the greatest, 14 nodes a piece are not trusted unseen. */
-const fineBelow = 0.02;
-const fineBelowShare = 0.25;
-
 /**
  * Distance along the runway from brake release to lift-off.
  *
  * s = integral of (V - w)/a(V) dV from V = w to V_LOF, plus (V_R - w) t_R for the rotation; t = integral of dV/a, plus t_R;
  * m a = T(V) - q S C_Dg - mu max(0, W - q S C_Lg) - W slope, q = rho V|V|/2.
  *
- * Gauss-Legendre, 14 nodes a piece; a piece ends where V = 0, where lift reaches the weight and at the thrust's kinks. Where the
- * acceleration is small or falls by much, pieces are halved until they agree. The acceleration is integrated to V_LOF even where
- * V_R is lower, and the rotation comes on top: the longer reading of two.
+ * On a ground line with a profile each stretch has its own slope. The acceleration is integrated to V_LOF even where V_R is
+ * lower, and the rotation comes on top: the longer reading of two.
  *
  * @param run - steady headwind w, airspeeds and V_R = rotationSpeed [m/s], t_R = rotationTime [s]
  * @returns distance [m] and time [s]; 'never-reaches-lift-off-speed' where a is not above 1e-6 g throughout, with the airspeed at
@@ -47,22 +39,12 @@ const fineBelowShare = 0.25;
 export function groundRoll(run: TakeoffRun): GroundRoll {
   const { headwind, liftOffSpeed } = run;
   if (headwind >= liftOffSpeed) return { outcome: 'ground-speed-not-positive', headwind, liftOffSpeed };
-  const forces = rollForces(run);
-  const ends = splitPoints(headwind, liftOffSpeed, rollJumps(forces));
-  let sum = newPathIntegral();
-  for (let i = 1; i < ends.length; i++) {
-    addRollPiece(forces, headwind, ends[i - 1] as number, ends[i] as number, sum);
-  }
-  if (!(sum.least > none * g0)) return neverReaches(forces, headwind, liftOffSpeed, sum.leastAt);
-  if (sum.least < fineBelow * g0 || sum.least < fineBelowShare * sum.most) {
-    sum = newPathIntegral();
-    let settled = true;
-    const add = (from: number, to: number, into: PathIntegral) => addRollPiece(forces, headwind, from, to, into);
-    for (let i = 1; i < ends.length && settled; i++) {
-      settled = addSettled(add, ends[i - 1] as number, ends[i] as number, sum);
-    }
-    if (!settled || sum.least <= none * g0) return neverReaches(forces, headwind, liftOffSpeed, sum.leastAt);
-  }
+  const steady = rollForces(run);
+  const { gainsSpeed, sum, forces } =
+    run.profile === undefined
+      ? { ...rollBetween(steady, headwind, headwind, liftOffSpeed), forces: steady }
+      : profiledRoll(steady, run.profile, headwind, liftOffSpeed);
+  if (!gainsSpeed) return neverReaches(forces, headwind, liftOffSpeed, sum.leastAt);
   return {
     outcome: 'lifts-off',
     distance: sum.distance + Math.max(0, run.rotationSpeed - headwind) * run.rotationTime,
@@ -76,7 +58,7 @@ function neverReaches(forces: RollForces, from: number, to: number, leastAt: num
   const leastAccelerationRatio = rollAcceleration(forces, leastAt) / g0;
   for (let i = 0; i <= 1000; i++) {
     const airspeed = from + ((to - from) * i) / 1000;
-    if (rollAcceleration(forces, airspeed) <= none * g0) {
+    if (rollAcceleration(forces, airspeed) <= noAcceleration * g0) {
       return { outcome: 'never-reaches-lift-off-speed', atAirspeed: airspeed, leastAccelerationRatio };
     }
   }

@@ -40,6 +40,11 @@ export function rollForces(run: TakeoffRun): RollForces {
   };
 }
 
+/** The same forces on another slope, uphill positive. */
+export function sloped(forces: RollForces, slope: number): RollForces {
+  return { ...forces, uphill: g0 * slope };
+}
+
 /** Acceleration [m/s2] at a true airspeed [m/s], below 0 with a tailwind at rest: air from behind pushes. */
 export function rollAcceleration(forces: RollForces, airspeed: number): number {
   return accelerationWith(forces, airspeed, forces.thrust.at(airspeed));

@@ -1,4 +1,5 @@
 import type { Thrust } from '../../physics/thrust/thrust.ts';
+import type { SlopeProfile } from '../slope-profile.ts';
 
 /** All that the integrations of a takeoff need, in SI, nothing assumed any more. */
 export interface TakeoffRun {
@@ -23,8 +24,10 @@ export interface TakeoffRun {
   readonly density: number;
   /** along the runway [m/s], on the nose positive */
   readonly headwind: number;
-  /** uphill positive, dimensionless */
+  /** uphill positive, dimensionless; with a profile, of the whole line */
   readonly slope: number;
+  /** the ground line from the start point on; absent: the slope holds throughout */
+  readonly profile?: SlopeProfile | undefined;
   /** true airspeeds [m/s] */
   readonly rotationSpeed: number;
   readonly liftOffSpeed: number;

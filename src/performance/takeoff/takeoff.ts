@@ -1,3 +1,4 @@
+import { steepestFrom } from '../slope-profile.ts';
 import { airDistance, neededWithAllEngines } from './air-distance.ts';
 import { groundRoll } from './ground-roll.ts';
 import type { TakeoffResult, TakeoffRun } from './takeoff-run.ts';
@@ -16,7 +17,7 @@ export function takeoff(run: TakeoffRun, neededClimbGradient = neededWithAllEngi
   if (roll !== undefined) return roll;
   const ground = groundRoll(run);
   if (ground.outcome !== 'lifts-off') return ground;
-  const air = airDistance(run, neededClimbGradient);
+  const air = airDistance(underPath(run, ground.distance), neededClimbGradient);
   if (air.outcome !== 'reaches-screen') {
     const { outcome, leastClimbGradient } = air;
     return {
@@ -37,6 +38,11 @@ export function takeoff(run: TakeoffRun, neededClimbGradient = neededWithAllEngi
     leastAccelerationRatio: ground.leastAccelerationRatio,
     leastClimbGradient: air.leastClimbGradient,
   };
+}
+
+/** The run as its air path sees the ground: on a profile the steepest stretch from lift-off on. */
+function underPath(run: TakeoffRun, groundRoll: number): TakeoffRun {
+  return run.profile === undefined ? run : { ...run, slope: steepestFrom(run.profile, groundRoll) };
 }
 
 function outsideData(run: TakeoffRun): TakeoffResult | undefined {
