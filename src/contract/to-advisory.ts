@@ -23,7 +23,9 @@ function toCaution(how: Presentation, { code, severity, message, at, value, thre
   return shown;
 }
 
-/** A measure as a quantity to the nearest step; a bare number as a ratio. */
+/** A measure as a quantity, rounded the way it says; a bare number as a ratio. */
 export function toMeasure(how: Presentation, measure: Measure | number): Q<Unit> | number {
-  return typeof measure === 'number' ? shownRatio(how, measure) : shownQuantity(how, measure.kind, measure.value);
+  return typeof measure === 'number'
+    ? shownRatio(how, measure)
+    : shownQuantity(how, measure.kind, measure.value, measure.direction);
 }

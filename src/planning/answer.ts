@@ -1,5 +1,5 @@
 import type { ReferenceKey } from '../references.ts';
-import type { Kind } from '../units/presentation.ts';
+import type { Direction, Kind } from '../units/presentation.ts';
 
 /**
  * An answer in SI, as planning hands it to the contract's gate out. Sentences are already in the asked units; numbers are
@@ -28,6 +28,8 @@ export type Outcome = (typeof outcomes)[number];
 export interface Measure {
   readonly kind: Kind;
   readonly value: number;
+  /** which way it may be rounded; absent: to the nearest step */
+  readonly direction?: Direction;
 }
 
 export type Severity = 'note' | 'caution' | 'strong';

@@ -31,4 +31,27 @@ describe('a takeoff from gate to gate', () => {
       expect(Math.abs((others[i]?.[1] as number) / value - 1), path).toBeLessThanOrEqual(1e-12);
     });
   });
+
+  it.each(unitFamilies)('rounds what its cautions and its checks both show the same way in %s', (units) => {
+    let shown = 0;
+    for (let tora = 1203; tora < 1233; tora += 3.7) {
+      const declared = {
+        tora: { value: tora, unit: 'm' as const },
+        toda: { value: 3000, unit: 'm' as const },
+        asda: { value: 1300, unit: 'm' as const },
+      };
+      const answer = answerTakeoff(
+        { ...withMember(sampleTakeoff(), '/runway/declared', declared), units },
+        lookup,
+        stamp,
+      );
+      if (isRefused(answer)) throw new Error('refused');
+      const caution = (code: string) => answer.advisory.cautions.find((one) => one.code === code);
+      const check = (code?: string) => answer.assessment?.checks.find((one) => one.code === code);
+      expect(caution('clearway-capped')?.threshold).toEqual(check('takeoff-distance')?.available);
+      expect(caution('margin-negative')?.value).toEqual(check(answer.assessment?.governing)?.margin);
+      shown++;
+    }
+    expect(shown).toBeGreaterThan(8);
+  });
 });

@@ -13,8 +13,8 @@ export const clearwayCapped: CautionTest<AnswerContext> = {
     return {
       message: `The clearway counts up to half the run. ${textIn(context, 'distance', clearwayNotCredited)} of the declared TODA is not counted: ${measureDown(context, credited.toda)} is available.`,
       at: '/runway/declared/toda',
-      value: { kind: 'distance', value: clearwayNotCredited },
-      threshold: { kind: 'distance', value: credited.toda },
+      value: { kind: 'distance', value: clearwayNotCredited, direction: 'up' },
+      threshold: { kind: 'distance', value: credited.toda, direction: 'down' },
     };
   },
 };

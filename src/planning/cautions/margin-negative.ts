@@ -17,7 +17,7 @@ export const marginNegative: CautionTest<AnswerContext> = {
     return {
       message: `The check ${worst.code} is short by ${textIn(context, 'distance', -margin)}: ${textIn(context, 'distance', required)} required, ${measureDown(context, available)} available.${others}`,
       at: '/runway/declared',
-      value: { kind: 'distance', value: margin },
+      value: { kind: 'distance', value: margin, direction: 'down' },
     };
   },
 };
