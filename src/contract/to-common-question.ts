@@ -1,3 +1,4 @@
+import { configurationPointer } from '../planning/aeroplane-pointer.ts';
 import type { Fault } from '../planning/fault.ts';
 import type { Question } from '../planning/question.ts';
 import { ruleSetOf, ruleSets } from '../planning/rules/rule-sets.ts';
@@ -89,9 +90,9 @@ function defaulted(
   const pointers: string[] = [];
   if (units === undefined) pointers.push('/units');
   if (rounding === undefined) pointers.push('/rounding');
-  const lift = 'id' in aeroplane ? undefined : configurations[configuration]?.maximumLift;
+  const lift = configurations[configuration]?.maximumLift;
   if (lift && 'stallSpeed' in lift && lift.kind === undefined) {
-    pointers.push(`${aeroplaneAt(aeroplane)}/configurations/${configuration}/maximumLift/kind`);
+    pointers.push(configurationPointer({ aeroplaneAt: aeroplaneAt(aeroplane), configuration }, 'maximumLift/kind'));
   }
   return pointers;
 }

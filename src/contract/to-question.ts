@@ -19,6 +19,15 @@ export function toQuestion(request: TakeoffRequest, lookup: AeroplaneLookup): Ta
   const { procedure } = request;
   if (procedure !== undefined) faults.push(...takeoffProcedureFaults({ ...asked(request, known), procedure }));
   if (faults.length > 0) return { refused: faults };
-  const question = toCommonQuestion(request, known);
+  const common = toCommonQuestion(request, known);
+  const question = { ...common, defaulted: [...common.defaulted, ...defaultedProcedure(procedure)] };
   return procedure === undefined ? question : { ...question, procedure };
+}
+
+/** Pointers of what a takeoff takes where its procedure does not say. */
+function defaultedProcedure({ power, start }: NonNullable<TakeoffRequest['procedure']> = {}): string[] {
+  const pointers: string[] = [];
+  if (power === undefined) pointers.push('/procedure/power');
+  if (start === undefined) pointers.push('/procedure/start');
+  return pointers;
 }

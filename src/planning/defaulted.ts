@@ -1,7 +1,7 @@
 import type { Assumption } from './answer.ts';
 import type { Question } from './question.ts';
 
-/** What the gate filled in, as assumptions; nothing numeric hangs on units and rounding. */
+/** What the gate filled in, as assumptions; what else it could have been has no figure here. */
 export function defaulted({ defaulted, units }: Pick<Question, 'defaulted' | 'units'>): Assumption[] {
   return defaulted.map((at) => ({ at, value: filledIn(at, units), because: 'not given; the default of this version' }));
 }
@@ -9,5 +9,7 @@ export function defaulted({ defaulted, units }: Pick<Question, 'defaulted' | 'un
 function filledIn(at: string, units: string): string {
   if (at === '/units') return units;
   if (at === '/rounding') return 'safe';
+  if (at === '/procedure/power') return 'full';
+  if (at === '/procedure/start') return 'standing';
   return at.endsWith('/kind') ? 'one-g' : 'default';
 }

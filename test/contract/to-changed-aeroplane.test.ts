@@ -82,7 +82,10 @@ describe('an aeroplane on file with changes', () => {
   it('points into the changes for what it assumes', () => {
     const answer = asked(changed({ configurations: { 'takeoff-10': { pullUpLoadFactor: null } } }));
     const at = '/aeroplane/changes/configurations/takeoff-10';
-    expect(answer.basis.assumed.map((one) => one.at)).toEqual([`${at}/pullUpLoadFactor`, `${at}/maximumLift/kind`]);
+    expect(answer.basis.assumed.map((one) => one.at).filter((one) => one.startsWith('/aeroplane'))).toEqual([
+      `${at}/pullUpLoadFactor`,
+      `${at}/maximumLift/kind`,
+    ]);
   });
 
   it('names six changes and counts the others', () => {

@@ -168,7 +168,7 @@ describe('the gate in', () => {
       ruleSet: 'eu-class-b',
       stage: 'dispatch',
       units: 'm-kt-kg',
-      defaulted: [],
+      defaulted: ['/aeroplane#/configurations/takeoff-10/maximumLift/kind', '/procedure/power', '/procedure/start'],
     });
   });
 
@@ -240,9 +240,16 @@ describe('the gate in', () => {
 
   it('says what it fills in', () => {
     const silent = withMember(withMember(sampleTakeoff(), '/units', undefined), '/rounding', undefined);
-    expect(asked(silent)).toMatchObject({ units: 'm-kt-kg', defaulted: ['/units', '/rounding'] });
+    const kind = 'configurations/takeoff-10/maximumLift/kind';
+    const procedure = ['/procedure/power', '/procedure/start'];
+    expect(asked(silent)).toMatchObject({
+      units: 'm-kt-kg',
+      defaulted: ['/units', '/rounding', `/aeroplane#/${kind}`, ...procedure],
+    });
     const inline = withMember(sampleTakeoff(), '/aeroplane', { definition: sampleDefinition() });
-    expect(asked(inline).defaulted).toEqual(['/aeroplane/definition/configurations/takeoff-10/maximumLift/kind']);
+    expect(asked(inline).defaulted).toEqual([`/aeroplane/definition/${kind}`, ...procedure]);
+    const standing = withMember(inline, '/procedure', { start: 'standing' });
+    expect(asked(standing).defaulted).toEqual([`/aeroplane/definition/${kind}`, '/procedure/power']);
   });
 
   it('the same question in other units is the same question, to 1e-12', () => {
