@@ -71,6 +71,7 @@ export const references = entries({
   Cfr23s51: { title: '14 CFR 23.51 at amendments 23-50 to 23-62, takeoff speeds', status: 'read' },
   Cfr23s73: { title: '14 CFR 23.73 at amendments 23-50 to 23-62, reference landing approach speed', status: 'read' },
   Cfr23s75: { title: '14 CFR 23.75 at amendments 23-50 to 23-62, landing distance', status: 'read' },
+  Cfr23s77: { title: '14 CFR 23.77 at amendments 23-50 to 23-62, balked landing', status: 'read' },
   Cfr25s125: { title: '14 CFR 25.125 and CS 25.125, landing', status: 'read' },
   Cfr23s233: { title: '14 CFR 23.233 and 25.237, crosswind that was demonstrated', status: 'memory' },
   Annex14: { title: 'ICAO Annex 14, Volume I, declared distances, clearways and runway slopes', status: 'memory' },

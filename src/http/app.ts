@@ -15,6 +15,7 @@ import { requestLog } from './plugins/request-log.ts';
 import { aeroplanes } from './routes/aeroplanes.ts';
 import { air } from './routes/air.ts';
 import { airspeed } from './routes/airspeed.ts';
+import { landing } from './routes/landing.ts';
 import { ruleSets } from './routes/rule-sets.ts';
 import { service } from './routes/service.ts';
 import { sources } from './routes/sources.ts';
@@ -70,7 +71,13 @@ export async function buildApp({ catalogue, logger = false, settings }: House): 
   sources(app);
   const lookup = aeroplaneLookup(catalogue);
   const ours = stamp();
-  const warmUps = [takeoff(app, lookup, ours), speeds(app, lookup, ours), airspeed(app, lookup, ours), air(app, ours)];
+  const warmUps = [
+    takeoff(app, lookup, ours),
+    landing(app, lookup, ours),
+    speeds(app, lookup, ours),
+    airspeed(app, lookup, ours),
+    air(app, ours),
+  ];
   await documentPages(app);
 
   app.addHook('onReady', (done) => {

@@ -5,8 +5,8 @@ import type { Assumption } from './answer.ts';
 /** The members of a run that are bare numbers. */
 export type NumberMember<Run> = { [K in keyof Run]: Run[K] extends number ? K : never }[keyof Run];
 
-/** How to put the other end of an assumption's plausible range into a run. */
-export type OtherEnd<Run = TakeoffRun> =
+/** How to put the other end of the plausible range of a bare number into a run. */
+export type NumberOtherEnd<Run> =
   | {
       /** 'run-increment': the value comes on top of the run's own */
       readonly kind: 'run' | 'run-increment';
@@ -19,7 +19,11 @@ export type OtherEnd<Run = TakeoffRun> =
       readonly member: NumberMember<Run>;
       readonly factor: number;
       readonly text: string;
-    }
+    };
+
+/** How to put the other end of an assumption of a takeoff into its run. */
+export type OtherEnd =
+  | NumberOtherEnd<TakeoffRun>
   | {
       readonly kind: 'propulsion';
       readonly propulsion: Propulsion;

@@ -1,4 +1,4 @@
-import type { Assumed, OtherEnd } from './assumed.ts';
+import type { Assumed, NumberOtherEnd } from './assumed.ts';
 
 /**
  * What each assumption is worth: the change of the whole distance when the other end of its plausible range is taken.
@@ -20,10 +20,7 @@ export function assumptionEffects<Other extends { readonly text: string }>(
 }
 
 /** A run with the other end of a bare number in its place. */
-export function withNumber<Run extends object>(
-  run: Run,
-  other: Exclude<OtherEnd<Run>, { readonly kind: 'propulsion' }>,
-): Run {
+export function withNumber<Run extends object>(run: Run, other: NumberOtherEnd<Run>): Run {
   const { member } = other;
   const own = run[member] as number;
   switch (other.kind) {

@@ -3,7 +3,7 @@ import type { Air } from '../performance/air.ts';
 import { airAtRunway, chosenConfiguration, chosenRuleSet, isFault } from './chosen.ts';
 import type { Refused } from './fault.ts';
 import type { Question } from './question.ts';
-import type { RuleSet } from './rules/rule-set.ts';
+import type { PhaseRules, RuleSet } from './rules/rule-set.ts';
 import { type WindAlong, windAlong } from './wind-along.ts';
 import { windCredit } from './wind-credit.ts';
 
@@ -35,5 +35,18 @@ export function conditionsOf(question: Question, phase: 'takeoff' | 'landing'): 
     wind,
     creditedHeadwind: windCredit(wind.headwind, ruleSet.windCredit),
     doesNotApply: ruleSet.doesNotApply(question.aeroplane),
+  };
+}
+
+/** What the rule set makes of the runs behind an answer; nothing where it does not apply. */
+export function ruledRuns(
+  { creditedHeadwind, wind, doesNotApply }: Conditions,
+  { startsFrom, runwayFactors }: PhaseRules,
+  { surface, slope }: Question['runway'],
+): { readonly creditedHeadwind: number; readonly needsReference: boolean } {
+  if (doesNotApply !== undefined) return { creditedHeadwind: wind.headwind, needsReference: false };
+  return {
+    creditedHeadwind,
+    needsReference: startsFrom === 'reference' && runwayFactors(surface, slope) !== undefined,
   };
 }

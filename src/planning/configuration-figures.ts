@@ -1,7 +1,7 @@
 import type { ScheduledSpeed } from '../performance/aeroplane.ts';
 import { configurationPointer } from './aeroplane-pointer.ts';
 import type { Assumption } from './answer.ts';
-import type { Assumed, NumberMember, OtherEnd } from './assumed.ts';
+import type { Assumed, NumberMember, NumberOtherEnd } from './assumed.ts';
 import type { Question } from './question.ts';
 import type { StandingDefault } from './rules/standing-default.ts';
 import { numberText } from './sentences/measure-text.ts';
@@ -31,7 +31,7 @@ export interface FigureOfSpeed<Run> {
 
 /** The figures of a configuration: as stated, or the default, said with where it would be stated and what else it could be. */
 export class ConfigurationFigures<Run> {
-  readonly assumed: Assumed<OtherEnd<Run>>[] = [];
+  readonly assumed: Assumed<NumberOtherEnd<Run>>[] = [];
   readonly #question: Pick<Question, 'aeroplaneAt' | 'configuration'>;
 
   /** @param question - for the pointers */
@@ -71,7 +71,7 @@ export class ConfigurationFigures<Run> {
     return { kind: 'stall-ratio', ratio: value };
   }
 
-  say(name: string, assumption: Assumption, otherEnd?: OtherEnd<Run>): void {
+  say(name: string, assumption: Assumption, otherEnd?: NumberOtherEnd<Run>): void {
     this.assumed.push(otherEnd === undefined ? { name, assumption } : { name, assumption, otherEnd });
   }
 }

@@ -1,6 +1,9 @@
 import { arithmeticSlack } from './arithmetic-slack.ts';
 import type { Runway } from './question.ts';
 
+/** The declared distances that count in each phase. */
+export const countingDistances = { takeoff: ['tora', 'toda', 'asda'], landing: ['lda'] } as const;
+
 /** Lengths from the start point [m]; an absent one is not known and is not taken from another. */
 export interface Lengths {
   readonly tora: number | undefined;

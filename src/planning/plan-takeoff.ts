@@ -109,8 +109,8 @@ export function planTakeoff(question: TakeoffQuestion): TakeoffAnswer | Refused 
       method,
       band: band?.contributions,
       assumed: [...assumed.map(({ assumption }) => assumption), ...defaulted(question)],
-      notGiven: notGiven(question),
-      sources: [ruleSet.source, ruleSet.windCredit.source],
+      notGiven: notGiven(question, 'takeoff'),
+      sources: [rules.source, ruleSet.windCredit.source],
     },
   };
 }

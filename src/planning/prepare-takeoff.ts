@@ -6,7 +6,7 @@ import type { TakeoffRun } from '../performance/takeoff/takeoff-run.ts';
 import type { Thrust } from '../physics/thrust/thrust.ts';
 import type { TakeoffAnswer } from './answer.ts';
 import { isFault } from './chosen.ts';
-import { type Conditions, conditionsOf } from './conditions.ts';
+import { type Conditions, conditionsOf, ruledRuns } from './conditions.ts';
 import { isRefused, type Refused } from './fault.ts';
 import { type FlownTakeoff, flownTakeoff } from './procedure/flown-takeoff.ts';
 import { takeoffProcedureFaults } from './procedure/takeoff-procedure-faults.ts';
@@ -44,7 +44,7 @@ export function prepareTakeoff(question: TakeoffQuestion): PreparedTakeoff | Ref
   if (isRefused(conditions)) return conditions;
   const unflyable = takeoffProcedureFaults(question);
   if (unflyable.length > 0) return { refused: unflyable };
-  const { ruleSet, configuration, air, wind, creditedHeadwind, doesNotApply } = conditions;
+  const { ruleSet, configuration, air, wind } = conditions;
   const flown = flownTakeoff(question, configuration);
 
   const resolved = resolveTakeoff(question, configuration);
@@ -63,16 +63,13 @@ export function prepareTakeoff(question: TakeoffQuestion): PreparedTakeoff | Ref
     rollingFriction: friction.actual ?? friction.reference,
   });
 
-  const rules = ruleSet.takeoff;
+  const { creditedHeadwind, needsReference } = ruledRuns(conditions, ruleSet.takeoff, runway);
   const runConditions = {
-    creditedHeadwind: doesNotApply === undefined ? creditedHeadwind : wind.headwind,
+    creditedHeadwind,
     actualFriction: friction.actual,
     referenceFriction: friction.reference,
     rollingStartAllowance: flown.rollingStartAllowance,
-    needsReference:
-      doesNotApply === undefined &&
-      rules.startsFrom === 'reference' &&
-      rules.runwayFactors(runway.surface, runway.slope) !== undefined,
+    needsReference,
   };
   return { conditions, flown, resolved, speeds, power, thrustIn, friction, run, runConditions };
 }

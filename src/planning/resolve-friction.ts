@@ -3,6 +3,7 @@ import type { Assumed } from './assumed.ts';
 import type { Surface } from './question.ts';
 import { frictionUncertainty } from './rules/input-uncertainties.ts';
 import { numberText } from './sentences/measure-text.ts';
+import { unstatedGround } from './unstated-ground.ts';
 
 /** Rolling friction of the runway, and of the one that factors are meant to multiply. */
 export interface ResolvedFriction {
@@ -37,7 +38,7 @@ export function resolveFriction(surface: Surface, jet: boolean): ResolvedFrictio
       assumed: [],
     };
   }
-  const assumed = unstatedGround(surface);
+  const assumed: Assumed[] = unstatedGround(surface, 'takeoff');
   const given = surface.rollingFrictionCoefficient;
   if (given !== undefined) {
     return { actual: given, reference: reference.coefficient, surface: known.because, assumed };
@@ -59,27 +60,4 @@ export function resolveFriction(surface: Surface, jet: boolean): ResolvedFrictio
     },
   });
   return { actual: known.coefficient, reference: reference.coefficient, surface: known.because, assumed };
-}
-
-/** What is taken of ground whose grass or subsoil nobody stated; its friction says what that is worth. */
-function unstatedGround({ kind, grass, firmness }: Surface): Assumed[] {
-  const assumed: Assumed[] = [];
-  if (kind === 'grass' && grass === undefined && firmness !== 'soft') {
-    assumed.push({
-      name: 'the length of the grass',
-      assumption: {
-        at: '/runway/surface/grass',
-        value: 'long',
-        because: 'not stated; the longer takeoff',
-        source: 'Judgement',
-      },
-    });
-  }
-  if (kind !== 'paved' && kind !== 'ice' && firmness === undefined) {
-    assumed.push({
-      name: 'the subsoil',
-      assumption: { at: '/runway/surface/firmness', value: 'firm', because: 'not stated', source: 'Judgement' },
-    });
-  }
-  return assumed;
 }

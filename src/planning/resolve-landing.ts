@@ -1,6 +1,6 @@
 import type { Aeroplane, Configuration, ScheduledSpeed } from '../performance/aeroplane.ts';
 import type { LandingRun } from '../performance/landing/landing-run.ts';
-import type { Assumed, OtherEnd } from './assumed.ts';
+import type { Assumed, NumberOtherEnd } from './assumed.ts';
 import { ConfigurationFigures } from './configuration-figures.ts';
 import type { LandingQuestion } from './question.ts';
 import { referenceSpeedRules } from './rules/certification/reference-speed.ts';
@@ -9,7 +9,7 @@ import { measureText } from './sentences/measure-text.ts';
 
 /** How to put the other end of an assumption of a landing into a run. */
 export type LandingOtherEnd =
-  | OtherEnd<LandingRun>
+  | NumberOtherEnd<LandingRun>
   | {
       /** idle thrust in the roll [N] */
       readonly kind: 'idle-thrust';

@@ -24,15 +24,7 @@ export function shortfalls(result: NotReached, propulsionAt: string): readonly S
         },
       ];
     case 'ground-speed-not-positive':
-      return [
-        {
-          at: '/weather/wind',
-          axis: 'headwind',
-          given: { kind: 'speed', value: result.headwind },
-          bound: { kind: 'speed', value: result.liftOffSpeed },
-          side: 'above',
-        },
-      ];
+      return [headwindShortfall(result.headwind, result.liftOffSpeed)];
     case 'outside-stated-data':
       return [
         {
@@ -44,4 +36,15 @@ export function shortfalls(result: NotReached, propulsionAt: string): readonly S
         },
       ];
   }
+}
+
+/** A headwind at or above the true airspeed at which the wheels leave or meet the runway [m/s]. */
+export function headwindShortfall(headwind: number, airspeed: number): Shortfall {
+  return {
+    at: '/weather/wind',
+    axis: 'headwind',
+    given: { kind: 'speed', value: headwind },
+    bound: { kind: 'speed', value: airspeed },
+    side: 'above',
+  };
 }

@@ -1,10 +1,8 @@
+import { countingDistances } from '../../planning/declared-distances.ts';
 import type { Fault } from '../../planning/fault.ts';
 import { si } from '../quantity.ts';
 import type { RunwayOnWire } from '../runway.ts';
 import { written } from '../written.ts';
-
-/** The declared distances that count in each phase. */
-const counting = { takeoff: ['tora', 'toda', 'asda'], landing: ['lda'] } as const;
 
 /** Members of a runway against each other. */
 export function checkRunway(runway: RunwayOnWire, phase: 'takeoff' | 'landing'): Fault[] {
@@ -36,7 +34,7 @@ function checkStart({ start, lineUp, declared = {} }: RunwayOnWire, phase: 'take
   const faults: Fault[] = [];
   const offset = typeof start === 'object' && 'offset' in start ? start.offset : undefined;
   const offsetLength = offset === undefined ? 0 : si('length', offset);
-  for (const name of counting[phase]) {
+  for (const name of countingDistances[phase]) {
     const length = declared[name];
     if (length === undefined) continue;
     const published = si('length', length);

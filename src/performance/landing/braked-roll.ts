@@ -32,7 +32,8 @@ const weights = Float64Array.from([0, ...rule.weights, 0]);
  * Distance on the wheels from an airspeed to a standstill, brakes full on.
  *
  * s = integral of (V - w)/d(V) dV from V = w to the airspeed; t = integral of dV/d;
- * m d = mu_B(V - w) max(0, W - q S C_Lg) + q S C_Dg - T_idle + W slope, q = rho V|V|/2.
+ * m d = mu_B(V - w) max(0, W - q S C_Lg) + q S C_Dg - T_idle + W slope, q = rho V|V|/2,
+ * with the reverse thrust added in place of T_idle taken off, at and above its cut-off speed.
  *
  * @param run - configuration, wind and braking of the stop
  * @param airspeed - true, at which braking begins [m/s], above w
@@ -60,9 +61,10 @@ export function brakedRoll(run: BrakedRun, airspeed: number): BrakedRoll {
   return { outcome: 'stops', distance: sum.distance, time: sum.time, leastDecelerationRatio: sum.least / g0 };
 }
 
-/** Airspeeds [m/s] at which the slope of the deceleration jumps: still air, the wheels unloaded, the friction's kinks. */
+/** Airspeeds [m/s] at which the deceleration or its slope jumps: still air, the wheels unloaded, the friction's kinks, reverse. */
 function jumpsOf(run: BrakedRun): number[] {
   const jumps = [0, ...run.braking.kinks.map((groundSpeed) => groundSpeed + run.headwind)];
+  if (run.reverseThrust !== undefined) jumps.push(run.reverseThrust.cutOffSpeed + run.headwind);
   const lift = 0.5 * run.density * run.wingArea * run.groundLiftCoefficient;
   if (lift > 0) jumps.push(Math.sqrt((run.mass * g0) / lift));
   return jumps;
@@ -76,9 +78,13 @@ function decelerationOf(run: BrakedRun): (airspeed: number) => number {
   const drag = halfRhoS * dragCoefficient(run.groundDragCoefficient, run.inducedDragFactor, liftCoefficient, phi);
   const lift = halfRhoS * liftCoefficient;
   const steady = g0 * run.slope - run.idleThrust / run.mass;
+  const { thrust: reverse, cutOffSpeed } = run.reverseThrust ?? { thrust: 0, cutOffSpeed: Number.POSITIVE_INFINITY };
+  const reversed = g0 * run.slope + reverse / run.mass;
   return (airspeed) => {
     const square = airspeed * Math.abs(airspeed);
-    return braking.at(airspeed - headwind) * Math.max(0, g0 - lift * square) + drag * square + steady;
+    const groundSpeed = airspeed - headwind;
+    const rest = groundSpeed < cutOffSpeed ? steady : reversed;
+    return braking.at(groundSpeed) * Math.max(0, g0 - lift * square) + drag * square + rest;
   };
 }
 

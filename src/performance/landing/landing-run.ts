@@ -18,6 +18,8 @@ export interface BrakedRun {
   readonly braking: BrakingFriction;
   /** of all running engines, forward positive [N] */
   readonly idleThrust: number;
+  /** backwards in place of idle thrust [N], at and above a ground speed [m/s]; absent: not used */
+  readonly reverseThrust?: { readonly thrust: number; readonly cutOffSpeed: number } | undefined;
   /** [kg/m3] */
   readonly density: number;
   /** along the runway [m/s], on the nose positive */

@@ -24,6 +24,10 @@ export const inputUncertainties = {
   technique: 0.15,
   /** [m]: where the wheels stand when the brakes are let go */
   startPoint: 15,
+  /** on the approach, above the landing reference speed [m/s]: 5 kt */
+  approachSpeed: (5 * 1852) / 3600,
+  /** height over the threshold [m]: 15 ft */
+  screenHeight: 15 * 0.3048,
 } as const;
 
 /** Model form: what the method itself may be off, as a share of the distance. @see references.Judgement */
@@ -39,4 +43,9 @@ export function frictionUncertainty({ kind, state, firmness }: Surface): number 
   if (firmness === 'soft') return 0.05;
   if (kind === 'paved' || kind === 'ice') return 0.005;
   return kind === 'dirt' && state !== 'dry' ? 0.05 : 0.02;
+}
+
+/** Standard deviation of the braking friction coefficient, as a share of it: 0.15 on dry pavement, 0.25 elsewhere. @see references.Judgement */
+export function brakingUncertainty({ kind, state }: Surface): number {
+  return kind === 'paved' && state === 'dry' ? 0.15 : 0.25;
 }

@@ -1,4 +1,4 @@
-import type { ReferenceKey } from '../../references.ts';
+import { tailwheelBrakedLoad, tricycleBrakedLoad } from '../../physics/braking-friction.ts';
 import type { StandingDefault } from './standing-default.ts';
 
 const degree = Math.PI / 180;
@@ -87,18 +87,20 @@ export const landingScreenHeight = 50 * 0.3048;
 /** (D - T)/W while the aeroplane floats, where nothing is fitted. @see references.Judgement */
 export const floatDeceleration = 0.12;
 
-/** Part of the weight that the braked wheels carry. */
+/** Part of the weight on the braked wheels by the arrangement of the wheels. @see references.HouseFriction */
 export const brakedLoad: Readonly<
-  Record<
-    'tricycle' | 'tailwheel' | 'unknown',
-    { readonly value: number; readonly because: string; readonly source: ReferenceKey }
-  >
+  Record<'tricycle' | 'tailwheel' | 'unknown', { readonly value: number; readonly because: string }>
 > = {
-  tricycle: { value: 0.85, because: 'not stated; 0.85 to 0.92 is usual with a nose wheel', source: 'Judgement' },
-  tailwheel: { value: 0.8, because: 'not stated; about 0.80 is usual with a tail wheel', source: 'Judgement' },
+  tricycle: { value: tricycleBrakedLoad, because: 'not stated; 0.85 to 0.92 is usual with a nose wheel' },
+  tailwheel: { value: tailwheelBrakedLoad, because: 'not stated; about 0.80 is usual with a tail wheel' },
   unknown: {
-    value: 0.8,
-    because: 'not stated, nor whether the third wheel is at the nose or the tail; 0.80 is the less of the two',
-    source: 'Judgement',
+    value: tailwheelBrakedLoad,
+    because: 'not stated, nor whether the third wheel is at the nose or at the tail; the less of 0.85 and 0.80',
   },
 };
+
+/** Tyre pressure where none is stated [Pa]: 100 psi, 200 psi for jets; a lower one brakes better on a wet runway. @see references.Judgement */
+export function assumedTyrePressure(isJet: boolean): { readonly value: number; readonly text: string } {
+  return isJet ? { value: 200 * psi, text: '200 psi' } : { value: 100 * psi, text: '100 psi' };
+}
+const psi = 6894.757293168361;

@@ -33,6 +33,7 @@ export interface Requirement {
 
 /** What a rule set holds for takeoffs, or for landings. */
 export interface PhaseRules {
+  readonly source: ReferenceKey;
   /**
    * The distance that the set's surface and slope factors multiply. 'reference': credited wind on a paved, dry, level runway;
    * 'credited': the set has no such factors and physics on the actual runway stands alone.

@@ -64,6 +64,7 @@ const requirements: readonly Requirement[] = [
 
 /** CAT.POL.A.330 and A.335: landing of class B aeroplanes, on dry and on wet runways. */
 export const euClassBLanding: PhaseRules = {
+  source: 'EuAirOps330',
   startsFrom: 'reference',
   runwayFactors: (surface, slope) => {
     const factors = surfaceFactors(surface);

@@ -81,6 +81,7 @@ function requirements({ published: { tora, toda, asda } }: DeclaredDistances): r
 
 /** CAT.POL.A.305: takeoff of class B aeroplanes. */
 export const euClassBTakeoff: TakeoffRules = {
+  source: 'EuAirOps305',
   startsFrom: 'reference',
   clearwayShare,
   runwayFactors: (surface, slope) => {

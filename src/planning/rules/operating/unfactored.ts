@@ -21,10 +21,11 @@ export const unfactored: RuleSet = {
   windCredit: { headwind: 1, tailwind: 1, because: 'the wind is taken as given', source: 'Judgement' },
   thinMargin,
   takeoff: {
+    source: 'Judgement',
     startsFrom: 'credited',
     clearwayShare,
     runwayFactors: () => undefined,
     requirements: () => takeoff,
   },
-  landing: { startsFrom: 'credited', runwayFactors: () => undefined, requirements: () => landing },
+  landing: { source: 'Judgement', startsFrom: 'credited', runwayFactors: () => undefined, requirements: () => landing },
 };

@@ -1,0 +1,40 @@
+import { g0 } from '../../physics/constants.ts';
+import { dragCoefficient } from '../../physics/drag.ts';
+import { groundEffect } from '../../physics/ground-effect.ts';
+import { landingAirDistance } from './landing-air-distance.ts';
+import type { LandingRun } from './landing-run.ts';
+
+/** Ground roll by mean deceleration and air distance [m]; Infinity where the mean is not positive. */
+export interface LandingEstimate {
+  readonly groundRoll: number;
+  readonly airDistance: number;
+}
+
+/**
+ * The cheap, smooth estimate of a landing from which bands and effects are taken.
+ *
+ * s_G = (V_TD - w) t_F + (V_TD - w)^2/(2 d(V_m)), V_m = w + 0.707 (V_TD - w); the air distance is that of landingAirDistance,
+ * which is closed.
+ *
+ * @param run - as for landing, the touchdown speed above the headwind
+ * @returns [m] each; not an answer by itself: within some 3 % of the roll on friction that does not change with speed
+ * @see references.AndersonPerformance, ch. 6 for 0.7 of the touchdown speed
+ */
+export function landingEstimate(run: LandingRun): LandingEstimate {
+  const { headwind, touchdownSpeed, groundLiftCoefficient: liftCoefficient, reverseThrust } = run;
+  const groundSpeed = touchdownSpeed - headwind;
+  if (!(groundSpeed > 0)) return { groundRoll: Number.NaN, airDistance: Number.NaN };
+  const mean = headwind + Math.SQRT1_2 * groundSpeed;
+  const phi = groundEffect(run.wingHeight / run.span);
+  const q = (0.5 * run.density * run.wingArea * mean * Math.abs(mean)) / run.mass;
+  const drag = q * dragCoefficient(run.groundDragCoefficient, run.inducedDragFactor, liftCoefficient, phi);
+  const held = run.braking.at(mean - headwind) * Math.max(0, g0 - q * liftCoefficient);
+  const isReversed = reverseThrust !== undefined && mean - headwind >= reverseThrust.cutOffSpeed;
+  const thrust = isReversed ? -reverseThrust.thrust : run.idleThrust;
+  const deceleration = held + drag - thrust / run.mass + g0 * run.slope;
+  const groundRoll =
+    deceleration > 0
+      ? groundSpeed * run.freeRollTime + groundSpeed ** 2 / (2 * deceleration)
+      : Number.POSITIVE_INFINITY;
+  return { groundRoll, airDistance: landingAirDistance(run).distance };
+}

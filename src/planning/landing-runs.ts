@@ -1,0 +1,110 @@
+import { landing } from '../performance/landing/landing.ts';
+import type { LandingResult, LandingRun } from '../performance/landing/landing-run.ts';
+import type { BrakingFriction } from '../physics/braking-friction.ts';
+import { inducedDragFactor } from '../physics/drag.ts';
+import type { LandingAnswer } from './answer.ts';
+import type { Checked } from './assess.ts';
+import type { LandingQuestion } from './question.ts';
+import type { ResolvedLanding } from './resolve-landing.ts';
+import { floatDeceleration, landingScreenHeight } from './rules/landing-defaults.ts';
+import { firstWithout, type Runs, runsOf } from './runs.ts';
+
+/** A landing that stops. */
+export type Stopped = Extract<LandingResult, { outcome: 'stops' }>;
+/** The name of why there are no distances. */
+export type NotStopped = Exclude<LandingResult, Stopped>;
+/** The distances behind an answer to a landing. */
+export type LandingRuns = Runs<LandingResult>;
+
+/** What differs between the three. */
+export interface LandingConditions {
+  /** [m/s] */
+  readonly creditedHeadwind: number;
+  /** on the actual surface; absent where physics does not speak of it */
+  readonly actualBraking: BrakingFriction | undefined;
+  readonly referenceBraking: BrakingFriction;
+  /** whether the rule set multiplies the reference distance */
+  readonly needsReference: boolean;
+}
+
+/** What of the weather and the runway a run needs beside its question. */
+export interface LandingAir {
+  /** [kg/m3] */
+  readonly density: number;
+  /** [m/s] */
+  readonly headwind: number;
+  readonly braking: BrakingFriction;
+}
+
+/** The run on the runway as it is, in the wind as given: all that the integrations need. */
+export function statedLanding(
+  question: Pick<LandingQuestion, 'aeroplane' | 'mass' | 'runway' | 'procedure'>,
+  resolved: ResolvedLanding,
+  speeds: LandingAnswer['speeds'],
+  { density, headwind, braking }: LandingAir,
+): LandingRun {
+  const { wing, drag, reverseThrust } = question.aeroplane;
+  return {
+    mass: question.mass,
+    wingArea: wing.area,
+    span: wing.span,
+    wingHeight: wing.heightAboveGround,
+    inducedDragFactor: inducedDragFactor(wing.span, wing.area, drag.oswaldFactor),
+    groundDragCoefficient: drag.zeroLiftCoefficient + resolved.groundDragIncrement,
+    groundLiftCoefficient: resolved.groundLiftCoefficient,
+    braking,
+    idleThrust: resolved.idleThrust,
+    density,
+    headwind,
+    slope: question.runway.slope,
+    referenceSpeed: speeds.landingReference.tas,
+    touchdownSpeed: speeds.touchdown.tas,
+    approachAngle: resolved.approachAngle,
+    flareLoadFactor: resolved.flareLoadFactor,
+    screenHeight: landingScreenHeight,
+    freeRollTime: resolved.freeRollTime,
+    floatDecelerationRatio: floatDeceleration,
+    reverseThrust: question.procedure?.reverse ? reverseThrust : undefined,
+  };
+}
+
+/**
+ * The three runs behind an answer.
+ *
+ * No reverse thrust shortens the distance that factors multiply: it stands for the flight manual's, which counts none.
+ */
+export function landingRuns(run: LandingRun, conditions: LandingConditions): LandingRuns {
+  const { creditedHeadwind, actualBraking, referenceBraking, needsReference } = conditions;
+  return runsOf(landing, run, {
+    known: actualBraking !== undefined,
+    creditedHeadwind,
+    reference: needsReference
+      ? { ...run, headwind: creditedHeadwind, slope: 0, braking: referenceBraking, reverseThrust: undefined }
+      : undefined,
+    sameRunway: run.slope === 0 && actualBraking === referenceBraking && run.reverseThrust === undefined,
+  });
+}
+
+/** What a run came to, where it stops. */
+export function stopped(result: LandingResult | undefined): Stopped | undefined {
+  return result !== undefined && isStopped(result) ? result : undefined;
+}
+
+/** The first of the three that does not stop, in the order stated, credited, reference. */
+export function notStopped(runs: LandingRuns): NotStopped | undefined {
+  return firstWithout(runs, isStopped);
+}
+
+/** What checks are of, of each run that stops. */
+export function checkedLandings(runs: LandingRuns): Runs<Checked> {
+  return { stated: checked(runs.stated), credited: checked(runs.credited), reference: checked(runs.reference) };
+}
+
+function checked(result: LandingResult | undefined): Checked | undefined {
+  const found = stopped(result);
+  return found && { groundRoll: found.groundRoll, wholeDistance: found.landingDistance };
+}
+
+function isStopped(result: LandingResult): result is Stopped {
+  return result.outcome === 'stops';
+}
