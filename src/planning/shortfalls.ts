@@ -18,7 +18,7 @@ export function shortfalls(result: NotReached, propulsionAt: string): readonly S
         {
           at: '/mass',
           axis: 'climbGradient',
-          given: { kind: 'gradient', value: result.leastClimbGradient },
+          given: { kind: 'gradient', value: result.leastClimbGradient, direction: 'down' },
           bound: { kind: 'gradient', value: result.neededClimbGradient },
           side: 'below',
         },

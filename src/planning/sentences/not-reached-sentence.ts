@@ -11,9 +11,9 @@ export function notReachedSentence(runs: TakeoffRuns, units: UnitFamily): string
   const where = whichRun(runs, result);
   switch (result.outcome) {
     case 'never-reaches-lift-off-speed':
-      return `Never reaches the lift-off speed${where}: at ${speed(result.atAirspeed)} true airspeed the acceleration is ${percentText(result.leastAccelerationRatio, 2)} of that of gravity.`;
+      return `Never reaches the lift-off speed${where}: at ${speed(result.atAirspeed)} true airspeed the aeroplane gains no more speed; the least acceleration is ${percentText(result.leastAccelerationRatio, 2, 'down')} of that of gravity.`;
     case 'never-reaches-screen-height':
-      return `Never reaches the screen height${where}: the least climb gradient is ${percentText(result.leastClimbGradient, 2)}, and ${percentText(result.neededClimbGradient, 2)} is needed.`;
+      return `Never reaches the screen height${where}: the least climb gradient is ${percentText(result.leastClimbGradient, 2, 'down')}, and ${percentText(result.neededClimbGradient, 2)} is needed.`;
     case 'ground-speed-not-positive':
       return `The headwind of ${speed(result.headwind)} is not below the lift-off speed of ${speed(result.liftOffSpeed)} true airspeed: there is no ground roll to compute.`;
     case 'outside-stated-data':

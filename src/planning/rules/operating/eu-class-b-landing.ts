@@ -23,7 +23,8 @@ function surface(value: number, because: string, source: Factor['source'], statu
 }
 
 /** The surface's factors, none for dry pavement, undefined where the rules do not speak of the surface. */
-function surfaceFactors({ kind, state, firmness, grass: length }: Surface): readonly Factor[] | undefined {
+function surfaceFactors({ kind, state, firmness, grass: length, contaminant }: Surface): readonly Factor[] | undefined {
+  if (contaminant !== undefined) return undefined;
   const isDry = state === 'dry';
   if (!isDry && state !== 'wet' && state !== 'damp') return undefined;
   const moisture = isDry ? [] : [state === 'wet' ? wet : damp];

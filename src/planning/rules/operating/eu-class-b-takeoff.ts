@@ -31,8 +31,9 @@ function surface(value: number, because: string, status: string): Factor {
   return { code: 'surface', value, because, source: 'EuAirOps305Amc1', status };
 }
 
-/** The surface's factor, none for dry pavement, undefined where the table does not speak of the surface. */
-function surfaceFactor({ kind, state, firmness }: Surface): readonly Factor[] | undefined {
+/** The surface's factor, none for dry pavement, undefined where the table does not speak of the surface or of what lies on it. */
+function surfaceFactor({ kind, state, firmness, contaminant }: Surface): readonly Factor[] | undefined {
+  if (contaminant !== undefined) return undefined;
   if (kind === 'paved') {
     if (state === 'dry') return [];
     return state === 'wet' ? [wetPavement] : state === 'damp' ? [dampPavement] : undefined;

@@ -54,6 +54,27 @@ describe('class B, takeoff', () => {
     const credited = { tora: 985, toda: 985, asda: 990 };
     expect(takeoff.requirements({ published, credited })).toHaveLength(1);
   });
+  it('has no factor for what lies on a runway, whatever its state is called', () => {
+    const contaminants = [
+      'water',
+      'slush',
+      'wet-snow',
+      'dry-snow',
+      'compacted-snow',
+      'frost',
+      'ice',
+      'wet-ice',
+    ] as const;
+    for (const kind of contaminants) {
+      for (const state of ['dry', 'damp', 'wet'] as const) {
+        for (const phase of [takeoff, euClassB.landing]) {
+          const onPavement = phase.runwayFactors({ kind: 'paved', state, contaminant: { kind } }, 0);
+          const onGrass = phase.runwayFactors({ kind: 'grass', state, contaminant: { kind } }, 0);
+          expect([onPavement, onGrass], `${state} with ${kind}`).toEqual([undefined, undefined]);
+        }
+      }
+    }
+  });
   it('knows dry pavement and firm grass, takes damp as wet, and does not speak of the rest', () => {
     expect(factors({ kind: 'paved', state: 'dry' })).toEqual([]);
     expect(factors({ kind: 'paved', state: 'damp' })).toEqual([1]);
