@@ -73,7 +73,8 @@ function agree(halves: number, whole: number, before: number): boolean {
   return Math.abs(halves - whole) <= agreement * (halves + before) + negligible;
 }
 
-function gather(sum: PathIntegral, part: PathIntegral): void {
+/** Adds a part of a path to a sum. */
+export function gather(sum: PathIntegral, part: PathIntegral): void {
   sum.distance += part.distance;
   sum.time += part.time;
   if (part.least < sum.least) {

@@ -40,11 +40,11 @@ export function groundRoll(run: TakeoffRun): GroundRoll {
   const { headwind, liftOffSpeed } = run;
   if (headwind >= liftOffSpeed) return { outcome: 'ground-speed-not-positive', headwind, liftOffSpeed };
   const steady = rollForces(run);
-  const { gainsSpeed, sum, forces } =
+  const { reaches, sum, forces, entered } =
     run.profile === undefined
-      ? { ...rollBetween(steady, headwind, headwind, liftOffSpeed), forces: steady }
+      ? { ...rollBetween(steady, headwind, headwind, liftOffSpeed), forces: steady, entered: headwind }
       : profiledRoll(steady, run.profile, headwind, liftOffSpeed);
-  if (!gainsSpeed) return neverReaches(forces, headwind, liftOffSpeed, sum.leastAt);
+  if (!reaches) return neverReaches(forces, entered, liftOffSpeed, sum.leastAt);
   return {
     outcome: 'lifts-off',
     distance: sum.distance + Math.max(0, run.rotationSpeed - headwind) * run.rotationTime,
