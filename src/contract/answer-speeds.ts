@@ -1,4 +1,6 @@
 import { turnLoadFactor } from '../physics/stall-speed.ts';
+import { raisedCautions } from '../planning/cautions/caution-test.ts';
+import { referenceSpeedRaised } from '../planning/cautions/reference-speed-raised.ts';
 import { isRefused, type Refused } from '../planning/fault.ts';
 import { measureText } from '../planning/sentences/measure-text.ts';
 import { asChosen } from './aeroplane-choice.ts';
@@ -41,9 +43,12 @@ export function answerSpeeds(request: SpeedsRequest, lookup: AeroplaneLookup, st
   const found = foundSpeeds(configured, air, loadFactor);
   if (isRefused(found)) return found;
   const how = presentationOf(request);
+  const question = { aeroplane: known.aeroplane, units: how.units };
+  const raised = found.landing && raisedCautions([referenceSpeedRaised], { ...found.landing, question });
+  const cautions = [...changedCautions(known), ...(raised ?? [])];
   return {
     outcome: 'computed',
-    advisory: toAdvisory(how, sentenceOf(how, found, configured.mass, configuration), changedCautions(known)),
+    advisory: toAdvisory(how, sentenceOf(how, found, configured.mass, configuration), cautions),
     air: toAir(how, air),
     ...(loadFactor === undefined ? {} : { loadFactor: shownRatio(how, loadFactor) }),
     speeds: toSpeeds(how, found.speeds),
@@ -53,6 +58,7 @@ export function answerSpeeds(request: SpeedsRequest, lookup: AeroplaneLookup, st
       sources: toSources(
         airSources(weather),
         bank === undefined ? ['Cfr25s103', 'GraceyRp1046', 'Cfr1s1'] : ['Cfr25s103', 'GraceyRp1046', 'Cfr1s1', 'Phak'],
+        cautions.flatMap(({ source }) => (source === undefined ? [] : [source])),
         found.assumed.flatMap(({ source }) => (source === undefined ? [] : [source])),
       ),
       modelVersion: stamp.modelVersion,

@@ -1,11 +1,11 @@
 import type { Aeroplane, Configuration } from '../performance/aeroplane.ts';
 import type { Air } from '../performance/air.ts';
-import { configuredStallSpeed } from '../performance/speeds/configured-stall-speed.ts';
-import { scheduledSpeed } from '../performance/speeds/scheduled-speed.ts';
-import { speedSet } from '../performance/speeds/speed-set.ts';
-import { aeroplanePointer } from '../planning/aeroplane-pointer.ts';
 import type { Assumption, SpeedSet } from '../planning/answer.ts';
-import type { Fault, Refused } from '../planning/fault.ts';
+import { isFault } from '../planning/chosen.ts';
+import { ConfiguredSpeeds } from '../planning/configured-speeds.ts';
+import type { Refused } from '../planning/fault.ts';
+import { type LandingSpeeds, landingSpeeds } from '../planning/landing-speeds.ts';
+import { resolveLandingSpeeds } from '../planning/resolve-landing.ts';
 import { resolveTakeoff } from '../planning/resolve-takeoff.ts';
 import { takeoffSpeeds } from '../planning/takeoff-speeds.ts';
 
@@ -28,53 +28,46 @@ export interface FoundSpeeds {
     readonly landingReference?: SpeedSet;
     readonly touchdown?: SpeedSet;
   };
+  /** of a landing configuration: whether its reference speed was raised */
+  readonly landing?: LandingSpeeds;
   readonly assumed: readonly Assumption[];
 }
 
 /**
  * Stall speeds and the speeds of the procedure at this mass in this air.
  *
- * Takeoff speeds that the configuration leaves out are filled in as for a takeoff, and said; landing speeds are shown where
- * they are stated.
+ * Speeds that the configuration leaves out are filled in as for a takeoff and a landing, and said.
  *
  * @param loadFactor - of the level turn, where one is asked for
  */
 export function foundSpeeds(configured: Configured, air: Air, loadFactor: number | undefined): FoundSpeeds | Refused {
-  const { aeroplane, configuration: id, mass } = configured;
+  const { aeroplane, configuration: id } = configured;
   const configuration = aeroplane.configurations[id] as Configuration;
-  const stallEas = configuredStallSpeed(configuration.maximumLift, aeroplane.wing.area, mass);
-  const inKinds = (eas: number | 'not-subsonic') =>
-    eas === 'not-subsonic' ? eas : speedSet(eas, stallEas, air, aeroplane.airspeedCalibration);
-
-  const stall = inKinds(stallEas);
-  if (stall === 'not-subsonic') return { refused: [notSubsonic(configured, 'maximumLift')] };
-  const stallInBank = loadFactor === undefined ? undefined : inKinds(stallEas * Math.sqrt(loadFactor));
-  if (stallInBank === 'not-subsonic') return { refused: [notSubsonic(configured, 'maximumLift')] };
+  const all = new ConfiguredSpeeds(configured, configuration, air);
+  const stall = all.stall();
+  if (isFault(stall)) return { refused: [stall] };
+  const stallInBank =
+    loadFactor === undefined ? undefined : all.inKinds(all.stallEas * Math.sqrt(loadFactor), all.at('maximumLift'));
+  if (stallInBank !== undefined && isFault(stallInBank)) return { refused: [stallInBank] };
 
   let takeoff = {};
   const assumed: Assumption[] = [];
   if (configuration.for.includes('takeoff')) {
     const resolved = resolveTakeoff(configured, configuration);
     const speeds = takeoffSpeeds(configured, configuration, resolved, air);
-    if ('code' in speeds) return { refused: [speeds] };
+    if (isFault(speeds)) return { refused: [speeds] };
     takeoff = { rotation: speeds.rotation, liftOff: speeds.liftOff, screen: speeds.screen };
     assumed.push(...resolved.assumed.map(({ assumption }) => assumption).filter(({ at }) => at.includes('/speeds/')));
   }
-  const landing: { landingReference?: SpeedSet; touchdown?: SpeedSet } = {};
-  for (const name of ['landingReference', 'touchdown'] as const) {
-    const schedule = configuration.for.includes('landing') ? configuration.speeds?.[name] : undefined;
-    if (schedule === undefined) continue;
-    const speeds = inKinds(scheduledSpeed(schedule, mass, stallEas, air.pressure));
-    if (speeds === 'not-subsonic') return { refused: [notSubsonic(configured, `speeds/${name}`)] };
-    landing[name] = speeds;
-  }
-  return { speeds: { stall, ...(stallInBank === undefined ? {} : { stallInBank }), ...takeoff, ...landing }, assumed };
-}
-
-function notSubsonic({ aeroplaneAt, configuration }: Configured, member: string): Fault {
+  const spoken = { stall, ...(stallInBank === undefined ? {} : { stallInBank }), ...takeoff };
+  if (!configuration.for.includes('landing')) return { speeds: spoken, assumed };
+  const resolved = resolveLandingSpeeds(configured, configuration);
+  const landing = landingSpeeds(configured, configuration, resolved, air);
+  if (isFault(landing)) return { refused: [landing] };
+  const { landingReference, touchdown } = landing.speeds;
   return {
-    pointer: aeroplanePointer(aeroplaneAt, `/configurations/${configuration}/${member}`),
-    code: 'implausible',
-    message: 'The speed that follows from this is not below that of sound.',
+    speeds: { ...spoken, landingReference, touchdown },
+    landing,
+    assumed: [...assumed, ...resolved.assumed.map(({ assumption }) => assumption)],
   };
 }

@@ -1,3 +1,4 @@
+import type { Aeroplane } from '../performance/aeroplane.ts';
 import type { Refused } from '../planning/fault.ts';
 import { landingProcedureFaults } from '../planning/procedure/landing-procedure-faults.ts';
 import type { LandingProcedure, LandingQuestion } from '../planning/question.ts';
@@ -22,8 +23,19 @@ export function toLandingQuestion(request: LandingRequest, lookup: AeroplaneLook
   const procedure = request.procedure && toLandingProcedure(request.procedure);
   if (procedure !== undefined) faults.push(...landingProcedureFaults({ ...asked(request, known), procedure }));
   if (faults.length > 0) return { refused: faults };
-  const question = toCommonQuestion(request, known);
+  const common = toCommonQuestion(request, known);
+  const question = { ...common, defaulted: [...common.defaulted, ...defaultedProcedure(known.aeroplane, procedure)] };
   return procedure === undefined ? question : { ...question, procedure };
+}
+
+/** Pointers of what a landing takes where its procedure does not say, of what the aeroplane has. */
+function defaultedProcedure({ reverseThrust, brakes }: Aeroplane, procedure: LandingProcedure = {}): string[] {
+  const pointers: string[] = [];
+  if (procedure.approachSpeedIncrement === undefined) pointers.push('/procedure/approachSpeedIncrement');
+  if (procedure.reverse === undefined && reverseThrust !== undefined) pointers.push('/procedure/reverse');
+  const antiSkid = brakes?.antiSkid ?? 'none';
+  if (procedure.antiSkid === undefined && antiSkid !== 'none') pointers.push('/procedure/antiSkid');
+  return pointers;
 }
 
 function toLandingProcedure(given: LandingProcedureOnWire): LandingProcedure {

@@ -11,5 +11,8 @@ function filledIn(at: string, units: string): string {
   if (at === '/rounding') return 'safe';
   if (at === '/procedure/power') return 'full';
   if (at === '/procedure/start') return 'standing';
+  if (at === '/procedure/approachSpeedIncrement') return 'none';
+  if (at === '/procedure/reverse') return 'not used';
+  if (at === '/procedure/antiSkid') return 'operative';
   return at.endsWith('/kind') ? 'one-g' : 'default';
 }

@@ -58,19 +58,10 @@ export function resolveLanding(
 ): ResolvedLanding {
   const figures = new ConfigurationFigures<LandingRun>(question);
   const d = landingDefaults;
-  const { speeds, flap } = configuration;
+  const { flap } = configuration;
   const { procedure = {} } = question;
-  if (speeds?.landingReference === undefined) sayReference(figures, question.aeroplane);
-  const touchdown = figures.speed({
-    member: 'touchdown',
-    name: 'the touchdown speed over the stall speed',
-    stated: speeds?.touchdown,
-    standing: d.touchdownStallRatio,
-    runMember: 'touchdownSpeed',
-  });
   const resolved = {
-    landingReference: speeds?.landingReference,
-    touchdown,
+    ...speedSchedule(figures, question, configuration),
     approachSpeedIncrement: procedure.approachSpeedIncrement ?? 0,
     approachAngle: figures.figure({
       member: 'approachAngle',
@@ -119,6 +110,32 @@ export function resolveLanding(
   const assumed: LandingAssumed[] = figures.assumed;
   if (idle === undefined) assumed.push(assumedIdle(figures.at('idleThrust'), staticThrust, question.units));
   return { ...resolved, idleThrust: idle ?? idleThrustShare.value * staticThrust, assumed };
+}
+
+/** The speeds of a landing configuration, with what was filled in; no more of the landing. */
+export function resolveLandingSpeeds(
+  question: Pick<LandingQuestion, 'aeroplane' | 'aeroplaneAt' | 'configuration'>,
+  configuration: Configuration,
+): Pick<ResolvedLanding, 'landingReference' | 'touchdown' | 'approachSpeedIncrement' | 'assumed'> {
+  const figures = new ConfigurationFigures<LandingRun>(question);
+  const schedule = speedSchedule(figures, question, configuration);
+  return { ...schedule, approachSpeedIncrement: 0, assumed: figures.assumed };
+}
+
+function speedSchedule(
+  figures: ConfigurationFigures<LandingRun>,
+  { aeroplane }: Pick<LandingQuestion, 'aeroplane'>,
+  { speeds }: Configuration,
+): Pick<ResolvedLanding, 'landingReference' | 'touchdown'> {
+  if (speeds?.landingReference === undefined) sayReference(figures, aeroplane);
+  const touchdown = figures.speed({
+    member: 'touchdown',
+    name: 'the touchdown speed over the stall speed',
+    stated: speeds?.touchdown,
+    standing: landingDefaults.touchdownStallRatio,
+    runMember: 'touchdownSpeed',
+  });
+  return { landingReference: speeds?.landingReference, touchdown };
 }
 
 function sayReference(figures: ConfigurationFigures<LandingRun>, { certification }: Aeroplane): void {

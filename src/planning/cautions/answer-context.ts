@@ -41,12 +41,17 @@ export interface AnswerContext extends ConditionsContext {
   readonly wholeDistance: BandedDistance | undefined;
 }
 
+/** What a text needs of a question: the units it is written in. */
+export interface Written {
+  readonly question: Pick<Question, 'units'>;
+}
+
 /** A number in the units of the question, as a caution writes it; distances go up. */
-export function textIn({ question }: Pick<ConditionsContext, 'question'>, kind: Kind, si: number): string {
+export function textIn({ question }: Written, kind: Kind, si: number): string {
   return measureText(question.units, kind, si, kind === 'distance' ? 'up' : 'nearest');
 }
 
 /** A length that is available or spare, as a caution writes it: it goes down. */
-export function measureDown({ question }: Pick<ConditionsContext, 'question'>, si: number): string {
+export function measureDown({ question }: Written, si: number): string {
   return measureText(question.units, 'distance', si, 'down');
 }
