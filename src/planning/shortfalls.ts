@@ -24,7 +24,7 @@ export function shortfalls(result: NotReached, propulsionAt: string): readonly S
         },
       ];
     case 'ground-speed-not-positive':
-      return [headwindShortfall(result.headwind, result.liftOffSpeed)];
+      return [headwindShortfall(result.headwind, 'climbSpeed' in result ? result.climbSpeed : result.liftOffSpeed)];
     case 'outside-stated-data':
       return [
         {
@@ -38,7 +38,7 @@ export function shortfalls(result: NotReached, propulsionAt: string): readonly S
   }
 }
 
-/** A headwind at or above the true airspeed at which the wheels leave or meet the runway [m/s]. */
+/** A headwind at or above the true airspeed [m/s] at which the wheels leave or meet the runway, or the speed forward in the climb. */
 export function headwindShortfall(headwind: number, airspeed: number): Shortfall {
   return {
     at: '/weather/wind',

@@ -19,6 +19,12 @@ export type AirDistance =
       readonly outcome: 'never-reaches-screen-height';
       readonly leastClimbGradient: number;
       readonly neededClimbGradient: number;
+    }
+  | {
+      readonly outcome: 'ground-speed-not-positive';
+      readonly headwind: number;
+      /** mean speed forward through the air on the path [m/s] */
+      readonly climbSpeed: number;
     };
 
 /** Least climb gradient at which a path with all engines is computed. @see references.HouseEnergyPath */
@@ -38,7 +44,8 @@ const fineBelowShare = 0.5;
  *
  * @param run - speeds true [m/s], screen height h_s [m], load factor n of the arc above 1
  * @param needed - climb gradient that must be exceeded on the whole path
- * @returns distance [m] and time [s], or 'never-reaches-screen-height' with the least (T - D)/W - max(slope, 0)
+ * @returns distance [m] and time [s], or 'never-reaches-screen-height' with the least (T - D)/W - max(slope, 0), or
+ * 'ground-speed-not-positive' where a steep path through a wind just below the lift-off speed gets nowhere over the ground
  * @remarks A screen speed below the lift-off speed counts as the lift-off speed. Long by design just after lift-off, where the
  * arc throws energy away; a falling runway gets no credit. Path angles are held to 45 degrees.
  * @see references.HouseEnergyPath
@@ -71,9 +78,12 @@ export function airDistance(run: TakeoffRun, needed = neededWithAllEngines): Air
     }
   }
   const time = arcTime + sum.time;
+  const throughAir = pullUpArcDistance(radius, arcTop) + sum.distance;
+  const distance = throughAir - headwind * time;
+  if (!(distance > 0)) return { outcome: 'ground-speed-not-positive', headwind, climbSpeed: throughAir / time };
   return {
     outcome: 'reaches-screen',
-    distance: pullUpArcDistance(radius, arcTop) + sum.distance - headwind * time,
+    distance,
     time,
     leastClimbGradient: Math.min(lesser, sum.least),
   };

@@ -71,6 +71,12 @@ export type TakeoffResult =
     }
   | { readonly outcome: 'ground-speed-not-positive'; readonly headwind: number; readonly liftOffSpeed: number }
   | {
+      readonly outcome: 'ground-speed-not-positive';
+      readonly headwind: number;
+      /** mean speed forward through the air from lift-off to the screen [m/s] */
+      readonly climbSpeed: number;
+    }
+  | {
       readonly outcome: 'outside-stated-data';
       /** true airspeed asked for and the bound of the measured thrust [m/s] */
       readonly airspeed: number;

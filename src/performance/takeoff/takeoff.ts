@@ -18,6 +18,7 @@ export function takeoff(run: TakeoffRun, neededClimbGradient = neededWithAllEngi
   const ground = groundRoll(run);
   if (ground.outcome !== 'lifts-off') return ground;
   const air = airDistance(underPath(run, ground.distance), neededClimbGradient);
+  if (air.outcome === 'ground-speed-not-positive') return air;
   if (air.outcome !== 'reaches-screen') {
     const { outcome, leastClimbGradient } = air;
     return {

@@ -15,7 +15,9 @@ export function notReachedSentence(runs: TakeoffRuns, units: UnitFamily): string
     case 'never-reaches-screen-height':
       return `Never reaches the screen height${where}: the least climb gradient is ${percentText(result.leastClimbGradient, 2, 'down')}, and ${percentText(result.neededClimbGradient, 2)} is needed.`;
     case 'ground-speed-not-positive':
-      return `The headwind of ${speed(result.headwind)} is not below the lift-off speed of ${speed(result.liftOffSpeed)} true airspeed: there is no ground roll to compute.`;
+      return 'climbSpeed' in result
+        ? `The headwind of ${speed(result.headwind)} is not below the speed of ${speed(result.climbSpeed)} at which the aeroplane moves forward in its steep climb: it makes no way over the ground${where}.`
+        : `The headwind of ${speed(result.headwind)} is not below the lift-off speed of ${speed(result.liftOffSpeed)} true airspeed: there is no ground roll to compute.`;
     case 'outside-stated-data':
       return `Outside the stated thrust: ${speed(result.airspeed)} true airspeed is asked for, and the data end at ${speed(result.bound)}.`;
   }

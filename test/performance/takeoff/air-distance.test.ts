@@ -109,10 +109,23 @@ describe('airDistance', () => {
     const run = plainRun({ thrust: quadraticThrust(0.015 * 9.80665) });
     const result = airDistance(run);
     expect(result).toMatchObject({ outcome: 'never-reaches-screen-height', neededClimbGradient: 0.015 });
+    if (result.outcome !== 'never-reaches-screen-height') throw new Error(result.outcome);
     expect(result.leastClimbGradient).toBeCloseTo(0.015, 12);
     expect(airDistance(run, 0).outcome).toBe('reaches-screen');
     expect(airDistance(plainRun({ thrust: quadraticThrust(0.01 * 9.80665) }), 0).outcome).toBe('reaches-screen');
     expect(airDistance(plainRun({ thrust: quadraticThrust(0) }), 0).outcome).toBe('never-reaches-screen-height');
+  });
+
+  it('is no distance backwards where a steep climb into a wind makes no way: ground-speed-not-positive', () => {
+    // 45 degrees from a short arc on: forward speed 30 m/s at lift-off, 21.2 m/s soon after
+    const steep = { thrust: quadraticThrust(9.80665), pullUpLoadFactor: 2, screenHeight: 30 };
+    const still = air(plainRun(steep));
+    const forward = still.distance / still.time;
+    expect(forward).toBeGreaterThan(30 * Math.SQRT1_2);
+    expect(forward).toBeLessThan(30);
+    expect(air(plainRun({ ...steep, headwind: forward - 0.01 })).distance).toBeCloseTo(0.01 * still.time, 9);
+    const result = airDistance(plainRun({ ...steep, headwind: forward + 0.01 }));
+    expect(result).toEqual({ outcome: 'ground-speed-not-positive', headwind: forward + 0.01, climbSpeed: forward });
   });
 
   it('refuses an arc that does not pull up', () => {
