@@ -15,6 +15,7 @@ import { requestLog } from './plugins/request-log.ts';
 import { aeroplanes } from './routes/aeroplanes.ts';
 import { air } from './routes/air.ts';
 import { airspeed } from './routes/airspeed.ts';
+import { landingChoices, takeoffChoices } from './routes/choices.ts';
 import { landing } from './routes/landing.ts';
 import { ruleSets } from './routes/rule-sets.ts';
 import { service } from './routes/service.ts';
@@ -74,6 +75,8 @@ export async function buildApp({ catalogue, logger = false, settings }: House): 
   const warmUps = [
     takeoff(app, lookup, ours),
     landing(app, lookup, ours),
+    takeoffChoices(app, lookup, ours),
+    landingChoices(app, lookup, ours),
     speeds(app, lookup, ours),
     airspeed(app, lookup, ours),
     air(app, ours),
