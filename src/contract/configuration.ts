@@ -46,6 +46,12 @@ export const configuration = z
       .exactOptional(),
     approachAngle: approachAngle.exactOptional(),
     flareLoadFactor: loadFactor.meta({ description: 'Load factor in the flare.' }).exactOptional(),
+    floatDecelerationRatio: z
+      .number()
+      .min(0.03)
+      .max(0.5)
+      .meta({ description: 'Drag less thrust over weight while floating, in the landing configuration.' })
+      .exactOptional(),
     freeRollTime: shortTime.meta({ description: 'From touchdown to braking.' }).exactOptional(),
     idleThrust: idleThrust.exactOptional(),
   })

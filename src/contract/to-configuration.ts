@@ -20,6 +20,7 @@ export function toConfiguration(given: ConfigurationOnWire, calibration?: Airspe
     rollingStartAllowance: perhaps((length) => si('length', length), given.rollingStartAllowance),
     approachAngle: perhaps((angle) => si('angle', angle), given.approachAngle),
     flareLoadFactor: given.flareLoadFactor,
+    floatDecelerationRatio: given.floatDecelerationRatio,
     freeRollTime: perhaps(seconds, given.freeRollTime),
     idleThrust: perhaps((force) => si('force', force), given.idleThrust),
   });

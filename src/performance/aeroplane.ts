@@ -117,6 +117,8 @@ export interface Configuration {
   readonly rollingStartAllowance?: number;
   readonly approachAngle?: number;
   readonly flareLoadFactor?: number;
+  /** (D - T)/W while floating */
+  readonly floatDecelerationRatio?: number;
   readonly freeRollTime?: number;
   readonly idleThrust?: number;
 }

@@ -3,7 +3,9 @@ import type { TakeoffRun } from '../performance/takeoff/takeoff-run.ts';
 import type { Assumption } from './answer.ts';
 
 /** The members of a run that are bare numbers. */
-export type NumberMember<Run> = { [K in keyof Run]: Run[K] extends number ? K : never }[keyof Run];
+export type NumberMember<Run> = {
+  [K in keyof Run]-?: NonNullable<Run[K]> extends number ? K : never;
+}[keyof Run];
 
 /** How to put the other end of the plausible range of a bare number into a run. */
 export type NumberOtherEnd<Run> =

@@ -6,7 +6,7 @@ import type { LandingAnswer } from './answer.ts';
 import type { Checked } from './assess.ts';
 import type { LandingQuestion } from './question.ts';
 import type { ResolvedLanding } from './resolve-landing.ts';
-import { floatDeceleration, landingScreenHeight } from './rules/landing-defaults.ts';
+import { landingScreenHeight } from './rules/landing-defaults.ts';
 import { firstWithout, type Runs, runsOf } from './runs.ts';
 
 /** A landing that stops. */
@@ -63,7 +63,7 @@ export function statedLanding(
     flareLoadFactor: resolved.flareLoadFactor,
     screenHeight: landingScreenHeight,
     freeRollTime: resolved.freeRollTime,
-    floatDecelerationRatio: floatDeceleration,
+    floatDecelerationRatio: resolved.floatDecelerationRatio,
     reverseThrust: question.procedure?.reverse ? reverseThrust : undefined,
   };
 }

@@ -33,6 +33,7 @@ export interface ResolvedLanding {
   readonly approachSpeedIncrement: number;
   readonly approachAngle: number;
   readonly flareLoadFactor: number;
+  readonly floatDecelerationRatio: number;
   readonly freeRollTime: number;
   /** of the whole aeroplane [N] */
   readonly idleThrust: number;
@@ -76,6 +77,13 @@ export function resolveLanding(
       stated: configuration.flareLoadFactor,
       standing: d.flareLoadFactor,
       runMember: 'flareLoadFactor',
+    }),
+    floatDecelerationRatio: figures.figure({
+      member: 'floatDecelerationRatio',
+      name: 'the deceleration while floating',
+      stated: configuration.floatDecelerationRatio,
+      standing: d.floatDecelerationRatio,
+      runMember: 'floatDecelerationRatio',
     }),
     freeRollTime: figures.figure({
       member: 'freeRollTime',

@@ -28,6 +28,12 @@ export const landingDefaults = {
     because: 'no load factor of the flare is stated; 1.1 to 1.2 is usual',
     source: 'Raymer',
   },
+  floatDecelerationRatio: {
+    value: 0.12,
+    otherEnd: 0.1,
+    because: 'no deceleration while floating is stated; about 0.12 of gravity is usual with landing flap at idle',
+    source: 'Judgement',
+  },
   freeRollTime: {
     value: 2,
     otherEnd: 3,
@@ -83,9 +89,6 @@ export const steepestWithoutData = 4 * degree;
 
 /** Height of the screen of every landing [m]: 50 ft. @see references.Cfr23s75; references.Cfr25s125 */
 export const landingScreenHeight = 50 * 0.3048;
-
-/** (D - T)/W while the aeroplane floats, where nothing is fitted. @see references.Judgement */
-export const floatDeceleration = 0.12;
 
 /** Part of the weight on the braked wheels by the arrangement of the wheels. @see references.HouseFriction */
 export const brakedLoad: Readonly<
