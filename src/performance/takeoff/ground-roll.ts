@@ -1,4 +1,5 @@
 import { g0 } from '../../physics/constants.ts';
+import type { PathIntegral } from '../path-integral.ts';
 import { profiledRoll } from './profiled-roll.ts';
 import { noAcceleration, rollBetween } from './roll-between.ts';
 import { type RollForces, rollAcceleration, rollForces } from './roll-forces.ts';
@@ -39,21 +40,27 @@ export type GroundRoll =
 export function groundRoll(run: TakeoffRun): GroundRoll {
   const { headwind, liftOffSpeed } = run;
   if (headwind >= liftOffSpeed) return { outcome: 'ground-speed-not-positive', headwind, liftOffSpeed };
-  const steady = rollForces(run);
-  const { reaches, sum, forces, entered } =
-    run.profile === undefined
-      ? { ...rollBetween(steady, headwind, headwind, liftOffSpeed), forces: steady, entered: headwind }
-      : profiledRoll(steady, run.profile, headwind, liftOffSpeed);
-  if (!reaches) return neverReaches(forces, entered, liftOffSpeed, sum.leastAt);
+  const forces = rollForces(run);
+  if (run.profile === undefined) {
+    const { reaches, sum } = rollBetween(forces, headwind, headwind, liftOffSpeed);
+    return reaches ? liftsOff(run, sum) : neverReaches(forces, headwind, liftOffSpeed, sum.leastAt);
+  }
+  const path = profiledRoll(forces, run.profile, headwind, liftOffSpeed);
+  return path.reaches
+    ? liftsOff(run, path.sum)
+    : neverReaches(path.forces, path.entered, liftOffSpeed, path.sum.leastAt);
+}
+
+function liftsOff(run: TakeoffRun, sum: PathIntegral): GroundRoll {
   return {
     outcome: 'lifts-off',
-    distance: sum.distance + Math.max(0, run.rotationSpeed - headwind) * run.rotationTime,
+    distance: sum.distance + Math.max(0, run.rotationSpeed - run.headwind) * run.rotationTime,
     time: sum.time + run.rotationTime,
     leastAccelerationRatio: sum.least / g0,
   };
 }
 
-/** The named outcome, with the first airspeed at which the acceleration is gone, to a thousandth of the roll's speeds. */
+/** The named outcome, with the first airspeed at which the acceleration is gone, to a thousandth of the speeds between. */
 function neverReaches(forces: RollForces, from: number, to: number, leastAt: number): GroundRoll {
   const leastAccelerationRatio = rollAcceleration(forces, leastAt) / g0;
   for (let i = 0; i <= 1000; i++) {
