@@ -1,3 +1,4 @@
+import { arithmeticSlack } from '../arithmetic-slack.ts';
 import { type ConditionsContext, textIn } from './answer-context.ts';
 import type { CautionTest } from './caution-test.ts';
 
@@ -9,7 +10,7 @@ export const gustNotCredited: CautionTest<ConditionsContext> = {
   source: 'Judgement',
   test: (context) => {
     const gust = context.wind.gust;
-    if (gust === undefined || gust.speed <= gust.mean) return undefined;
+    if (gust === undefined || gust.speed - gust.mean <= arithmeticSlack) return undefined;
     const mean = context.wind.headwind;
     const counted = `Distances count the mean of ${textIn(context, 'speed', gust.mean)} only`;
     const tail =

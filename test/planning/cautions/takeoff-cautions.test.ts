@@ -201,7 +201,8 @@ const pairs: readonly Pair[] = [
     code: 'gust-not-credited',
     severity: 'note',
     raised: from(70, 10, { gust: 20 * kt }),
-    silent: from(70, 10, { gust: 10 * kt }),
+    // 27.78 km/h, which is 15 kt but for the last bit
+    silent: from(70, 15, { gust: 27.78 * (1 / 3.6) }),
     says: /^Gusts of 20 kt, 10 kt over the mean wind\. Distances count the mean of 10 kt only\.$/,
   },
   {
