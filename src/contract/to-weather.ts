@@ -11,15 +11,23 @@ export function toWeather(given: WeatherOnWire): Weather {
     pressure: toPressure(given.pressure),
     wind: toWind(given.wind),
   };
-  if (given.dewPoint !== undefined) weather.dewPoint = si('temperature', given.dewPoint);
+  if (given.dewPoint !== undefined) weather.dewPoint = dewPointOf(given.dewPoint, weather.temperature);
   return weather;
 }
 
 /** The air in SI. */
 export function toAirReport({ temperature, dewPoint, pressure }: StillWeatherOnWire): AirReport {
   const report: Draft<AirReport> = { temperature: si('temperature', temperature), pressure: toPressure(pressure) };
-  if (dewPoint !== undefined) report.dewPoint = si('temperature', dewPoint);
+  if (dewPoint !== undefined) report.dewPoint = dewPointOf(dewPoint, report.temperature);
   return report;
+}
+
+/**
+ * The dew point of a checked question [K]: saturated air may have it a last bit above the temperature, where the two come in
+ * different units.
+ */
+function dewPointOf(given: NonNullable<StillWeatherOnWire['dewPoint']>, temperature: number): number {
+  return Math.min(si('temperature', given), temperature);
 }
 
 function toPressure(given: StillWeatherOnWire['pressure']): AirReport['pressure'] {

@@ -57,6 +57,21 @@ describe('the air from gate to gate', () => {
     ).toEqual([]);
   });
 
+  it('takes saturated air in whatever units the temperature and the dew point come', () => {
+    // 59 degF and 15 degC are one temperature, and differ in the last bit in kelvin; so do others, either way
+    for (let celsius = -40; celsius <= 40; celsius += 5) {
+      const inC = { value: celsius, unit: 'degC' } as const;
+      const inF = { value: celsius * 1.8 + 32, unit: 'degF' } as const;
+      for (const [temperature, dewPoint] of [
+        [inC, inF],
+        [inF, inC],
+      ] as const) {
+        const pressure = { stationPressure: { value: 950, unit: 'hPa' } } as const;
+        expect(told({ weather: { temperature, dewPoint, pressure } }).air.relativeHumidity?.value).toBe(100);
+      }
+    }
+  });
+
   it('refuses air that is mostly vapour, and a dew point above the temperature', () => {
     const hot = { value: 60, unit: 'degC' } as const;
     const thin = { stationPressure: { value: 400, unit: 'hPa' } } as const;
