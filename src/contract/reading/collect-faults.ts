@@ -4,7 +4,7 @@ import { allowedBy } from './allowed.ts';
 import { pointerTo } from './json-pointer.ts';
 import { listFaults } from './list-faults.ts';
 import { objectFaults } from './object-faults.ts';
-import { numberFault, textFault, wordFault, wrongType } from './scalar-faults.ts';
+import { numberFault, shortened, textFault, wordFault, wrongType } from './scalar-faults.ts';
 import { type Form, formOf, type ObjectForm, type UnionForm } from './schema-form.ts';
 import { unionFaults } from './union-faults.ts';
 
@@ -69,6 +69,16 @@ function scalarFaults(form: Form, value: unknown, pointer: string): Fault[] {
   return fits ? [] : [wrongType(pointer, value, allowedBy(form))];
 }
 
+/** A member's name is at fault, not its value: another code than the value's, so that both can be told. */
+function oddName(pointer: string, name: string, keyType: z.core.$ZodType): Fault {
+  return {
+    pointer,
+    code: 'unknown-member',
+    message: `A member here cannot be named ${shortened(name)}.`,
+    allowed: `as its name, ${allowedBy(keyType)}`,
+  };
+}
+
 function recordFaults(form: z.core.$ZodRecord, value: unknown, pointer: string, collection: Collection): void {
   if (typeof value !== 'object' || value === null || Array.isArray(value)) {
     collection.faults.push(wrongType(pointer, value, allowedBy(form)));
@@ -76,7 +86,8 @@ function recordFaults(form: z.core.$ZodRecord, value: unknown, pointer: string, 
   }
   const { keyType, valueType } = form._zod.def;
   for (const [name, inner] of Object.entries(value)) {
-    collection.collect(keyType, name, pointerTo(pointer, name));
-    collection.collect(valueType, inner, pointerTo(pointer, name));
+    const at = pointerTo(pointer, shortened(name));
+    if (scalarFaults(formOf(keyType), name, at).length > 0) collection.faults.push(oddName(at, name, keyType));
+    collection.collect(valueType, inner, at);
   }
 }

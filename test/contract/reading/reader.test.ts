@@ -110,6 +110,19 @@ describe('reader', () => {
     expect(faultsOf(definition({ for: 'takeoff' }))).toMatchObject([{ code: 'wrong-type', pointer }]);
   });
 
+  it('tells a name that no id has apart from the value under it, in a pointer of bounded length', () => {
+    const [, question] = sampleQuestions() as [Json, Json];
+    const inline = (question['aeroplane'] as Json)['definition'] as Json;
+    Object.assign(inline['configurations'] as Json, { 'Flaps 10': 10, ['x'.repeat(5000)]: 10 });
+    const at = '/aeroplane/definition/configurations';
+    expect(faultsOf(question)).toMatchObject([
+      { code: 'unknown-member', pointer: `${at}/Flaps 10`, message: 'A member here cannot be named Flaps 10.' },
+      { code: 'wrong-type', pointer: `${at}/Flaps 10`, received: 10 },
+      { code: 'unknown-member', pointer: `${at}/${'x'.repeat(64)}…` },
+      { code: 'wrong-type', pointer: `${at}/${'x'.repeat(64)}…` },
+    ]);
+  });
+
   it('tells in which units a number out of range would fit', () => {
     expect(faultsOf(changed('/weather/pressure/qnh', { value: 1009, unit: 'inHg' }))).toMatchObject([
       { code: 'out-of-range', pointer: '/weather/pressure/qnh/value', received: 1009, hint: '1009 would fit in hPa.' },
