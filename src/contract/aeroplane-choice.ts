@@ -2,14 +2,17 @@ import { z } from 'zod';
 import type { Aeroplane } from '../performance/aeroplane.ts';
 import type { AeroplaneChanges } from '../planning/question.ts';
 import { aeroplaneDefinition } from './aeroplane-definition.ts';
+import { orderOfIds } from './order-of-ids.ts';
+import { orderOfMembers } from './order-of-members.ts';
 import { id, reason, shortText } from './text.ts';
 
 const revision = shortText.meta({ description: 'If given, the revision must be the one on file.' }).exactOptional();
 const inline = z.strictObject({ definition: aeroplaneDefinition });
+const inlineInOrder = inline.overwrite(({ definition }) => ({ definition: orderOfIds(definition) }));
 const changed = {
   basedOn: id.meta({ description: 'An id of the catalogue.' }),
   revision,
-  changes: z.record(z.string().max(64), z.unknown()).meta({
+  changes: z.record(z.string().max(64), z.unknown()).overwrite(orderOfMembers).meta({
     description: 'JSON merge patch (RFC 7396) of its definition; null takes a member out.',
     minProperties: 1,
     maxProperties: 24,
@@ -17,10 +20,12 @@ const changed = {
   because: reason.meta({ description: 'Why the aeroplane is changed; repeated in a caution.' }),
 };
 
-export const aeroplaneChoice = z.union([z.strictObject({ id, revision }), inline, z.strictObject(changed)]).meta({
-  id: 'Aeroplane',
-  description: 'The aeroplane: an id of the catalogue, a whole definition, or one of the catalogue with changes.',
-});
+export const aeroplaneChoice = z
+  .union([z.strictObject({ id, revision }), inlineInOrder, z.strictObject(changed)])
+  .meta({
+    id: 'Aeroplane',
+    description: 'The aeroplane: an id of the catalogue, a whole definition, or one of the catalogue with changes.',
+  });
 
 /** The aeroplane as an answer echoes it: one of the catalogue always with its revision. */
 export const aeroplaneUnderstood = z
