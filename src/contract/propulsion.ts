@@ -113,7 +113,7 @@ const turboprop = z.strictObject({
   flatRating,
   lapseExponent: z
     .number()
-    .min(0)
+    .min(0.5)
     .max(4)
     .meta({
       description: 'n in theta^-n, the fall of power with temperature beyond the flat rating; about 1.5 to 2.5.',

@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { answerTakeoff } from '../../src/contract/answer-takeoff.ts';
+import { takeoffRequest } from '../../src/contract/takeoff-request.ts';
 import { takeoffResponse } from '../../src/contract/takeoff-response.ts';
 import { isRefused } from '../../src/planning/fault.ts';
 import { unitFamilies } from '../../src/units/presentation.ts';
@@ -18,6 +19,20 @@ describe('a takeoff from gate to gate', () => {
   it('is refused by the gate before anything is planned', () => {
     const answer = answerTakeoff(withMember(sampleTakeoff(), '/ruleSet', 'nobodys'), lookup, stamp);
     expect(isRefused(answer) && named(answer.refused)).toEqual(['unknown-id /ruleSet']);
+  });
+
+  it.each([0.5, 4])('has an answer where a turboprop states no flat rating and a lapse exponent of %d', (exponent) => {
+    const propulsion = {
+      kind: 'turboprop',
+      power: { value: 200, unit: 'kW' },
+      propellerDiameter: { value: 2, unit: 'm' },
+      lapseExponent: exponent,
+    };
+    const definition = { ...sampleDefinition(), category: 'single-turboprop', propulsion };
+    const request = takeoffRequest.parse({ ...sampleTakeoff(), aeroplane: { definition } });
+    expect(takeoffResponse.safeParse(answerTakeoff(request, lookup, stamp)).error).toBeUndefined();
+    const flatter = withMember(request, '/aeroplane/definition/propulsion/lapseExponent', 0);
+    expect(takeoffRequest.safeParse(flatter).success).toBe(false);
   });
 
   it('is the same takeoff in other units before rounding, to 1e-12', () => {
