@@ -30,15 +30,21 @@ export function slopeProfile(distances: readonly number[], heights: readonly num
   return { ends, slopes };
 }
 
-/** Slope of the line from the start point to the end of the profile. */
-export function overallSlope({ ends, slopes }: SlopeProfile): number {
+/**
+ * Slope of the line from the start point to a distance on the profile.
+ *
+ * @param length - [m], above 0; beyond the profile the last slope holds
+ */
+export function overallSlope({ ends, slopes }: SlopeProfile, length = ends[ends.length - 1] as number): number {
   let rise = 0;
   let from = 0;
-  for (let i = 0; i < ends.length; i++) {
-    rise += (slopes[i] as number) * ((ends[i] as number) - from);
-    from = ends[i] as number;
+  const last = ends.length - 1;
+  for (let i = 0; i <= last && from < length; i++) {
+    const end = i === last ? length : Math.min(length, ends[i] as number);
+    rise += (slopes[i] as number) * (end - from);
+    from = end;
   }
-  return rise / from;
+  return rise / length;
 }
 
 /** The greatest slope met from a distance on [m]; of the last stretch where the distance lies beyond it. */

@@ -100,6 +100,10 @@ describe('slopeProfile', () => {
   it('measures from the start point and keeps rise over length', () => {
     expect(hump.ends).toEqual([120, 200, 1500]);
     expectNear(overallSlope(hump), (91.4 - 100) / 1500, 1e-15);
+    // from the start point to a distance on the line, and on the last slope beyond it
+    expectNear(overallSlope(hump, 160), (102.8 - 100) / 160, 1e-15);
+    expectNear(overallSlope(hump, 120), 0.01, 1e-15);
+    expectNear(overallSlope(hump, 2500), (91.4 - 10 - 100) / 2500, 1e-15);
     const later = slopeProfile([0, 120, 200, 1500], [100, 101.2, 104.4, 91.4], 150);
     expect(later.ends).toEqual([50, 1350]);
     expectNear(later.slopes[0] as number, 0.04, 1e-12);
