@@ -111,6 +111,28 @@ export const references = entries({
     status: 'secondary',
   },
   Ac25s32: { title: 'FAA AC 25-32, Landing Performance Data for Time-of-Arrival Assessments, 2015', status: 'memory' },
+  Ac25s31: {
+    title: 'FAA AC 25-31, Takeoff Performance Data for Operations on Contaminated Runways, 2015, table 2',
+    status: 'secondary',
+  },
+  Amc25s1591: {
+    title: 'AMC 25.1591, contaminated runways: displacement and spray drag, densities (3 mm read, the rest recalled)',
+    status: 'memory',
+  },
+  Rcam: {
+    title: 'Runway condition assessment matrix of the global reporting format, FAA AIM and ICAO Doc 10064',
+    status: 'secondary',
+  },
+  HorneDreher1963: {
+    title: 'Horne & Dreher, Phenomena of Pneumatic Tire Hydroplaning, NASA TN D-2056, 1963',
+    status: 'secondary',
+  },
+  HorneSpinUp: { title: 'Horne, spin-up hydroplaning speed of a wheel at touchdown', status: 'memory' },
+  HouseContaminant: {
+    title:
+      'Contaminants the longer way: their drag whole in a takeoff, at most half in a stop; the poorer braking figure',
+    status: 'judgement',
+  },
   HouseFriction: {
     title: 'Rolling and braking friction by surface: the long-distance end of the published ranges',
     status: 'judgement',

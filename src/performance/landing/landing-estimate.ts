@@ -31,7 +31,10 @@ export function landingEstimate(run: LandingRun): LandingEstimate {
   const held = run.braking.at(mean - headwind) * Math.max(0, g0 - q * liftCoefficient);
   const isReversed = reverseThrust !== undefined && mean - headwind >= reverseThrust.cutOffSpeed;
   const thrust = isReversed ? -reverseThrust.thrust : run.idleThrust;
-  const deceleration = held + drag - thrust / run.mass + g0 * run.slope;
+  const { contaminantDrag } = run;
+  const isPushing = contaminantDrag !== undefined && mean - headwind < contaminantDrag.below;
+  const pushed = isPushing ? (contaminantDrag.perSquare * (mean - headwind) ** 2) / run.mass : 0;
+  const deceleration = held + drag + pushed - thrust / run.mass + g0 * run.slope;
   const groundRoll =
     deceleration > 0
       ? groundSpeed * run.freeRollTime + groundSpeed ** 2 / (2 * deceleration)

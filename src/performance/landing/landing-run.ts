@@ -1,4 +1,17 @@
 import type { BrakingFriction } from '../../physics/braking-friction.ts';
+import type { StoppingDrag } from '../../physics/stopping-drag.ts';
+
+/** A stretch of runway with its own braking, slope and contaminant. */
+export interface BrakedStretch {
+  /** where it ends [m]: from the threshold in a landing, in the direction of movement */
+  readonly end: number;
+  /** effective, as in the run */
+  readonly braking: BrakingFriction;
+  /** uphill positive, dimensionless */
+  readonly slope: number;
+  /** what a loose contaminant helps; absent: nothing */
+  readonly contaminantDrag?: StoppingDrag | undefined;
+}
 
 /** What the stop from a speed on the wheels needs, in SI. */
 export interface BrakedRun {
@@ -26,6 +39,13 @@ export interface BrakedRun {
   readonly headwind: number;
   /** uphill positive, dimensionless */
   readonly slope: number;
+  /** what a loose contaminant helps; absent: nothing */
+  readonly contaminantDrag?: StoppingDrag | undefined;
+  /**
+   * the runway where it is not the same throughout, in rising order of their ends, the last going on beyond its end; absent: the
+   * run's own braking, slope and contaminant throughout. The estimate goes by the run's own: those of the poorest stretch.
+   */
+  readonly stretches?: readonly BrakedStretch[] | undefined;
 }
 
 /** All that the integrations of a landing need, in SI, nothing assumed any more. */

@@ -15,10 +15,10 @@ import type { LandingResult, LandingRun } from './landing-run.ts';
 export function landing(run: LandingRun): LandingResult {
   const { headwind, touchdownSpeed, freeRollTime } = run;
   if (headwind >= touchdownSpeed) return { outcome: 'ground-speed-not-positive', headwind, touchdownSpeed };
-  const braked = brakedRoll(run, touchdownSpeed);
-  if (braked.outcome === 'never-stops') return braked;
   const air = landingAirDistance(run);
   const freeRoll = (touchdownSpeed - headwind) * freeRollTime;
+  const braked = brakedRoll(run, touchdownSpeed, air.distance + freeRoll);
+  if (braked.outcome === 'never-stops') return braked;
   const groundRoll = freeRoll + braked.distance;
   return {
     outcome: 'stops',
