@@ -2,7 +2,7 @@ import type { Aeroplane, Configuration } from '../../src/performance/aeroplane.t
 import type { TakeoffAnswer } from '../../src/planning/answer.ts';
 import { isRefused } from '../../src/planning/fault.ts';
 import { planTakeoff } from '../../src/planning/plan-takeoff.ts';
-import type { TakeoffQuestion } from '../../src/planning/question.ts';
+import type { Question, TakeoffQuestion } from '../../src/planning/question.ts';
 
 const ft = 0.3048;
 const kt = 1852 / 3600;
@@ -108,25 +108,26 @@ export function fourReadings(tora: number): TakeoffQuestion {
 }
 
 /** What a question may be changed in; a member given replaces the whole of it. */
-export interface Changes {
+export interface Changes<Asked extends Question = TakeoffQuestion> {
   readonly aeroplane?: Partial<Aeroplane>;
   readonly configuration?: Partial<Configuration>;
-  readonly runway?: Partial<TakeoffQuestion['runway']>;
-  readonly weather?: Partial<TakeoffQuestion['weather']>;
-  readonly question?: Partial<TakeoffQuestion>;
+  readonly runway?: Partial<Question['runway']>;
+  readonly weather?: Partial<Question['weather']>;
+  readonly question?: Partial<Asked>;
 }
 
 /** A question with some of it changed. */
-export function changed(
-  base: TakeoffQuestion,
-  { aeroplane, configuration, runway, weather, question }: Changes,
-): TakeoffQuestion {
-  const takeoff = { ...(base.aeroplane.configurations['takeoff'] as Configuration), ...configuration };
+export function changed<Asked extends Question>(
+  base: Asked,
+  { aeroplane, configuration, runway, weather, question }: Changes<Asked>,
+): Asked {
+  const id = base.configuration;
+  const own = { ...(base.aeroplane.configurations[id] as Configuration), ...configuration };
   return {
     ...base,
     aeroplane: {
       ...base.aeroplane,
-      configurations: { ...base.aeroplane.configurations, takeoff },
+      configurations: { ...base.aeroplane.configurations, [id]: own },
       ...aeroplane,
     },
     runway: { ...base.runway, ...runway },
