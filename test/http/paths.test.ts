@@ -1,5 +1,6 @@
+import fs from 'node:fs';
 import type { FastifyInstance } from 'fastify';
-import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import { afterAll, beforeAll, describe, expect, it, vi } from 'vitest';
 import { expectProblem } from '../support/expect-problem.ts';
 import { post, testHouse } from '../support/house.ts';
 
@@ -114,6 +115,36 @@ describe('what the caller accepts', () => {
     expect(page.statusCode).toBe(200);
     expect(page.headers['content-security-policy']).toBeDefined();
     expect((await app.inject('/v1/sources')).headers['content-security-policy']).toBeUndefined();
+  });
+});
+
+describe('a file of the pages', () => {
+  it('is sent whole, whatever range or age the caller asks for', async () => {
+    const whole = await app.inject('/docs/static/swagger-ui.css');
+    expect(whole.statusCode).toBe(200);
+    expect(whole.headers['content-type']).toBe('text/css; charset=utf-8');
+    const headers = { range: 'bytes=9-2', 'if-modified-since': 'Fri, 99 Foo 9999 00:00:00 GMT' };
+    const asked = await app.inject({ url: '/docs/static/swagger-ui.css', headers });
+    expect([asked.statusCode, asked.body === whole.body]).toEqual([200, true]);
+    const head = await app.inject({ method: 'HEAD', url: '/docs/static/swagger-ui.css' });
+    expect([head.statusCode, head.body]).toEqual([200, '']);
+  });
+
+  it.each(['', 'nothing.js', '%00', '%5c..%5c..%5cpackage.json', '..%2f..%2f..%2fpackage.json', 'a'.repeat(300)])(
+    'is not %j',
+    async (name) => {
+      expectProblem(await app.inject(`/docs/static/${name}`), 'not-found');
+    },
+  );
+
+  it('is read once, at start: no request reaches the disk', async () => {
+    const calls = ['open', 'openSync', 'readFile', 'stat', 'lstat', 'createReadStream'] as const;
+    const spies = calls.map((name) => vi.spyOn(fs, name));
+    for (const url of ['/docs', '/docs/static/swagger-ui-bundle.js', '/docs/static/none.js', '/v1/aeroplanes/..%2fa']) {
+      await app.inject(url);
+    }
+    expect(spies.map((spy) => spy.mock.calls.length)).toEqual(calls.map(() => 0));
+    for (const spy of spies) spy.mockRestore();
   });
 });
 

@@ -1,9 +1,16 @@
+import { createRequire } from 'node:module';
+import { dirname, join } from 'node:path';
 import helmet from '@fastify/helmet';
 import swagger from '@fastify/swagger';
 import swaggerUi from '@fastify/swagger-ui';
 import type { FastifyInstance } from 'fastify';
 import { fastifyZodOpenApiPlugin, fastifyZodOpenApiTransformers } from 'fastify-zod-openapi';
+import { problemOf } from '../../contract/problem.ts';
 import { documentHead } from '../document/document-head.ts';
+import { sendProblem } from '../problems.ts';
+import { keptFiles } from './kept-files.ts';
+
+const require = createRequire(import.meta.url);
 
 /** Gathers every route into one OpenAPI document. Must come before the routes. */
 export async function documentation(app: FastifyInstance): Promise<void> {
@@ -39,9 +46,13 @@ function addExamples({ paths }: Bodies, examples: ReadonlyMap<string, unknown>):
 
 /** Serves the document and a page to browse it. Must come after the routes. */
 export async function documentPages(app: FastifyInstance): Promise<void> {
-  let text: string | undefined;
+  let text = '';
+  app.addHook('onReady', (done) => {
+    // now, since gathering takes longer than any request may
+    text = JSON.stringify(app.swagger());
+    done();
+  });
   app.get('/openapi.json', { schema: { hide: true } }, (_request, reply) => {
-    text ??= JSON.stringify(app.swagger());
     return reply.type('application/json; charset=utf-8').header('x-content-type-options', 'nosniff').send(text);
   });
   await app.register(async (pages) => {
@@ -49,6 +60,12 @@ export async function documentPages(app: FastifyInstance): Promise<void> {
     await pages.register(helmet, {
       contentSecurityPolicy: { directives: { upgradeInsecureRequests: null } },
       strictTransportSecurity: false,
+    });
+    keptFiles(pages, '/docs/static', join(dirname(require.resolve('@fastify/swagger-ui')), 'static'));
+    pages.addHook('onRequest', (request, reply, done) => {
+      // writing YAML takes longer than any request may
+      if (request.routeOptions.url !== '/docs/yaml') done();
+      else sendProblem(reply, problemOf('not-found', 'There is nothing at this path; the document is /openapi.json.'));
     });
     await pages.register(swaggerUi, { routePrefix: '/docs' });
   });
