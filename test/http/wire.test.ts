@@ -43,6 +43,12 @@ describe('bytes that two readers could understand differently', () => {
     ['two Host fields', 'GET /health/live HTTP/1.1\r\nhost: a\r\nHost: b\r\n\r\n', 'unreadable'],
     ['no Host field', 'GET /health/live HTTP/1.1\r\n\r\n', 'unreadable'],
     ['another service as target', 'GET http://other/health/live HTTP/1.1\r\nhost: a\r\n\r\n', 'unreadable'],
+    ['two Content-Type', put('content-type: text/plain\r\ncontent-length: 2\r\n'), 'unreadable'],
+    [
+      'Transfer-Encoding in HTTP/1.0',
+      `POST /v1/air HTTP/1.0\r\n${json}transfer-encoding: chunked\r\n\r\n${chunked}`,
+      'unreadable',
+    ],
     ['HTTP/0.9', 'GET /health/live\r\n\r\n', 'unreadable'],
     ['20 KB of header', get(`x: ${'y'.repeat(20_000)}\r\n`), 'headers-too-large'],
     ['101 header fields', get('x: y\r\n'.repeat(101)), 'headers-too-large'],

@@ -37,16 +37,21 @@ function framingProblem({ raw }: FastifyRequest): Problem | undefined {
   }
   if (raw.httpVersionMajor !== 1) return problemOf('unreadable', 'The request is not HTTP/1.1 or HTTP/1.0.');
   let hosts = 0;
+  let types = 0;
   for (let i = 0; i < rawHeaders.length; i += 2) {
     const name = rawHeaders[i] as string;
     if (name.length === 4 && name.toLowerCase() === 'host') hosts++;
+    if (name.length === 12 && name.toLowerCase() === 'content-type') types++;
   }
+  if (types > 1) return problemOf('unreadable', 'The request may carry only one Content-Type field.');
   if (hosts > 1 || (hosts === 0 && raw.httpVersionMinor > 0)) {
     return problemOf('unreadable', 'The request must carry exactly one Host field.');
   }
   if (raw.url?.[0] !== '/') return problemOf('unreadable', 'The request target must be a path.');
   const coding = raw.headers['transfer-encoding'];
-  if (coding === undefined || coding.toLowerCase() === 'chunked') return undefined;
+  if (coding === undefined) return undefined;
+  if (raw.httpVersionMinor === 0) return problemOf('unreadable', 'HTTP/1.0 has no transfer codings.');
+  if (coding.toLowerCase() === 'chunked') return undefined;
   return /(^|[, \t])chunked[ \t]*$/i.test(coding)
     ? problemOf('not-implemented', 'The only transfer coding known is chunked.')
     : problemOf('unreadable', 'The last transfer coding must be chunked.');
