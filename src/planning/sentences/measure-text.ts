@@ -6,7 +6,6 @@ const symbols: Readonly<Record<string, string>> = {
   deltaC: '°C',
   deltaF: '°F',
   percent: '%',
-  deg: '°',
   'kg/m3': 'kg/m³',
   m2: 'm²',
   ft2: 'ft²',
@@ -19,11 +18,12 @@ const symbols: Readonly<Record<string, string>> = {
  * @param kind - what the number is
  * @param si - the number in SI, finite
  * @param direction - up for what is required, down for what is available or spare
- * @returns such as '1 255 m', '11.9 kt', '-3.5 °C'
+ * @returns such as '1 255 m', '11.9 kt', '-3.5 °C', '3°'
  */
 export function measureText(family: UnitFamily, kind: Kind, si: number, direction: Direction = 'nearest'): string {
   const unit = unitFor(family, kind);
-  return `${numberText(shown(family, kind, si, direction))} ${symbols[unit] ?? unit}`;
+  const number = numberText(shown(family, kind, si, direction));
+  return unit === 'deg' ? `${number}°` : `${number} ${symbols[unit] ?? unit}`;
 }
 
 /** Per cent of a ratio with so many decimals at most, such as '8.1 %'; a margin goes down. */
