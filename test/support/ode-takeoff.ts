@@ -19,7 +19,8 @@ export function odeAcceleration(run: TakeoffRun, airspeed: number): number {
     (run.groundDragCoefficient + phi * run.inducedDragFactor * run.groundLiftCoefficient ** 2);
   const onWheels = run.mass * g - pressure * run.wingArea * run.groundLiftCoefficient;
   const thrust = run.thrust.at(Math.max(0, airspeed));
-  return (thrust - drag - run.rollingFriction * Math.max(0, onWheels)) / run.mass - g * run.slope;
+  const displaced = (run.contaminantDrag ?? 0) * (airspeed - run.headwind) ** 2;
+  return (thrust - drag - displaced - run.rollingFriction * Math.max(0, onWheels)) / run.mass - g * run.slope;
 }
 
 /** (T - D)/W - max(slope, 0) at a height on the speed schedule, and the speed. */

@@ -15,7 +15,9 @@ export interface QuadraticThrust {
  * s = -ln(1 - B V^2/A)/(2 g B); with a headwind w, s = P(V) - P(w) - w (Q(V) - Q(w)), P the integral of V/a and Q of 1/a, which is
  * atanh(V sqrt(B/A))/(g sqrt(A B)), or atan where B < 0. With a tailwind the piece from w to 0 has T2 = 0 and air that pushes.
  *
- * @param run - its own thrust is not used; lift must stay below the weight
+ * A loose contaminant's k adds k/m to g B in still air.
+ *
+ * @param run - its own thrust is not used; lift must stay below the weight; no contaminant with a wind
  * @param thrust - of all engines
  * @returns distance [m] and time [s], or the name of why there is none
  * @see references.Raymer, ch. 17, ground roll; references.McCormick1995, sec. 7.2
@@ -27,8 +29,10 @@ export function closedFormRoll(
   const { headwind: w, liftOffSpeed: v, mass } = run;
   if (w >= v) return 'ground-speed-not-positive';
   const forces = rollForces(run);
+  const displaced = (run.contaminantDrag ?? 0) / mass;
+  if (displaced > 0 && w !== 0) throw new RangeError('contaminantDrag has no closed form with a headwind');
   const a = thrust.atRest / (mass * g0) - run.rollingFriction - run.slope;
-  const air = (forces.drag - run.rollingFriction * forces.lift) / g0;
+  const air = (forces.drag - run.rollingFriction * forces.lift + displaced) / g0;
   const b = air - thrust.perSquare / (mass * g0);
   const from = Math.max(0, w);
   const behind = Math.min(0, w);

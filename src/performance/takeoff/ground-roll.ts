@@ -26,7 +26,7 @@ export type GroundRoll =
  * Distance along the runway from brake release to lift-off.
  *
  * s = integral of (V - w)/a(V) dV from V = w to V_LOF, plus (V_R - w) t_R for the rotation; t = integral of dV/a, plus t_R;
- * m a = T(V) - q S C_Dg - mu max(0, W - q S C_Lg) - W slope, q = rho V|V|/2.
+ * m a = T(V) - q S C_Dg - mu max(0, W - q S C_Lg) - k (V - w)^2 - W slope, q = rho V|V|/2, k of a loose contaminant.
  *
  * On a ground line with a profile each stretch has its own slope. The acceleration is integrated to V_LOF even where V_R is
  * lower, and the rotation comes on top: the longer reading of two.

@@ -2,10 +2,12 @@ import { g0 } from '../../physics/constants.ts';
 import { dragCoefficient } from '../../physics/drag.ts';
 import { groundEffect } from '../../physics/ground-effect.ts';
 import type { Thrust } from '../../physics/thrust/thrust.ts';
+import { displacedPull } from './displaced-pull.ts';
 import type { TakeoffRun } from './takeoff-run.ts';
 
 /** What pushes and holds an aeroplane that rolls on its wheels, by unit of mass, as constants of one run. */
 export interface RollForces {
+  /** less the drag of a loose contaminant */
   readonly thrust: Thrust;
   /** one over the mass [1/kg] */
   readonly perMass: number;
@@ -25,12 +27,12 @@ export interface RollForces {
  * @see references.McCormick1995, sec. 7.2
  */
 export function rollForces(run: TakeoffRun): RollForces {
-  const { mass, density, wingArea, groundLiftCoefficient } = run;
+  const { mass, density, wingArea, groundLiftCoefficient, contaminantDrag, thrust } = run;
   const perMass = 1 / mass;
   const halfRhoS = 0.5 * density * wingArea * perMass;
   const phi = groundEffect(run.wingHeight / run.span);
   return {
-    thrust: run.thrust,
+    thrust: contaminantDrag === undefined ? thrust : displacedPull(thrust, contaminantDrag, run.headwind),
     perMass,
     weight: g0,
     drag: halfRhoS * dragCoefficient(run.groundDragCoefficient, run.inducedDragFactor, groundLiftCoefficient, phi),

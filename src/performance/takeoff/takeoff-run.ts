@@ -19,6 +19,8 @@ export interface TakeoffRun {
   readonly groundLiftCoefficient: number;
   /** free-rolling friction, dimensionless */
   readonly rollingFriction: number;
+  /** drag of a loose contaminant over the square of the ground speed [kg/m], whole at every speed; absent: none */
+  readonly contaminantDrag?: number | undefined;
   readonly thrust: Thrust;
   /** [kg/m3] */
   readonly density: number;

@@ -1,3 +1,4 @@
+import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { brakedRoll } from '../../../src/performance/landing/braked-roll.ts';
 import type { BrakedRun } from '../../../src/performance/landing/landing-run.ts';
@@ -108,5 +109,94 @@ describe('brakedRoll', () => {
 
   it('asks for a speed to stop from', () => {
     expect(() => brakedRoll({ ...plain, headwind: 30 }, 30)).toThrow(/airspeed/);
+  });
+});
+
+describe('reverse thrust', () => {
+  const reversed = { ...plain, reverseThrust: { thrust: 0.1 * plain.mass * g, cutOffSpeed: 15 } };
+  it('slows above its cut-off speed and not below, by hand: v dv = a ds in two pieces', () => {
+    const expected = (30 ** 2 - 15 ** 2) / (2 * 0.4 * g) + 15 ** 2 / (2 * 0.3 * g);
+    expect(stop(reversed, 30).distance).toBeCloseTo(expected, 8);
+    expect(stop(reversed, 15 - 1e-9).distance).toBeCloseTo(stop(plain, 15).distance, 6);
+  });
+  it('is of the ground speed, whatever the wind', () => {
+    const windy = { ...reversed, headwind: 5, density: 1e-9 };
+    expect(stop(windy, 35).distance).toBeCloseTo(stop({ ...reversed, density: 1e-9 }, 30).distance, 6);
+  });
+
+  it('is helped by a contaminant below its ground speed only: u^2 goes as exp(-2 k s) there [closed form; computed]', () => {
+    const braking = constantBraking(0.1);
+    const contaminantDrag = { perSquare: 1.5, below: 15 };
+    for (const headwind of [-3, 0, 5]) {
+      const found = stop({ ...plain, braking, contaminantDrag, headwind }, 30 + headwind);
+      const k = 1.5 / 1043;
+      const expected = (900 - 225) / (2 * g * 0.1) + Math.log1p((k * 225) / (0.1 * g)) / (2 * k);
+      expect(found.distance).toBeCloseTo(expected, 7);
+    }
+  });
+});
+
+describe('brakedRoll over stretches of runway', () => {
+  const third = (end: number, friction: number, slope = 0) => ({ end, braking: constantBraking(friction), slope });
+
+  it('thirds of one code equal that code, wherever braking begins [the same integral cut; computed]', () => {
+    const anywhere = fc.double({ min: 0, max: 1200, noNaN: true });
+    const wind = fc.double({ min: -8, max: 12, noNaN: true });
+    const slope = fc.double({ min: -0.02, max: 0.02, noNaN: true });
+    const braking = { at: (speed: number) => 0.3 - 0.005 * Math.min(speed, 20), kinks: [20] };
+    fc.assert(
+      fc.property(anywhere, wind, slope, (begin, headwind, rise) => {
+        const run = { ...trainer, braking, headwind, slope: rise, contaminantDrag: { perSquare: 0.4, below: 18 } };
+        const stretches = [300, 600, 900].map((end) => ({ ...run, end }));
+        const whole = stop(run, 32);
+        const cut = brakedRoll({ ...run, stretches }, 32, begin);
+        if (cut.outcome !== 'stops') throw new Error(cut.outcome);
+        expect(cut.distance / whole.distance).toBeCloseTo(1, 8);
+        expect(cut.time / whole.time).toBeCloseTo(1, 8);
+        expect(cut.leastDecelerationRatio).toBeCloseTo(whole.leastDecelerationRatio, 6);
+      }),
+    );
+  });
+
+  it('loses mu g s of V^2/2 on each stretch, in the order in which they come [work and energy; computed]', () => {
+    // braking begins 40 m before the end of the first: 450 = 0.1 g 40 + (0.05 + 0.01) g 300 + 0.3 g s
+    const run = { ...plain, stretches: [third(300, 0.1), third(600, 0.05, 0.01), third(900, 0.3)] };
+    const rest = (450 - g * (0.1 * 40 + 0.06 * 300)) / (0.3 * g);
+    const result = brakedRoll(run, 30, 260);
+    if (result.outcome !== 'stops') throw new Error(result.outcome);
+    expect(result.distance).toBeCloseTo(340 + rest, 5);
+    // a stop that begins on the last stretch, or beyond it, sees no other
+    for (const begin of [600, 2000]) {
+      expect(brakedRoll(run, 30, begin)).toMatchObject({ distance: expect.closeTo(450 / (0.3 * g), 7) });
+    }
+  });
+
+  it('is between the poorest and the best of its stretches, and no shorter where one is poorer', () => {
+    const friction = fc.double({ min: 0.05, max: 0.4, noNaN: true });
+    fc.assert(
+      fc.property(fc.tuple(friction, friction, friction), fc.nat(2), ([a, b, c], poorer) => {
+        const of = (frictions: readonly number[]) => {
+          const stretches = frictions.map((mu, i) => third(200 * (i + 1), mu));
+          return stop({ ...trainer, stretches }, 32).distance;
+        };
+        const frictions = [a, b, c];
+        const distance = of(frictions);
+        const all = (mu: number) => stop({ ...trainer, braking: constantBraking(mu) }, 32).distance;
+        expect(distance).toBeLessThanOrEqual(all(Math.min(a, b, c)) + 1e-6);
+        expect(distance).toBeGreaterThanOrEqual(all(Math.max(a, b, c)) - 1e-6);
+        const changed = frictions.map((mu, i) => (i === poorer ? 0.8 * mu : mu));
+        expect(of(changed)).toBeGreaterThanOrEqual(distance - 1e-6);
+      }),
+    );
+  });
+
+  it('never stops where a stretch lets it gain speed, and says from which ground speed', () => {
+    const run = { ...plain, slope: 0, stretches: [third(50, 0.2), third(600, 0.02, -0.05)] };
+    const result = brakedRoll(run, 30);
+    if (result.outcome !== 'never-stops') throw new Error(result.outcome);
+    expect(result.leastDecelerationRatio).toBeCloseTo(-0.03, 12);
+    expect(result.atGroundSpeed).toBeCloseTo(Math.sqrt(900 - 2 * g * 0.2 * 50), 6);
+    // and stops where it is slow enough to be held before that
+    expect(brakedRoll(run, 10)).toMatchObject({ outcome: 'stops' });
   });
 });

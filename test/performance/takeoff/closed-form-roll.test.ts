@@ -49,6 +49,20 @@ describe('closedFormRoll', () => {
     );
   });
 
+  it('adds a contaminant in still air, to 1e-6 of the quadrature, and has no form for it with a headwind', () => {
+    for (const contaminantDrag of [0, 0.2, 1.5]) {
+      const run = lightSingle({ contaminantDrag });
+      const closed = closedFormRoll(run, lightThrust);
+      const found = groundRoll(run);
+      if (typeof closed === 'string' || found.outcome !== 'lifts-off') throw new Error('no roll');
+      expect(Math.abs(found.distance / closed.distance - 1)).toBeLessThan(1e-6);
+    }
+    expect(closedFormRoll(lightSingle({ contaminantDrag: 3 }), lightThrust)).toBe('never-reaches-lift-off-speed');
+    expect(() => closedFormRoll(lightSingle({ contaminantDrag: 1, headwind: 3 }), lightThrust)).toThrow(
+      /contaminantDrag/,
+    );
+  });
+
   it('goes over to V^2/(2 a) where drag and friction balance, without losing digits', () => {
     for (const perSquare of [0, 1e-12, -1e-12, 1e-9, -1e-9, 2e-9]) {
       const found = closedFormRoll(plainRun({}), { atRest: 2, perSquare });
