@@ -1,6 +1,7 @@
 import { z } from 'zod';
 import { surfaceKinds, surfaceStates } from '../planning/question.ts';
-import { direction, elevation, magneticVariation, runwayLength, slope } from './quantities.ts';
+import { direction, elevation, magneticVariation, runwayLength } from './quantities.ts';
+import { slope } from './slope.ts';
 import { shortText } from './text.ts';
 import { north } from './weather.ts';
 

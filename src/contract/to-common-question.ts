@@ -52,7 +52,11 @@ export function asked({ aeroplane, configuration }: CommonRequest, known: KnownA
 }
 
 /** What a takeoff and a landing share, in SI. */
-export function toCommonQuestion(request: CommonRequest, known: KnownAeroplane): Question {
+export function toCommonQuestion(
+  request: CommonRequest,
+  known: KnownAeroplane,
+  phase: 'takeoff' | 'landing',
+): Question {
   return {
     aeroplane: known.aeroplane,
     aeroplaneDigest: known.digest,
@@ -60,7 +64,7 @@ export function toCommonQuestion(request: CommonRequest, known: KnownAeroplane):
     ...(known.changes === undefined ? {} : { changes: known.changes }),
     mass: si('mass', request.mass),
     configuration: request.configuration,
-    runway: toRunway(request.runway),
+    runway: toRunway(request.runway, phase),
     weather: toWeather(request.weather),
     ruleSet: request.ruleSet,
     ...(request.stage === undefined ? {} : { stage: request.stage }),

@@ -23,7 +23,7 @@ export function toLandingQuestion(request: LandingRequest, lookup: AeroplaneLook
   const procedure = request.procedure && toLandingProcedure(request.procedure);
   if (procedure !== undefined) faults.push(...landingProcedureFaults({ ...asked(request, known), procedure }));
   if (faults.length > 0) return { refused: faults };
-  const common = toCommonQuestion(request, known);
+  const common = toCommonQuestion(request, known, 'landing');
   const question = { ...common, defaulted: [...common.defaulted, ...defaultedProcedure(known.aeroplane, procedure)] };
   return procedure === undefined ? question : { ...question, procedure };
 }

@@ -19,7 +19,7 @@ export function toQuestion(request: TakeoffRequest, lookup: AeroplaneLookup): Ta
   const { procedure } = request;
   if (procedure !== undefined) faults.push(...takeoffProcedureFaults({ ...asked(request, known), procedure }));
   if (faults.length > 0) return { refused: faults };
-  const common = toCommonQuestion(request, known);
+  const common = toCommonQuestion(request, known, 'takeoff');
   const question = { ...common, defaulted: [...common.defaulted, ...defaultedProcedure(procedure)] };
   return procedure === undefined ? question : { ...question, procedure };
 }

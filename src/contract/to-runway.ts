@@ -1,16 +1,22 @@
+import { groundSlope } from '../planning/ground-slope.ts';
 import type { Declared, Runway } from '../planning/question.ts';
 import type { Draft } from './present.ts';
 import { si } from './quantity.ts';
 import type { RunwayOnWire } from './runway.ts';
+import { startAlong, toSlopeProfile } from './to-ground-line.ts';
 
-/** The runway in SI. */
-export function toRunway(given: RunwayOnWire): Runway {
+/**
+ * The runway in SI.
+ *
+ * @param phase - which declared distance the slope of a profile is taken over
+ */
+export function toRunway(given: RunwayOnWire, phase: 'takeoff' | 'landing'): Runway {
   const runway = {
     designator: given.designator,
     direction: si('angle', given.direction),
     directionReference: given.directionReference,
     elevation: si('length', given.elevation),
-    slope: si('proportion', given.slope),
+    slope: 'profile' in given.slope ? 0 : si('proportion', given.slope),
     surface: given.surface,
     start: toStart(given.start),
   } satisfies Runway as Draft<Runway>;
@@ -19,7 +25,9 @@ export function toRunway(given: RunwayOnWire): Runway {
     runway.lineUp = { tora: si('length', given.lineUp.tora), asda: si('length', given.lineUp.asda) };
   }
   if (given.declared !== undefined) runway.declared = toDeclared(given.declared);
-  return runway;
+  if (!('profile' in given.slope)) return runway;
+  const profile = toSlopeProfile(given.slope.profile, startAlong(given));
+  return { ...runway, profile, slope: groundSlope(profile, runway, phase) };
 }
 
 function toStart(given: RunwayOnWire['start']): Runway['start'] {

@@ -9,6 +9,7 @@ import { landingCautions } from './cautions/landing-cautions.ts';
 import { declaredDistances } from './declared-distances.ts';
 import { defaulted } from './defaulted.ts';
 import { isRefused, type Refused } from './fault.ts';
+import { groundSlopeAssumed } from './ground-slope.ts';
 import { landingBand } from './landing-band.ts';
 import { landingDistances } from './landing-distances.ts';
 import { landingEffects } from './landing-effects.ts';
@@ -119,7 +120,11 @@ export function planLanding(question: LandingQuestion): LandingAnswer | Refused 
     basis: {
       method,
       band: band?.contributions,
-      assumed: [...assumed.map(({ assumption }) => assumption), ...defaulted(question)],
+      assumed: [
+        ...assumed.map(({ assumption }) => assumption),
+        ...groundSlopeAssumed(runway, 'landing'),
+        ...defaulted(question),
+      ],
       notGiven: notGiven(question, 'landing'),
       sources: [rules.source, ruleSet.windCredit.source],
     },

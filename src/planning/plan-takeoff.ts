@@ -8,6 +8,7 @@ import { takeoffCautions } from './cautions/takeoff-cautions.ts';
 import { declaredDistances } from './declared-distances.ts';
 import { defaulted } from './defaulted.ts';
 import { isRefused, type Refused } from './fault.ts';
+import { groundSlopeAssumed } from './ground-slope.ts';
 import { notGiven } from './not-given.ts';
 import { prepareTakeoff } from './prepare-takeoff.ts';
 import type { TakeoffQuestion } from './question.ts';
@@ -108,7 +109,11 @@ export function planTakeoff(question: TakeoffQuestion): TakeoffAnswer | Refused 
     basis: {
       method,
       band: band?.contributions,
-      assumed: [...assumed.map(({ assumption }) => assumption), ...defaulted(question)],
+      assumed: [
+        ...assumed.map(({ assumption }) => assumption),
+        ...groundSlopeAssumed(runway, 'takeoff'),
+        ...defaulted(question),
+      ],
       notGiven: notGiven(question, 'takeoff'),
       sources: [rules.source, ruleSet.windCredit.source],
     },

@@ -1,4 +1,5 @@
 import type { Aeroplane } from '../performance/aeroplane.ts';
+import type { SlopeProfile } from '../performance/slope-profile.ts';
 import type { UnitFamily } from '../units/presentation.ts';
 
 /**
@@ -100,8 +101,10 @@ export interface Runway {
   /** east positive */
   readonly magneticVariation?: number;
   readonly elevation: number;
-  /** uphill positive in the direction of movement */
+  /** uphill positive in the direction of movement; with a profile, of the line that planning takes for the whole */
   readonly slope: number;
+  /** the ground line from the start point on */
+  readonly profile?: SlopeProfile;
   readonly surface: Surface;
   readonly start:
     | { readonly kind: 'threshold' }

@@ -60,6 +60,7 @@ export function statedRun(
     density,
     headwind,
     slope: runway.slope,
+    profile: runway.profile,
     rotationSpeed: speeds.rotation.tas,
     liftOffSpeed: speeds.liftOff.tas,
     screenSpeed: speeds.screen.tas,
@@ -97,9 +98,9 @@ export function takeoffRuns(run: TakeoffRun, conditions: RunConditions): Takeoff
     known: actualFriction !== undefined,
     creditedHeadwind,
     reference: needsReference
-      ? { ...run, headwind: creditedHeadwind, slope: 0, rollingFriction: referenceFriction }
+      ? { ...run, headwind: creditedHeadwind, slope: 0, profile: undefined, rollingFriction: referenceFriction }
       : undefined,
-    sameRunway: run.slope === 0 && actualFriction === referenceFriction,
+    sameRunway: run.slope === 0 && run.profile === undefined && actualFriction === referenceFriction,
   });
 }
 

@@ -2,11 +2,19 @@ import { countingDistances } from '../../planning/declared-distances.ts';
 import type { Fault } from '../../planning/fault.ts';
 import { si } from '../quantity.ts';
 import type { RunwayOnWire } from '../runway.ts';
+import { startAlong } from '../to-ground-line.ts';
 import { written } from '../written.ts';
+import { checkProfile } from './check-profile.ts';
 
 /** Members of a runway against each other. */
 export function checkRunway(runway: RunwayOnWire, phase: 'takeoff' | 'landing'): Fault[] {
-  return [...checkDeclared(runway.declared ?? {}), ...checkStart(runway, phase), ...checkSurface(runway.surface)];
+  const start = checkStart(runway, phase);
+  return [
+    ...checkDeclared(runway.declared ?? {}),
+    ...start,
+    ...(start.length > 0 ? [] : checkProfile(runway, phase)),
+    ...checkSurface(runway.surface),
+  ];
 }
 
 function checkDeclared({ tora, toda, asda }: NonNullable<RunwayOnWire['declared']>): Fault[] {
@@ -33,7 +41,7 @@ function checkDeclared({ tora, toda, asda }: NonNullable<RunwayOnWire['declared'
 function checkStart({ start, lineUp, declared = {} }: RunwayOnWire, phase: 'takeoff' | 'landing'): Fault[] {
   const faults: Fault[] = [];
   const offset = typeof start === 'object' && 'offset' in start ? start.offset : undefined;
-  const offsetLength = offset === undefined ? 0 : si('length', offset);
+  const offsetLength = startAlong({ start });
   for (const name of countingDistances[phase]) {
     const length = declared[name];
     if (length === undefined) continue;
