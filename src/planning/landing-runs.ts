@@ -57,6 +57,7 @@ export function statedLanding(
     density,
     headwind,
     slope: question.runway.slope,
+    profile: question.runway.profile,
     referenceSpeed: speeds.landingReference.tas,
     touchdownSpeed: speeds.touchdown.tas,
     approachAngle: resolved.approachAngle,
@@ -79,9 +80,20 @@ export function landingRuns(run: LandingRun, conditions: LandingConditions): Lan
     known: actualBraking !== undefined,
     creditedHeadwind,
     reference: needsReference
-      ? { ...run, headwind: creditedHeadwind, slope: 0, braking: referenceBraking, reverseThrust: undefined }
+      ? {
+          ...run,
+          headwind: creditedHeadwind,
+          slope: 0,
+          profile: undefined,
+          braking: referenceBraking,
+          reverseThrust: undefined,
+        }
       : undefined,
-    sameRunway: run.slope === 0 && actualBraking === referenceBraking && run.reverseThrust === undefined,
+    sameRunway:
+      run.slope === 0 &&
+      run.profile === undefined &&
+      actualBraking === referenceBraking &&
+      run.reverseThrust === undefined,
   });
 }
 

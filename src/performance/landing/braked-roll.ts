@@ -1,6 +1,7 @@
 import { g0 } from '../../physics/constants.ts';
 import type { PathIntegral } from '../path-integral.ts';
 import { stretchedPath } from '../stretched-path.ts';
+import { brakedStretches } from './braked-stretches.ts';
 import type { BrakedRun } from './landing-run.ts';
 import { noDeceleration, stopBetween } from './stop-between.ts';
 import { type StopForces, stopForces } from './stop-forces.ts';
@@ -34,7 +35,8 @@ export type BrakedRoll =
  * @see references.McCormick1995, sec. 7.7; references.Raymer, ch. 17
  */
 export function brakedRoll(run: BrakedRun, airspeed: number, begin = 0): BrakedRoll {
-  const { headwind, stretches } = run;
+  const { headwind } = run;
+  const stretches = brakedStretches(run);
   if (!(airspeed > headwind)) throw new RangeError(`airspeed must be above the headwind ${headwind}: ${airspeed}`);
   if (stretches === undefined) {
     const forces = stopForces(run, run);

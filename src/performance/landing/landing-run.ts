@@ -1,5 +1,6 @@
 import type { BrakingFriction } from '../../physics/braking-friction.ts';
 import type { StoppingDrag } from '../../physics/stopping-drag.ts';
+import type { SlopeProfile } from '../slope-profile.ts';
 
 /** A stretch of runway with its own braking, slope and contaminant. */
 export interface BrakedStretch {
@@ -7,8 +8,8 @@ export interface BrakedStretch {
   readonly end: number;
   /** effective, as in the run */
   readonly braking: BrakingFriction;
-  /** uphill positive, dimensionless */
-  readonly slope: number;
+  /** uphill positive, dimensionless; absent: the run's own */
+  readonly slope?: number | undefined;
   /** what a loose contaminant helps; absent: nothing */
   readonly contaminantDrag?: StoppingDrag | undefined;
 }
@@ -37,8 +38,10 @@ export interface BrakedRun {
   readonly density: number;
   /** along the runway [m/s], on the nose positive */
   readonly headwind: number;
-  /** uphill positive, dimensionless */
+  /** uphill positive, dimensionless; with a profile, of the whole line */
   readonly slope: number;
+  /** the ground line from the threshold on, in place of every slope; absent: the slopes hold */
+  readonly profile?: SlopeProfile | undefined;
   /** what a loose contaminant helps; absent: nothing */
   readonly contaminantDrag?: StoppingDrag | undefined;
   /**

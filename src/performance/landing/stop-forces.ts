@@ -21,7 +21,7 @@ export interface StopForces {
  */
 export function stopForces(run: BrakedRun, ground: Omit<BrakedStretch, 'end'>): StopForces {
   const { headwind, groundLiftCoefficient: liftCoefficient } = run;
-  const { braking, slope, contaminantDrag } = ground;
+  const { braking, slope = run.slope, contaminantDrag } = ground;
   const halfRhoS = (0.5 * run.density * run.wingArea) / run.mass;
   const phi = groundEffect(run.wingHeight / run.span);
   const drag = halfRhoS * dragCoefficient(run.groundDragCoefficient, run.inducedDragFactor, liftCoefficient, phi);

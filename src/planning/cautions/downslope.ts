@@ -17,7 +17,7 @@ export const downslope: CautionTest<LandingContext> = {
     const { question, stated } = context;
     const { runway } = question;
     if (runway.slope >= -falls - 1e-9) return undefined;
-    const level = stated && context.landedWith({ slope: 0 })?.groundRoll;
+    const level = stated && context.landedWith({ slope: 0, profile: undefined })?.groundRoll;
     return {
       message: `Runway ${runway.designator} falls ${percentText(-runway.slope, 2)} in the direction of movement.${fromTo(context, 'ground roll', level, stated?.groundRoll)}`,
       at: '/runway/slope',
