@@ -51,6 +51,10 @@ export const references = entries({
     status: 'secondary',
   },
   EuAirOps305Amc2: { title: 'AMC2 CAT.POL.A.305, runway slope (ED Decision 2014/015/R)', status: 'read' },
+  EuAirOps310: {
+    title: 'Regulation (EU) No 965/2012, CAT.POL.A.310, take-off obstacle clearance, multi-engined class B aeroplanes',
+    status: 'read',
+  },
   EuAirOps330: { title: 'Regulation (EU) No 965/2012, CAT.POL.A.330, landing of class B aeroplanes', status: 'read' },
   EuAirOps330Amc1: { title: 'AMC1 CAT.POL.A.330, landing on grass (ED Decision 2014/015/R)', status: 'secondary' },
   EuAirOps330Amc2: {

@@ -15,7 +15,7 @@ const check = z
   .strictObject({
     code: z.string().meta({ description: 'Stable name of the check.' }),
     of: z.string().meta({ description: 'What is compared.' }),
-    startsFrom,
+    startsFrom: startsFrom.exactOptional(),
     distance: quantity.meta({ description: 'Before factors.' }).exactOptional(),
     factors: z.array(factor),
     alternative: z

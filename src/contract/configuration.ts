@@ -1,6 +1,6 @@
 import { z } from 'zod';
 import { maximumLift, scheduledSpeed } from './lift.ts';
-import { approachAngle, flapAngle, idleThrust, runwayLength, shortTime } from './quantities.ts';
+import { approachAngle, climbHeight, flapAngle, idleThrust, runwayLength, shortTime } from './quantities.ts';
 
 const dragIncrement = z.number().min(-0.05).max(0.5);
 const loadFactor = z.number().min(1.01).max(2);
@@ -36,6 +36,16 @@ export const configuration = z
         touchdown: scheduledSpeed.exactOptional(),
       })
       .meta({ id: 'ScheduledSpeeds', description: 'The speeds of the procedure in this configuration.' })
+      .exactOptional(),
+    climbOut: z
+      .array(
+        z
+          .strictObject({ from: climbHeight, airDragIncrementCoefficient: dragIncrement })
+          .meta({ id: 'ClimbOutChange', description: 'Drag increment in the air from a height above the runway on.' }),
+      )
+      .min(1)
+      .max(4)
+      .meta({ description: 'How gear and flap come up after the screen, in rising order of height.' })
       .exactOptional(),
     rotationTime: shortTime.meta({ description: 'From rotation to lift-off.' }).exactOptional(),
     pullUpLoadFactor: loadFactor.meta({ description: 'Load factor in the arc after lift-off.' }).exactOptional(),

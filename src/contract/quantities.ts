@@ -43,6 +43,23 @@ export const flightAltitude = quantitySchema(
   -1200,
   15_000,
 );
+export const climbHeight = quantitySchema('ClimbHeight', 'Height above the runway.', 'length', metresOrFeet, 3, 500);
+export const obstacleHeight = quantitySchema(
+  'ObstacleHeight',
+  'Height of an obstacle above the runway where its distance is measured from.',
+  'length',
+  metresOrFeet,
+  -100,
+  1000,
+);
+export const obstacleDistance = quantitySchema(
+  'ObstacleDistance',
+  'Distance of an obstacle straight ahead.',
+  'length',
+  ['m', 'km', 'ft', 'NM'],
+  0,
+  30_000,
+);
 export const screenHeight = quantitySchema(
   'ScreenHeight',
   'Height of the screen above the runway, to be passed at its end.',

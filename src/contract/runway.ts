@@ -1,6 +1,13 @@
 import { z } from 'zod';
 import { surfaceKinds, surfaceStates } from '../planning/question.ts';
-import { direction, elevation, magneticVariation, runwayLength } from './quantities.ts';
+import {
+  direction,
+  elevation,
+  magneticVariation,
+  obstacleDistance,
+  obstacleHeight,
+  runwayLength,
+} from './quantities.ts';
 import { slope } from './slope.ts';
 import { shortText } from './text.ts';
 import { north } from './weather.ts';
@@ -64,6 +71,26 @@ export const declared = z
       'The declared distances. None is assumed equal to another: an absent one leaves its check not assessed.',
   });
 
+export const obstacles = z
+  .strictObject({
+    from: z
+      .enum(['brake-release', 'end-of-toda'])
+      .meta({ description: 'Where distances and heights are measured from; end-of-toda needs declared.toda.' }),
+    list: z
+      .array(
+        z
+          .strictObject({ distance: obstacleDistance, height: obstacleHeight })
+          .meta({ id: 'Obstacle', description: 'One obstacle straight ahead.' }),
+      )
+      .min(1)
+      .max(50),
+  })
+  .meta({
+    id: 'Obstacles',
+    description:
+      'Obstacles straight ahead after takeoff. A turn is not computed: an obstacle beside a turn has no place here.',
+  });
+
 export const runway = z
   .strictObject({
     designator: shortText.meta({ description: 'Name of the runway end used, for example 07 or 25L.' }),
@@ -84,6 +111,7 @@ export const runway = z
       .meta({ id: 'LineUp', description: 'Length lost in lining up.' })
       .exactOptional(),
     declared: declared.exactOptional(),
+    obstacles: obstacles.exactOptional(),
   })
   .meta({ id: 'Runway', description: 'The runway, seen in the direction of movement.' });
 

@@ -1,9 +1,10 @@
 import { z } from 'zod';
 import { aeroplaneUnderstood } from './aeroplane-choice.ts';
-import { speedSet } from './answer-parts.ts';
+import { percent, rateOfClimb, speedSet } from './answer-parts.ts';
 import { answerBegin, answerEnd } from './answer-shape.ts';
 import { basisOf, takeoffContribution } from './basis.ts';
 import { bandedDistance, distancesShape, timesShape } from './distances.ts';
+import { obstaclePath } from './obstacle-path.ts';
 import { rounding, units } from './question-frame.ts';
 import { takeoffRequest } from './takeoff-request.ts';
 
@@ -30,6 +31,18 @@ export const takeoffResponse = z
       .strictObject({ ...distancesShape, takeoffDistance: bandedDistance, ...timesShape })
       .meta({ id: 'TakeoffDistances', description: 'As stated, no factor, all engines.' })
       .exactOptional(),
+    climb: z
+      .strictObject({
+        gradient: percent.meta({ description: 'Height over distance in still air.' }),
+        rate: rateOfClimb,
+      })
+      .meta({
+        id: 'TakeoffClimb',
+        description:
+          'All engines, flap and gear as at the screen, at the screen speed, out of ground effect; not a certified gradient.',
+      })
+      .exactOptional(),
+    obstaclePath: obstaclePath.exactOptional(),
     ...answerEnd,
     basis: basisOf(takeoffContribution, 'Basis'),
     question: takeoffQuestion,

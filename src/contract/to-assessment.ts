@@ -14,7 +14,8 @@ export function toAssessment(how: Presentation, given: NonNullable<Answer['asses
 
 function toCheck(how: Presentation, check: Check) {
   const { unit, distance, alternative, required, available, margin, marginRatio, why } = check;
-  const shown = { code: check.code, of: check.of, startsFrom: check.startsFrom } as Draft<ShownCheck>;
+  const shown = { code: check.code, of: check.of } as Draft<ShownCheck>;
+  if (check.startsFrom !== undefined) shown.startsFrom = check.startsFrom;
   if (distance !== undefined) shown.distance = shownQuantity(how, unit, distance, 'up');
   shown.factors = check.factors.map((factor) => toFactor(how, factor));
   if (alternative !== undefined) {

@@ -15,6 +15,10 @@ export function toConfiguration(given: ConfigurationOnWire, calibration?: Airspe
     airDragIncrementCoefficient: given.airDragIncrementCoefficient,
     groundLiftCoefficient: given.groundLiftCoefficient,
     speeds: perhaps(toSpeeds, given.speeds),
+    climbOut: given.climbOut?.map(({ from, airDragIncrementCoefficient }) => ({
+      from: si('length', from),
+      airDragIncrementCoefficient,
+    })),
     rotationTime: perhaps(seconds, given.rotationTime),
     pullUpLoadFactor: given.pullUpLoadFactor,
     rollingStartAllowance: perhaps((length) => si('length', length), given.rollingStartAllowance),

@@ -10,6 +10,7 @@ import { toAnswerBegin } from './to-answer-begin.ts';
 import { toAssessment } from './to-assessment.ts';
 import { toBandedDistance } from './to-banded-distance.ts';
 import { type Stamp, toBasis, toContribution } from './to-basis.ts';
+import { toObstaclePath } from './to-obstacle-path.ts';
 import { toShortfall } from './to-shortfall.ts';
 import { toSpeedSet } from './to-speed-set.ts';
 
@@ -31,6 +32,13 @@ export function toResponse(
   const response = toAnswerBegin(how, answer) as Draft<TakeoffResponse>;
   response.speeds = toSpeeds(how, answer.speeds);
   if (answer.distances !== undefined) response.distances = toDistances(how, answer.distances);
+  if (answer.climb !== undefined) {
+    response.climb = {
+      gradient: shownQuantity(how, 'gradient', answer.climb.gradient, 'down'),
+      rate: shownQuantity(how, 'rateOfClimb', answer.climb.rate, 'down'),
+    };
+  }
+  if (answer.obstaclePath !== undefined) response.obstaclePath = toObstaclePath(how, answer.obstaclePath);
   if (answer.assessment !== undefined) response.assessment = toAssessment(how, answer.assessment);
   if (answer.shortfall !== undefined) response.shortfall = answer.shortfall.map((one) => toShortfall(how, one));
   response.basis = toBasis(how, answer, question.aeroplaneDigest, stamp, (one) => ({

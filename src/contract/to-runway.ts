@@ -25,6 +25,15 @@ export function toRunway(given: RunwayOnWire, phase: 'takeoff' | 'landing'): Run
     runway.lineUp = { tora: si('length', given.lineUp.tora), asda: si('length', given.lineUp.asda) };
   }
   if (given.declared !== undefined) runway.declared = toDeclared(given.declared);
+  if (given.obstacles !== undefined) {
+    runway.obstacles = {
+      from: given.obstacles.from,
+      list: given.obstacles.list.map(({ distance, height }) => ({
+        distance: si('length', distance),
+        height: si('length', height),
+      })),
+    };
+  }
   if (!('profile' in given.slope)) return runway;
   const profile = toSlopeProfile(given.slope.profile, startAlong(given));
   return { ...runway, profile, slope: groundSlope(profile, runway, phase) };

@@ -111,6 +111,8 @@ export interface Configuration {
     readonly landingReference?: ScheduledSpeed;
     readonly touchdown?: ScheduledSpeed;
   };
+  /** drag increments after the screen as gear and flap come up, each from a height above the runway on [m] */
+  readonly climbOut?: readonly { readonly from: number; readonly airDragIncrementCoefficient: number }[];
   readonly rotationTime?: number;
   readonly pullUpLoadFactor?: number;
   /** what a rolling start takes over one from standing at full power [m] */

@@ -99,7 +99,8 @@ export interface Check {
   readonly code: string;
   /** what is compared: 'groundRoll', 'takeoffDistance', 'landingDistance' ... */
   readonly of: string;
-  readonly startsFrom: 'reference' | 'credited' | 'flight-manual';
+  /** absent for a check that is not of a distance */
+  readonly startsFrom?: 'reference' | 'credited' | 'flight-manual';
   /** the distance before factors [m], where one exists */
   readonly distance?: number;
   readonly factors: readonly Factor[];
@@ -189,6 +190,41 @@ export interface Distances {
   readonly airTime: number;
 }
 
+/** The climb after takeoff: all engines, flap and gear as at the screen, at the screen speed, out of ground effect. */
+export interface TakeoffClimb {
+  /** height over distance in still air, below 0 where the aeroplane sinks */
+  readonly gradient: number;
+  /** [m/s] */
+  readonly rate: number;
+}
+
+/** One obstacle and the path above it [m], heights above the runway where the distances are measured from. */
+export interface ObstacleCleared {
+  readonly distance: number;
+  readonly height: number;
+  readonly pathHeight: number;
+  readonly clearance: number;
+}
+
+/** The path past the obstacles; the critical one has the least clearance. */
+export type ObstaclePath =
+  | {
+      readonly outcome: 'climbs';
+      /** where the path begins: distance from brake release [m] and what it is */
+      readonly begins: number;
+      readonly because: string;
+      readonly obstacles: readonly ObstacleCleared[];
+      /** place of the critical one in the list */
+      readonly critical: number;
+    }
+  | { readonly outcome: 'does-not-climb'; readonly atHeight: number; readonly gradient: number }
+  | {
+      readonly outcome: 'outside-stated-data';
+      /** true airspeed at which the thrust is asked for, and where its data end [m/s] */
+      readonly airspeed: number;
+      readonly bound: number;
+    };
+
 export interface TakeoffAnswer extends Answer {
   readonly speeds: {
     readonly stall: SpeedSet;
@@ -197,6 +233,10 @@ export interface TakeoffAnswer extends Answer {
     readonly screen: SpeedSet;
   };
   readonly distances?: (Distances & { readonly takeoffDistance: BandedDistance }) | undefined;
+  /** absent where the airspeed lies outside measured thrust */
+  readonly climb?: TakeoffClimb | undefined;
+  /** absent where no obstacle was given or there are no distances */
+  readonly obstaclePath?: ObstaclePath | undefined;
 }
 
 /** The climb after a balked landing: all engines at full power, in the landing configuration, at the landing reference speed. */

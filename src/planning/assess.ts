@@ -27,6 +27,8 @@ export interface Assessing {
   readonly distances: Runs<Checked>;
   /** of the distances as stated */
   readonly band: Band | undefined;
+  /** checks that follow from those of the runway, such as the clearance over obstacles */
+  readonly further?: (checks: readonly Check[]) => readonly Check[];
   /** the length that the ground roll has [m] */
   readonly rollAvailable: number | undefined;
 }
@@ -47,7 +49,8 @@ export function assess(assessing: Assessing): Assessed {
   const { stated, credited, reference } = distances;
   const noSurface = notReached === undefined && credited === undefined && reference === undefined;
   const isAssessed = notReached === undefined && doesNotApply === undefined && !noSurface;
-  const checks = isAssessed ? checksOf(rules, distances, runway, declared) : undefined;
+  const ofRunway = isAssessed ? checksOf(rules, distances, runway, declared) : undefined;
+  const checks = ofRunway && assessing.further ? [...ofRunway, ...assessing.further(ofRunway)] : ofRunway;
   const thinRatio = ruleSet.thinMargin.ratio;
   const highOver = (of: string) => highOverOf(band, of);
   const outcome = outcomeOf({

@@ -25,7 +25,7 @@ export function notGiven(
   missing(limitations?.maximumPressureAltitude, inAeroplane('/limitations/maximumPressureAltitude'));
   if (phase === 'takeoff') missing(runway.lineUp, '/runway/lineUp');
   for (const name of countingDistances[phase]) missing(runway.declared?.[name], `/runway/declared/${name}`);
-  if (phase === 'takeoff') pointers.push('/runway/obstacles');
+  if (phase === 'takeoff') missing(runway.obstacles, '/runway/obstacles');
   missing(weather.dewPoint, '/weather/dewPoint');
   if (weather.wind.kind === 'components') missing(weather.wind.crosswind, '/weather/wind/crosswind');
   return pointers;

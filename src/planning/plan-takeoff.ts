@@ -1,7 +1,7 @@
 import { propulsionThrust } from '../performance/propulsion.ts';
 import { aeroplanePointer } from './aeroplane-pointer.ts';
 import { airBeside } from './air-beside.ts';
-import type { TakeoffAnswer } from './answer.ts';
+import type { ObstaclePath, TakeoffAnswer } from './answer.ts';
 import { assess } from './assess.ts';
 import { raisedCautions } from './cautions/caution-test.ts';
 import { takeoffCautions } from './cautions/takeoff-cautions.ts';
@@ -10,12 +10,15 @@ import { defaulted } from './defaulted.ts';
 import { isRefused, type Refused } from './fault.ts';
 import { groundSlopeAssumed } from './ground-slope.ts';
 import { notGiven } from './not-given.ts';
+import { obstacleCheck, obstaclePathOf } from './obstacle-path.ts';
+import { pathStart } from './path-start.ts';
 import { prepareTakeoff } from './prepare-takeoff.ts';
 import type { TakeoffQuestion } from './question.ts';
 import { answerSentence } from './sentences/answer-sentence.ts';
 import { notReachedSentence } from './sentences/not-reached-sentence.ts';
 import { shortfalls } from './shortfalls.ts';
 import { takeoffBand } from './takeoff-band.ts';
+import { climbAfterTakeoff } from './takeoff-climb.ts';
 import { takeoffDistances } from './takeoff-distances.ts';
 import { takeoffEffects } from './takeoff-effects.ts';
 import { checkedTakeoffs, notReached as notReachedOf, reached, takeoffOf, takeoffRuns } from './takeoff-runs.ts';
@@ -52,6 +55,7 @@ export function planTakeoff(question: TakeoffQuestion): TakeoffAnswer | Refused 
 
   const declared = declaredDistances(runway, rules.clearwayShare);
   const rollAvailable = declared.credited.tora;
+  let obstaclePath: ObstaclePath | undefined;
   const { outcome, checks, governing, thin } = assess({
     conditions,
     rules,
@@ -61,6 +65,12 @@ export function planTakeoff(question: TakeoffQuestion): TakeoffAnswer | Refused 
     distances: checkedTakeoffs(runs),
     band,
     rollAvailable,
+    further: (ofRunway) => {
+      const demand = rules.obstacles?.appliesTo(aeroplane) === true ? rules.obstacles : undefined;
+      const start = pathStart(demand, ofRunway, reached(runs.credited ?? runs.stated));
+      obstaclePath = start && obstaclePathOf(question, prepared, start);
+      return demand === undefined || obstaclePath === undefined ? [] : [obstacleCheck(demand, obstaclePath)];
+    },
   });
 
   const assumed = takeoffEffects(
@@ -104,6 +114,8 @@ export function planTakeoff(question: TakeoffQuestion): TakeoffAnswer | Refused 
     wind: windAnswer(wind, creditedHeadwind),
     speeds,
     distances,
+    climb: stated && climbAfterTakeoff(question, prepared),
+    obstaclePath,
     assessment: checks && { ruleSet: ruleSet.id, checks, governing: governing?.code },
     shortfall: notReached && shortfalls(notReached, aeroplanePointer(aeroplaneAt, '/propulsion')),
     basis: {

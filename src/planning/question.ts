@@ -87,6 +87,13 @@ export interface Surface {
   readonly brakingFrictionCoefficient?: number;
 }
 
+/** Obstacles straight ahead, from brake release or from the end of TODA. */
+export interface Obstacles {
+  readonly from: 'brake-release' | 'end-of-toda';
+  /** distance from there and height above the runway there [m], at least one */
+  readonly list: readonly { readonly distance: number; readonly height: number }[];
+}
+
 export interface Declared {
   readonly tora?: number;
   readonly toda?: number;
@@ -112,6 +119,7 @@ export interface Runway {
     | { readonly kind: 'point'; readonly name: string };
   readonly lineUp?: { readonly tora: number; readonly asda: number };
   readonly declared?: Declared;
+  readonly obstacles?: Obstacles;
 }
 
 export interface Weather {

@@ -14,6 +14,7 @@ export function checkRunway(runway: RunwayOnWire, phase: 'takeoff' | 'landing'):
     ...start,
     ...(start.length > 0 ? [] : checkProfile(runway, phase)),
     ...checkSurface(runway.surface),
+    ...checkObstacles(runway, phase),
   ];
 }
 
@@ -70,6 +71,29 @@ function checkStart({ start, lineUp, declared = {} }: RunwayOnWire, phase: 'take
     }
   }
   return faults;
+}
+
+/** Obstacles measured from the end of TODA need a TODA; after a landing there is no climb to clear them. */
+function checkObstacles({ obstacles, declared }: RunwayOnWire, phase: 'takeoff' | 'landing'): Fault[] {
+  if (obstacles === undefined) return [];
+  if (phase === 'landing') {
+    return [
+      {
+        pointer: '/runway/obstacles',
+        code: 'contradiction',
+        message: 'Obstacles are cleared after a takeoff; a landing has no use for them.',
+        hint: 'Leave them away in a landing.',
+      },
+    ];
+  }
+  if (obstacles.from === 'brake-release' || declared?.toda !== undefined) return [];
+  return [
+    {
+      pointer: '/runway/declared/toda',
+      code: 'missing',
+      message: 'Obstacles are measured from the end of TODA, and TODA is not given.',
+    },
+  ];
 }
 
 function checkSurface({ kind, grass, firmness }: RunwayOnWire['surface']): Fault[] {

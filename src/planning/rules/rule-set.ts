@@ -45,10 +45,24 @@ export interface PhaseRules {
   readonly requirements: (declared: DeclaredDistances) => readonly Requirement[];
 }
 
+/** What a set asks of the path past obstacles. */
+export interface ObstacleDemand {
+  readonly code: string;
+  /** vertical, over every obstacle [m] */
+  readonly clearance: number;
+  /** where the path begins at the screen height: at the end of the distance that the set requires, or of the one computed */
+  readonly begins: 'required-distance' | 'computed-distance';
+  readonly because: string;
+  readonly appliesTo: (aeroplane: Aeroplane) => boolean;
+  readonly source: ReferenceKey;
+}
+
 /** The takeoff side of a rule set. */
 export interface TakeoffRules extends PhaseRules {
   /** the most that counts of a clearway, over the run */
   readonly clearwayShare: number;
+  /** absent where the set asks for no clearance with all engines running */
+  readonly obstacles?: ObstacleDemand;
 }
 
 /** A set of operating rules as figures with their sources; numbers somebody decided live in these files and nowhere else. */

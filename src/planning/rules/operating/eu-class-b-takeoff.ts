@@ -2,7 +2,7 @@ import type { Factor } from '../../answer.ts';
 import type { DeclaredDistances } from '../../declared-distances.ts';
 import type { Surface } from '../../question.ts';
 import { clearwayShare } from '../clearway-share.ts';
-import type { Requirement, TakeoffRules } from '../rule-set.ts';
+import type { ObstacleDemand, Requirement, TakeoffRules } from '../rule-set.ts';
 
 function overall(code: string, value: number, because: string): Factor {
   return { code, value, because, source: 'EuAirOps305', status: 'read' };
@@ -81,9 +81,20 @@ function requirements({ published: { tora, toda, asda } }: DeclaredDistances): r
 }
 
 /** CAT.POL.A.305: takeoff of class B aeroplanes. */
+/** Multi-engined aeroplanes clear obstacles by 50 ft; the path begins where the required takeoff distance ends. */
+const obstacles: ObstacleDemand = {
+  code: 'obstacle-all-engines',
+  clearance: 50 * 0.3048,
+  begins: 'required-distance',
+  because: 'the takeoff distance that CAT.POL.A.305(b) requires',
+  appliesTo: ({ engines }) => engines > 1,
+  source: 'EuAirOps310',
+};
+
 export const euClassBTakeoff: TakeoffRules = {
   source: 'EuAirOps305',
   startsFrom: 'reference',
+  obstacles,
   clearwayShare,
   runwayFactors: (surface, slope) => {
     const factors = surfaceFactor(surface);
