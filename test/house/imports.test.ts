@@ -11,7 +11,7 @@ const table: Record<string, readonly string[]> = {
   contract: ['planning', 'performance', 'physics', 'units', 'references'],
   planning: ['performance', 'physics', 'units', 'references'],
   performance: ['physics', 'numerics', 'references'],
-  physics: ['numerics', 'references'],
+  physics: ['numerics', 'units', 'references'],
   numerics: [],
   units: [],
   references: [],

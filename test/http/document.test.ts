@@ -52,8 +52,10 @@ describe('the OpenAPI document', () => {
       'post /v1/air',
       'post /v1/airspeed',
       'post /v1/landing',
+      'post /v1/landing/choices',
       'post /v1/speeds',
       'post /v1/takeoff',
+      'post /v1/takeoff/choices',
     ]);
   });
 
@@ -122,7 +124,7 @@ describe('the OpenAPI document', () => {
 
   it('shows an example for each question, and the service answers it', async () => {
     const questions = operations.filter(({ method }) => method === 'post');
-    expect(questions).toHaveLength(5);
+    expect(questions).toHaveLength(7);
     for (const { path, operation } of questions) {
       const example = operation.requestBody?.content['application/json']?.example;
       const answered = await post(app, path, example);
