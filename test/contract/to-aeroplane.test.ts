@@ -53,9 +53,11 @@ describe('a definition in SI', () => {
         temperatureExponent: 0.5,
         humidityFactor: 1,
         thrustFactor: 1,
+        powerSettings: { 'reduced-90': { fullPowerRatio: 0.9 } },
       },
-      wheels: { tyrePressure: 200_000, tyreSpeedLimit: expect.closeTo(61.7333333333, 9) },
+      wheels: { arrangement: 'tricycle', tyrePressure: 200_000, tyreSpeedLimit: expect.closeTo(61.7333333333, 9) },
       brakes: { brakingFrictionCoefficient: 0.4, loadFactor: 0.85, antiSkid: 'none', energyLimit: 1e6 },
+      reverseThrust: { thrust: 800, cutOffSpeed: expect.closeTo(10.2888888889, 9) },
       limitations: {
         demonstratedCrosswind: expect.closeTo(7.7166666667, 9),
         crosswind: expect.closeTo(10.2888888889, 9),
@@ -90,6 +92,7 @@ describe('a definition in SI', () => {
         },
         rotationTime: 1,
         pullUpLoadFactor: 1.1,
+        rollingStartAllowance: 30,
       },
       'landing-full': {
         for: ['landing'],
@@ -101,6 +104,7 @@ describe('a definition in SI', () => {
         },
         approachAngle: expect.closeTo(0.0523598776, 9),
         flareLoadFactor: 1.2,
+        floatDecelerationRatio: 0.13,
         freeRollTime: 2,
         idleThrust: 150,
       },

@@ -44,10 +44,10 @@ describe('the 90 % band of a landing', () => {
       wholeDistance: expect.closeTo(modelForm.stated, 12),
     });
   });
-  it('has a roll that grows as the first power of mass, since friction does too: 0.9 to 1.2 on 2 %', () => {
+  it('has a roll that grows as the first power of mass, since friction does too: 0.8 to 1.1 on 2 %, the free roll as its root', () => {
     const exponent = (of('mass')?.groundRoll ?? 0) / 0.02;
-    expect(exponent).toBeGreaterThan(0.9);
-    expect(exponent).toBeLessThan(1.2);
+    expect(exponent).toBeGreaterThan(0.8);
+    expect(exponent).toBeLessThan(1.1);
   });
   it('takes braking as more uncertain where it is wet', () => {
     const wet = of('braking friction', changed(plainLanding, { runway: { surface: wetPavement } }));

@@ -1,5 +1,6 @@
 import type { AeroplaneDefinition } from '../../src/contract/aeroplane-definition.ts';
 import type { AeroplaneLookup } from '../../src/contract/aeroplane-lookup.ts';
+import type { LandingRequest } from '../../src/contract/landing-request.ts';
 import type { TakeoffRequest } from '../../src/contract/takeoff-request.ts';
 import { toAeroplane } from '../../src/contract/to-aeroplane.ts';
 import type { Fault } from '../../src/planning/fault.ts';
@@ -43,6 +44,7 @@ export function sampleDefinition(): AeroplaneDefinition {
         },
         rotationTime: { value: 1, unit: 's' },
         pullUpLoadFactor: 1.1,
+        rollingStartAllowance: { value: 30, unit: 'm' },
       },
       'landing-full': {
         for: ['landing'],
@@ -51,6 +53,7 @@ export function sampleDefinition(): AeroplaneDefinition {
         speeds: { landingReference: { stallRatio: 1.3 }, touchdown: { stallRatio: 1.15 } },
         approachAngle: { value: 3, unit: 'deg' },
         flareLoadFactor: 1.2,
+        floatDecelerationRatio: 0.13,
         freeRollTime: { value: 2, unit: 's' },
         idleThrust: { value: 150, unit: 'N' },
       },
@@ -64,14 +67,20 @@ export function sampleDefinition(): AeroplaneDefinition {
       temperatureExponent: 0.5,
       humidityFactor: 1,
       thrustFactor: 1,
+      powerSettings: { 'reduced-90': { fullPowerRatio: 0.9 } },
     },
-    wheels: { tyrePressure: { value: 2, unit: 'bar' }, tyreSpeedLimit: { value: 120, unit: 'kt' } },
+    wheels: {
+      arrangement: 'tricycle',
+      tyrePressure: { value: 2, unit: 'bar' },
+      tyreSpeedLimit: { value: 120, unit: 'kt' },
+    },
     brakes: {
       brakingFrictionCoefficient: 0.4,
       loadFactor: 0.85,
       antiSkid: 'none',
       energyLimit: { value: 1, unit: 'MJ' },
     },
+    reverseThrust: { thrust: { value: 0.8, unit: 'kN' }, cutOffSpeed: { value: 20, unit: 'kt' } },
     limitations: {
       demonstratedCrosswind: { value: 15, unit: 'kt' },
       crosswind: { value: 20, unit: 'kt' },
@@ -134,6 +143,27 @@ export function sampleTakeoff(): TakeoffRequest {
     stage: 'dispatch',
     units: 'm-kt-kg',
     rounding: 'safe',
+  };
+}
+
+/** A landing of it with every member that a question can have, by id. */
+export function sampleLanding(): LandingRequest {
+  const { procedure: _, ...common } = sampleTakeoff();
+  return {
+    ...common,
+    mass: { value: 960, unit: 'kg' },
+    configuration: 'landing-full',
+    runway: {
+      ...common.runway,
+      surface: { kind: 'paved', state: 'wet', brakingFrictionCoefficient: 0.21 },
+    },
+    procedure: {
+      approachSpeedIncrement: { value: 4, unit: 'kt' },
+      approachAngle: { value: 3.5, unit: 'deg' },
+      reverse: true,
+      antiSkid: 'inoperative',
+      reactionTime: { value: 2.5, unit: 's' },
+    },
   };
 }
 
