@@ -100,8 +100,11 @@ function reading(startsFrom: Start, distance: number, factors: readonly Factor[]
   return { startsFrom, distance, factors, required };
 }
 
+/** Shares of the required that differ by less are equal: in other units the last bits fall otherwise. */
+const alike = 1e-9;
+
 /**
- * The check with the least margin as a share of what it requires; of equal ones the first.
+ * The check with the least margin as a share of what it requires; of equal ones the first, whatever their last bits.
  *
  * @returns its code, or undefined where nothing was assessed
  */
@@ -109,7 +112,7 @@ export function governingCheck(checks: readonly Check[]): Check | undefined {
   let governing: Check | undefined;
   for (const check of checks) {
     if (check.marginRatio === undefined) continue;
-    if (governing?.marginRatio === undefined || check.marginRatio < governing.marginRatio) governing = check;
+    if (governing?.marginRatio === undefined || check.marginRatio < governing.marginRatio - alike) governing = check;
   }
   return governing;
 }

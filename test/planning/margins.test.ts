@@ -90,6 +90,8 @@ describe('the governing check', () => {
   });
   it('is the first of equals, and never one that was not assessed', () => {
     expect(governingCheck([check('a'), check('b', 0.1), check('c', 0.1)])?.code).toBe('b');
+    // equal but for the last bit
+    expect(governingCheck([check('a', 0.1), check('b', 0.1 - 1e-16)])?.code).toBe('a');
     expect(governingCheck([check('a')])).toBeUndefined();
     expect(governingCheck([])).toBeUndefined();
   });
