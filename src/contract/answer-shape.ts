@@ -2,6 +2,7 @@ import { z } from 'zod';
 import { outcomes } from '../planning/answer.ts';
 import { advisory, air } from './answer-parts.ts';
 import { assessment } from './assessment.ts';
+import { trajectory, working } from './detail.ts';
 import { shortfall } from './shortfall.ts';
 import { windComponents } from './wind-components.ts';
 
@@ -17,4 +18,6 @@ export const answerBegin = {
 export const answerEnd = {
   assessment: assessment.exactOptional(),
   shortfall: z.array(shortfall).exactOptional(),
+  working: working.exactOptional(),
+  trajectory: trajectory.exactOptional(),
 };

@@ -1,3 +1,4 @@
+import { takeoffDetail } from '../planning/detail/takeoff-detail.ts';
 import { isRefused, type Refused } from '../planning/fault.ts';
 import { planTakeoff } from '../planning/plan-takeoff.ts';
 import type { AeroplaneLookup } from './aeroplane-lookup.ts';
@@ -16,5 +17,8 @@ export function answerTakeoff(
   const question = toQuestion(request, lookup);
   if (isRefused(question)) return question;
   const answer = planTakeoff(question);
-  return isRefused(answer) ? answer : toResponse(answer, request, question, stamp);
+  if (isRefused(answer)) return answer;
+  const { detail } = request;
+  const whole = detail === undefined ? answer : { ...answer, detail: takeoffDetail(question, answer, detail) };
+  return toResponse(whole, request, question, stamp);
 }

@@ -13,7 +13,16 @@ export function asUnderstood(
   request: TakeoffRequest | LandingRequest,
   known: Chosen,
 ): TakeoffQuestion | LandingQuestion {
-  const { reference, asOf, procedure, stage, units = defaultUnits, rounding = defaultRounding } = request;
+  const {
+    reference,
+    asOf,
+    procedure,
+    stage,
+    detail,
+    select,
+    units = defaultUnits,
+    rounding = defaultRounding,
+  } = request;
   const question = {} as Draft<TakeoffQuestion | LandingQuestion>;
   if (reference !== undefined) question.reference = reference;
   if (asOf !== undefined) question.asOf = asOf;
@@ -27,5 +36,7 @@ export function asUnderstood(
   if (stage !== undefined) question.stage = stage;
   question.units = units;
   question.rounding = rounding;
+  if (detail !== undefined) question.detail = detail;
+  if (select !== undefined) question.select = select;
   return question;
 }

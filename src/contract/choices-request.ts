@@ -22,15 +22,22 @@ const landingChoice = z
   })
   .meta({ id: 'LandingChoice', description: 'One runway end and threshold, with a configuration.' });
 
-const { configuration: _takeoffConfiguration, runway: _takeoffRunway, ...takeoffCommon } = takeoffRequest.shape;
-const { configuration: _landingConfiguration, runway: _landingRunway, ...landingCommon } = landingRequest.shape;
+/** What all choices share; the answer to a choice is short, so that there is nothing to detail or to select from. */
+function common<Shape extends TakeoffShape | LandingShape>(shape: Shape): Omit<Shape, OfOne> {
+  const { configuration: _, runway: _r, detail: _d, select: _s, ...shared } = shape;
+  return shared;
+}
+
+type TakeoffShape = typeof takeoffRequest.shape;
+type LandingShape = typeof landingRequest.shape;
+type OfOne = 'configuration' | 'runway' | 'detail' | 'select';
 
 export const takeoffChoicesRequest = z
-  .strictObject({ ...takeoffCommon, choices: z.array(takeoffChoice).min(1).max(most) })
+  .strictObject({ ...common(takeoffRequest.shape), choices: z.array(takeoffChoice).min(1).max(most) })
   .meta({ id: 'TakeoffChoicesRequest', description: 'One takeoff under one weather and mass, and the ways to do it.' });
 
 export const landingChoicesRequest = z
-  .strictObject({ ...landingCommon, choices: z.array(landingChoice).min(1).max(most) })
+  .strictObject({ ...common(landingRequest.shape), choices: z.array(landingChoice).min(1).max(most) })
   .meta({ id: 'LandingChoicesRequest', description: 'One landing under one weather and mass, and the ways to do it.' });
 
 export type TakeoffChoicesRequest = z.infer<typeof takeoffChoicesRequest>;

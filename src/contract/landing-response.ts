@@ -3,6 +3,7 @@ import { aeroplaneUnderstood } from './aeroplane-choice.ts';
 import { percent, rateOfClimb, speed, speedSet } from './answer-parts.ts';
 import { answerBegin, answerEnd } from './answer-shape.ts';
 import { basisOf, landingContribution } from './basis.ts';
+import { sensitivitiesOf } from './detail.ts';
 import { bandedDistance, distancesShape, timesShape } from './distances.ts';
 import { landingRequest } from './landing-request.ts';
 import { rounding, units } from './question-frame.ts';
@@ -50,6 +51,7 @@ export const landingResponse = z
       .exactOptional(),
     balkedLanding,
     ...answerEnd,
+    sensitivities: sensitivitiesOf('landingDistance', 'LandingSensitivity').exactOptional(),
     basis: basisOf(landingContribution, 'LandingBasis'),
     question: landingQuestion,
   })

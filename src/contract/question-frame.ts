@@ -15,6 +15,11 @@ export const rounding = z
   .enum(['safe', 'none'])
   .meta({ description: 'safe rounds what is required up and what is available down; none shows numbers unrounded.' });
 
+export const select = z.array(z.string().max(256)).max(64).meta({
+  description:
+    'JSON pointers (RFC 6901) into the answer: it then holds those members only, and outcome and advisory always. A pointer may name a member that this answer lacks; one that no answer to the question could have is refused. Lists, and numbers with their unit, are selected whole.',
+});
+
 /** What an answer is written in when the question does not say; frozen in v1. */
 export const defaultUnits = 'm-kt-kg';
 export const defaultRounding = 'safe';

@@ -1,7 +1,8 @@
 import { z } from 'zod';
 import { aeroplaneChoice } from './aeroplane-choice.ts';
+import { detail } from './detail.ts';
 import { mass } from './quantities.ts';
-import { asOf, reference, rounding, units } from './question-frame.ts';
+import { asOf, reference, rounding, select, units } from './question-frame.ts';
 import { runway } from './runway.ts';
 import { id } from './text.ts';
 import { weather } from './weather.ts';
@@ -24,5 +25,7 @@ export function questionShape<Procedure extends z.ZodType>(phase: 'takeoff' | 'l
       .exactOptional(),
     units: units.exactOptional(),
     rounding: rounding.exactOptional(),
+    detail: detail.exactOptional(),
+    select: select.exactOptional(),
   };
 }

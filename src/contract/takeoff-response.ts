@@ -3,6 +3,7 @@ import { aeroplaneUnderstood } from './aeroplane-choice.ts';
 import { percent, rateOfClimb, speedSet } from './answer-parts.ts';
 import { answerBegin, answerEnd } from './answer-shape.ts';
 import { basisOf, takeoffContribution } from './basis.ts';
+import { sensitivitiesOf } from './detail.ts';
 import { bandedDistance, distancesShape, timesShape } from './distances.ts';
 import { obstaclePath } from './obstacle-path.ts';
 import { rounding, units } from './question-frame.ts';
@@ -44,6 +45,7 @@ export const takeoffResponse = z
       .exactOptional(),
     obstaclePath: obstaclePath.exactOptional(),
     ...answerEnd,
+    sensitivities: sensitivitiesOf('takeoffDistance', 'TakeoffSensitivity').exactOptional(),
     basis: basisOf(takeoffContribution, 'Basis'),
     question: takeoffQuestion,
   })

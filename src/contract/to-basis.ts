@@ -76,7 +76,7 @@ export function toBasis<Band>(
 }
 
 /** Sources that checks, factors, cautions and assumptions name: an answer names no key that it does not list. */
-function citedBy({ assessment, cautions, basis }: Answer): ReferenceKey[] {
+function citedBy({ assessment, cautions, basis, detail }: Answer): ReferenceKey[] {
   const keys: ReferenceKey[] = [];
   for (const check of assessment?.checks ?? []) {
     keys.push(check.source);
@@ -85,5 +85,6 @@ function citedBy({ assessment, cautions, basis }: Answer): ReferenceKey[] {
   }
   for (const { source } of cautions) if (source !== undefined) keys.push(source);
   for (const { source } of basis.assumed) if (source !== undefined) keys.push(source);
+  for (const { source } of detail?.working ?? []) if (source !== undefined) keys.push(source);
   return keys;
 }

@@ -5,6 +5,7 @@ import { ruleSetOf, ruleSets } from '../planning/rules/rule-sets.ts';
 import type { AeroplaneDefinition } from './aeroplane-definition.ts';
 import type { KnownAeroplane } from './aeroplane-lookup.ts';
 import type { LandingRequest } from './landing-request.ts';
+import { landingResponse } from './landing-response.ts';
 import { si } from './quantity.ts';
 import { checkAir } from './question-checks/check-air.ts';
 import { checkConfigurationId } from './question-checks/check-configuration-id.ts';
@@ -12,7 +13,9 @@ import { checkMass } from './question-checks/check-mass.ts';
 import { checkRunway } from './question-checks/check-runway.ts';
 import { checkWind } from './question-checks/check-wind.ts';
 import { defaultUnits } from './question-frame.ts';
+import { selectFaults } from './selection/select-faults.ts';
 import type { TakeoffRequest } from './takeoff-request.ts';
+import { takeoffResponse } from './takeoff-response.ts';
 import { aeroplaneAt } from './to-known-aeroplane.ts';
 import { toRunway } from './to-runway.ts';
 import { toWeather } from './to-weather.ts';
@@ -43,6 +46,7 @@ export function commonFaults(
     ...checkAir(request.weather, request.runway.elevation),
     ...checkWind(request.weather.wind, request.runway),
     ...checkRuleSet(request.ruleSet),
+    ...selectFaults(request.select ?? [], phase === 'takeoff' ? takeoffResponse : landingResponse, request.detail),
   ];
 }
 

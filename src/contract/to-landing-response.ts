@@ -10,6 +10,7 @@ import { toAnswerBegin } from './to-answer-begin.ts';
 import { toAssessment } from './to-assessment.ts';
 import { toBandedDistance } from './to-banded-distance.ts';
 import { type Stamp, toBasis, toContribution } from './to-basis.ts';
+import { toSensitivities, toTrajectory, toWorking } from './to-detail.ts';
 import { toShortfall } from './to-shortfall.ts';
 import { toSpeedSet } from './to-speed-set.ts';
 
@@ -38,6 +39,10 @@ export function toLandingResponse(
   response.balkedLanding = toBalkedLanding(how, answer.balkedLanding);
   if (answer.assessment !== undefined) response.assessment = toAssessment(how, answer.assessment);
   if (answer.shortfall !== undefined) response.shortfall = answer.shortfall.map((one) => toShortfall(how, one));
+  const { working, trajectory, sensitivities } = answer.detail ?? {};
+  if (working !== undefined) response.working = toWorking(how, working);
+  if (trajectory !== undefined) response.trajectory = toTrajectory(how, trajectory);
+  if (sensitivities !== undefined) response.sensitivities = toSensitivities(how, sensitivities, 'landingDistance');
   response.basis = toBasis(how, answer, question.aeroplaneDigest, stamp, (one) => ({
     ...toContribution(how, one),
     landingDistancePercent: shownPercent(how, one.wholeDistance, 'nearest'),

@@ -30,6 +30,10 @@ export interface Operation<Request extends z.ZodType, Response extends z.ZodType
   /** the questions that must be answered before the service says ready */
   readonly warmUp: readonly z.input<Request>[];
   readonly answer: (question: z.output<Request>) => z.output<Response> | Refused;
+  /** what the document says of the answer; absent: its schema */
+  readonly documented?: z.ZodType;
+  /** what the question wants to see of a lawful answer; absent: all of it */
+  readonly shown?: (answer: z.output<Response>, question: z.output<Request>) => unknown;
 }
 
 /** Answers the bytes of one body: the text of the answer, or a problem. */
@@ -48,6 +52,7 @@ export class AnswerFault extends Error {}
 export function exchange<Request extends z.ZodType, Response extends z.ZodType>(
   operation: Operation<Request, Response>,
 ): Exchange {
+  const { shown } = operation;
   const read = reader(operation.request);
   const lawful = z.compile(operation.response, { strict: true });
   return (body) => {
@@ -59,7 +64,7 @@ export function exchange<Request extends z.ZodType, Response extends z.ZodType>(
     const answer = operation.answer(question.value);
     if (isRefused(answer as object)) return toProblem(answer as Refused);
     if (!lawful.validate(answer)) throw new AnswerFault(faultsOf(operation.response, answer));
-    return JSON.stringify(answer);
+    return JSON.stringify(shown === undefined ? answer : shown(answer as z.output<Response>, question.value));
   };
 }
 
@@ -85,7 +90,7 @@ export function addOperation<Request extends z.ZodType, Response extends z.ZodTy
   app.route({
     method: 'POST',
     url: operation.url,
-    schema: operationSchema(operation),
+    schema: operationSchema({ ...operation, response: operation.documented ?? operation.response }),
     config: { example: operation.example },
     onRequest: jsonOnly,
     handler(request, reply) {

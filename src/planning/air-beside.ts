@@ -1,5 +1,5 @@
 import { type Air, airOf } from '../performance/air.ts';
-import type { Question } from './question.ts';
+import type { Question, Weather } from './question.ts';
 
 /**
  * The air of a question with its temperature and pressure a little off, for a slope.
@@ -13,8 +13,12 @@ export function airBeside(
   temperatureOff: number,
   pressureOff: number,
 ): Air | undefined {
-  const { kind, value } = weather.pressure;
-  const pressure = { kind, value: kind === 'pressureAltitude' ? value - 0.083 * pressureOff : value + pressureOff };
+  const pressure = pressureBeside(weather.pressure, pressureOff);
   const found = airOf({ ...weather, temperature: weather.temperature + temperatureOff, pressure }, runway.elevation);
   return found.outcome === 'air' ? found.air : undefined;
+}
+
+/** A pressure that is a little off [Pa]; a pressure altitude moves by 8.3 m a hectopascal the other way. */
+export function pressureBeside({ kind, value }: Weather['pressure'], off: number): Weather['pressure'] {
+  return { kind, value: kind === 'pressureAltitude' ? value - 0.083 * off : value + off };
 }

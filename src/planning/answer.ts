@@ -1,5 +1,6 @@
 import type { ReferenceKey } from '../references.ts';
 import type { Direction, Kind } from '../units/presentation.ts';
+import type { Detail } from './detail/detail.ts';
 
 /**
  * An answer in SI, as planning hands it to the contract's gate out. Sentences are already in the asked units; numbers are
@@ -178,6 +179,8 @@ export interface Answer {
       }
     | undefined;
   readonly shortfall?: readonly Shortfall[] | undefined;
+  /** what was asked for beyond that */
+  readonly detail?: Detail;
   readonly basis: Basis;
 }
 

@@ -1,8 +1,11 @@
 import type { FastifyInstance } from 'fastify';
+import * as z from 'zod';
 import type { AeroplaneLookup } from '../../contract/aeroplane-lookup.ts';
 import { answerLanding } from '../../contract/answer-landing.ts';
 import { landingRequest } from '../../contract/landing-request.ts';
 import { landingResponse } from '../../contract/landing-response.ts';
+import { selected } from '../../contract/selection/selected.ts';
+import { selectedAnswer } from '../../contract/selection/selected-answer.ts';
 import type { Stamp } from '../../contract/to-basis.ts';
 import { exampleLanding } from '../document/example-landing.ts';
 import { addOperation, type WarmUp } from '../operation.ts';
@@ -20,8 +23,10 @@ export function landing(app: FastifyInstance, lookup: AeroplaneLookup, stamp: St
     tag: 'questions',
     request: landingRequest,
     response: landingResponse,
+    documented: z.union([landingResponse, selectedAnswer]),
     example: exampleLanding,
     warmUp: warmUpStates('landing').map((state) => ({ ...plain, ...state, ruleSet: 'unfactored' })),
     answer: (request) => answerLanding(request, lookup, stamp),
+    shown: (answer, { select }) => (select === undefined ? answer : selected(answer, select)),
   });
 }

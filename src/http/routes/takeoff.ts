@@ -1,6 +1,9 @@
 import type { FastifyInstance } from 'fastify';
+import * as z from 'zod';
 import type { AeroplaneLookup } from '../../contract/aeroplane-lookup.ts';
 import { answerTakeoff } from '../../contract/answer-takeoff.ts';
+import { selected } from '../../contract/selection/selected.ts';
+import { selectedAnswer } from '../../contract/selection/selected-answer.ts';
 import { takeoffRequest } from '../../contract/takeoff-request.ts';
 import { takeoffResponse } from '../../contract/takeoff-response.ts';
 import type { Stamp } from '../../contract/to-basis.ts';
@@ -19,8 +22,10 @@ export function takeoff(app: FastifyInstance, lookup: AeroplaneLookup, stamp: St
     tag: 'questions',
     request: takeoffRequest,
     response: takeoffResponse,
+    documented: z.union([takeoffResponse, selectedAnswer]),
     example: exampleTakeoff,
     warmUp: warmUpStates('takeoff').map((state) => ({ ...exampleTakeoff, ...state, ruleSet: 'unfactored' })),
     answer: (request) => answerTakeoff(request, lookup, stamp),
+    shown: (answer, { select }) => (select === undefined ? answer : selected(answer, select)),
   });
 }

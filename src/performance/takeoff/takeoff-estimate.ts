@@ -14,6 +14,15 @@ export interface TakeoffEstimate {
 const slower = Math.sqrt((1 - Math.sqrt(1 / 3)) / 2);
 const faster = Math.sqrt((1 + Math.sqrt(1 / 3)) / 2);
 
+/** The two true airspeeds at which the estimate takes the acceleration [m/s]: a share of the speed gained, on top of the wind. */
+export function estimateSpeeds({
+  headwind,
+  liftOffSpeed,
+}: Pick<TakeoffRun, 'headwind' | 'liftOffSpeed'>): readonly [number, number] {
+  const gain = liftOffSpeed - headwind;
+  return [headwind + slower * gain, headwind + faster * gain];
+}
+
 /**
  * The cheap, smooth estimate of a takeoff from which bands and effects are taken.
  *
@@ -32,8 +41,9 @@ export function takeoffEstimate(run: TakeoffRun): TakeoffEstimate {
   const { headwind, liftOffSpeed, screenHeight } = run;
   const gain = liftOffSpeed - headwind;
   const forces = rollForces(run);
-  const first = rollAcceleration(forces, headwind + slower * gain);
-  const second = rollAcceleration(forces, headwind + faster * gain);
+  const [slow, fast] = estimateSpeeds(run);
+  const first = rollAcceleration(forces, slow);
+  const second = rollAcceleration(forces, fast);
   const groundRoll =
     first > 0 && second > 0
       ? (gain * gain * (1 / first + 1 / second)) / 4 + Math.max(0, run.rotationSpeed - headwind) * run.rotationTime

@@ -42,7 +42,7 @@ export function takeoff(run: TakeoffRun, neededClimbGradient = neededWithAllEngi
 }
 
 /** The run as its air path sees the ground: on a profile the steepest stretch from lift-off on. */
-function underPath(run: TakeoffRun, groundRoll: number): TakeoffRun {
+export function underPath(run: TakeoffRun, groundRoll: number): TakeoffRun {
   return run.profile === undefined ? run : { ...run, slope: steepestFrom(run.profile, groundRoll) };
 }
 

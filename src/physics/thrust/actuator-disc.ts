@@ -45,8 +45,10 @@ export function actuatorDiscThrust(
   const supply = (profileFactor * power) / mass;
   const atRest = Math.cbrt(supply / kappa);
   const scale = engines * thrustFactor * mass;
-  const fallen = Math.min(1, Math.cbrt((power / ratedPower) ** 2 * (density / rho0)));
-  const cap = staticThrust === undefined ? Number.POSITIVE_INFINITY : engines * staticThrust * fallen;
+  const cap =
+    staticThrust === undefined
+      ? Number.POSITIVE_INFINITY
+      : engines * staticThrust * staticThrustFall(power, ratedPower, density);
 
   const at = (airspeed: number): number => {
     if (!(supply > 0)) return 0;
@@ -76,8 +78,29 @@ export function actuatorDiscThrust(
   return { at, fill, kinks: corner === undefined ? [] : [corner] };
 }
 
-/** v of kappa v^3 + (1 + kappa) V v^2 + V^2 v = supply [m/s], by Newton from any positive start. */
-function inducedVelocity(kappa: number, supply: number, airspeed: number, start: number): number {
+/**
+ * Known static thrust in this air over that at sea level, standard day: min(1, ((P/P_rated)^2 sigma)^(1/3)).
+ *
+ * @param power - of one engine in this air [W]
+ * @param ratedPower - at sea level, standard day [W], above 0
+ * @param density - [kg/m3]
+ * @see references.McCormick1995, ch. 6; that it never rises is a judgement
+ */
+export function staticThrustFall(power: number, ratedPower: number, density: number): number {
+  return Math.min(1, Math.cbrt((power / ratedPower) ** 2 * (density / rho0)));
+}
+
+/**
+ * Induced velocity of a disc: v of kappa v^3 + (1 + kappa) V v^2 + V^2 v = supply, by Newton from any positive start.
+ *
+ * @param kappa - excess of the induced power, 1 or more
+ * @param supply - eta0 P/(2 rho A) [m3/s3], above 0
+ * @param airspeed - V [m/s], 0 or more
+ * @param start - [m/s], above 0
+ * @returns [m/s]
+ * @see references.McCormick1995, ch. 6, momentum theory
+ */
+export function inducedVelocity(kappa: number, supply: number, airspeed: number, start: number): number {
   const linear = (1 + kappa) * airspeed;
   const square = airspeed * airspeed;
   let v = start;

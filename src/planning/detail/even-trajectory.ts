@@ -1,0 +1,24 @@
+import type { TrajectoryPoint } from '../../performance/trajectory.ts';
+import type { Distances } from '../answer.ts';
+
+/** Steps of distance of a trajectory. */
+export const trajectorySteps = 50;
+
+/**
+ * A trajectory that ends where the answer does, to the last digit: the path is integrated in finer pieces than the answer, which
+ * moves its end by some 1e-8 of the distance.
+ *
+ * @param wholeDistance - of the answer [m]
+ */
+export function evenTrajectory(
+  points: readonly TrajectoryPoint[],
+  wholeDistance: number,
+  { groundRollTime, airTime }: Pick<Distances, 'groundRollTime' | 'airTime'>,
+): readonly TrajectoryPoint[] {
+  const steps = points.length - 1;
+  return points.map((point, i) => ({
+    ...point,
+    distance: i === steps ? wholeDistance : (wholeDistance * i) / steps,
+    time: i === steps ? groundRollTime + airTime : point.time,
+  }));
+}

@@ -1,0 +1,168 @@
+import fc from 'fast-check';
+import { readCatalogue } from '../../src/catalogue/read-catalogue.ts';
+import type { AeroplaneDefinition } from '../../src/contract/aeroplane-definition.ts';
+import type { AeroplaneLookup } from '../../src/contract/aeroplane-lookup.ts';
+import type { TakeoffRequest } from '../../src/contract/takeoff-request.ts';
+import { aeroplaneLookup } from '../../src/http/aeroplane-lookup.ts';
+import { warmUpStates } from '../../src/http/warm-up-states.ts';
+
+const catalogue = readCatalogue({ builtIn: true });
+export const builtIn: AeroplaneLookup = aeroplaneLookup(catalogue);
+
+const between = (min: number, max: number) => fc.double({ min, max, noNaN: true });
+const q = <U extends string>(unit: U, min: number, max: number) => between(min, max).map((value) => ({ value, unit }));
+
+/** Definitions that between them state everything and nothing. */
+const definitions: readonly AeroplaneDefinition[] = [
+  ...catalogue.list().map(({ definition }) => definition),
+  ...warmUpStates('takeoff').map(({ aeroplane: { definition } }) => definition),
+  ...warmUpStates('takeoff').map(({ aeroplane: { definition } }) => calibrated(definition)),
+];
+
+/** The same with a calibration, stated speeds, a minimum speed for the stall, and a known static thrust where there may be one. */
+function calibrated(definition: AeroplaneDefinition): AeroplaneDefinition {
+  const { propulsion } = definition;
+  const known = {
+    ...propulsion,
+    ...('power' in propulsion ? { staticThrust: { value: 2500, unit: 'N' } } : {}),
+    ...(propulsion.kind === 'constant-speed' ? { criticalAltitude: { value: 3000, unit: 'ft' } } : {}),
+    powerSettings: { reduced: { fullPowerRatio: 0.92 } },
+  };
+  const mass = { value: 1040, unit: 'kg' } as const;
+  return {
+    ...definition,
+    propulsion: known as AeroplaneDefinition['propulsion'],
+    configurations: {
+      takeoff: {
+        for: ['takeoff'],
+        flap: { value: 12, unit: 'deg' },
+        maximumLift: { stallSpeed: { value: 46, unit: 'kt' }, type: 'cas', kind: 'minimum', mass },
+        speeds: {
+          rotation: { cas: { value: 52, unit: 'kt' }, mass },
+          liftOff: { cas: { value: 58, unit: 'kt' }, mass },
+          screen: { stallRatio: 1.25 },
+        },
+        rotationTime: { value: 1.5, unit: 's' },
+        rollingStartAllowance: { value: 35, unit: 'm' },
+      },
+    },
+    airspeedCalibration: {
+      columns: [
+        { name: 'indicated', unit: 'kt' },
+        { name: 'calibrated', unit: 'kt' },
+      ],
+      rows: [
+        [38, 45],
+        [60, 61.5],
+        [100, 99],
+      ],
+    },
+  };
+}
+
+const wind: fc.Arbitrary<TakeoffRequest['weather']['wind']> = fc.oneof(
+  fc.constant('calm' as const),
+  fc.record({ headwind: q('kt', -10, 25) }),
+  fc.record({ headwind: q('kt', -10, 25), crosswind: q('kt', 0, 20) }),
+  fc.record({
+    from: q('deg', 1, 360),
+    fromReference: fc.constantFrom('true' as const, 'magnetic' as const),
+    speed: q('kt', 1, 20),
+  }),
+  fc.record({
+    from: fc.constant({ value: 240, unit: 'deg' as const }),
+    fromReference: fc.constant('true' as const),
+    speed: q('kt', 3, 15),
+    variable: fc.constant({ from: { value: 200, unit: 'deg' as const }, to: { value: 280, unit: 'deg' as const } }),
+  }),
+);
+
+/** Takeoffs with every choice of form, of which most but not all have distances. */
+export const anyTakeoff: fc.Arbitrary<TakeoffRequest> = fc
+  .record({
+    definition: fc.constantFrom(...definitions),
+    share: between(0.75, 1),
+    altitude: between(0, 6000),
+    temperature: q('degC', -15, 38),
+    dew: fc.option(between(0, 20), { nil: undefined }),
+    pressure: fc.constantFrom('qnh' as const, 'pressureAltitude' as const, 'stationPressure' as const),
+    setting: between(985, 1040),
+    slope: fc.oneof(
+      { weight: 4, arbitrary: q('percent', -2, 2) },
+      {
+        weight: 1,
+        arbitrary: fc.array(between(-8, 8), { minLength: 4, maxLength: 4 }).map((heights) => ({
+          profile: {
+            units: ['m', 'm'] as ['m', 'm'],
+            points: [0, ...heights].map((height, i): [number, number] => [i * 700, height]),
+          },
+        })),
+      },
+    ),
+    obstacles: fc.boolean(),
+    paved: fc.boolean(),
+    start: fc.constantFrom('threshold' as const, { offset: { value: 60, unit: 'm' as const } }),
+    lineUp: fc.boolean(),
+    magnetic: fc.boolean(),
+    declared: fc.constantFrom(['tora'], ['tora', 'toda'], ['tora', 'toda', 'asda'], []),
+    wind,
+    rolling: fc.boolean(),
+    reduced: fc.boolean(),
+    ruleSet: fc.constantFrom('unfactored', 'eu-class-b'),
+    units: fc.constantFrom('m-kt-kg' as const, 'ft-kt-lb' as const, 'si' as const),
+    rounding: fc.constantFrom('safe' as const, 'none' as const),
+  })
+  .map((any) => {
+    const { definition, temperature, dew, altitude } = any;
+    const configuration = Object.entries(definition.configurations).find(([, one]) => one.for.includes('takeoff'));
+    const { value, unit } = definition.masses.maximumTakeoff;
+    const lengths = { tora: 1900, toda: 2400, asda: 2000 } as const;
+    const weather: TakeoffRequest['weather'] = {
+      temperature,
+      ...(dew === undefined ? {} : { dewPoint: { value: temperature.value - dew, unit: 'degC' as const } }),
+      pressure:
+        any.pressure === 'qnh'
+          ? { qnh: { value: any.setting, unit: 'hPa' } }
+          : any.pressure === 'pressureAltitude'
+            ? { pressureAltitude: { value: altitude, unit: 'ft' } }
+            : { stationPressure: { value: any.setting * (1 - altitude / 40_000), unit: 'hPa' } },
+      wind: any.wind,
+    };
+    return {
+      aeroplane: { definition },
+      mass: { value: value * any.share, unit },
+      configuration: configuration?.[0] ?? '',
+      runway: {
+        designator: '25',
+        direction: { value: 247, unit: 'deg' },
+        directionReference: any.magnetic ? 'magnetic' : 'true',
+        magneticVariation: { value: 4, unit: 'deg' },
+        elevation: { value: altitude, unit: 'ft' },
+        slope: any.slope,
+        surface: any.paved
+          ? { kind: 'paved', state: 'dry' }
+          : { kind: 'grass', state: 'wet', grass: 'short', firmness: 'firm' },
+        start: any.start,
+        ...(any.lineUp ? { lineUp: { tora: { value: 12, unit: 'm' }, asda: { value: 15, unit: 'm' } } } : {}),
+        ...(any.obstacles
+          ? {
+              obstacles: {
+                from: 'brake-release' as const,
+                list: [{ distance: { value: 3100, unit: 'm' as const }, height: { value: 40, unit: 'm' as const } }],
+              },
+            }
+          : {}),
+        declared: Object.fromEntries(
+          any.declared.map((name) => [name, { value: lengths[name as keyof typeof lengths], unit: 'm' }]),
+        ),
+      },
+      weather,
+      procedure: {
+        ...(any.rolling && configuration?.[1].rollingStartAllowance !== undefined ? { start: 'rolling' as const } : {}),
+        ...(any.reduced && 'reduced' in (definition.propulsion.powerSettings ?? {}) ? { power: 'reduced' } : {}),
+      },
+      ruleSet: any.ruleSet,
+      units: any.units,
+      rounding: any.rounding,
+    };
+  });
