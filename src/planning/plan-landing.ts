@@ -2,20 +2,18 @@ import { landing } from '../performance/landing/landing.ts';
 import type { LandingRun } from '../performance/landing/landing-run.ts';
 import { airBeside } from './air-beside.ts';
 import type { LandingAnswer } from './answer.ts';
+import { answerBasis } from './answer-basis.ts';
 import { assess } from './assess.ts';
 import { balkedLandingClimb } from './balked-landing.ts';
 import { raisedCautions } from './cautions/caution-test.ts';
 import { landingCautions } from './cautions/landing-cautions.ts';
 import { declaredDistances } from './declared-distances.ts';
-import { defaulted } from './defaulted.ts';
 import { isRefused, type Refused } from './fault.ts';
-import { groundSlopeAssumed } from './ground-slope.ts';
 import { landingBand } from './landing-band.ts';
 import { landingDistances } from './landing-distances.ts';
 import { landingEffects } from './landing-effects.ts';
 import { checkedLandings, landingRuns, notStopped, stopped } from './landing-runs.ts';
 import { landingShortfalls } from './landing-shortfalls.ts';
-import { notGiven } from './not-given.ts';
 import { prepareLanding } from './prepare-landing.ts';
 import type { LandingQuestion } from './question.ts';
 import { resolveBraking } from './resolve-braking.ts';
@@ -117,16 +115,6 @@ export function planLanding(question: LandingQuestion): LandingAnswer | Refused 
     balkedLanding,
     assessment: checks && { ruleSet: ruleSet.id, checks, governing: governing?.code },
     shortfall: notReached && landingShortfalls(notReached),
-    basis: {
-      method,
-      band: band?.contributions,
-      assumed: [
-        ...assumed.map(({ assumption }) => assumption),
-        ...groundSlopeAssumed(runway, 'landing'),
-        ...defaulted(question),
-      ],
-      notGiven: notGiven(question, 'landing'),
-      sources: [rules.source, ruleSet.windCredit.source],
-    },
+    basis: answerBasis(question, 'landing', ruleSet, method, assumed, band),
   };
 }

@@ -2,14 +2,12 @@ import { propulsionThrust } from '../performance/propulsion.ts';
 import { aeroplanePointer } from './aeroplane-pointer.ts';
 import { airBeside } from './air-beside.ts';
 import type { ObstaclePath, TakeoffAnswer } from './answer.ts';
+import { answerBasis } from './answer-basis.ts';
 import { assess } from './assess.ts';
 import { raisedCautions } from './cautions/caution-test.ts';
 import { takeoffCautions } from './cautions/takeoff-cautions.ts';
 import { declaredDistances } from './declared-distances.ts';
-import { defaulted } from './defaulted.ts';
 import { isRefused, type Refused } from './fault.ts';
-import { groundSlopeAssumed } from './ground-slope.ts';
-import { notGiven } from './not-given.ts';
 import { obstacleCheck, obstaclePathOf } from './obstacle-path.ts';
 import { pathStart } from './path-start.ts';
 import { prepareTakeoff } from './prepare-takeoff.ts';
@@ -118,16 +116,6 @@ export function planTakeoff(question: TakeoffQuestion): TakeoffAnswer | Refused 
     obstaclePath,
     assessment: checks && { ruleSet: ruleSet.id, checks, governing: governing?.code },
     shortfall: notReached && shortfalls(notReached, aeroplanePointer(aeroplaneAt, '/propulsion')),
-    basis: {
-      method,
-      band: band?.contributions,
-      assumed: [
-        ...assumed.map(({ assumption }) => assumption),
-        ...groundSlopeAssumed(runway, 'takeoff'),
-        ...defaulted(question),
-      ],
-      notGiven: notGiven(question, 'takeoff'),
-      sources: [rules.source, ruleSet.windCredit.source],
-    },
+    basis: answerBasis(question, 'takeoff', ruleSet, method, assumed, band),
   };
 }

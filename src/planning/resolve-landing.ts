@@ -2,6 +2,7 @@ import type { Aeroplane, Configuration, ScheduledSpeed } from '../performance/ae
 import type { LandingRun } from '../performance/landing/landing-run.ts';
 import type { Assumed, NumberOtherEnd } from './assumed.ts';
 import { ConfigurationFigures } from './configuration-figures.ts';
+import { groundFigures } from './ground-figures.ts';
 import type { LandingQuestion } from './question.ts';
 import { referenceSpeedRules } from './rules/certification/reference-speed.ts';
 import { idleThrustShare, landingDefaults } from './rules/landing-defaults.ts';
@@ -92,21 +93,7 @@ export function resolveLanding(
       standing: d.freeRollTime,
       runMember: 'freeRollTime',
     }),
-    groundLiftCoefficient: figures.figure({
-      member: 'groundLiftCoefficient',
-      name: 'the lift coefficient of the roll',
-      stated: configuration.groundLiftCoefficient,
-      standing: flap > 0 ? d.groundLiftFlap : d.groundLiftClean,
-      runMember: 'groundLiftCoefficient',
-    }),
-    groundDragIncrement: figures.figure({
-      member: 'groundDragIncrementCoefficient',
-      name: 'the drag increment on the ground',
-      stated: configuration.groundDragIncrementCoefficient,
-      standing: d.groundDragIncrement,
-      runMember: 'groundDragCoefficient',
-      increment: true,
-    }),
+    ...groundFigures(figures, configuration, flap > 0 ? d.groundLiftFlap : d.groundLiftClean, d.groundDragIncrement),
     airDragIncrement: figures.figure({
       member: 'airDragIncrementCoefficient',
       name: 'the drag increment in the air',

@@ -2,6 +2,7 @@ import type { Configuration, ScheduledSpeed } from '../performance/aeroplane.ts'
 import type { TakeoffRun } from '../performance/takeoff/takeoff-run.ts';
 import type { Assumed } from './assumed.ts';
 import { ConfigurationFigures } from './configuration-figures.ts';
+import { groundFigures } from './ground-figures.ts';
 import type { Question } from './question.ts';
 import { takeoffDefaults } from './rules/takeoff-defaults.ts';
 
@@ -72,21 +73,7 @@ export function resolveTakeoff(
       standing: d.pullUpLoadFactor,
       runMember: 'pullUpLoadFactor',
     }),
-    groundLiftCoefficient: figures.figure({
-      member: 'groundLiftCoefficient',
-      name: 'the lift coefficient of the roll',
-      stated: configuration.groundLiftCoefficient,
-      standing: flap > 0 ? d.groundLiftFlap : d.groundLiftClean,
-      runMember: 'groundLiftCoefficient',
-    }),
-    groundDragIncrement: figures.figure({
-      member: 'groundDragIncrementCoefficient',
-      name: 'the drag increment on the ground',
-      stated: configuration.groundDragIncrementCoefficient,
-      standing: d.groundDragIncrement,
-      runMember: 'groundDragCoefficient',
-      increment: true,
-    }),
+    ...groundFigures(figures, configuration, flap > 0 ? d.groundLiftFlap : d.groundLiftClean, d.groundDragIncrement),
     airDragIncrement: figures.figure({
       member: 'airDragIncrementCoefficient',
       name: 'the drag increment in the air',

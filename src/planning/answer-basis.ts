@@ -1,0 +1,35 @@
+import type { Basis, Method } from './answer.ts';
+import type { AnyAssumed } from './assumed.ts';
+import type { Band } from './band.ts';
+import { defaulted } from './defaulted.ts';
+import { groundSlopeAssumed } from './ground-slope.ts';
+import { notGiven } from './not-given.ts';
+import type { Question } from './question.ts';
+import type { RuleSet } from './rules/rule-set.ts';
+
+/**
+ * What an answer rests on.
+ *
+ * @param assumed - by planning; what the gate filled in and what stands for a profile's slope come behind
+ * @param band - of the distances, where there are any
+ */
+export function answerBasis(
+  question: Question,
+  phase: 'takeoff' | 'landing',
+  ruleSet: RuleSet,
+  method: Method,
+  assumed: readonly AnyAssumed[],
+  band: Band | undefined,
+): Basis {
+  return {
+    method,
+    band: band?.contributions,
+    assumed: [
+      ...assumed.map(({ assumption }) => assumption),
+      ...groundSlopeAssumed(question.runway, phase),
+      ...defaulted(question),
+    ],
+    notGiven: notGiven(question, phase),
+    sources: [ruleSet[phase].source, ruleSet.windCredit.source],
+  };
+}
