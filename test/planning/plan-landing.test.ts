@@ -164,6 +164,42 @@ describe('the outcome', () => {
   });
 });
 
+describe('reverse thrust', () => {
+  const reversed = (reverse: boolean, ruleSet: string) =>
+    landed(
+      changed(plainLanding, {
+        aeroplane: { reverseThrust: { thrust: 1500, cutOffSpeed: 10 } },
+        question: { ruleSet, procedure: { reverse } },
+      }),
+    );
+  it('shortens the roll, and not the distance that the factors of class B multiply', () => {
+    const [without, used] = [reversed(false, 'eu-class-b'), reversed(true, 'eu-class-b')];
+    expect(used.distances?.groundRoll.value ?? 0).toBeLessThan((without.distances?.groundRoll.value ?? 0) * 0.9);
+    expect(check(used).startsFrom).toBe('reference');
+    expectRatio(check(used).distance, check(without).distance ?? 0, 1e-12);
+  });
+  it('shortens what is required where there are no factors', () => {
+    expect(check(reversed(true, 'unfactored')).required ?? 1).toBeLessThan(
+      check(reversed(false, 'unfactored')).required ?? 0,
+    );
+  });
+});
+
+describe('a balked landing', () => {
+  it('climbs as thrust less drag over weight at the landing reference speed, by hand', () => {
+    const { balkedLanding, speeds, air } = landed(plainLanding);
+    const speed = speeds.landingReference.tas;
+    const weight = 1010 * 9.80665;
+    const q = 0.5 * air.density * speed ** 2 * 16.2;
+    const drag = q * (0.08 + (weight / q) ** 2 / (Math.PI * 7.32 * 0.72));
+    const sigma = (1 - (0.0065 * air.pressureAltitude) / 288.15) ** 4.2558798;
+    const lapse = ((sigma - 0.12) / 0.88) * Math.sqrt((288.15 - 0.0065 * air.pressureAltitude) / 288.15);
+    const thrust = 2366 * lapse - 0.0564 * air.density * 1.905 ** 2 * speed ** 2;
+    if (balkedLanding.outcome !== 'computed') throw new Error(balkedLanding.outcome);
+    expectRatio(balkedLanding.rate, (speed * (thrust - drag)) / weight, 1e-6);
+  });
+});
+
 describe('the runway', () => {
   it('is as long as LDA less a start offset, and not shortened from a named point', () => {
     const available = (start: LandingQuestion['runway']['start']) =>
@@ -379,6 +415,26 @@ describe('the basis', () => {
       ['/brakes/loadFactor', false],
       ['/brakes/antiSkid', false],
     ]);
+  });
+  it('takes the figures of the published ranges [Raymer, ch. 17: secondary; 14 CFR 23.73, 23.75: read; the rest judgement]', () => {
+    const { basis } = landed(silent);
+    const values = Object.fromEntries(basis.assumed.map(({ at, value }) => [at.split('/').at(-1), value]));
+    expect(values).toMatchObject({
+      landingReference: 1.3,
+      touchdown: 1.15,
+      approachAngle: { kind: 'angle', value: expect.closeTo(Math.PI / 60, 12) },
+      flareLoadFactor: 1.2,
+      floatDecelerationRatio: 0.12,
+      freeRollTime: { kind: 'time', value: 2 },
+      groundLiftCoefficient: 0.6,
+      groundDragIncrementCoefficient: 0,
+      airDragIncrementCoefficient: 0.065,
+      brakingFrictionCoefficient: 0.12,
+      loadFactor: 0.8,
+      grass: 'long',
+    });
+    // 6 % of the static thrust of 2 366 N at 100 m and 15 °C, by the lapse of the definition
+    expectNear((values['idleThrust'] as { value: number }).value, (0.06 * 2366 * (0.9904 - 0.12)) / 0.88, 1);
   });
   it('says nothing of what is stated', () => {
     expect(landed(plainLanding).basis.assumed).toEqual([]);
