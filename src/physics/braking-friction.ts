@@ -1,7 +1,9 @@
-import { brent } from '../numerics/brent.ts';
 import type { ReferenceKey } from '../references.ts';
-import type { RunwaySurface } from './friction.ts';
-import { type AntiSkidKind, antiSkidEfficiency, greatestWetBrakingSpeed, wetBrakingCurve } from './wet-braking.ts';
+import { greatestWetBrakingSpeed } from './braking-polynomial.ts';
+import { poorerBraking } from './poorer-braking.ts';
+import { runwayConditionCode } from './runway-condition-code.ts';
+import { filmAsWet, looseContaminant, type RunwaySurface } from './runway-surface.ts';
+import { type AntiSkidKind, antiSkidEfficiency, wetBrakingCurve } from './wet-braking.ts';
 
 /** Braking friction against ground speed. */
 export interface BrakingFriction {
@@ -59,12 +61,13 @@ const wetPavementCap = 0.2;
  * Paved dry 0.35 (0.40 with modulated anti-skid); paved wet the wet curve of the tyre pressure times the anti-skid efficiency,
  * and not above 0.20 without a modulated system; firm gravel and dirt 0.30; grass dry 0.25 short, 0.20 long, wet 0.12; soft
  * 0.10; compacted snow 0.10; loose snow 0.08; ice 0.05. Damp counts as wet, grass of unstated length as long, frost on pavement
- * as wet, wet dirt as soft.
+ * and no more than 3 mm of a loose contaminant as wet, wet dirt as soft.
  *
  * @param surface - in plain words
  * @param antiSkid - of the aeroplane
  * @param tyrePressure - [Pa]
- * @returns the friction before the share of the weight on the braked wheels, or 'no-data': flooded, standing water, slush, wet ice
+ * @returns the friction before the share of the weight on the braked wheels, or 'no-data': under water or slush, wet ice and
+ * whatever else has condition code 0, and contaminated by nobody says what
  * @see references.Cfr25s109, (c); references.GudmundssonGa, table 17-3; references.HouseFriction
  */
 export function brakingFriction(
@@ -72,26 +75,28 @@ export function brakingFriction(
   antiSkid: AntiSkidKind,
   tyrePressure: number,
 ): SurfaceBraking | 'no-data' {
-  const { kind, state } = surface;
-  const contaminant = surface.contaminant?.kind;
-  if (state === 'flooded' || contaminant === 'water' || contaminant === 'slush' || contaminant === 'wet-ice')
-    return 'no-data';
+  const read = filmAsWet(surface);
+  const described = runwayConditionCode(read);
+  if (described !== 'no-data' && described.code === 0) return 'no-data';
+  const { kind, state, firmness, grass } = read;
+  const contaminant = read.contaminant?.kind;
+  const loose = looseContaminant(read);
+  if (loose === 'wet-snow' || loose === 'dry-snow') return looseSnow;
+  if (loose !== undefined || state === 'flooded') return 'no-data';
   if (contaminant === 'compacted-snow') return compactedSnow;
-  if (contaminant === 'wet-snow' || contaminant === 'dry-snow') return looseSnow;
-  if (contaminant === 'ice') return ice;
-  if (contaminant === 'frost') return kind === 'paved' ? wetPavement(antiSkid, tyrePressure) : 'no-data';
-  if (kind === 'ice') return state === 'dry' ? ice : 'no-data';
+  if (kind === 'ice' || contaminant === 'ice') return ice;
   if (kind === 'snow') return looseSnow;
+  if (contaminant === 'frost') return kind === 'paved' ? wetPavement(antiSkid, tyrePressure) : 'no-data';
   if (state === 'contaminated') return 'no-data';
   const dry = state === 'dry';
   if (kind === 'paved') {
     if (!dry) return wetPavement(antiSkid, tyrePressure);
     return modulates(antiSkid) ? dryPavementModulated : dryPavement;
   }
-  if (surface.firmness === 'soft' || (kind === 'dirt' && !dry)) return softGround;
+  if (firmness === 'soft' || (kind === 'dirt' && !dry)) return softGround;
   if (kind !== 'grass') return firmGround;
   if (!dry) return wetGrass;
-  return surface.grass === 'short' ? shortDryGrass : longDryGrass;
+  return grass === 'short' ? shortDryGrass : longDryGrass;
 }
 
 function modulates(antiSkid: AntiSkidKind): boolean {
@@ -101,15 +106,7 @@ function modulates(antiSkid: AntiSkidKind): boolean {
 function wetPavement(antiSkid: AntiSkidKind, tyrePressure: number): SurfaceBraking {
   const curve = wetBrakingCurve(tyrePressure);
   const efficiency = antiSkidEfficiency(antiSkid);
-  const because = 'wet pavement';
-  if (modulates(antiSkid)) {
-    return { at: (speed) => efficiency * curve(speed), kinks: [greatestWetBrakingSpeed], because, source: 'Cfr25s109' };
-  }
-  const above = brent((speed) => efficiency * curve(speed) - wetPavementCap, 0, greatestWetBrakingSpeed, 1e-9);
-  return {
-    at: (speed) => Math.min(wetPavementCap, efficiency * curve(speed)),
-    kinks: above.outcome === 'root' ? [above.root, greatestWetBrakingSpeed] : [greatestWetBrakingSpeed],
-    because,
-    source: 'Cfr25s109',
-  };
+  const wet = { at: (speed: number) => efficiency * curve(speed), kinks: [greatestWetBrakingSpeed] };
+  const braking = modulates(antiSkid) ? wet : poorerBraking(wet, constantBraking(wetPavementCap));
+  return { ...braking, because: 'wet pavement', source: 'Cfr25s109' };
 }

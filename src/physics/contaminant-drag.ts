@@ -1,5 +1,4 @@
-/** Loose contaminants, which wheels have to push aside. */
-export type LooseContaminant = 'water' | 'slush' | 'wet-snow' | 'dry-snow';
+import { deepestWet, type LooseContaminant } from './runway-surface.ts';
 
 /** Density [kg/m3]. @see references.Amc25s1591 */
 export const contaminantDensity: Readonly<Record<LooseContaminant, number>> = {
@@ -8,9 +7,6 @@ export const contaminantDensity: Readonly<Record<LooseContaminant, number>> = {
   'wet-snow': 400,
   'dry-snow': 200,
 };
-
-/** Depth up to which a loose contaminant counts as a wet runway and holds no wheel back [m]. @see references.Amc25s1591 */
-export const deepestWet = 0.003;
 
 /** Drag coefficient of a tyre on the front it pushes aside, water and slush; taken for snow too. @see references.Amc25s1591 */
 const displacementCoefficient = 0.75;

@@ -1,6 +1,5 @@
-import { brent } from '../numerics/brent.ts';
-import type { BrakingFriction } from './braking-friction.ts';
-import { greatestWetBrakingSpeed } from './wet-braking.ts';
+import { type BrakingFriction, constantBraking } from './braking-friction.ts';
+import { poorerBraking } from './poorer-braking.ts';
 
 /**
  * Braking friction where the brakes themselves give no more than a coefficient: the smaller of the two at each speed.
@@ -11,11 +10,5 @@ import { greatestWetBrakingSpeed } from './wet-braking.ts';
  */
 export function limitedBraking(braking: BrakingFriction, limit: number): BrakingFriction {
   if (!(limit >= 0)) throw new RangeError(`limit must be 0 or more: ${limit}`);
-  if (braking.at(0) <= limit) return braking;
-  const { at } = braking;
-  const crossing = brent((groundSpeed) => at(groundSpeed) - limit, 0, greatestWetBrakingSpeed, 1e-9);
-  return {
-    at: (groundSpeed) => Math.min(limit, at(groundSpeed)),
-    kinks: crossing.outcome === 'root' ? [crossing.root, ...braking.kinks] : braking.kinks,
-  };
+  return braking.at(0) <= limit ? braking : poorerBraking(braking, constantBraking(limit));
 }

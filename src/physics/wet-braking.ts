@@ -1,4 +1,4 @@
-import { interpolateHeld } from '../numerics/interpolate.ts';
+import { brakingPolynomial } from './braking-polynomial.ts';
 
 /** Kinds of anti-skid system by what they make of the tyre's grip on a wet runway. */
 export type AntiSkidKind = 'none' | 'on-off' | 'quasi-modulating' | 'fully-modulating';
@@ -21,25 +21,25 @@ export function antiSkidEfficiency(kind: AntiSkidKind): number {
   return efficiencies[kind];
 }
 
-const psi = 6894.757293168361;
-const knot = 1852 / 3600;
-/** Tyre pressures [Pa] of the four curves, and their coefficients c3, c2, c1, c0 in v = ground speed/100 kt. */
-const pressures = [50, 100, 200, 300].map((pressure) => pressure * psi);
-const curves = [
+/** Coefficients c3, c2, c1, c0 at 50, 100, 200 and 300 psi. @see references.Cfr25s109, (c)(1) */
+const smooth = [
   [-0.035, 0.306, -0.851, 0.883],
   [-0.0437, 0.32, -0.805, 0.804],
   [-0.0331, 0.252, -0.658, 0.692],
   [-0.0401, 0.263, -0.611, 0.614],
-] as const;
-/** Ground speed beyond which the curves are held [m/s], and the least coefficient given (judgement). */
-export const greatestWetBrakingSpeed = 200 * knot;
-const least = 0.05;
+];
+/** Coefficients c5 to c0 at the same pressures. @see references.Cfr25s109, (d)(2) */
+const grooved = [
+  [0.147, -1.05, 2.673, -2.683, 0.403, 0.859],
+  [0.1106, -0.813, 2.13, -2.2, 0.317, 0.807],
+  [0.0498, -0.398, 1.14, -1.285, 0.14, 0.701],
+  [0.0314, -0.247, 0.703, -0.779, -0.00954, 0.614],
+];
 
 /**
  * The curve of the greatest tyre-to-ground braking coefficient on a smooth wet runway, at one tyre pressure.
  *
- * mu = c3 v^3 + c2 v^2 + c1 v + c0, v = ground speed/100 kt; the coefficients are linear in tyre pressure between 50, 100, 200 and
- * 300 psi and held beyond; speed held in 0 to 200 kt; not below 0.05.
+ * mu = c3 v^3 + c2 v^2 + c1 v + c0, v = ground speed/100 kt, by brakingPolynomial.
  *
  * @param tyrePressure - [Pa]
  * @returns mu against ground speed [m/s], before anti-skid efficiency and load on the braked wheels
@@ -47,16 +47,21 @@ const least = 0.05;
  * @see references.Cfr25s109, (c)(1)
  */
 export function wetBrakingCurve(tyrePressure: number): (groundSpeed: number) => number {
-  if (!(tyrePressure > 0)) throw new RangeError(`tyrePressure must be above 0: ${tyrePressure}`);
-  const [c3, c2, c1, c0] = [0, 1, 2, 3].map((power) =>
-    interpolateHeld(
-      pressures,
-      curves.map((curve) => curve[power] as number),
-      tyrePressure,
-    ),
-  ) as [number, number, number, number];
-  return (groundSpeed) => {
-    const v = Math.min(greatestWetBrakingSpeed, Math.max(0, groundSpeed)) / (100 * knot);
-    return Math.max(least, ((c3 * v + c2) * v + c1) * v + c0);
-  };
+  return brakingPolynomial(smooth, tyrePressure);
+}
+
+/**
+ * The same on a grooved or porous wet runway, before the 70 % of dry braking that the rule allows instead.
+ *
+ * mu = c5 v^5 + ... + c0, and not below the smooth curve, under which it starts at 50 psi below 2 kt.
+ *
+ * @param tyrePressure - [Pa]
+ * @returns mu against ground speed [m/s], before anti-skid efficiency and load on the braked wheels
+ * @remarks Rises up to 9 kt at 50 psi. Grooved or treated and maintained as the rule asks.
+ * @see references.Cfr25s109, (d)(2)
+ */
+export function groovedBrakingCurve(tyrePressure: number): (groundSpeed: number) => number {
+  const onGrooves = brakingPolynomial(grooved, tyrePressure);
+  const onSmooth = wetBrakingCurve(tyrePressure);
+  return (groundSpeed) => Math.max(onGrooves(groundSpeed), onSmooth(groundSpeed));
 }

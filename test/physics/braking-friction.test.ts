@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { brakingFriction, constantBraking, scaledBraking } from '../../src/physics/braking-friction.ts';
-import type { RunwaySurface } from '../../src/physics/friction.ts';
+import type { RunwaySurface } from '../../src/physics/runway-surface.ts';
 
 const psi = 6894.757293168361;
 const tyre = 50 * psi;
@@ -51,6 +51,24 @@ describe('brakingFriction', () => {
     }
     expect(at({ kind: 'paved', state: 'contaminated' })).toBe('no-data');
     expect(at({ kind: 'ice', state: 'wet' })).toBe('no-data');
+  });
+
+  it('has nothing for whatever else has code 0: water on ice or on compacted snow, snow on ice', () => {
+    const wet = { kind: 'paved', state: 'wet' } as const;
+    expect(at({ ...wet, contaminant: { kind: 'ice' } })).toBe('no-data');
+    expect(at({ ...wet, contaminant: { kind: 'compacted-snow' } })).toBe('no-data');
+    expect(at({ kind: 'snow', state: 'wet' })).toBe('no-data');
+    expect(at({ kind: 'ice', state: 'contaminated', contaminant: { kind: 'dry-snow', depth: 0.01 } })).toBe('no-data');
+  });
+
+  it('reads up to 3 mm of a loose contaminant as wet', () => {
+    for (const kind of ['water', 'slush', 'wet-snow', 'dry-snow'] as const) {
+      const film = { state: 'contaminated', contaminant: { kind, depth: 0.003 } } as const;
+      expect(at({ kind: 'paved', ...film })).toBe(0.2);
+      expect(at({ kind: 'grass', grass: 'short', ...film })).toBe(0.12);
+    }
+    const deep = { kind: 'paved', state: 'contaminated', contaminant: { kind: 'dry-snow', depth: 0.0031 } } as const;
+    expect(at(deep)).toBe(0.08);
   });
 
   it('is never better wet, long or soft than dry, short or firm', () => {

@@ -1,6 +1,7 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { contaminantDrag, type LooseContaminant } from '../../src/physics/contaminant-drag.ts';
+import { contaminantDrag } from '../../src/physics/contaminant-drag.ts';
+import type { LooseContaminant } from '../../src/physics/runway-surface.ts';
 import { expectNear, expectRatio } from '../support/near.ts';
 
 const gear = { tyres: 3, tyreWidth: 0.16, tyreDeflection: 0.02, sprayLength: 0 };

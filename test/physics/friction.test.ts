@@ -1,5 +1,8 @@
+import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { type RunwaySurface, rollingFriction } from '../../src/physics/friction.ts';
+import { greatestRollingFriction, rollingFriction } from '../../src/physics/friction.ts';
+import type { RunwaySurface } from '../../src/physics/runway-surface.ts';
+import { anySurface } from '../support/surfaces.ts';
 
 const rows: readonly (readonly [RunwaySurface, number])[] = [
   [{ kind: 'paved', state: 'dry' }, 0.03],
@@ -36,6 +39,47 @@ describe('rollingFriction', () => {
     expect(rollingFriction({ kind: 'paved', state: 'flooded' }, false)).toBe('no-data');
     expect(rollingFriction({ kind: 'snow', state: 'dry' }, false)).toBe('no-data');
     expect(rollingFriction({ kind: 'paved', state: 'contaminated' }, false)).toBe('no-data');
+  });
+
+  it('under what wheels push aside, for whoever adds its drag: loose snow 0.15 up to 10 cm, else the wet ground beneath', () => {
+    const under = (kind: 'water' | 'slush' | 'wet-snow' | 'dry-snow', depth?: number, jet = false) => {
+      const contaminant = depth === undefined ? { kind } : { kind, depth };
+      const found = rollingFriction({ kind: 'paved', state: 'contaminated', contaminant }, jet, 'added');
+      return found === 'no-data' ? found : found.coefficient;
+    };
+    expect([under('water'), under('slush', 0.01), under('slush', 0.01, true)]).toEqual([0.03, 0.03, 0.02]);
+    expect([under('wet-snow', 0.1), under('dry-snow', 0.02)]).toEqual([0.15, 0.15]);
+    expect([under('dry-snow', 0.101), under('wet-snow')]).toEqual(['no-data', 'no-data']);
+    const grass = { kind: 'grass', grass: 'short', state: 'flooded' } as const;
+    expect(rollingFriction(grass, false, 'added')).toMatchObject({ coefficient: 0.08 });
+  });
+
+  it('reads up to 3 mm of a loose contaminant as wet', () => {
+    for (const kind of ['water', 'slush', 'wet-snow', 'dry-snow'] as const) {
+      const film = {
+        kind: 'grass',
+        grass: 'short',
+        state: 'contaminated',
+        contaminant: { kind, depth: 0.003 },
+      } as const;
+      expect(rollingFriction(film, false)).toMatchObject({ coefficient: 0.08 });
+      expect(rollingFriction({ ...film, contaminant: { kind, depth: 0.0031 } }, false)).toBe('no-data');
+    }
+  });
+
+  it('is 0 to 0.25 or no data on whatever can be written, and no less with the drag added than without', () => {
+    fc.assert(
+      fc.property(anySurface, fc.boolean(), (surface, jet) => {
+        const plain = rollingFriction(surface, jet);
+        const added = rollingFriction(surface, jet, 'added');
+        for (const found of [plain, added]) {
+          if (found === 'no-data') continue;
+          expect(found.coefficient).toBeGreaterThan(0);
+          expect(found.coefficient).toBeLessThanOrEqual(greatestRollingFriction);
+        }
+        if (plain !== 'no-data') expect(added).toEqual(plain);
+      }),
+    );
   });
 
   it('never makes grass easier by length, moisture or softness', () => {

@@ -1,7 +1,11 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { antiSkidEfficiency, wetBrakingCurve } from '../../src/physics/wet-braking.ts';
-import { fullyModulatingCoefficients, wetBrakingCoefficients } from '../published/braking-and-landing.ts';
+import { antiSkidEfficiency, groovedBrakingCurve, wetBrakingCurve } from '../../src/physics/wet-braking.ts';
+import {
+  fullyModulatingCoefficients,
+  groovedBrakingCoefficients,
+  wetBrakingCoefficients,
+} from '../published/braking-and-landing.ts';
 
 const psi = 6894.757293168361;
 const knot = 1852 / 3600;
@@ -45,6 +49,37 @@ describe('wetBrakingCurve', () => {
         expect(curve(a)).toBeLessThanOrEqual(0.883);
       }),
     );
+  });
+});
+
+describe('groovedBrakingCurve', () => {
+  it.each(groovedBrakingCoefficients.map((figure) => [figure.title, figure] as const))(
+    '%s',
+    (_, { inputs, expected, tolerance }) => {
+      const found = groovedBrakingCurve(inputs.tyre_psi * psi)(inputs.ground_speed_kt * knot);
+      expect(Math.abs(found - expected)).toBeLessThan(tolerance);
+    },
+  );
+
+  it('is never below the smooth curve: at 50 psi its own line starts under it, at 0.859 against 0.883', () => {
+    expect(groovedBrakingCurve(50 * psi)(0)).toBeCloseTo(0.883, 12);
+    const speed = fc.double({ min: 0, max: 220 * knot, noNaN: true });
+    const pressure = fc.double({ min: 20 * psi, max: 400 * psi, noNaN: true });
+    fc.assert(
+      fc.property(speed, pressure, (v, p) => {
+        expect(groovedBrakingCurve(p)(v)).toBeGreaterThanOrEqual(wetBrakingCurve(p)(v));
+      }),
+    );
+  });
+
+  it('rises up to 9 kt at 50 psi, and falls from there on', () => {
+    const at = (speed: number) => groovedBrakingCurve(50 * psi)(speed * knot);
+    expect(at(8.5)).toBeGreaterThan(at(4));
+    for (let speed = 9; speed < 200; speed += 5) expect(at(speed + 5)).toBeLessThan(at(speed));
+  });
+
+  it('asks for a pressure', () => {
+    expect(() => groovedBrakingCurve(Number.NaN)).toThrow(/tyrePressure/);
   });
 });
 

@@ -33,6 +33,27 @@ export const wetBrakingCoefficients = figures(
   ],
 );
 
+/** The same on a grooved wet runway. */
+export const groovedBrakingCoefficients = figures(
+  {
+    source: '14 CFR 25.109(d)(2)',
+    section: 'table; curves recalled',
+    status: 'memory',
+    quantity: 'braking coefficient on grooves before anti-skid efficiency',
+    unit: '-',
+  },
+  [
+    { id: 'mu-grooved-50-50', inputs: { tyre_psi: 50, ground_speed_kt: 50 }, expected: 0.66284, tolerance: 1e-5 },
+    { id: 'mu-grooved-50-100', inputs: { tyre_psi: 50, ground_speed_kt: 100 }, expected: 0.349, tolerance: 1e-5 },
+    { id: 'mu-grooved-100-50', inputs: { tyre_psi: 100, ground_speed_kt: 50 }, expected: 0.63439, tolerance: 1e-5 },
+    { id: 'mu-grooved-100-100', inputs: { tyre_psi: 100, ground_speed_kt: 100 }, expected: 0.3516, tolerance: 1e-5 },
+    { id: 'mu-grooved-200-50', inputs: { tyre_psi: 200, ground_speed_kt: 50 }, expected: 0.56893, tolerance: 1e-5 },
+    { id: 'mu-grooved-200-100', inputs: { tyre_psi: 200, ground_speed_kt: 100 }, expected: 0.3478, tolerance: 1e-5 },
+    { id: 'mu-grooved-300-50', inputs: { tyre_psi: 300, ground_speed_kt: 50 }, expected: 0.4879, tolerance: 1e-5 },
+    { id: 'mu-grooved-300-100', inputs: { tyre_psi: 300, ground_speed_kt: 100 }, expected: 0.31286, tolerance: 1e-5 },
+  ],
+);
+
 /** The 100 psi line with a fully modulating system. */
 export const fullyModulatingCoefficients = figures(
   {
