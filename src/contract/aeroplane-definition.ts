@@ -10,9 +10,12 @@ import {
   pressureAltitude,
   screenHeight,
   span,
+  sprayLength,
   temperature,
   thrust,
+  tyreDeflection,
   tyrePressure,
+  tyreWidth,
   windSpeed,
   wingAngle,
   wingArea,
@@ -149,6 +152,20 @@ export const aeroplaneDefinition = z
           .exactOptional(),
         tyrePressure: tyrePressure.exactOptional(),
         tyreSpeedLimit: airspeed.meta({ description: 'Greatest ground speed of the tyres.' }).exactOptional(),
+        tyres: z
+          .number()
+          .int()
+          .min(1)
+          .max(40)
+          .meta({ description: 'How many tyres roll through what lies on the runway, those of nose or tail too.' })
+          .exactOptional(),
+        maximumTyreWidth: tyreWidth.meta({ description: 'Greatest width of any tyre.' }).exactOptional(),
+        tyreDeflection: tyreDeflection
+          .meta({ description: 'How far the loaded tyre of that width is flattened.' })
+          .exactOptional(),
+        sprayLength: sprayLength
+          .meta({ description: 'Length of fuselage behind the wheels that their spray wets.' })
+          .exactOptional(),
       })
       .meta({ id: 'Wheels', description: 'Wheels and tyres.' })
       .exactOptional(),

@@ -216,6 +216,23 @@ export const tyrePressure = quantitySchema(
   50_000,
   3_000_000,
 );
+export const tyreWidth = quantitySchema('TyreWidth', 'Width of a tyre.', 'length', ['m', 'ft', 'in'], 0.03, 1);
+export const tyreDeflection = quantitySchema(
+  'TyreDeflection',
+  'How far a loaded tyre is flattened.',
+  'length',
+  ['m', 'ft', 'in'],
+  0,
+  0.3,
+);
+export const sprayLength = quantitySchema(
+  'SprayLength',
+  'Length of fuselage wetted by spray.',
+  'length',
+  metresOrFeet,
+  0,
+  60,
+);
 export const brakeEnergy = quantitySchema(
   'BrakeEnergy',
   'Energy the brakes take in one stop.',

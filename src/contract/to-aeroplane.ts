@@ -75,6 +75,10 @@ function toWheels(given: Given<'wheels'>): Made<'wheels'> {
     arrangement: given.arrangement,
     tyrePressure: perhaps((pressure) => si('pressure', pressure), given.tyrePressure),
     tyreSpeedLimit: perhaps(metresPerSecond, given.tyreSpeedLimit),
+    tyres: given.tyres,
+    maximumTyreWidth: perhaps(metres, given.maximumTyreWidth),
+    tyreDeflection: perhaps(metres, given.tyreDeflection),
+    sprayLength: perhaps(metres, given.sprayLength),
   });
 }
 

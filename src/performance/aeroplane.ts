@@ -35,6 +35,12 @@ export interface Aeroplane {
     readonly arrangement?: WheelArrangement;
     readonly tyrePressure?: number;
     readonly tyreSpeedLimit?: number;
+    /** how many roll through what lies on the runway */
+    readonly tyres?: number;
+    readonly maximumTyreWidth?: number;
+    readonly tyreDeflection?: number;
+    /** fuselage behind the wheels that their spray wets [m] */
+    readonly sprayLength?: number;
   };
   readonly brakes?: {
     readonly brakingFrictionCoefficient?: number;

@@ -55,7 +55,15 @@ describe('a definition in SI', () => {
         thrustFactor: 1,
         powerSettings: { 'reduced-90': { fullPowerRatio: 0.9 } },
       },
-      wheels: { arrangement: 'tricycle', tyrePressure: 200_000, tyreSpeedLimit: expect.closeTo(61.7333333333, 9) },
+      wheels: {
+        arrangement: 'tricycle',
+        tyrePressure: 200_000,
+        tyreSpeedLimit: expect.closeTo(61.7333333333, 9),
+        tyres: 3,
+        maximumTyreWidth: 0.17,
+        tyreDeflection: expect.closeTo(0.0254, 12),
+        sprayLength: expect.closeTo(3.048, 12),
+      },
       brakes: { brakingFrictionCoefficient: 0.4, loadFactor: 0.85, antiSkid: 'none', energyLimit: 1e6 },
       reverseThrust: { thrust: 800, cutOffSpeed: expect.closeTo(10.2888888889, 9) },
       limitations: {

@@ -73,6 +73,10 @@ export function sampleDefinition(): AeroplaneDefinition {
       arrangement: 'tricycle',
       tyrePressure: { value: 2, unit: 'bar' },
       tyreSpeedLimit: { value: 120, unit: 'kt' },
+      tyres: 3,
+      maximumTyreWidth: { value: 0.17, unit: 'm' },
+      tyreDeflection: { value: 1, unit: 'in' },
+      sprayLength: { value: 10, unit: 'ft' },
     },
     brakes: {
       brakingFrictionCoefficient: 0.4,
