@@ -25,9 +25,13 @@ afterAll(() => service.takeAway());
 
 /** Runs the service until it ends; a service that listens is sent a signal. */
 function run(variables: Record<string, string>, ...given: readonly string[]): Promise<Ended> {
+  return runNode([service.main, ...given], variables);
+}
+
+function runNode(given: readonly string[], variables: Record<string, string>): Promise<Ended> {
   return new Promise((resolve) => {
     const start = performance.now();
-    const child = spawn(process.execPath, [service.main, ...given], {
+    const child = spawn(process.execPath, given, {
       cwd: root,
       env: { PATH: process.env['PATH'], ...variables },
     });
@@ -87,6 +91,20 @@ describe('the start', () => {
     expect(stderr).toBe('');
     expect(stdout).toMatch(/127\.0\.0\.1:\d+/);
     expect(code).toBe(0);
+  });
+
+  it('needs to write no file, and no process beside its own, as a read-only container asks', async () => {
+    // Node.js called its permissions experimental until they became stable under their present name
+    const permission = process.allowedNodeEnvironmentFlags.has('--permission')
+      ? '--permission'
+      : '--experimental-permission';
+    const limits = [permission, '--allow-fs-read=*', '--no-warnings'];
+    const { code, stdout, stderr } = await runNode([...limits, service.main], { PORT: '0' });
+    expect([code, stderr]).toEqual([0, '']);
+    expect(stdout).toMatch(/listening/i);
+    const file = join(service.aeroplanes, 'written.json');
+    const writing = [...limits, '-e', `fs.writeFileSync(${JSON.stringify(file)}, '')`];
+    expect(await runNode(writing, {})).toMatchObject({ code: 1, stderr: expect.stringContaining('ERR_ACCESS_DENIED') });
   });
 
   it('says under --check in one line that all is in order, and does not listen', async () => {

@@ -1,6 +1,7 @@
 import { z } from 'zod';
 import type { CatalogueSource } from '../catalogue/read-catalogue.ts';
 import { slipsBetween } from '../contract/reading/nearest-name.ts';
+import { defaultAddress } from './default-address.ts';
 
 const logLevels = ['fatal', 'error', 'warn', 'info', 'debug', 'trace', 'silent'] as const;
 
@@ -10,11 +11,11 @@ const environment = z.object({
     .regex(/^\d{1,5}$/)
     .transform(Number)
     .refine((port) => port <= 65_535)
-    .default(3000),
+    .default(defaultAddress.port),
   HOST: z
     .string()
     .regex(/^[A-Za-z0-9.:_-]{1,253}$/)
-    .default('127.0.0.1'),
+    .default(defaultAddress.host),
   LOG_LEVEL: z.enum(logLevels).default('info'),
   CATALOGUE: z
     .string()

@@ -6,6 +6,7 @@ import { importsOf, sourceFiles } from '../support/sources.ts';
 const table: Record<string, readonly string[]> = {
   main: ['http', 'catalogue'],
   seal: ['catalogue'],
+  'health-check': ['http'],
   http: ['catalogue', 'contract', 'planning'],
   catalogue: ['contract', 'planning', 'performance'],
   contract: ['planning', 'performance', 'physics', 'units', 'references'],
@@ -22,6 +23,7 @@ const levels = Object.keys(table);
 const packages: Record<string, readonly string[]> = {
   main: ['close-with-grace'],
   seal: ['node:'],
+  'health-check': ['node:'],
   http: [
     'fastify',
     'fastify-zod-openapi',
