@@ -60,6 +60,14 @@ export const obstacleDistance = quantitySchema(
   0,
   30_000,
 );
+export const contaminantDepth = quantitySchema(
+  'ContaminantDepth',
+  'Depth of water, slush or snow on the runway.',
+  'length',
+  ['m', 'in'],
+  0,
+  0.5,
+);
 export const screenHeight = quantitySchema(
   'ScreenHeight',
   'Height of the screen above the runway, to be passed at its end.',

@@ -1,6 +1,7 @@
 import { z } from 'zod';
-import { surfaceKinds, surfaceStates } from '../planning/question.ts';
+import { contaminantKinds, surfaceKinds, surfaceStates } from '../planning/question.ts';
 import {
+  contaminantDepth,
   direction,
   elevation,
   magneticVariation,
@@ -20,6 +21,15 @@ export const surface = z
     firmness: z
       .enum(['firm', 'soft'])
       .meta({ description: 'Of the subsoil: firm when wheels mark it without making ruts.' })
+      .exactOptional(),
+    contaminant: z
+      .strictObject({
+        kind: z.enum(contaminantKinds).meta({ description: 'What covers the runway.' }),
+        depth: contaminantDepth
+          .meta({ description: 'Of water, slush and loose snow, which need it; nothing else has one.' })
+          .exactOptional(),
+      })
+      .meta({ id: 'Contaminant', description: 'Water, slush, snow, frost or ice on the runway.' })
       .exactOptional(),
     rollingFrictionCoefficient: z
       .number()

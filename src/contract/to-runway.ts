@@ -1,5 +1,5 @@
 import { groundSlope } from '../planning/ground-slope.ts';
-import type { Declared, Runway } from '../planning/question.ts';
+import type { Declared, Runway, Surface } from '../planning/question.ts';
 import type { Draft } from './present.ts';
 import { si } from './quantity.ts';
 import type { RunwayOnWire } from './runway.ts';
@@ -17,7 +17,7 @@ export function toRunway(given: RunwayOnWire, phase: 'takeoff' | 'landing'): Run
     directionReference: given.directionReference,
     elevation: si('length', given.elevation),
     slope: 'profile' in given.slope ? 0 : si('proportion', given.slope),
-    surface: given.surface,
+    surface: toSurface(given.surface),
     start: toStart(given.start),
   } satisfies Runway as Draft<Runway>;
   if (given.magneticVariation !== undefined) runway.magneticVariation = si('angle', given.magneticVariation);
@@ -37,6 +37,12 @@ export function toRunway(given: RunwayOnWire, phase: 'takeoff' | 'landing'): Run
   if (!('profile' in given.slope)) return runway;
   const profile = toSlopeProfile(given.slope.profile, startAlong(given));
   return { ...runway, profile, slope: groundSlope(profile, runway, phase) };
+}
+
+function toSurface({ contaminant, ...surface }: RunwayOnWire['surface']): Surface {
+  if (contaminant === undefined) return surface;
+  const { kind, depth } = contaminant;
+  return { ...surface, contaminant: depth === undefined ? { kind } : { kind, depth: si('length', depth) } };
 }
 
 function toStart(given: RunwayOnWire['start']): Runway['start'] {

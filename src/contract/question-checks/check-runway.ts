@@ -5,6 +5,7 @@ import type { RunwayOnWire } from '../runway.ts';
 import { startAlong } from '../to-ground-line.ts';
 import { written } from '../written.ts';
 import { checkProfile } from './check-profile.ts';
+import { checkSurface } from './check-surface.ts';
 
 /** Members of a runway against each other. */
 export function checkRunway(runway: RunwayOnWire, phase: 'takeoff' | 'landing'): Fault[] {
@@ -94,26 +95,4 @@ function checkObstacles({ obstacles, declared }: RunwayOnWire, phase: 'takeoff' 
       message: 'Obstacles are measured from the end of TODA, and TODA is not given.',
     },
   ];
-}
-
-function checkSurface({ kind, grass, firmness }: RunwayOnWire['surface']): Fault[] {
-  const faults: Fault[] = [];
-  if (grass !== undefined && kind !== 'grass') {
-    faults.push({
-      pointer: '/runway/surface/grass',
-      code: 'contradiction',
-      message: `The surface is ${kind}, with ${grass} grass given.`,
-      received: grass,
-      hint: 'Leave grass away, or make the kind grass.',
-    });
-  }
-  if (firmness !== undefined && kind === 'paved') {
-    faults.push({
-      pointer: '/runway/surface/firmness',
-      code: 'contradiction',
-      message: 'firmness is of the subsoil of an unpaved runway; the surface is paved.',
-      received: firmness,
-    });
-  }
-  return faults;
 }
