@@ -2,7 +2,10 @@ import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { brakedRoll } from '../../../src/performance/landing/braked-roll.ts';
 import type { BrakedRun } from '../../../src/performance/landing/landing-run.ts';
-import { constantBraking } from '../../../src/physics/braking-friction.ts';
+import { constantBraking, scaledBraking } from '../../../src/physics/braking-friction.ts';
+import { codeBraking } from '../../../src/physics/code-braking.ts';
+import type { RunwayConditionCode } from '../../../src/physics/runway-condition-code.ts';
+import type { AntiSkidKind } from '../../../src/physics/wet-braking.ts';
 import { andersonExample618, trainerStops } from '../../published/braking-and-landing.ts';
 
 const g = 9.80665;
@@ -198,5 +201,34 @@ describe('brakedRoll over stretches of runway', () => {
     expect(result.atGroundSpeed).toBeCloseTo(Math.sqrt(900 - 2 * g * 0.2 * 50), 6);
     // and stops where it is slow enough to be held before that
     expect(brakedRoll(run, 10)).toMatchObject({ outcome: 'stops' });
+  });
+
+  it('is never shorter for a worse code, on the whole runway or on any third of it', () => {
+    const anyCode = fc.integer({ min: 1, max: 6 }) as fc.Arbitrary<RunwayConditionCode>;
+    const brakes = fc.record({
+      dry: fc.double({ min: 0.2, max: 0.5, noNaN: true }),
+      antiSkid: fc.constantFrom<AntiSkidKind>('none', 'quasi-modulating', 'fully-modulating'),
+      tyrePressure: fc.double({ min: 150_000, max: 1_500_000, noNaN: true }),
+      hydroplaningSpeed: fc.option(fc.double({ min: 15, max: 60, noNaN: true }), { nil: undefined }),
+    });
+    const begin = fc.double({ min: 100, max: 700, noNaN: true });
+    fc.assert(
+      fc.property(fc.tuple(anyCode, anyCode, anyCode), fc.nat(2), brakes, begin, (codes, worse, own, from) => {
+        const of = (thirds: readonly RunwayConditionCode[]) => {
+          const stretches = thirds.map((code, i) => {
+            const braking = codeBraking(code, own);
+            if (braking === 'no-data') throw new Error(braking);
+            return { end: 400 * (i + 1), braking: scaledBraking(braking, 0.85), slope: 0 };
+          });
+          const result = brakedRoll({ ...trainer, stretches }, 40, from);
+          if (result.outcome !== 'stops') throw new Error(result.outcome);
+          return result.distance;
+        };
+        fc.pre((codes[worse] as number) > 1);
+        const poorer = codes.map((code, i) => (i === worse ? code - 1 : code)) as RunwayConditionCode[];
+        expect(of(poorer)).toBeGreaterThanOrEqual(of(codes) * (1 - 1e-8));
+      }),
+      { numRuns: 300 },
+    );
   });
 });

@@ -40,5 +40,19 @@ describe('landingEstimate', () => {
     const base = landingEstimate(run).groundRoll;
     expect(landingEstimate({ ...run, reverseThrust: { thrust: 2000, cutOffSpeed: 5 } }).groundRoll).toBeLessThan(base);
     expect(landingEstimate({ ...run, reverseThrust: { thrust: 2000, cutOffSpeed: 50 } }).groundRoll).toBe(base);
+    const windy = { ...run, headwind: 12 };
+    const mean = Math.SQRT1_2 * (run.touchdownSpeed - 12);
+    const above = { ...windy, reverseThrust: { thrust: 2000, cutOffSpeed: mean + 0.1 } };
+    expect(landingEstimate(above).groundRoll).toBe(landingEstimate(windy).groundRoll);
+  });
+
+  it('counts what a contaminant helps below its speed only', () => {
+    const [vector] = landingVectors;
+    if (vector === undefined) throw new Error('no vectors');
+    const run = landingVectorRun(vector);
+    const mean = Math.SQRT1_2 * (run.touchdownSpeed - run.headwind);
+    const of = (below: number) => landingEstimate({ ...run, contaminantDrag: { perSquare: 2, below } }).groundRoll;
+    expect(of(mean + 0.1)).toBeLessThan(landingEstimate(run).groundRoll);
+    expect(of(mean - 0.1)).toBe(landingEstimate(run).groundRoll);
   });
 });

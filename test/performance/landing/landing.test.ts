@@ -160,6 +160,30 @@ describe('landing', () => {
     );
   });
 
+  it('begins braking, on the scale of the stretches, where the air distance and the free roll end', () => {
+    const run = { ...landingVectorRun(landingVectors[0] as (typeof landingVectors)[number]), freeRollTime: 2 };
+    const plain = landing(run);
+    if (plain.outcome !== 'stops') throw new Error(plain.outcome);
+    const touched = plain.airDistance + plain.freeRoll;
+    const ice = { ...run, braking: scaledBraking(run.braking, 0.2) };
+    const icedFrom = (end: number) => {
+      const found = landing({
+        ...run,
+        stretches: [
+          { ...run, end },
+          { ...ice, end: 5000 },
+        ],
+      });
+      if (found.outcome !== 'stops') throw new Error(found.outcome);
+      expect(found.airDistance).toBe(plain.airDistance);
+      return found.brakedRoll;
+    };
+    expect(icedFrom(touched + plain.brakedRoll + 0.01) / plain.brakedRoll).toBeCloseTo(1, 9);
+    expect(icedFrom(touched + plain.brakedRoll - 1)).toBeGreaterThan(plain.brakedRoll + 0.5);
+    const wholly = landing(ice);
+    expect(icedFrom(touched) / (wholly as Stopped).brakedRoll).toBeCloseTo(1, 9);
+  });
+
   it('has no jump where the wind turns from head to tail', () => {
     fc.assert(
       fc.property(anyLanding, (run) => {
