@@ -69,6 +69,7 @@ describe('a landing from gate to gate', () => {
     if (climb.outcome !== 'computed' || unrounded.outcome !== 'computed') throw new Error('no climb');
     expect(climb.gradient.value).toBeLessThanOrEqual(unrounded.gradient.value);
     expect(unrounded.gradient.value - climb.gradient.value).toBeLessThan(0.01);
+    expect(climb.rate).toEqual({ value: Math.floor(unrounded.rate.value), unit: 'ft/min' });
   });
   it('echoes a question that gives the same answer when it is sent again', () => {
     const first = answered(withMember(sampleLanding(), '/units', undefined));

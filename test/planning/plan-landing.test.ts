@@ -61,6 +61,11 @@ describe('a landing by hand', () => {
     const slowed = (0.35 * 0.85 * (1010 * g - q * 0.5) + q * polar - 100) / 1010;
     expectRatio(answer.distances?.groundRoll.value, ground + ground ** 2 / (2 * slowed), 0.02);
   });
+  it('takes a second and the time of the mean deceleration on the ground, to 3 %', () => {
+    const ground = touchdown - wind;
+    const braked = (answer.distances?.groundRoll.value ?? 0) - ground;
+    expectRatio(answer.distances?.groundRollTime, 1 + (2 * braked) / ground, 0.03);
+  });
   it('adds up, and stands in the middle of its bands', () => {
     const { airDistance, groundRoll, landingDistance } = answer.distances ?? {};
     expectRatio(landingDistance?.value, (airDistance?.value ?? 0) + (groundRoll?.value ?? 0), 1e-12);
