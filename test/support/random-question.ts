@@ -1,14 +1,12 @@
 import * as q from '../../src/contract/quantities.ts';
-import { surface } from '../../src/contract/runway.ts';
 import { pressureAltitude, stationPressure } from '../../src/physics/altimetry.ts';
 import { standardTemperature } from '../../src/physics/atmosphere.ts';
-import { surfaceKinds, surfaceStates } from '../../src/planning/question.ts';
 import { ruleSets } from '../../src/planning/rules/rule-sets.ts';
 import { unitFamilies } from '../../src/units/presentation.ts';
-import { boundsAt } from './bounds-at.ts';
 import type { Dice } from './dice.ts';
 import { randomDefinition } from './random-definition.ts';
 import { anyQuantity, inSi, quantityOf, type WrittenQuantity } from './random-quantity.ts';
+import { randomSurface } from './random-surface.ts';
 
 /** A setting of flap and gear: only what the dice need of it. */
 interface OfOneSetting {
@@ -111,7 +109,6 @@ function randomPlace(dice: Dice): { readonly runway: object; readonly weather: o
   const directionReference = pick(['true', 'magnetic']);
   const wind = randomWind(dice);
   const references = [directionReference, ...('fromReference' in wind ? [wind.fromReference] : [])];
-  const kind = pick(surfaceKinds);
   return {
     runway: {
       designator: pick(['07', '25L', '∅']),
@@ -122,18 +119,7 @@ function randomPlace(dice: Dice): { readonly runway: object; readonly weather: o
       })),
       elevation,
       slope: anyQuantity(dice, q.slope),
-      surface: {
-        kind,
-        state: pick(surfaceStates),
-        ...maybe(kind === 'grass' ? 0.7 : 0, () => ({ grass: pick(['short', 'long']) })),
-        ...maybe(kind === 'paved' ? 0 : 0.5, () => ({ firmness: pick(['firm', 'soft']) })),
-        ...maybe(0.2, () => ({
-          rollingFrictionCoefficient: dice.within(...boundsAt(surface, 'rollingFrictionCoefficient')),
-        })),
-        ...maybe(0.2, () => ({
-          brakingFrictionCoefficient: dice.within(...boundsAt(surface, 'brakingFrictionCoefficient')),
-        })),
-      },
+      surface: randomSurface(dice),
       ...randomLengths(dice),
     },
     weather: { ...randomAir(dice, height), wind },
