@@ -2,7 +2,7 @@ import process from 'node:process';
 import { CatalogueFault } from './catalogue/catalogue-fault.ts';
 import { sealFolder } from './catalogue/seal-folder.ts';
 
-/** Seals a folder of aeroplane files: `npm run seal -- <folder>`. */
+/** Seals a folder of aeroplane files and the aerodromes within it: `npm run seal -- <folder>`. */
 function seal([folder, ...others]: readonly string[]): number {
   if (folder === undefined || others.length > 0) {
     process.stderr.write('usage: npm run seal -- <folder of aeroplane files>\n');

@@ -10,13 +10,19 @@ const largestFile = 2 * 1024 * 1024;
  *
  * Names that begin with two dots are left alone: orchestrators keep the versions of a mounted folder under them.
  *
+ * @param besides - a folder within that is read by itself
  * @throws CatalogueFault where the folder or a file cannot be read, or holds anything but files
  */
-export function folderFiles(folder: string): ReadonlyMap<string, Uint8Array> {
+export function folderFiles(folder: string, besides?: string): ReadonlyMap<string, Uint8Array> {
   const names = reading(folder, '', () => readdirSync(folder))
-    .filter((name) => !name.startsWith('..'))
+    .filter((name) => !name.startsWith('..') && !(name === besides && isFolder(join(folder, name))))
     .sort();
   return new Map(names.map((name) => [name, fileBytes(folder, name)]));
+}
+
+/** Whether there is a folder of this name; a link to one counts. */
+export function isFolder(path: string): boolean {
+  return statSync(path, { throwIfNoEntry: false })?.isDirectory() === true;
 }
 
 function fileBytes(folder: string, name: string): Uint8Array {

@@ -3,13 +3,13 @@ import { z } from 'zod';
 /** The list of a folder's files with the digest of each; it lies in the folder itself. */
 export const manifestName = 'manifest.json';
 
-/** A file is named for the aeroplane in it. */
-export const aeroplaneFileName = /^[a-z0-9][a-z0-9-]{0,63}\.json$/;
+/** A file is named for what is in it. */
+export const definitionFileName = /^[a-z0-9][a-z0-9-]{0,63}\.json$/;
 
 const manifest = z.strictObject({
   algorithm: z.literal('SHA-256'),
   files: z.record(
-    z.string().max(69).regex(aeroplaneFileName),
+    z.string().max(69).regex(definitionFileName),
     z
       .string()
       .max(64)

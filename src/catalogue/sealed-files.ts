@@ -4,13 +4,15 @@ import { manifestName, readManifest } from './manifest.ts';
 import { sha256 } from './sha-256.ts';
 
 /**
- * The aeroplane files of a sealed folder, each as the manifest says it is: none missing, none besides, no byte changed.
+ * The files of a sealed folder, each as the manifest says it is: none missing, none besides, no byte changed.
  *
+ * @param noun - what each file holds
+ * @param besides - a folder within that is sealed by itself
  * @returns bytes by file name, without the manifest
  * @throws CatalogueFault at the first difference
  */
-export function sealedFiles(folder: string): ReadonlyMap<string, Uint8Array> {
-  const files = new Map(folderFiles(folder));
+export function sealedFiles(folder: string, noun: string, besides?: string): ReadonlyMap<string, Uint8Array> {
+  const files = new Map(folderFiles(folder, besides));
   const seal = files.get(manifestName);
   if (seal === undefined) throw new CatalogueFault(folder, `there is no ${manifestName}; seal the folder first`);
   files.delete(manifestName);
@@ -30,6 +32,6 @@ export function sealedFiles(folder: string): ReadonlyMap<string, Uint8Array> {
       );
     }
   }
-  if (files.size === 0) throw new CatalogueFault(folder, 'there is no aeroplane in it');
+  if (files.size === 0) throw new CatalogueFault(folder, `there is no ${noun} in it`);
   return files;
 }

@@ -3,7 +3,7 @@ import { planLanding } from '../planning/plan-landing.ts';
 import { planTakeoff } from '../planning/plan-takeoff.ts';
 import { type Ranked, rankChoices } from '../planning/rank-choices.ts';
 import { choicesSentence } from '../planning/sentences/choices-sentence.ts';
-import type { AeroplaneLookup } from './aeroplane-lookup.ts';
+import type { CatalogueLookup } from './catalogue-lookup.ts';
 import type { LandingChoicesRequest, TakeoffChoicesRequest } from './choices-request.ts';
 import type { LandingChoicesResponse, TakeoffChoicesResponse } from './choices-response.ts';
 import type { LandingRequest } from './landing-request.ts';
@@ -16,18 +16,21 @@ import { toLandingQuestion } from './to-landing-question.ts';
 import { toLandingResponse } from './to-landing-response.ts';
 import { toQuestion } from './to-question.ts';
 import { toResponse } from './to-response.ts';
+import { withKnownRunway } from './with-known-runway.ts';
 
 /** The ways to take off, each asked as a takeoff of its own, best first. */
 export function answerTakeoffChoices(
   request: TakeoffChoicesRequest,
-  lookup: AeroplaneLookup,
+  lookup: CatalogueLookup,
   stamp: Stamp,
 ): TakeoffChoicesResponse | Refused {
   const answered = answerEach<TakeoffRequest, TakeoffResponse>(request, (one) => {
     const question = toQuestion(one, lookup);
     if (isRefused(question)) return question;
     const answer = planTakeoff(question);
-    return isRefused(answer) ? answer : { answer, response: toResponse(answer, one, question, stamp) };
+    return isRefused(answer)
+      ? answer
+      : { answer, response: toResponse(answer, withKnownRunway(one, lookup.aerodromes, 'takeoff'), question, stamp) };
   });
   return isRefused(answered) ? answered : together(request, answered);
 }
@@ -35,14 +38,19 @@ export function answerTakeoffChoices(
 /** The ways to land, each asked as a landing of its own, best first. */
 export function answerLandingChoices(
   request: LandingChoicesRequest,
-  lookup: AeroplaneLookup,
+  lookup: CatalogueLookup,
   stamp: Stamp,
 ): LandingChoicesResponse | Refused {
   const answered = answerEach<LandingRequest, LandingResponse>(request, (one) => {
     const question = toLandingQuestion(one, lookup);
     if (isRefused(question)) return question;
     const answer = planLanding(question);
-    return isRefused(answer) ? answer : { answer, response: toLandingResponse(answer, one, question, stamp) };
+    return isRefused(answer)
+      ? answer
+      : {
+          answer,
+          response: toLandingResponse(answer, withKnownRunway(one, lookup.aerodromes, 'landing'), question, stamp),
+        };
   });
   return isRefused(answered) ? answered : together(request, answered);
 }
@@ -94,12 +102,12 @@ function together<Response extends TakeoffChoicesResponse | LandingChoicesRespon
   const order = rankChoices(answered.map(({ answer }) => answer));
   const choices = order.map((index) => {
     const { response } = answered[index] as Answered<Shown>;
-    const { name, configuration, runway } = request.choices[index] as OneOf<TakeoffRequest>;
+    const { name, configuration } = request.choices[index] as OneOf<TakeoffRequest>;
     const { outcome, advisory, wind, distances, assessment, shortfall } = response;
     return {
       choice: index,
       ...(name === undefined ? {} : { name }),
-      designator: runway.designator,
+      designator: response.question.runway.designator,
       configuration,
       outcome,
       sentence: advisory.sentence,
@@ -127,6 +135,12 @@ function together<Response extends TakeoffChoicesResponse | LandingChoicesRespon
       modelVersion: response.basis.modelVersion,
       digests: response.basis.digests,
     },
-    question: { ...common, choices: request.choices },
+    question: {
+      ...common,
+      choices: request.choices.map((choice, index) => ({
+        ...choice,
+        runway: (answered[index] as Answered<Shown>).response.question.runway,
+      })),
+    },
   } as unknown as Response;
 }

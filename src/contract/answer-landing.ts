@@ -1,20 +1,22 @@
 import { isRefused, type Refused } from '../planning/fault.ts';
 import { planLanding } from '../planning/plan-landing.ts';
-import type { AeroplaneLookup } from './aeroplane-lookup.ts';
+import type { CatalogueLookup } from './catalogue-lookup.ts';
 import type { LandingRequest } from './landing-request.ts';
 import type { LandingResponse } from './landing-response.ts';
 import type { Stamp } from './to-basis.ts';
 import { toLandingQuestion } from './to-landing-question.ts';
 import { toLandingResponse } from './to-landing-response.ts';
+import { withKnownRunway } from './with-known-runway.ts';
 
 /** A landing from gate to gate: the request as a question, the plan, the answer as a response. */
 export function answerLanding(
   request: LandingRequest,
-  lookup: AeroplaneLookup,
+  lookup: CatalogueLookup,
   stamp: Stamp,
 ): LandingResponse | Refused {
   const question = toLandingQuestion(request, lookup);
   if (isRefused(question)) return question;
   const answer = planLanding(question);
-  return isRefused(answer) ? answer : toLandingResponse(answer, request, question, stamp);
+  if (isRefused(answer)) return answer;
+  return toLandingResponse(answer, withKnownRunway(request, lookup.aerodromes, 'landing'), question, stamp);
 }

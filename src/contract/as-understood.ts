@@ -5,12 +5,13 @@ import type { Draft } from './present.ts';
 import { defaultRounding, defaultUnits } from './question-frame.ts';
 import type { TakeoffRequest } from './takeoff-request.ts';
 import type { TakeoffQuestion } from './takeoff-response.ts';
+import type { WithKnownRunway } from './with-known-runway.ts';
 
 /** The request with what was filled in, in the order of its schema; it can be sent again as it stands. */
-export function asUnderstood(request: TakeoffRequest, known: Chosen): TakeoffQuestion;
-export function asUnderstood(request: LandingRequest, known: Chosen): LandingQuestion;
+export function asUnderstood(request: WithKnownRunway<TakeoffRequest>, known: Chosen): TakeoffQuestion;
+export function asUnderstood(request: WithKnownRunway<LandingRequest>, known: Chosen): LandingQuestion;
 export function asUnderstood(
-  request: TakeoffRequest | LandingRequest,
+  request: WithKnownRunway<TakeoffRequest> | WithKnownRunway<LandingRequest>,
   known: Chosen,
 ): TakeoffQuestion | LandingQuestion {
   const {

@@ -7,11 +7,13 @@ import { sensitivitiesOf } from './detail.ts';
 import { bandedDistance, distancesShape, timesShape } from './distances.ts';
 import { landingRequest } from './landing-request.ts';
 import { rounding, units } from './question-frame.ts';
+import { runway } from './runway.ts';
 
 export const landingQuestion = z
   .strictObject({
     ...landingRequest.shape,
     aeroplane: aeroplaneUnderstood,
+    runway,
     units,
     rounding,
   })

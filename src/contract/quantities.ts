@@ -19,6 +19,7 @@ export const runwayLength = quantitySchema(
   0,
   10_000,
 );
+export const runwayWidth = quantitySchema('RunwayWidth', 'Width of a runway.', 'length', metresOrFeet, 3, 120);
 export const elevation = quantitySchema(
   'Elevation',
   'Height of the aerodrome above mean sea level.',

@@ -3,7 +3,7 @@ import { aeroplaneChoice } from './aeroplane-choice.ts';
 import { detail } from './detail.ts';
 import { mass } from './quantities.ts';
 import { asOf, reference, rounding, select, units } from './question-frame.ts';
-import { runway } from './runway.ts';
+import { runwayChoice } from './runway-choice.ts';
 import { id } from './text.ts';
 import { weather } from './weather.ts';
 
@@ -15,7 +15,7 @@ export function questionShape<Procedure extends z.ZodType>(phase: 'takeoff' | 'l
     aeroplane: aeroplaneChoice,
     mass: mass.meta({ description: `${phase === 'takeoff' ? 'Takeoff' : 'Landing'} mass.` }),
     configuration: id.meta({ description: `One of the aeroplane's ${phase} configurations.` }),
-    runway,
+    runway: runwayChoice,
     weather,
     procedure: z.exactOptional(procedure),
     ruleSet: id.meta({ description: 'The rule set to assess by; GET /v1/rule-sets lists them.' }),

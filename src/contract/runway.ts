@@ -10,7 +10,7 @@ import {
   runwayLength,
 } from './quantities.ts';
 import { slope } from './slope.ts';
-import { shortText } from './text.ts';
+import { id, shortText, text } from './text.ts';
 import { north } from './weather.ts';
 
 export const surface = z
@@ -101,6 +101,23 @@ export const obstacles = z
       'Obstacles straight ahead after takeoff. A turn is not computed: an obstacle beside a turn has no place here.',
   });
 
+const onFile = z
+  .strictObject({
+    aerodrome: id,
+    revision: shortText,
+    changed: z
+      .array(text(300))
+      .max(40)
+      .meta({ description: 'What the question put in place of what is on file, in words.' })
+      .exactOptional(),
+    full: declared.meta({ description: 'With a named point: what is declared for the whole runway.' }).exactOptional(),
+  })
+  .meta({
+    id: 'RunwayOnFile',
+    description:
+      'Where the runway came from, as the answer to a question that named an aerodrome says it; repeated and not looked up.',
+  });
+
 export const runway = z
   .strictObject({
     designator: shortText.meta({ description: 'Name of the runway end used, for example 07 or 25L.' }),
@@ -122,6 +139,7 @@ export const runway = z
       .exactOptional(),
     declared: declared.exactOptional(),
     obstacles: obstacles.exactOptional(),
+    onFile: onFile.exactOptional(),
   })
   .meta({ id: 'Runway', description: 'The runway, seen in the direction of movement.' });
 

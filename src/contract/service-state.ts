@@ -10,23 +10,23 @@ export const readiness = z
   .strictObject({ status: z.literal('ready') })
   .meta({ id: 'Readiness', description: 'The service can compute.' });
 
+const onFile = z.strictObject({
+  builtIn: z.int().min(0).meta({ description: 'Invented ones that come with the service; 0 where switched off.' }),
+  own: z.int().min(0).meta({ description: "Those of the operator's own folder." }),
+});
+
 /** The answer of GET /version. */
 export const version = z
   .strictObject({
     service: z.string().meta({ description: 'Name of the service.' }),
     version: z.string().meta({ description: 'Version of the service.' }),
     modelVersion: z.string().meta({ description: 'Changes whenever any number of any answer changes.' }),
-    aeroplanes: z
-      .strictObject({
-        builtIn: z
-          .int()
-          .min(0)
-          .meta({ description: 'Invented ones that come with the service; 0 where switched off.' }),
-        own: z.int().min(0).meta({ description: "Those of the operator's own folder." }),
-      })
-      .meta({ description: 'How many aeroplanes are on file.' }),
+    aeroplanes: onFile.meta({ description: 'How many aeroplanes are on file.' }),
+    aerodromes: onFile.meta({ description: 'How many aerodromes are on file.' }),
     digests: z
-      .strictObject({ catalogue: z.string().meta({ description: 'SHA-256 over all aeroplanes on file, hex.' }) })
+      .strictObject({
+        catalogue: z.string().meta({ description: 'SHA-256 over all aeroplanes and aerodromes on file, hex.' }),
+      })
       .meta({ description: 'Digests of what the service was started with.' }),
   })
   .meta({ id: 'Version', description: 'What is running.' });

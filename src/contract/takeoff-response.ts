@@ -7,6 +7,7 @@ import { sensitivitiesOf } from './detail.ts';
 import { bandedDistance, distancesShape, timesShape } from './distances.ts';
 import { obstaclePath } from './obstacle-path.ts';
 import { rounding, units } from './question-frame.ts';
+import { runway } from './runway.ts';
 import { takeoffRequest } from './takeoff-request.ts';
 
 /** The question as understood: it can be sent again as it stands. */
@@ -14,6 +15,7 @@ export const takeoffQuestion = z
   .strictObject({
     ...takeoffRequest.shape,
     aeroplane: aeroplaneUnderstood,
+    runway,
     units,
     rounding,
   })

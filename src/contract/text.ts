@@ -6,16 +6,17 @@ export const id = z
   .max(64)
   .regex(/^[a-z0-9][a-z0-9-]{0,63}$/);
 
-/** A reason in a sentence or two, on one line: no control characters, no half of a surrogate pair. */
-export const reason = z
-  .string()
-  .min(1)
-  .max(200)
-  .regex(/^[^\p{Cc}\p{Cs}]*$/u);
+/** Text on one line of at most so many characters: no control characters, no half of a surrogate pair. */
+export function text(most: number) {
+  return z
+    .string()
+    .min(1)
+    .max(most)
+    .regex(/^[^\p{Cc}\p{Cs}]*$/u);
+}
 
-/** Free text of at most 64 characters on one line: no control characters, no half of a surrogate pair. */
-export const shortText = z
-  .string()
-  .min(1)
-  .max(64)
-  .regex(/^[^\p{Cc}\p{Cs}]*$/u);
+/** A reason in a sentence or two. */
+export const reason = text(200);
+
+/** Free text. */
+export const shortText = text(64);

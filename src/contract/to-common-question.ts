@@ -13,6 +13,7 @@ import { checkMass } from './question-checks/check-mass.ts';
 import { checkRunway } from './question-checks/check-runway.ts';
 import { checkWind } from './question-checks/check-wind.ts';
 import { defaultUnits } from './question-frame.ts';
+import type { RunwayOnWire } from './runway.ts';
 import { selectFaults } from './selection/select-faults.ts';
 import type { TakeoffRequest } from './takeoff-request.ts';
 import { takeoffResponse } from './takeoff-response.ts';
@@ -20,6 +21,7 @@ import { aeroplaneAt } from './to-known-aeroplane.ts';
 import { toRunway } from './to-runway.ts';
 import { toWeather } from './to-weather.ts';
 import { unknownId } from './unknown-id.ts';
+import type { WithKnownRunway } from './with-known-runway.ts';
 
 /** What a takeoff and a landing are asked alike. */
 export type CommonRequest = Omit<TakeoffRequest, 'procedure'> & Omit<LandingRequest, 'procedure'>;
@@ -27,11 +29,13 @@ export type CommonRequest = Omit<TakeoffRequest, 'procedure'> & Omit<LandingRequ
 /**
  * Faults of meaning in what a takeoff and a landing are asked alike.
  *
+ * @param runway - whole, or what was not found of it
  * @param known - the aeroplane, or its own faults
  * @param phase - what the configuration must be for, and which declared distances count
  */
 export function commonFaults(
   request: CommonRequest,
+  runway: RunwayOnWire | Fault[],
   known: KnownAeroplane | Fault[],
   phase: 'takeoff' | 'landing',
 ): Fault[] {
@@ -42,9 +46,13 @@ export function commonFaults(
           ...checkConfigurationId(request.configuration, known.aeroplane, phase),
         ]
       : known),
-    ...checkRunway(request.runway, phase),
-    ...checkAir(request.weather, request.runway.elevation),
-    ...checkWind(request.weather.wind, request.runway),
+    ...(Array.isArray(runway)
+      ? [...runway, ...checkAir(request.weather, undefined)]
+      : [
+          ...checkRunway(runway, phase),
+          ...checkAir(request.weather, runway.elevation),
+          ...checkWind(request.weather.wind, runway),
+        ]),
     ...checkRuleSet(request.ruleSet),
     ...selectFaults(request.select ?? [], phase === 'takeoff' ? takeoffResponse : landingResponse, request.detail),
   ];
@@ -57,7 +65,7 @@ export function asked({ aeroplane, configuration }: CommonRequest, known: KnownA
 
 /** What a takeoff and a landing share, in SI. */
 export function toCommonQuestion(
-  request: CommonRequest,
+  request: WithKnownRunway<CommonRequest>,
   known: KnownAeroplane,
   phase: 'takeoff' | 'landing',
 ): Question {

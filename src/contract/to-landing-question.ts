@@ -2,13 +2,14 @@ import type { Aeroplane } from '../performance/aeroplane.ts';
 import type { Refused } from '../planning/fault.ts';
 import { landingProcedureFaults } from '../planning/procedure/landing-procedure-faults.ts';
 import type { LandingProcedure, LandingQuestion } from '../planning/question.ts';
-import type { AeroplaneLookup } from './aeroplane-lookup.ts';
+import type { CatalogueLookup } from './catalogue-lookup.ts';
 import type { LandingRequest } from './landing-request.ts';
 import type { Draft } from './present.ts';
 import type { LandingProcedureOnWire } from './procedure.ts';
 import { si } from './quantity.ts';
 import { asked, commonFaults, toCommonQuestion } from './to-common-question.ts';
 import { toKnownAeroplane } from './to-known-aeroplane.ts';
+import { toKnownRunway } from './to-known-runway.ts';
 
 /**
  * The gate in: a landing request as planning's question, in SI.
@@ -16,14 +17,15 @@ import { toKnownAeroplane } from './to-known-aeroplane.ts';
  * @param request - read by its schema
  * @returns the question, or every fault of meaning in the request at once
  */
-export function toLandingQuestion(request: LandingRequest, lookup: AeroplaneLookup): LandingQuestion | Refused {
+export function toLandingQuestion(request: LandingRequest, lookup: CatalogueLookup): LandingQuestion | Refused {
   const known = toKnownAeroplane(request.aeroplane, lookup);
-  const faults = commonFaults(request, known, 'landing');
-  if (!('aeroplane' in known)) return { refused: faults };
+  const runway = toKnownRunway(request.runway, lookup.aerodromes, 'landing');
+  const faults = commonFaults(request, runway, known, 'landing');
+  if (Array.isArray(runway) || !('aeroplane' in known)) return { refused: faults };
   const procedure = request.procedure && toLandingProcedure(request.procedure);
   if (procedure !== undefined) faults.push(...landingProcedureFaults({ ...asked(request, known), procedure }));
   if (faults.length > 0) return { refused: faults };
-  const common = toCommonQuestion(request, known, 'landing');
+  const common = toCommonQuestion({ ...request, runway }, known, 'landing');
   const question = { ...common, defaulted: [...common.defaulted, ...defaultedProcedure(known.aeroplane, procedure)] };
   return procedure === undefined ? question : { ...question, procedure };
 }

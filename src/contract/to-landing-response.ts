@@ -13,6 +13,7 @@ import { type Stamp, toBasis, toContribution } from './to-basis.ts';
 import { toSensitivities, toTrajectory, toWorking } from './to-detail.ts';
 import { toShortfall } from './to-shortfall.ts';
 import { toSpeedSet } from './to-speed-set.ts';
+import type { WithKnownRunway } from './with-known-runway.ts';
 
 /**
  * The gate out: planning's answer to a landing in the units asked for, rounded the safe way, in the order of the contract.
@@ -24,7 +25,7 @@ import { toSpeedSet } from './to-speed-set.ts';
  */
 export function toLandingResponse(
   answer: LandingAnswer,
-  request: LandingRequest,
+  request: WithKnownRunway<LandingRequest>,
   question: Question,
   stamp: Stamp,
 ): LandingResponse {

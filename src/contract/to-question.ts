@@ -1,10 +1,11 @@
 import type { Refused } from '../planning/fault.ts';
 import { takeoffProcedureFaults } from '../planning/procedure/takeoff-procedure-faults.ts';
 import type { TakeoffQuestion } from '../planning/question.ts';
-import type { AeroplaneLookup } from './aeroplane-lookup.ts';
+import type { CatalogueLookup } from './catalogue-lookup.ts';
 import type { TakeoffRequest } from './takeoff-request.ts';
 import { asked, commonFaults, toCommonQuestion } from './to-common-question.ts';
 import { toKnownAeroplane } from './to-known-aeroplane.ts';
+import { toKnownRunway } from './to-known-runway.ts';
 
 /**
  * The gate in: a takeoff request as planning's question, in SI.
@@ -12,14 +13,15 @@ import { toKnownAeroplane } from './to-known-aeroplane.ts';
  * @param request - read by its schema
  * @returns the question, or every fault of meaning in the request at once
  */
-export function toQuestion(request: TakeoffRequest, lookup: AeroplaneLookup): TakeoffQuestion | Refused {
+export function toQuestion(request: TakeoffRequest, lookup: CatalogueLookup): TakeoffQuestion | Refused {
   const known = toKnownAeroplane(request.aeroplane, lookup);
-  const faults = commonFaults(request, known, 'takeoff');
-  if (!('aeroplane' in known)) return { refused: faults };
+  const runway = toKnownRunway(request.runway, lookup.aerodromes, 'takeoff');
+  const faults = commonFaults(request, runway, known, 'takeoff');
+  if (Array.isArray(runway) || !('aeroplane' in known)) return { refused: faults };
   const { procedure } = request;
   if (procedure !== undefined) faults.push(...takeoffProcedureFaults({ ...asked(request, known), procedure }));
   if (faults.length > 0) return { refused: faults };
-  const common = toCommonQuestion(request, known, 'takeoff');
+  const common = toCommonQuestion({ ...request, runway }, known, 'takeoff');
   const question = { ...common, defaulted: [...common.defaulted, ...defaultedProcedure(procedure)] };
   return procedure === undefined ? question : { ...question, procedure };
 }

@@ -14,18 +14,19 @@ import { toSensitivities, toTrajectory, toWorking } from './to-detail.ts';
 import { toObstaclePath } from './to-obstacle-path.ts';
 import { toShortfall } from './to-shortfall.ts';
 import { toSpeedSet } from './to-speed-set.ts';
+import type { WithKnownRunway } from './with-known-runway.ts';
 
 /**
  * The gate out: planning's answer to a takeoff in the units asked for, rounded the safe way, in the order of the contract.
  *
  * Distances go up, the lower end of a band down, what is available and spare down, all else to the nearest step.
  *
- * @param request - as read
+ * @param request - as read, its runway whole
  * @param question - what the gate in made of it
  */
 export function toResponse(
   answer: TakeoffAnswer,
-  request: TakeoffRequest,
+  request: WithKnownRunway<TakeoffRequest>,
   question: Question,
   stamp: Stamp,
 ): TakeoffResponse {

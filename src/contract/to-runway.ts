@@ -1,5 +1,5 @@
 import { groundSlope } from '../planning/ground-slope.ts';
-import type { Declared, Runway, Surface } from '../planning/question.ts';
+import type { Declared, Runway, RunwayOnFile, Surface } from '../planning/question.ts';
 import type { Draft } from './present.ts';
 import { si } from './quantity.ts';
 import type { RunwayOnWire } from './runway.ts';
@@ -34,6 +34,7 @@ export function toRunway(given: RunwayOnWire, phase: 'takeoff' | 'landing'): Run
       })),
     };
   }
+  if (given.onFile !== undefined) runway.onFile = toOnFile(given.onFile);
   if (!('profile' in given.slope)) return runway;
   const profile = toSlopeProfile(given.slope.profile, startAlong(given));
   return { ...runway, profile, slope: groundSlope(profile, runway, phase) };
@@ -50,6 +51,10 @@ function toStart(given: RunwayOnWire['start']): Runway['start'] {
   return 'point' in given
     ? { kind: 'point', name: given.point }
     : { kind: 'offset', offset: si('length', given.offset) };
+}
+
+function toOnFile({ aerodrome, revision, changed = [], full }: NonNullable<RunwayOnWire['onFile']>): RunwayOnFile {
+  return { aerodrome, revision, changed, ...(full === undefined ? {} : { full: toDeclared(full) }) };
 }
 
 function toDeclared({ tora, toda, asda, lda }: NonNullable<RunwayOnWire['declared']>): Declared {

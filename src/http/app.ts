@@ -1,6 +1,6 @@
 import fastify, { type FastifyInstance, type FastifyServerOptions, LogController } from 'fastify';
 import type { Catalogue } from '../catalogue/read-catalogue.ts';
-import { aeroplaneLookup } from './aeroplane-lookup.ts';
+import { catalogueLookup } from './catalogue-lookup.ts';
 import { acceptable } from './plugins/acceptable.ts';
 import { clientError } from './plugins/client-error.ts';
 import { closing } from './plugins/closing.ts';
@@ -12,6 +12,7 @@ import { answerError, lastResort } from './plugins/last-resort.ts';
 import { parameters } from './plugins/parameters.ts';
 import { requestId, requestIdOf } from './plugins/request-id.ts';
 import { requestLog } from './plugins/request-log.ts';
+import { aerodromes } from './routes/aerodromes.ts';
 import { aeroplanes } from './routes/aeroplanes.ts';
 import { air } from './routes/air.ts';
 import { airspeed } from './routes/airspeed.ts';
@@ -68,9 +69,10 @@ export async function buildApp({ catalogue, logger = false, settings }: House): 
   await documentation(app);
   service(app, catalogue);
   aeroplanes(app, catalogue);
+  aerodromes(app, catalogue);
   ruleSets(app);
   sources(app);
-  const lookup = aeroplaneLookup(catalogue);
+  const lookup = catalogueLookup(catalogue);
   const ours = stamp();
   const warmUps = [
     takeoff(app, lookup, ours),

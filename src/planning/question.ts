@@ -120,6 +120,17 @@ export interface Runway {
   readonly lineUp?: { readonly tora: number; readonly asda: number };
   readonly declared?: Declared;
   readonly obstacles?: Obstacles;
+  readonly onFile?: RunwayOnFile;
+}
+
+/** Where a runway came from, where it is one on file. */
+export interface RunwayOnFile {
+  readonly aerodrome: string;
+  readonly revision: string;
+  /** what the question put in place of what is on file, in words */
+  readonly changed: readonly string[];
+  /** with a named point: what is declared for the whole runway [m] */
+  readonly full?: Declared;
 }
 
 export interface Weather {

@@ -1,4 +1,4 @@
-import { readFileSync, rmSync, writeFileSync } from 'node:fs';
+import { cpSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { describe, expect, it } from 'vitest';
 import { CatalogueFault } from '../../src/catalogue/catalogue-fault.ts';
@@ -6,7 +6,7 @@ import { manifestText } from '../../src/catalogue/manifest.ts';
 import { readCatalogue } from '../../src/catalogue/read-catalogue.ts';
 import { sealFolder } from '../../src/catalogue/seal-folder.ts';
 import { sha256 } from '../../src/catalogue/sha-256.ts';
-import { builtInFolder, inFolder } from '../support/catalogue-folder.ts';
+import { builtInAerodromes, builtInFolder, inFolder } from '../support/catalogue-folder.ts';
 
 const builtInIds = [
   'duvassel-twin',
@@ -128,9 +128,10 @@ describe('readCatalogue', () => {
     });
   });
 
-  it('has one digest for its state: the same on every start, another with any other aeroplane', () => {
+  it('has one digest for its state: the same on every start, another with any other aeroplane or aerodrome', () => {
     expect(readCatalogue({ builtIn: true }).digest).toBe(catalogue.digest);
     inFolder('built-in', (folder) => {
+      cpSync(builtInAerodromes, join(folder, 'aerodromes'), { recursive: true });
       expect(readCatalogue({ builtIn: false, folder }).digest).toBe(catalogue.digest);
       const path = join(folder, 'pellibrin-trainer.json');
       writeFileSync(path, readFileSync(path, 'utf8').replace('"value": 735', '"value": 736'));
@@ -138,6 +139,9 @@ describe('readCatalogue', () => {
       expect(readCatalogue({ builtIn: false, folder }).digest).not.toBe(catalogue.digest);
       rmSync(path);
       sealFolder(folder);
+      expect(readCatalogue({ builtIn: false, folder }).digest).not.toBe(catalogue.digest);
+    });
+    inFolder('built-in', (folder) => {
       expect(readCatalogue({ builtIn: false, folder }).digest).not.toBe(catalogue.digest);
     });
     expect(catalogue.digest).toMatch(/^[0-9a-f]{64}$/);

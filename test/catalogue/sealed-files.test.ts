@@ -11,7 +11,7 @@ import { inFolder } from '../support/catalogue-folder.ts';
 function refusal(folder: string): string {
   let found: unknown;
   try {
-    sealedFiles(folder);
+    sealedFiles(folder, 'aeroplane');
   } catch (error) {
     found = error;
   }
@@ -25,7 +25,7 @@ function refusal(folder: string): string {
 describe('sealedFiles', () => {
   it('gives every file but the manifest, byte for byte', () => {
     inFolder('built-in', (folder) => {
-      const files = sealedFiles(folder);
+      const files = sealedFiles(folder, 'aeroplane');
       expect([...files.keys()]).toEqual(
         readdirSync(folder)
           .filter((name) => name !== manifestName)
@@ -54,7 +54,7 @@ describe('sealedFiles', () => {
         }),
         { numRuns: 500 },
       );
-      sealedFiles(folder);
+      sealedFiles(folder, 'aeroplane');
     });
   });
 
@@ -158,7 +158,7 @@ describe('sealedFiles', () => {
           symlinkSync(join('..data', name), join(mount, name));
         }
         symlinkSync('..2031_01_01', join(mount, '..data'));
-        expect([...sealedFiles(mount).keys()]).toEqual([...sealedFiles(folder).keys()]);
+        expect([...sealedFiles(mount, 'aeroplane').keys()]).toEqual([...sealedFiles(folder, 'aeroplane').keys()]);
       });
     });
   });

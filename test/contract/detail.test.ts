@@ -3,6 +3,7 @@ import { describe, expect, it } from 'vitest';
 import { answerTakeoff } from '../../src/contract/answer-takeoff.ts';
 import type { TakeoffRequest } from '../../src/contract/takeoff-request.ts';
 import { type TakeoffResponse, takeoffResponse } from '../../src/contract/takeoff-response.ts';
+import type { WithKnownRunway } from '../../src/contract/with-known-runway.ts';
 import { isRefused } from '../../src/planning/fault.ts';
 import { unitFamilies } from '../../src/units/presentation.ts';
 import { anyTakeoff, builtIn } from '../support/any-takeoff.ts';
@@ -14,7 +15,7 @@ function answered(request: TakeoffRequest): TakeoffResponse | undefined {
   return isRefused(answer) ? undefined : answer;
 }
 
-const plain: TakeoffRequest = {
+const plain: WithKnownRunway<TakeoffRequest> = {
   aeroplane: { id: 'pellibrin-trainer' },
   mass: { value: 700, unit: 'kg' },
   configuration: 'takeoff-12',

@@ -44,6 +44,8 @@ describe('the OpenAPI document', () => {
     expect(operations.map(({ path, method }) => `${method} ${path}`).sort()).toEqual([
       'get /health/live',
       'get /health/ready',
+      'get /v1/aerodromes',
+      'get /v1/aerodromes/{id}',
       'get /v1/aeroplanes',
       'get /v1/aeroplanes/{id}',
       'get /v1/rule-sets',

@@ -11,7 +11,15 @@ beforeAll(async () => {
 afterAll(() => app.close());
 
 const questions = ['/v1/takeoff', '/v1/speeds', '/v1/airspeed', '/v1/air'];
-const lists = ['/v1/aeroplanes', '/v1/rule-sets', '/v1/sources', '/health/live', '/health/ready', '/version'];
+const lists = [
+  '/v1/aerodromes',
+  '/v1/aeroplanes',
+  '/v1/rule-sets',
+  '/v1/sources',
+  '/health/live',
+  '/health/ready',
+  '/version',
+];
 
 describe('paths and methods', () => {
   it.each([...lists, '/v1/aeroplanes/pellibrin-trainer', '/openapi.json', '/docs'])('GET %s answers', async (url) => {

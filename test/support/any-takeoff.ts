@@ -1,13 +1,14 @@
 import fc from 'fast-check';
 import { readCatalogue } from '../../src/catalogue/read-catalogue.ts';
 import type { AeroplaneDefinition } from '../../src/contract/aeroplane-definition.ts';
-import type { AeroplaneLookup } from '../../src/contract/aeroplane-lookup.ts';
+import type { CatalogueLookup } from '../../src/contract/catalogue-lookup.ts';
 import type { TakeoffRequest } from '../../src/contract/takeoff-request.ts';
-import { aeroplaneLookup } from '../../src/http/aeroplane-lookup.ts';
+import type { WithKnownRunway } from '../../src/contract/with-known-runway.ts';
+import { catalogueLookup } from '../../src/http/catalogue-lookup.ts';
 import { warmUpStates } from '../../src/http/warm-up-states.ts';
 
 const catalogue = readCatalogue({ builtIn: true });
-export const builtIn: AeroplaneLookup = aeroplaneLookup(catalogue);
+export const builtIn: CatalogueLookup = catalogueLookup(catalogue);
 
 const between = (min: number, max: number) => fc.double({ min, max, noNaN: true });
 const q = <U extends string>(unit: U, min: number, max: number) => between(min, max).map((value) => ({ value, unit }));
@@ -78,7 +79,7 @@ const wind: fc.Arbitrary<TakeoffRequest['weather']['wind']> = fc.oneof(
 );
 
 /** Takeoffs with every choice of form, of which most but not all have distances. */
-export const anyTakeoff: fc.Arbitrary<TakeoffRequest> = fc
+export const anyTakeoff: fc.Arbitrary<WithKnownRunway<TakeoffRequest>> = fc
   .record({
     definition: fc.constantFrom(...definitions),
     share: between(0.75, 1),

@@ -1,7 +1,7 @@
 import { spawnSync } from 'node:child_process';
 import { cpSync, mkdirSync, mkdtempSync, rmSync } from 'node:fs';
 import { join } from 'node:path';
-import { builtInFolder } from './catalogue-folder.ts';
+import { builtInAerodromes, builtInFolder } from './catalogue-folder.ts';
 import { root } from './sources.ts';
 
 /** The service compiled as `npm run build` compiles it, in a folder of its own; types are checked elsewhere. */
@@ -24,5 +24,6 @@ export function builtService(): BuiltService {
   if (status !== 0) throw new Error(stdout);
   const aeroplanes = join(folder, 'catalogue', 'aeroplanes');
   cpSync(builtInFolder, aeroplanes, { recursive: true });
+  cpSync(builtInAerodromes, join(folder, 'catalogue', 'aerodromes'), { recursive: true });
   return { main: join(folder, 'main.js'), aeroplanes, takeAway: () => rmSync(folder, { recursive: true }) };
 }

@@ -6,6 +6,9 @@ import { root } from './sources.ts';
 /** The folder of the built-in aeroplanes. */
 export const builtInFolder = join(root, 'src', 'catalogue', 'aeroplanes');
 
+/** The folder of the built-in aerodromes. */
+export const builtInAerodromes = join(root, 'src', 'catalogue', 'aerodromes');
+
 /** Runs a test on a folder of its own, empty or with the built-in aeroplanes in it, and takes it away afterwards. */
 export function inFolder<T>(content: 'empty' | 'built-in', run: (folder: string) => T): T {
   const folder = mkdtempSync(join(tmpdir(), 'catalogue-'));

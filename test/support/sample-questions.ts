@@ -1,5 +1,5 @@
 import type { AeroplaneDefinition } from '../../src/contract/aeroplane-definition.ts';
-import type { AeroplaneLookup } from '../../src/contract/aeroplane-lookup.ts';
+import type { CatalogueLookup } from '../../src/contract/catalogue-lookup.ts';
 import type { LandingRequest } from '../../src/contract/landing-request.ts';
 import type { TakeoffRequest } from '../../src/contract/takeoff-request.ts';
 import { toAeroplane } from '../../src/contract/to-aeroplane.ts';
@@ -172,14 +172,19 @@ export function sampleLanding(): LandingRequest {
 }
 
 /** A lookup that knows these definitions; digests are made of the id. */
-export function sampleLookup(...definitions: readonly AeroplaneDefinition[]): AeroplaneLookup {
+export function sampleLookup(...definitions: readonly AeroplaneDefinition[]): CatalogueLookup {
   const known = new Map(
     definitions.map((definition) => [
       definition.id,
       { aeroplane: toAeroplane(definition), definition, digest: `digest of ${definition.id}` },
     ]),
   );
-  return { get: (id) => known.get(id), ids: [...known.keys()], digestOf: (definition) => `digest of ${definition.id}` };
+  return {
+    get: (id) => known.get(id),
+    ids: [...known.keys()],
+    digestOf: (definition) => `digest of ${definition.id}`,
+    aerodromes: { get: () => undefined, ids: [] },
+  };
 }
 
 /** A copy with one member, named by a pointer, replaced; undefined takes it away. */

@@ -4,6 +4,7 @@ import { si } from '../quantity.ts';
 import type { RunwayOnWire } from '../runway.ts';
 import { startAlong } from '../to-ground-line.ts';
 import { written } from '../written.ts';
+import { checkDeclared } from './check-declared.ts';
 import { checkProfile } from './check-profile.ts';
 import { checkSurface } from './check-surface.ts';
 
@@ -11,32 +12,12 @@ import { checkSurface } from './check-surface.ts';
 export function checkRunway(runway: RunwayOnWire, phase: 'takeoff' | 'landing'): Fault[] {
   const start = checkStart(runway, phase);
   return [
-    ...checkDeclared(runway.declared ?? {}),
+    ...checkDeclared(runway.declared ?? {}, '/runway/declared'),
     ...start,
     ...(start.length > 0 ? [] : checkProfile(runway, phase)),
     ...checkSurface(runway.surface),
     ...checkObstacles(runway, phase),
   ];
-}
-
-function checkDeclared({ tora, toda, asda }: NonNullable<RunwayOnWire['declared']>): Fault[] {
-  if (tora === undefined) return [];
-  const faults: Fault[] = [];
-  for (const [name, length] of [
-    ['toda', toda],
-    ['asda', asda],
-  ] as const) {
-    if (length === undefined || si('length', length) >= si('length', tora) * (1 - 1e-9)) continue;
-    faults.push({
-      pointer: `/runway/declared/${name}`,
-      code: 'contradiction',
-      message: `${name.toUpperCase()} ${written(length)} is shorter than TORA ${written(tora)}, of which it is a part.`,
-      received: length.value,
-      allowed: `at least ${written(tora)}`,
-      hint: 'Check the unit and whether the two were exchanged.',
-    });
-  }
-  return faults;
 }
 
 /** What a start offset and lining up take must leave something of each declared distance. */

@@ -10,10 +10,18 @@ const at = '/runway/surface';
 
 /** Members of a surface against each other. */
 export function checkSurface(surface: SurfaceOnWire): Fault[] {
-  return [...checkGround(surface), ...checkState(surface), ...checkDepth(surface)];
+  return [...checkGround(surface, at), ...checkState(surface), ...checkDepth(surface)];
 }
 
-function checkGround({ kind, grass, firmness }: SurfaceOnWire): Fault[] {
+/**
+ * What a surface is made of, its members against each other.
+ *
+ * @param at - pointer to the surface
+ */
+export function checkGround(
+  { kind, grass, firmness }: Pick<SurfaceOnWire, 'kind' | 'grass' | 'firmness'>,
+  at: string,
+): Fault[] {
   const faults: Fault[] = [];
   if (grass !== undefined && kind !== 'grass') {
     faults.push({

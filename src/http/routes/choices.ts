@@ -1,6 +1,6 @@
 import type { FastifyInstance } from 'fastify';
-import type { AeroplaneLookup } from '../../contract/aeroplane-lookup.ts';
 import { answerLandingChoices, answerTakeoffChoices } from '../../contract/answer-choices.ts';
+import type { CatalogueLookup } from '../../contract/catalogue-lookup.ts';
 import { landingChoicesRequest, takeoffChoicesRequest } from '../../contract/choices-request.ts';
 import { landingChoicesResponse, takeoffChoicesResponse } from '../../contract/choices-response.ts';
 import type { Stamp } from '../../contract/to-basis.ts';
@@ -9,7 +9,7 @@ import { exampleTakeoff } from '../document/example-takeoff.ts';
 import { addOperation, type WarmUp } from '../operation.ts';
 
 /** The ways to take off: runway ends, starts and configurations under one weather and mass. */
-export function takeoffChoices(app: FastifyInstance, lookup: AeroplaneLookup, stamp: Stamp): WarmUp {
+export function takeoffChoices(app: FastifyInstance, lookup: CatalogueLookup, stamp: Stamp): WarmUp {
   const { runway, configuration, ...common } = exampleTakeoff;
   const example = { ...common, choices: [{ name: 'as filed', configuration, runway }] };
   return addOperation(app, {
@@ -28,7 +28,7 @@ export function takeoffChoices(app: FastifyInstance, lookup: AeroplaneLookup, st
 }
 
 /** The ways to land: runway ends, thresholds and configurations under one weather and mass. */
-export function landingChoices(app: FastifyInstance, lookup: AeroplaneLookup, stamp: Stamp): WarmUp {
+export function landingChoices(app: FastifyInstance, lookup: CatalogueLookup, stamp: Stamp): WarmUp {
   const { runway, configuration, ...common } = exampleLanding;
   const example = { ...common, choices: [{ name: 'as filed', configuration, runway }] };
   return addOperation(app, {

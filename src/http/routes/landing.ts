@@ -1,7 +1,7 @@
 import type { FastifyInstance } from 'fastify';
 import * as z from 'zod';
-import type { AeroplaneLookup } from '../../contract/aeroplane-lookup.ts';
 import { answerLanding } from '../../contract/answer-landing.ts';
+import type { CatalogueLookup } from '../../contract/catalogue-lookup.ts';
 import { landingRequest } from '../../contract/landing-request.ts';
 import { landingResponse } from '../../contract/landing-response.ts';
 import { selected } from '../../contract/selection/selected.ts';
@@ -12,7 +12,7 @@ import { addOperation, type WarmUp } from '../operation.ts';
 import { warmUpStates } from '../warm-up-states.ts';
 
 /** The landing; warmed up with each kind of propulsion. */
-export function landing(app: FastifyInstance, lookup: AeroplaneLookup, stamp: Stamp): WarmUp {
+export function landing(app: FastifyInstance, lookup: CatalogueLookup, stamp: Stamp): WarmUp {
   const { procedure: _, ...plain } = exampleLanding;
   return addOperation(app, {
     url: '/v1/landing',

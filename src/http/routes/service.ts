@@ -37,6 +37,7 @@ export function service(app: FastifyInstance, catalogue: Catalogue): void {
       version: serviceVersion,
       modelVersion,
       aeroplanes: catalogue.aeroplanes,
+      aerodromes: catalogue.aerodromes.count,
       digests: { catalogue: catalogue.digest },
     },
   });

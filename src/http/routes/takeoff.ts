@@ -1,7 +1,7 @@
 import type { FastifyInstance } from 'fastify';
 import * as z from 'zod';
-import type { AeroplaneLookup } from '../../contract/aeroplane-lookup.ts';
 import { answerTakeoff } from '../../contract/answer-takeoff.ts';
+import type { CatalogueLookup } from '../../contract/catalogue-lookup.ts';
 import { selected } from '../../contract/selection/selected.ts';
 import { selectedAnswer } from '../../contract/selection/selected-answer.ts';
 import { takeoffRequest } from '../../contract/takeoff-request.ts';
@@ -12,7 +12,7 @@ import { addOperation, type WarmUp } from '../operation.ts';
 import { warmUpStates } from '../warm-up-states.ts';
 
 /** The takeoff; warmed up with each kind of propulsion. */
-export function takeoff(app: FastifyInstance, lookup: AeroplaneLookup, stamp: Stamp): WarmUp {
+export function takeoff(app: FastifyInstance, lookup: CatalogueLookup, stamp: Stamp): WarmUp {
   return addOperation(app, {
     url: '/v1/takeoff',
     operationId: 'takeoff',

@@ -16,10 +16,12 @@ import { marginNegative } from './margin-negative.ts';
 import { marginThin } from './margin-thin.ts';
 import { massAboveMaximumLanding } from './mass-above-maximum-landing.ts';
 import { methodIsEstimate } from './method-is-estimate.ts';
+import { pointAtFullLength } from './point-at-full-length.ts';
 import { pressureAltitudeAboveLimit } from './pressure-altitude-above-limit.ts';
 import { pressureExtreme } from './pressure-extreme.ts';
 import { referenceSpeedRaised } from './reference-speed-raised.ts';
 import { reverseCounted } from './reverse-counted.ts';
+import { runwayChanged } from './runway-changed.ts';
 import { slopeSteep } from './slope-steep.ts';
 import { tailwind } from './tailwind.ts';
 import { tailwindBeyondLimit } from './tailwind-beyond-limit.ts';
@@ -55,6 +57,8 @@ export const landingCautions: readonly CautionTest<LandingContext>[] = [
   temperatureFarFromStandard,
   pressureExtreme,
   slopeSteep,
+  pointAtFullLength,
+  runwayChanged,
   assumptionMatters,
   methodIsEstimate,
 ];

@@ -11,10 +11,12 @@ import { marginNegative } from './margin-negative.ts';
 import { marginThin } from './margin-thin.ts';
 import { massAboveMaximum } from './mass-above-maximum.ts';
 import { methodIsEstimate } from './method-is-estimate.ts';
+import { pointAtFullLength } from './point-at-full-length.ts';
 import { pressureAltitudeAboveLimit } from './pressure-altitude-above-limit.ts';
 import { pressureExtreme } from './pressure-extreme.ts';
 import { reducedPower } from './reduced-power.ts';
 import { rollingStart } from './rolling-start.ts';
+import { runwayChanged } from './runway-changed.ts';
 import { screenSpeedBelowLiftOff } from './screen-speed-below-lift-off.ts';
 import { slopeSteep } from './slope-steep.ts';
 import { tailwind } from './tailwind.ts';
@@ -42,6 +44,8 @@ export const takeoffCautions: readonly CautionTest<TakeoffContext>[] = [
   temperatureFarFromStandard,
   pressureExtreme,
   slopeSteep,
+  pointAtFullLength,
+  runwayChanged,
   clearwayCapped,
   screenSpeedBelowLiftOff,
   reducedPower,

@@ -58,6 +58,11 @@ const measuredTo = (knots: number): LandingChanges => ({
   },
 });
 
+const filed = { aerodrome: 'some-field', revision: '2', changed: [] };
+const atPoint = (full: number): LandingChanges => ({
+  runway: { start: { kind: 'point', name: 'B' }, onFile: { ...filed, full: { lda: full } } },
+});
+
 interface Pair {
   readonly code: string;
   readonly severity: string;
@@ -277,6 +282,27 @@ const pairs: readonly Pair[] = [
     raised: slope(2.1),
     silent: slope(1.9),
     says: /acts along the runway against the landing/,
+  },
+  {
+    code: 'slope-steep',
+    severity: 'caution',
+    raised: { runway: { slope: 0.005, profile: { ends: [200, 9000], slopes: [0.021, 0.0046] } } },
+    silent: { runway: { slope: 0.005, profile: { ends: [200, 9000], slopes: [0.02, 0.0046] } } },
+    says: /^A stretch of runway 07 slopes 2\.1 % uphill/,
+  },
+  {
+    code: 'point-at-full-length',
+    severity: 'caution',
+    raised: atPoint(1500),
+    silent: atPoint(1501),
+    says: /^LDA from B is 1 500 m, no less than for the whole of runway 07\./,
+  },
+  {
+    code: 'runway-changed',
+    severity: 'note',
+    raised: { runway: { onFile: { ...filed, changed: ['declared/tora 1400 m in place of 1500 m'] } } },
+    silent: { runway: { onFile: filed } },
+    says: /^Runway 07 is that of some-field, revision 2, with changes of the question: declared\/tora 1400 m/,
   },
   {
     code: 'assumption-matters',

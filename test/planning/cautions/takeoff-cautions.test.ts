@@ -54,6 +54,11 @@ const rolling = (start: 'standing' | 'rolling'): Changes => ({
   question: { procedure: { start } },
 });
 
+const filed = { aerodrome: 'some-field', revision: '2', changed: [] };
+const atPoint = (full: number): Changes => ({
+  runway: { start: { kind: 'point', name: 'B' }, onFile: { ...filed, full: { tora: full, toda: 9000, asda: 9000 } } },
+});
+
 interface Pair {
   readonly code: string;
   readonly severity: string;
@@ -332,6 +337,27 @@ const pairs: readonly Pair[] = [
     },
     silent: {},
     says: /^The aeroplane is plain-trainer, revision 1, with changes: propulsion\/staticThrust 2366 N in place of 2300 N\. The reason given: "a new propeller"\./,
+  },
+  {
+    code: 'slope-steep',
+    severity: 'caution',
+    raised: { runway: { slope: 0.005, profile: { ends: [200, 9000], slopes: [0.021, 0.0046] } } },
+    silent: { runway: { slope: 0.005, profile: { ends: [200, 9000], slopes: [0.02, 0.0046] } } },
+    says: /^A stretch of runway 07 slopes 2\.1 % uphill/,
+  },
+  {
+    code: 'point-at-full-length',
+    severity: 'caution',
+    raised: atPoint(1500),
+    silent: atPoint(1501),
+    says: /^TORA from B is 1 500 m, no less than for the whole of runway 07\./,
+  },
+  {
+    code: 'runway-changed',
+    severity: 'note',
+    raised: { runway: { onFile: { ...filed, changed: ['declared/tora 1400 m in place of 1500 m'] } } },
+    silent: { runway: { onFile: filed } },
+    says: /^Runway 07 is that of some-field, revision 2, with changes of the question: declared\/tora 1400 m/,
   },
   {
     code: 'assumption-matters',

@@ -1,0 +1,13 @@
+import { digest } from '../catalogue/digest.ts';
+import type { Catalogue } from '../catalogue/read-catalogue.ts';
+import type { CatalogueLookup } from '../contract/catalogue-lookup.ts';
+
+/** The catalogue as the contract's gate asks it. */
+export function catalogueLookup({ get, list, aerodromes }: Catalogue): CatalogueLookup {
+  return {
+    get,
+    ids: list().map(({ definition }) => definition.id),
+    digestOf: digest,
+    aerodromes: { get: aerodromes.get, ids: aerodromes.list().map(({ definition }) => definition.id) },
+  };
+}
