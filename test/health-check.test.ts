@@ -1,9 +1,9 @@
 import { spawn } from 'node:child_process';
+import { readFileSync } from 'node:fs';
 import { createServer } from 'node:http';
 import type { AddressInfo } from 'node:net';
 import { join } from 'node:path';
 import { describe, expect, it } from 'vitest';
-import { testHouse } from './support/house.ts';
 import { root } from './support/sources.ts';
 
 /** Runs the health check with the address of a service. */
@@ -19,31 +19,40 @@ function healthCheck(variables: Record<string, string>): Promise<{ code: number 
   });
 }
 
-/** A server that answers every request in one way, or never. */
-async function answering(status: number | 'never', run: (port: string) => Promise<void>): Promise<void> {
-  const server = createServer((_, response) => {
+/** A server that answers every request with one status, or never; says afterwards what it was asked. */
+async function answering(status: number | 'never', run: (port: string) => Promise<void>): Promise<string[]> {
+  const asked: string[] = [];
+  const server = createServer(({ method, url }, response) => {
+    asked.push(`${method} ${url}`);
     if (status !== 'never') response.writeHead(status).end();
   });
-  await new Promise<void>((resolve) => server.listen(0, '127.0.0.1', resolve));
+  await new Promise<void>((resolve) => server.listen(0, '0.0.0.0', resolve));
   try {
     await run(String((server.address() as AddressInfo).port));
   } finally {
     server.closeAllConnections();
-    server.close();
+    await new Promise((resolve) => server.close(resolve));
   }
+  return asked;
 }
 
 describe('the health check', () => {
-  it('finds the service ready where PORT and HOST say, and gone once it has closed', async () => {
-    const app = await testHouse();
-    await app.listen({ port: 0, host: '0.0.0.0' });
-    const PORT = String((app.server.address() as AddressInfo).port);
-    expect(await healthCheck({ PORT })).toEqual({ code: 0, stderr: '' });
-    expect(await healthCheck({ PORT, HOST: '0.0.0.0' })).toEqual({ code: 0, stderr: '' });
-    await app.close();
-    const { code, stderr } = await healthCheck({ PORT });
+  it('asks where PORT and HOST say, and finds the service ready or gone', async () => {
+    let last = '';
+    const asked = await answering(200, async (PORT) => {
+      last = PORT;
+      expect(await healthCheck({ PORT })).toEqual({ code: 0, stderr: '' });
+      expect(await healthCheck({ PORT, HOST: '0.0.0.0' })).toEqual({ code: 0, stderr: '' });
+    });
+    expect(asked).toEqual(['GET /health/ready', 'GET /health/ready']);
+    const { code, stderr } = await healthCheck({ PORT: last });
     expect(code).toBe(1);
     expect(stderr).toMatch(/^not ready: .*ECONNREFUSED.*\n$/);
+  });
+
+  it('asks for what the service says of itself when it can compute', () => {
+    const { paths } = JSON.parse(readFileSync(join(root, 'openapi', 'openapi.json'), 'utf8'));
+    expect(paths['/health/ready'].get.operationId).toBe('ready');
   });
 
   it('takes any other status than 200 for not ready', async () => {

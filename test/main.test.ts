@@ -23,6 +23,13 @@ beforeAll(() => {
 });
 afterAll(() => service.takeAway());
 
+/** Leaves a process of Node.js what a read-only container leaves it. The flag's first name is that of Node.js 20. */
+const readingOnly = [
+  process.allowedNodeEnvironmentFlags.has('--permission') ? '--permission' : '--experimental-permission',
+  '--allow-fs-read=*',
+  '--disable-warning=ExperimentalWarning',
+];
+
 /** Runs the service until it ends; a service that listens is sent a signal. */
 function run(variables: Record<string, string>, ...given: readonly string[]): Promise<Ended> {
   return runNode([service.main, ...given], variables);
@@ -86,25 +93,18 @@ describe('the start', () => {
     expect(stderr).toMatch(/^field-length service does not start: .*203\.0\.113\.7.*\n$/);
   });
 
-  it('listens, logs where, and ends in peace on SIGTERM', async () => {
-    const { code, stdout, stderr } = await run({ PORT: '0' });
+  it('listens, logs where, and ends in peace on SIGTERM, writing no file and starting no process', async () => {
+    const { code, stdout, stderr } = await runNode([...readingOnly, service.main], { PORT: '0' });
     expect(stderr).toBe('');
     expect(stdout).toMatch(/127\.0\.0\.1:\d+/);
     expect(code).toBe(0);
   });
 
-  it('needs to write no file, and no process beside its own, as a read-only container asks', async () => {
-    // Node.js called its permissions experimental until they became stable under their present name
-    const permission = process.allowedNodeEnvironmentFlags.has('--permission')
-      ? '--permission'
-      : '--experimental-permission';
-    const limits = [permission, '--allow-fs-read=*', '--no-warnings'];
-    const { code, stdout, stderr } = await runNode([...limits, service.main], { PORT: '0' });
-    expect([code, stderr]).toEqual([0, '']);
-    expect(stdout).toMatch(/listening/i);
-    const file = join(service.aeroplanes, 'written.json');
-    const writing = [...limits, '-e', `fs.writeFileSync(${JSON.stringify(file)}, '')`];
-    expect(await runNode(writing, {})).toMatchObject({ code: 1, stderr: expect.stringContaining('ERR_ACCESS_DENIED') });
+  it('would be found out if it wrote a file', async () => {
+    const writing = `fs.writeFileSync(${JSON.stringify(join(service.aeroplanes, 'written.json'))}, '')`;
+    const { code, stderr } = await runNode([...readingOnly, '-e', writing], {});
+    expect(code).toBe(1);
+    expect(stderr).toContain('ERR_ACCESS_DENIED');
   });
 
   it('says under --check in one line that all is in order, and does not listen', async () => {
