@@ -1,6 +1,7 @@
 import { fc, test } from '@fast-check/vitest';
 import { describe, expect, it } from 'vitest';
 import type { Check, LandingAnswer } from '../../src/planning/answer.ts';
+import { conditionsOf, ruledRuns } from '../../src/planning/conditions.ts';
 import { isRefused } from '../../src/planning/fault.ts';
 import { planLanding } from '../../src/planning/plan-landing.ts';
 import type { LandingQuestion, Surface } from '../../src/planning/question.ts';
@@ -166,6 +167,65 @@ describe('the outcome', () => {
     const gravel = landed(changed(classB, { runway: { surface: { kind: 'gravel', state: 'dry' } } }));
     expect(check(gravel).startsFrom).toBe('credited');
     expect(check(gravel).alternative).toBeUndefined();
+  });
+});
+
+describe('the procedure', () => {
+  it('rolls for a reaction time instead of the time of the definition, at the touchdown speed', () => {
+    const slower = landed(changed(plainLanding, { question: { procedure: { reactionTime: 2.5 } } }));
+    const { distances, speeds } = landed(plainLanding);
+    const longer = (slower.distances?.groundRoll.value ?? 0) - (distances?.groundRoll.value ?? 0);
+    expectRatio(longer, 1.5 * speeds.touchdown.tas, 1e-9);
+  });
+  it('comes down the angle that is asked for', () => {
+    const angle = (3.5 * Math.PI) / 180;
+    const asked = landed(changed(plainLanding, { question: { procedure: { approachAngle: angle } } }));
+    const stated = landed(changed(plainLanding, { configuration: { approachAngle: angle } }));
+    expect(asked.distances).toEqual(stated.distances);
+  });
+});
+
+describe('why there are no distances', () => {
+  const icy = { runway: { surface: { kind: 'ice', state: 'dry' }, slope: -0.08 } } as const;
+  it('is in numbers: no deceleration, or a headwind at the touchdown speed', () => {
+    const [never] = landed(changed(plainLanding, icy)).shortfall ?? [];
+    expect(never).toMatchObject({ at: '/runway/surface', axis: 'decelerationRatio', bound: 0, side: 'below' });
+    expect(never?.given as number).toBeLessThan(0);
+    const windy = landed(changed(plainLanding, along(90)));
+    expect(windy.shortfall?.[0]).toMatchObject({
+      at: '/weather/wind',
+      given: { kind: 'speed', value: expect.closeTo(46.3, 9) },
+      bound: { kind: 'speed', value: windy.speeds.touchdown.tas },
+    });
+  });
+  it('names the wind that the rules credit where only in that one it does not stop', () => {
+    const gentle = { runway: { surface: { kind: 'ice', state: 'dry' }, slope: -0.028 } } as const;
+    const tail = { ...gentle, weather: { wind: { kind: 'components', headwind: -5 } } } as const;
+    expect(landed(changed(plainLanding, tail)).distances).toBeDefined();
+    expect(landed(changed(classB, tail)).sentence).toMatch(/^Never stops in the wind that the rules credit: at /);
+    const steeper = { ...tail, runway: { ...gentle.runway, slope: -0.08 } };
+    expect(landed(changed(classB, steeper)).sentence).toMatch(/^Never stops: at /);
+  });
+});
+
+describe('rules that do not apply', () => {
+  it('take no part in the runs: the wind is as given', () => {
+    const heavy = changed(plainLanding, {
+      aeroplane: { masses: { maximumTakeoff: 5701 } },
+      question: { ruleSet: 'eu-class-b' },
+      weather: { wind: { kind: 'components', headwind: -landed(plainLanding).speeds.touchdown.tas } },
+    });
+    const conditions = conditionsOf(heavy, 'landing');
+    if (isRefused(conditions)) throw new Error('refused');
+    const ruled = ruledRuns(conditions, conditions.ruleSet.landing, heavy.runway);
+    expect(ruled).toEqual({ creditedHeadwind: conditions.wind.headwind, needsReference: false });
+    const applies = conditionsOf(changed(heavy, { aeroplane: { masses: { maximumTakeoff: 1050 } } }), 'landing');
+    if (isRefused(applies)) throw new Error('refused');
+    expectRatio(
+      ruledRuns(applies, applies.ruleSet.landing, heavy.runway).creditedHeadwind,
+      1.5 * applies.wind.headwind,
+      1e-12,
+    );
   });
 });
 
