@@ -28,6 +28,7 @@ export const time = shownSchema('AnsweredTime', 'time', 'A time.');
 const kinds: readonly Kind[] = [
   'distance',
   'altitude',
+  'depth',
   'speed',
   'mass',
   'temperature',

@@ -13,6 +13,8 @@ import { slope } from './slope.ts';
 import { id, shortText, text } from './text.ts';
 import { north } from './weather.ts';
 
+const conditionCode = z.number().int().min(0).max(6);
+
 export const surface = z
   .strictObject({
     kind: z.enum(surfaceKinds).meta({ description: 'What the surface is made of.' }),
@@ -30,6 +32,13 @@ export const surface = z
           .exactOptional(),
       })
       .meta({ id: 'Contaminant', description: 'Water, slush, snow, frost or ice on the runway.' })
+      .exactOptional(),
+    runwayConditionCode: z
+      .union([conditionCode, z.tuple([conditionCode, conditionCode, conditionCode])])
+      .meta({
+        description:
+          'Runway condition code, 6 dry to 0 less than poor: one for the whole runway, or one a third in the direction of movement.',
+      })
       .exactOptional(),
     rollingFrictionCoefficient: z
       .number()

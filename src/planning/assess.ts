@@ -1,3 +1,4 @@
+import { filmAsWet } from '../physics/runway-surface.ts';
 import type { Check, Outcome } from './answer.ts';
 import { type Band, highOverOf } from './band.ts';
 import type { Conditions } from './conditions.ts';
@@ -17,7 +18,7 @@ export interface Checked {
 
 /** What there is to assess. */
 export interface Assessing {
-  readonly conditions: Pick<Conditions, 'ruleSet' | 'doesNotApply'>;
+  readonly conditions: Pick<Conditions, 'ruleSet' | 'doesNotApply' | 'condition'>;
   readonly rules: PhaseRules;
   readonly runway: Pick<Runway, 'surface' | 'slope'>;
   readonly declared: DeclaredDistances;
@@ -49,7 +50,9 @@ export function assess(assessing: Assessing): Assessed {
   const { stated, credited, reference } = distances;
   const noSurface = notReached === undefined && credited === undefined && reference === undefined;
   const isAssessed = notReached === undefined && doesNotApply === undefined && !noSurface;
-  const ofRunway = isAssessed ? checksOf(rules, distances, runway, declared) : undefined;
+  const ofRunway = isAssessed
+    ? checksOf(rules, distances, runway, declared, conditions.condition.isSlippery)
+    : undefined;
   const checks = ofRunway && assessing.further ? [...ofRunway, ...assessing.further(ofRunway)] : ofRunway;
   const thinRatio = ruleSet.thinMargin.ratio;
   const highOver = (of: string) => highOverOf(band, of);
@@ -76,10 +79,23 @@ function checksOf(
   { credited, reference }: Runs<Checked>,
   { surface, slope }: Pick<Runway, 'surface' | 'slope'>,
   declared: DeclaredDistances,
+  isSlippery: boolean,
 ): readonly Check[] {
-  const factors = rules.runwayFactors(surface, slope);
+  const factors = rules.runwayFactors(filmAsWet(surface), slope);
   return rules.requirements(declared).map((requirement) => {
     const of = requirement.of === 'groundRoll' ? 'groundRoll' : 'wholeDistance';
-    return checkOf(requirement, { reference: reference?.[of], credited: credited?.[of] }, factors, declared);
+    const check = checkOf(requirement, { reference: reference?.[of], credited: credited?.[of] }, factors, declared);
+    return isSlippery && requirement.presumesDryOrWet ? withoutStop(check) : check;
   });
+}
+
+/** A check by a factor that presumes a dry or a wet runway: on a slippery one it can fail, and cannot pass. */
+function withoutStop(check: Check): Check {
+  if (check.result !== 'passes') return check;
+  const { margin: _, marginRatio: __, ...rest } = check;
+  return {
+    ...rest,
+    result: 'not-assessed',
+    why: 'the stop is not computed on this surface, and the factor that stands for it presumes a dry or wet runway',
+  };
 }

@@ -1,9 +1,11 @@
 import type { Configuration } from '../performance/aeroplane.ts';
 import type { Air } from '../performance/air.ts';
+import { filmAsWet } from '../physics/runway-surface.ts';
 import { airAtRunway, chosenConfiguration, chosenRuleSet, isFault } from './chosen.ts';
 import type { Refused } from './fault.ts';
 import type { Question } from './question.ts';
 import type { PhaseRules, RuleSet } from './rules/rule-set.ts';
+import { type RunwayCondition, runwayCondition } from './runway-condition.ts';
 import { type WindAlong, windAlong } from './wind-along.ts';
 import { windCredit } from './wind-credit.ts';
 
@@ -13,6 +15,8 @@ export interface Conditions {
   readonly configuration: Configuration;
   readonly air: Air;
   readonly wind: WindAlong;
+  /** what lies on the runway */
+  readonly condition: RunwayCondition;
   /** [m/s] */
   readonly creditedHeadwind: number;
   /** why the rule set does not speak of the aeroplane; undefined where it does */
@@ -33,6 +37,7 @@ export function conditionsOf(question: Question, phase: 'takeoff' | 'landing'): 
     configuration,
     air,
     wind,
+    condition: runwayCondition(question),
     creditedHeadwind: windCredit(wind.headwind, ruleSet.windCredit),
     doesNotApply: ruleSet.doesNotApply(question.aeroplane),
   };
@@ -40,13 +45,14 @@ export function conditionsOf(question: Question, phase: 'takeoff' | 'landing'): 
 
 /** What the rule set makes of the runs behind an answer; nothing where it does not apply. */
 export function ruledRuns(
-  { creditedHeadwind, wind, doesNotApply }: Conditions,
+  { creditedHeadwind, wind, condition, doesNotApply }: Conditions,
   { startsFrom, runwayFactors }: PhaseRules,
   { surface, slope }: Question['runway'],
 ): { readonly creditedHeadwind: number; readonly needsReference: boolean } {
   if (doesNotApply !== undefined) return { creditedHeadwind: wind.headwind, needsReference: false };
+  const isAnswered = condition.refusal === undefined && startsFrom === 'reference';
   return {
     creditedHeadwind,
-    needsReference: startsFrom === 'reference' && runwayFactors(surface, slope) !== undefined,
+    needsReference: isAnswered && runwayFactors(filmAsWet(surface), slope) !== undefined,
   };
 }

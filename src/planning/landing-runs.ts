@@ -1,7 +1,8 @@
 import { landing } from '../performance/landing/landing.ts';
-import type { LandingResult, LandingRun } from '../performance/landing/landing-run.ts';
+import type { BrakedStretch, LandingResult, LandingRun } from '../performance/landing/landing-run.ts';
 import type { BrakingFriction } from '../physics/braking-friction.ts';
 import { inducedDragFactor } from '../physics/drag.ts';
+import type { StoppingDrag } from '../physics/stopping-drag.ts';
 import type { LandingAnswer } from './answer.ts';
 import type { Checked } from './assess.ts';
 import type { LandingQuestion } from './question.ts';
@@ -34,6 +35,10 @@ export interface LandingAir {
   /** [m/s] */
   readonly headwind: number;
   readonly braking: BrakingFriction;
+  /** where the runway is not the same throughout */
+  readonly stretches?: readonly BrakedStretch[] | undefined;
+  /** what a loose contaminant helps */
+  readonly contaminantDrag?: StoppingDrag | undefined;
 }
 
 /** The run on the runway as it is, in the wind as given: all that the integrations need. */
@@ -41,7 +46,7 @@ export function statedLanding(
   question: Pick<LandingQuestion, 'aeroplane' | 'mass' | 'runway' | 'procedure'>,
   resolved: ResolvedLanding,
   speeds: LandingAnswer['speeds'],
-  { density, headwind, braking }: LandingAir,
+  { density, headwind, braking, stretches, contaminantDrag }: LandingAir,
 ): LandingRun {
   const { wing, drag, reverseThrust } = question.aeroplane;
   return {
@@ -53,6 +58,8 @@ export function statedLanding(
     groundDragCoefficient: drag.zeroLiftCoefficient + resolved.groundDragIncrement,
     groundLiftCoefficient: resolved.groundLiftCoefficient,
     braking,
+    stretches,
+    contaminantDrag,
     idleThrust: resolved.idleThrust,
     density,
     headwind,
@@ -86,12 +93,16 @@ export function landingRuns(run: LandingRun, conditions: LandingConditions): Lan
           slope: 0,
           profile: undefined,
           braking: referenceBraking,
+          stretches: undefined,
+          contaminantDrag: undefined,
           reverseThrust: undefined,
         }
       : undefined,
     sameRunway:
       run.slope === 0 &&
       run.profile === undefined &&
+      run.stretches === undefined &&
+      run.contaminantDrag === undefined &&
       actualBraking === referenceBraking &&
       run.reverseThrust === undefined,
   });

@@ -35,7 +35,7 @@ export function planLanding(question: LandingQuestion): LandingAnswer | Refused 
   const prepared = prepareLanding(question);
   if (isRefused(prepared)) return prepared;
   const { conditions, resolved, power, braking, run } = prepared;
-  const { ruleSet, air, wind, creditedHeadwind, doesNotApply } = conditions;
+  const { ruleSet, air, wind, condition, creditedHeadwind, doesNotApply } = conditions;
   const { speeds, reference, raised } = prepared.landingSpeeds;
 
   const rules = ruleSet.landing;
@@ -85,6 +85,8 @@ export function planLanding(question: LandingQuestion): LandingAnswer | Refused 
     reference,
     raised,
     surface: braking.surface,
+    noData: braking.noData,
+    condition,
     declared,
     doesNotApply,
     outcome,
@@ -96,7 +98,10 @@ export function planLanding(question: LandingQuestion): LandingAnswer | Refused 
     run,
     stated,
     landedWith,
-    brakingWithAntiSkid: () => resolveBraking({ ...question, procedure: {} }, runway.surface).actual,
+    brakingWithAntiSkid: () => {
+      const { actual, stretches } = resolveBraking({ ...question, procedure: {} }, runway, condition);
+      return actual && { braking: actual, stretches };
+    },
     dryPavementBraking: braking.reference,
     balkedLanding,
     roll: stated?.groundRoll,
@@ -114,7 +119,7 @@ export function planLanding(question: LandingQuestion): LandingAnswer | Refused 
     distances,
     balkedLanding,
     assessment: checks && { ruleSet: ruleSet.id, checks, governing: governing?.code },
-    shortfall: notReached && landingShortfalls(notReached),
+    shortfall: notReached ? landingShortfalls(notReached) : condition.refusal?.shortfall,
     basis: answerBasis(question, 'landing', ruleSet, method, assumed, band),
   };
 }

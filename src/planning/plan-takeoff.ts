@@ -36,7 +36,7 @@ export function planTakeoff(question: TakeoffQuestion): TakeoffAnswer | Refused 
   const prepared = prepareTakeoff(question);
   if (isRefused(prepared)) return prepared;
   const { conditions, resolved, speeds, power, thrustIn, friction, run } = prepared;
-  const { ruleSet, air, wind, creditedHeadwind, doesNotApply } = conditions;
+  const { ruleSet, air, wind, condition, creditedHeadwind, doesNotApply } = conditions;
   const { fullPowerRatio, rollingStartAllowance } = prepared.flown;
 
   const rules = ruleSet.takeoff;
@@ -84,6 +84,9 @@ export function planTakeoff(question: TakeoffQuestion): TakeoffAnswer | Refused 
     wind,
     speeds,
     surface: friction.surface,
+    noData: friction.noData,
+    condition,
+    contaminantDrag: friction.contaminantDrag,
     declared,
     doesNotApply,
     outcome,
@@ -115,7 +118,9 @@ export function planTakeoff(question: TakeoffQuestion): TakeoffAnswer | Refused 
     climb: stated && climbAfterTakeoff(question, prepared),
     obstaclePath,
     assessment: checks && { ruleSet: ruleSet.id, checks, governing: governing?.code },
-    shortfall: notReached && shortfalls(notReached, aeroplanePointer(aeroplaneAt, '/propulsion')),
+    shortfall: notReached
+      ? shortfalls(notReached, aeroplanePointer(aeroplaneAt, '/propulsion'))
+      : condition.refusal?.shortfall,
     basis: answerBasis(question, 'takeoff', ruleSet, method, assumed, band),
   };
 }

@@ -52,11 +52,13 @@ export function prepareLanding(question: LandingQuestion): PreparedLanding | Ref
   const resolved = resolveLanding(question, configuration, heldThrust(thrust).at(0));
   const speeds = landingSpeeds(question, configuration, resolved, air);
   if (isFault(speeds)) return { refused: [speeds] };
-  const braking = resolveBraking(question, runway.surface);
+  const braking = resolveBraking(question, runway, conditions.condition);
   const run = statedLanding(question, resolved, speeds.speeds, {
     density: air.density,
     headwind: wind.headwind,
     braking: braking.actual ?? braking.reference,
+    stretches: braking.stretches,
+    contaminantDrag: braking.contaminantDrag,
   });
   const runConditions = {
     ...ruledRuns(conditions, ruleSet.landing, runway),

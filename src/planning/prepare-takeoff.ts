@@ -55,12 +55,14 @@ export function prepareTakeoff(question: TakeoffQuestion): PreparedTakeoff | Ref
   const power = resolveThrust(aeroplane, aeroplaneAt, liftOffAtMaximumMass, weather.dewPoint !== undefined);
   const thrustIn = (state: Air, propulsion: Propulsion, factor: number) =>
     propulsionThrust(propulsionAtSetting(propulsion, flown.fullPowerRatio), aeroplane.engines, state, factor);
-  const friction = resolveFriction(runway.surface, aeroplane.propulsion.kind === 'jet');
+  const { condition } = conditions;
+  const friction = resolveFriction(question, runway.surface, condition.refusal);
   const run = statedRun(question, resolved, speeds, {
     thrust: thrustIn(air, aeroplane.propulsion, power.thrustFactor),
     density: air.density,
     headwind: wind.headwind,
     rollingFriction: friction.actual ?? friction.reference,
+    contaminantDrag: friction.contaminantDrag,
   });
 
   const { creditedHeadwind, needsReference } = ruledRuns(conditions, ruleSet.takeoff, runway);

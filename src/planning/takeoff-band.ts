@@ -6,7 +6,7 @@ import type { Band } from './band.ts';
 import { BandParts } from './band-parts.ts';
 import { heldThrust } from './held-thrust.ts';
 import type { Surface } from './question.ts';
-import { frictionUncertainty, inputUncertainties } from './rules/input-uncertainties.ts';
+import { contaminantDragUncertainty, frictionUncertainty, inputUncertainties } from './rules/input-uncertainties.ts';
 import type { Reached } from './takeoff-runs.ts';
 
 /** Density and thrust in air that is a little off. */
@@ -65,6 +65,12 @@ export function takeoffBand(
   parts.move('rolling friction', (by) => {
     run.rollingFriction += by * friction;
   });
+  const { contaminantDrag } = stated;
+  if (contaminantDrag !== undefined) {
+    parts.move('drag of the contaminant', (by) => {
+      run.contaminantDrag = contaminantDrag * (1 + by * contaminantDragUncertainty);
+    });
+  }
   parts.add('technique', 0, u.technique);
   parts.add('start point', u.startPoint / result.groundRoll, 0);
   return parts.band();
@@ -83,6 +89,7 @@ function restore(run: Changing, stated: TakeoffRun, thrust: Thrust): void {
   run.mass = stated.mass;
   run.headwind = stated.headwind;
   run.rollingFriction = stated.rollingFriction;
+  run.contaminantDrag = stated.contaminantDrag;
   run.rotationSpeed = stated.rotationSpeed;
   run.liftOffSpeed = stated.liftOffSpeed;
   run.screenSpeed = stated.screenSpeed;

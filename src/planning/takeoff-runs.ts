@@ -37,6 +37,8 @@ export interface RunAir {
   /** [m/s] */
   readonly headwind: number;
   readonly rollingFriction: number;
+  /** of a loose contaminant [kg/m] */
+  readonly contaminantDrag?: number | undefined;
 }
 
 /** The run on the runway as it is, in the wind as given: all that the integrations need. */
@@ -44,7 +46,7 @@ export function statedRun(
   { aeroplane: { wing, drag, certification }, mass, runway }: Pick<Question, 'aeroplane' | 'mass' | 'runway'>,
   resolved: ResolvedTakeoff,
   speeds: TakeoffAnswer['speeds'],
-  { thrust, density, headwind, rollingFriction }: RunAir,
+  { thrust, density, headwind, rollingFriction, contaminantDrag }: RunAir,
 ): TakeoffRun {
   return {
     mass,
@@ -56,6 +58,7 @@ export function statedRun(
     airDragCoefficient: drag.zeroLiftCoefficient + resolved.airDragIncrement,
     groundLiftCoefficient: resolved.groundLiftCoefficient,
     rollingFriction,
+    contaminantDrag,
     thrust,
     density,
     headwind,
@@ -98,9 +101,20 @@ export function takeoffRuns(run: TakeoffRun, conditions: RunConditions): Takeoff
     known: actualFriction !== undefined,
     creditedHeadwind,
     reference: needsReference
-      ? { ...run, headwind: creditedHeadwind, slope: 0, profile: undefined, rollingFriction: referenceFriction }
+      ? {
+          ...run,
+          headwind: creditedHeadwind,
+          slope: 0,
+          profile: undefined,
+          rollingFriction: referenceFriction,
+          contaminantDrag: undefined,
+        }
       : undefined,
-    sameRunway: run.slope === 0 && run.profile === undefined && actualFriction === referenceFriction,
+    sameRunway:
+      run.slope === 0 &&
+      run.profile === undefined &&
+      run.contaminantDrag === undefined &&
+      actualFriction === referenceFriction,
   });
 }
 

@@ -8,6 +8,7 @@ export type UnitFamily = (typeof unitFamilies)[number];
 export type Kind =
   | 'distance'
   | 'altitude'
+  | 'depth'
   | 'speed'
   | 'mass'
   | 'temperature'
@@ -57,6 +58,7 @@ const forms: Record<UnitFamily, Record<Kind, Form>> = {
   'm-kt-kg': {
     ...shared,
     distance: metres,
+    depth: form('length', 'm', 0.001),
     altitude: form('length', 'ft', 1),
     speed: knots,
     mass: form('mass', 'kg', 1),
@@ -70,6 +72,7 @@ const forms: Record<UnitFamily, Record<Kind, Form>> = {
   'ft-kt-lb': {
     ...shared,
     distance: form('length', 'ft', 5),
+    depth: form('length', 'in', 0.05),
     altitude: form('length', 'ft', 1),
     speed: knots,
     mass: form('mass', 'lb', 1),
@@ -83,6 +86,7 @@ const forms: Record<UnitFamily, Record<Kind, Form>> = {
   si: {
     ...shared,
     distance: metres,
+    depth: form('length', 'm', 0.001),
     altitude: form('length', 'm', 0.1),
     speed: form('speed', 'm/s', 0.1),
     mass: form('mass', 'kg', 1),

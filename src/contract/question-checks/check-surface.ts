@@ -10,7 +10,7 @@ const at = '/runway/surface';
 
 /** Members of a surface against each other. */
 export function checkSurface(surface: SurfaceOnWire): Fault[] {
-  return [...checkGround(surface, at), ...checkState(surface), ...checkDepth(surface)];
+  return [...checkGround(surface, at), ...checkState(surface), ...checkDepth(surface), ...checkCode(surface)];
 }
 
 /**
@@ -44,8 +44,8 @@ export function checkGround(
 }
 
 /** What the state says lies on the runway against what is named. */
-function checkState({ state, contaminant }: SurfaceOnWire): Fault[] {
-  if (state === 'contaminated' && contaminant === undefined) {
+function checkState({ state, contaminant, runwayConditionCode }: SurfaceOnWire): Fault[] {
+  if (state === 'contaminated' && contaminant === undefined && runwayConditionCode === undefined) {
     return [
       {
         pointer: `${at}/contaminant`,
@@ -105,4 +105,30 @@ function checkDepth({ state, contaminant }: SurfaceOnWire): Fault[] {
       allowed: isDeep ? 'flooded, contaminated' : 'damp, wet, contaminated',
     },
   ];
+}
+
+/** A code says how the brakes hold, and so does a coefficient; and 6 is of a dry runway. */
+function checkCode({ state, contaminant, runwayConditionCode, brakingFrictionCoefficient }: SurfaceOnWire): Fault[] {
+  if (runwayConditionCode === undefined) return [];
+  const faults: Fault[] = [];
+  if (brakingFrictionCoefficient !== undefined) {
+    faults.push({
+      pointer: `${at}/brakingFrictionCoefficient`,
+      code: 'exactly-one-of',
+      message: 'A runway condition code and a braking coefficient both say how the brakes hold.',
+      received: brakingFrictionCoefficient,
+      allowed: 'runwayConditionCode or brakingFrictionCoefficient',
+    });
+  }
+  const codes = typeof runwayConditionCode === 'number' ? [runwayConditionCode] : runwayConditionCode;
+  if (state === 'contaminated' && contaminant === undefined && codes.every((code) => code === 6)) {
+    faults.push({
+      pointer: `${at}/runwayConditionCode`,
+      code: 'contradiction',
+      message: 'The runway is contaminated, with code 6 of a dry one.',
+      received: 6,
+      allowed: '0 to 5',
+    });
+  }
+  return faults;
 }

@@ -6,6 +6,7 @@ import type { DeclaredDistances } from '../declared-distances.ts';
 import type { ThinBecause } from '../outcome.ts';
 import type { Question } from '../question.ts';
 import type { RuleSet } from '../rules/rule-set.ts';
+import type { RunwayCondition } from '../runway-condition.ts';
 import { measureText } from '../sentences/measure-text.ts';
 import type { WindAlong } from '../wind-along.ts';
 
@@ -23,6 +24,9 @@ export interface AnswerContext extends ConditionsContext {
   readonly declared: DeclaredDistances;
   /** the surface in words: 'short wet grass' */
   readonly surface: string;
+  /** why physics does not speak of it, where more can be said than that */
+  readonly noData: string | undefined;
+  readonly condition: RunwayCondition;
   /** why the rule set does not speak of the aeroplane */
   readonly doesNotApply: string | undefined;
   readonly outcome: Outcome;

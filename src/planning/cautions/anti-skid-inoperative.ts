@@ -12,7 +12,7 @@ export const antiSkidInoperative: CautionTest<LandingContext> = {
     const { question, run, stated } = context;
     if (question.procedure?.antiSkid !== 'inoperative') return undefined;
     const braking = context.brakingWithAntiSkid();
-    const without = stated && braking && context.landedWith({ braking })?.groundRoll;
+    const without = stated && braking && context.landedWith(braking)?.groundRoll;
     const friction = run.braking.at(run.touchdownSpeed - run.headwind);
     return {
       message: `The anti-skid system is inoperative: the braking friction at touchdown is ${Math.round(friction * 1000) / 1000} of the weight.${fromTo(context, 'ground roll', without, stated?.groundRoll)}`,

@@ -5,12 +5,15 @@ import { assumptionMatters } from './assumption-matters.ts';
 import { balkedLandingClimbLow } from './balked-landing-climb-low.ts';
 import { balkedLandingUnknown } from './balked-landing-unknown.ts';
 import type { CautionTest } from './caution-test.ts';
+import { conditionCodeTooGood } from './condition-code-too-good.ts';
 import { crosswindBeyondDemonstrated } from './crosswind-beyond-demonstrated.ts';
 import { decelerationMarginal } from './deceleration-marginal.ts';
 import { densityAltitudeHigh } from './density-altitude-high.ts';
 import { downslope } from './downslope.ts';
+import { filmCountsAsWet } from './film-counts-as-wet.ts';
 import { flareAboveScreen } from './flare-above-screen.ts';
 import { gustNotCredited } from './gust-not-credited.ts';
+import { hydroplaning } from './hydroplaning.ts';
 import type { LandingContext } from './landing-context.ts';
 import { marginNegative } from './margin-negative.ts';
 import { marginThin } from './margin-thin.ts';
@@ -42,6 +45,9 @@ export const landingCautions: readonly CautionTest<LandingContext>[] = [
   crosswindBeyondDemonstrated,
   windVariable,
   gustNotCredited,
+  conditionCodeTooGood,
+  hydroplaning,
+  filmCountsAsWet,
   downslope,
   veryShortWetGrassCaution,
   decelerationMarginal,

@@ -19,7 +19,7 @@ export interface LandingContext extends AnswerContext {
   /** what would come of it with some of it changed */
   readonly landedWith: (change: Partial<LandingRun>) => Stopped | undefined;
   /** the braking friction with the aeroplane's own anti-skid system */
-  readonly brakingWithAntiSkid: () => BrakingFriction | undefined;
+  readonly brakingWithAntiSkid: () => Pick<LandingRun, 'braking' | 'stretches'> | undefined;
   /** on dry pavement, brakes as they are */
   readonly dryPavementBraking: BrakingFriction;
   readonly balkedLanding: BalkedLanding;

@@ -4,9 +4,13 @@ import { assumptionMatters } from './assumption-matters.ts';
 import type { CautionTest } from './caution-test.ts';
 import { clearwayCapped } from './clearway-capped.ts';
 import { climbGradientMarginal } from './climb-gradient-marginal.ts';
+import { conditionCodeTooGood } from './condition-code-too-good.ts';
+import { contaminantHoldsBack } from './contaminant-holds-back.ts';
 import { crosswindBeyondDemonstrated } from './crosswind-beyond-demonstrated.ts';
 import { densityAltitudeHigh } from './density-altitude-high.ts';
+import { filmCountsAsWet } from './film-counts-as-wet.ts';
 import { gustNotCredited } from './gust-not-credited.ts';
+import { hydroplaning } from './hydroplaning.ts';
 import { marginNegative } from './margin-negative.ts';
 import { marginThin } from './margin-thin.ts';
 import { massAboveMaximum } from './mass-above-maximum.ts';
@@ -19,6 +23,7 @@ import { rollingStart } from './rolling-start.ts';
 import { runwayChanged } from './runway-changed.ts';
 import { screenSpeedBelowLiftOff } from './screen-speed-below-lift-off.ts';
 import { slopeSteep } from './slope-steep.ts';
+import { stopNotComputed } from './stop-not-computed.ts';
 import { tailwind } from './tailwind.ts';
 import { tailwindBeyondLimit } from './tailwind-beyond-limit.ts';
 import type { TakeoffContext } from './takeoff-context.ts';
@@ -38,6 +43,11 @@ export const takeoffCautions: readonly CautionTest<TakeoffContext>[] = [
   crosswindBeyondDemonstrated,
   windVariable,
   gustNotCredited,
+  stopNotComputed,
+  conditionCodeTooGood,
+  hydroplaning,
+  contaminantHoldsBack,
+  filmCountsAsWet,
   accelerationMarginal,
   climbGradientMarginal,
   densityAltitudeHigh,

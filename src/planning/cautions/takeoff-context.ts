@@ -7,6 +7,8 @@ export interface TakeoffContext extends AnswerContext {
   readonly speeds: TakeoffAnswer['speeds'];
   /** what came of the run as stated, where physics speaks of the surface and the screen is reached */
   readonly stated: Reached | undefined;
+  /** of a loose contaminant over the square of the ground speed [kg/m] */
+  readonly contaminantDrag: number | undefined;
   /** 1 at full power */
   readonly fullPowerRatio: number;
   /** the takeoff distance at full power [m] */

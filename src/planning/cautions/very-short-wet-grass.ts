@@ -18,7 +18,8 @@ export const veryShortWetGrassCaution: CautionTest<LandingContext> = {
     if (surface.grass === 'long') return undefined;
     const factors = ruleSet.landing.runwayFactors(surface, slope) ?? [];
     if (factors.some(({ code }) => code === veryShortWetGrass)) return undefined;
-    const dry = stated && context.landedWith({ braking: context.dryPavementBraking })?.landingDistance;
+    const pavement = { braking: context.dryPavementBraking, stretches: undefined, contaminantDrag: undefined };
+    const dry = stated && context.landedWith(pavement)?.landingDistance;
     const effect =
       dry === undefined
         ? ''

@@ -64,7 +64,7 @@ function changesOf({ distances }: TakeoffAnswer): Changes | undefined {
 
 function withFriction(question: TakeoffQuestion, by: number): TakeoffQuestion | undefined {
   const { surface } = question.runway;
-  const { actual } = resolveFriction(surface, question.aeroplane.propulsion.kind === 'jet');
+  const { actual } = resolveFriction(question, surface);
   if (actual === undefined || actual + by < 0) return undefined;
   const moved = { ...surface, rollingFrictionCoefficient: actual + by };
   return { ...question, runway: { ...question.runway, surface: moved } };

@@ -38,6 +38,9 @@ export const modelForm: Readonly<Record<Method, number>> = {
   geometry: 0.25,
 };
 
+/** Standard deviation of the drag of a loose contaminant, as a share of it: its depth is seldom known better. @see references.Judgement */
+export const contaminantDragUncertainty = 0.3;
+
 /** Standard deviation of the rolling friction coefficient: 0.005 paved, 0.02 firm ground, 0.05 soft. @see references.Judgement */
 export function frictionUncertainty({ kind, state, firmness }: Surface): number {
   if (firmness === 'soft') return 0.05;

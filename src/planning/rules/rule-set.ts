@@ -28,6 +28,8 @@ export interface Requirement {
   readonly factor?: Factor;
   /** another reading of the same rule, shown beside the one that decides */
   readonly alternative?: { readonly factor: Factor; readonly because: string };
+  /** the factor stands for a stop that the rule means to be on a dry or wet runway */
+  readonly presumesDryOrWet?: true;
   readonly source: ReferenceKey;
 }
 

@@ -26,7 +26,7 @@ export function answerSentence(context: AnswerContext, notReached: () => string)
     case 'rule-set-does-not-apply':
       return `The rules asked for do not apply (${context.ruleSet.title}): ${context.doesNotApply}. ${distance(context)}`.trim();
     case 'no-data-for-this-surface':
-      return `No data for this surface (${context.surface}): neither a factor of the rules asked for nor physics speaks of it.`;
+      return `No data for this surface (${context.surface}): ${context.noData ?? 'neither a factor of the rules asked for nor physics speaks of it'}.`;
     default:
       return notReached();
   }

@@ -68,7 +68,7 @@ const withMore: readonly Requirement[] = [
     alternative: { factor: runAlone, because: 'the reading without stopway and clearway, (b)(1)' },
   },
   { ...shared, code: 'takeoff-distance', against: 'toda', factor: distance },
-  { ...shared, code: 'accelerate-stop', against: 'asda', factor: stop },
+  { ...shared, code: 'accelerate-stop', against: 'asda', factor: stop, presumesDryOrWet: true },
 ];
 
 /**
