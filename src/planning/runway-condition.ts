@@ -12,7 +12,8 @@ type Thirds = readonly [RunwayConditionCode, RunwayConditionCode, RunwayConditio
 export interface SurfaceRefusal {
   /** for a sentence, behind the surface in words */
   readonly reason: string;
-  readonly shortfall: readonly Shortfall[];
+  /** absent where no number shows it */
+  readonly shortfall?: readonly Shortfall[];
 }
 
 /** What lies on a runway, by third, and what follows from it. */
@@ -78,7 +79,6 @@ function refusalOf(
   if (deep.depth === undefined) {
     return {
       reason: `the depth of the ${deep.kind} is not given, and a light aeroplane has no data beyond 13 mm`,
-      shortfall: [],
     };
   }
   if (deep.depth <= deepestForLight + 1e-9) return undefined;

@@ -1,7 +1,8 @@
 import { describe, expect, it } from 'vitest';
 import type { Aeroplane } from '../../src/performance/aeroplane.ts';
-import type { LandingProcedure, Surface } from '../../src/planning/question.ts';
+import type { LandingProcedure, LandingQuestion, Surface } from '../../src/planning/question.ts';
 import { resolveBraking } from '../../src/planning/resolve-braking.ts';
+import { runwayCondition } from '../../src/planning/runway-condition.ts';
 import { plainLanding, statedLander, wetGrass, wetPavement } from '../support/landing-question.ts';
 import { expectNear, expectRatio } from '../support/near.ts';
 
@@ -9,8 +10,13 @@ const dry: Surface = { kind: 'paved', state: 'dry' };
 const { brakes: _, wheels: __, ...bare } = statedLander;
 const kt = 1852 / 3600;
 
+function braked(question: LandingQuestion, surface: Surface) {
+  const runway = { ...question.runway, surface };
+  return resolveBraking(question, runway, runwayCondition({ ...question, runway }));
+}
+
 function resolved(surface: Surface, aeroplane: Partial<Aeroplane> = {}, procedure: LandingProcedure = {}) {
-  return resolveBraking({ ...plainLanding, aeroplane: { ...statedLander, ...aeroplane }, procedure }, surface);
+  return braked({ ...plainLanding, aeroplane: { ...statedLander, ...aeroplane }, procedure }, surface);
 }
 const withBrakes = (brakes: Aeroplane['brakes']) => ({ brakes: { ...statedLander.brakes, ...brakes } });
 const said = (found: ReturnType<typeof resolved>) => found.assumed.map(({ assumption }) => assumption.at);
@@ -23,7 +29,7 @@ describe('the braking friction of a landing', () => {
     expect(found.assumed).toEqual([]);
   });
   it('is a default that is said where no brakes are stated: 0.35 and 0.80, unknown wheels', () => {
-    const found = resolveBraking({ ...plainLanding, aeroplane: bare }, dry);
+    const found = braked({ ...plainLanding, aeroplane: bare }, dry);
     expectRatio(found.actual?.at(0), 0.35 * 0.8, 1e-12);
     expect(said(found)).toEqual([
       '/aeroplane/definition/brakes/brakingFrictionCoefficient',
@@ -35,7 +41,7 @@ describe('the braking friction of a landing', () => {
     ['tricycle', 0.85],
     ['tailwheel', 0.8],
   ] as const)('puts less weight on the braked wheels of a %s: %f', (arrangement, share) => {
-    const found = resolveBraking({ ...plainLanding, aeroplane: { ...bare, wheels: { arrangement } } }, dry);
+    const found = braked({ ...plainLanding, aeroplane: { ...bare, wheels: { arrangement } } }, dry);
     expectRatio(found.actual?.at(0), 0.35 * share, 1e-12);
   });
   it("is never more than the aeroplane's own brakes on another surface, and the surface's where that is less", () => {
@@ -64,7 +70,7 @@ describe('the braking friction of a landing', () => {
   });
   it('takes a tyre pressure that brakes worse where none is stated on a wet runway, and says so', () => {
     const { wheels: ___, ...unshod } = statedLander;
-    const found = resolveBraking({ ...plainLanding, aeroplane: unshod }, wetPavement);
+    const found = braked({ ...plainLanding, aeroplane: unshod }, wetPavement);
     expect(said(found)).toContain('/aeroplane/definition/wheels/tyrePressure');
     expect(found.actual?.at(25) ?? 1).toBeLessThan(resolved(wetPavement).actual?.at(25) ?? 0);
   });

@@ -17,7 +17,7 @@ export const contaminantHoldsBack: CautionTest<TakeoffContext> = {
     if (contaminantDrag === undefined || deep?.depth === undefined) return undefined;
     const drag = contaminantDrag * Math.max(0, wheelSpeed.tas - wind.headwind) ** 2;
     return {
-      message: `${depthText(deep.depth)} of ${surfaceText(deep.kind)} holds the aeroplane back by ${textIn(context, 'force', drag)} at lift-off. The drag is counted whole at every speed; a little more depth or an uneven cover lengthens the roll.`,
+      message: `The wheels push aside ${depthText(deep.depth)} of ${surfaceText(deep.kind)}, which holds the aeroplane back by ${textIn(context, 'force', drag)} at lift-off. The drag is counted whole at every speed; a little more depth or an uneven cover lengthens the roll.`,
       at: '/runway/surface/contaminant',
       value: { kind: 'force', value: drag, direction: 'up' },
     };

@@ -15,7 +15,7 @@ export const filmCountsAsWet: CautionTest<ConditionsContext> = {
     if (contaminant?.depth === undefined || looseContaminant(runway.surface) === undefined) return undefined;
     if (filmAsWet(runway.surface).contaminant !== undefined) return undefined;
     return {
-      message: `${depthText(contaminant.depth)} of ${surfaceText(contaminant.kind)} counts as a wet runway, up to ${depthText(deepestWet)}; any deeper it holds the wheels back and brakes far worse.`,
+      message: `The runway counts as wet under ${depthText(contaminant.depth)} of ${surfaceText(contaminant.kind)}, since that is no more than ${depthText(deepestWet)}; any deeper it holds the wheels back and brakes far worse.`,
       at: '/runway/surface/contaminant/depth',
       value: { kind: 'depth', value: contaminant.depth },
     };

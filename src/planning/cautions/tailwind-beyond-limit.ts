@@ -8,11 +8,13 @@ const usualLimit = (10 * 1852) / 3600;
 export const tailwindBeyondLimit: CautionTest<ConditionsContext> = {
   code: 'tailwind-beyond-limit',
   severity: 'strong',
-  meaning: 'The tailwind is beyond the limitation of the aeroplane, or beyond 10 kt.',
+  meaning: 'The tailwind, mean or in a gust, is beyond the limitation of the aeroplane, or beyond 10 kt.',
   threshold: { kind: 'speed', value: usualLimit },
   source: 'Judgement',
   test: (context) => {
-    const component = -context.wind.headwind;
+    const mean = -context.wind.headwind;
+    const gust = -(context.wind.gust?.headwind ?? Number.POSITIVE_INFINITY);
+    const component = Math.max(mean, gust);
     const limitation = context.question.aeroplane.limitations?.tailwind;
     const isLimited = limitation !== undefined && component > limitation + 1e-9;
     const limit = isLimited ? limitation : usualLimit;
@@ -21,7 +23,7 @@ export const tailwindBeyondLimit: CautionTest<ConditionsContext> = {
       ? `the aeroplane's limitation of ${textIn(context, 'speed', limitation)}`
       : `${textIn(context, 'speed', usualLimit)}, where data of aeroplanes usually end`;
     return {
-      message: `Tailwind ${textIn(context, 'speed', component)} is ${textIn(context, 'speed', component - limit)} beyond ${what}.`,
+      message: `${gust > mean ? 'In a gust the tailwind of' : 'Tailwind'} ${textIn(context, 'speed', component)} is ${textIn(context, 'speed', component - limit)} beyond ${what}.`,
       at: '/weather/wind',
       value: { kind: 'speed', value: component },
       threshold: { kind: 'speed', value: limit },
