@@ -24,6 +24,25 @@ const unnamed: SurfaceOnWire = { kind: 'paved', state: 'contaminated' };
 const pairs: readonly [title: string, slip: SurfaceOnWire, fault: string, sound: SurfaceOnWire][] = [
   ['contaminated, where it is not wet', unnamed, what, { kind: 'paved', state: 'wet' }],
   ['contaminated by nobody says what', unnamed, what, on('contaminated', 'ice')],
+  ['the same, with a code', unnamed, what, { ...unnamed, runwayConditionCode: 3 }],
+  [
+    'code 6 on what is contaminated',
+    { ...unnamed, runwayConditionCode: [6, 6, 6] },
+    'contradiction /runway/surface/runwayConditionCode',
+    { ...unnamed, runwayConditionCode: [6, 5, 6] },
+  ],
+  [
+    'code 6 on it, not on a dry one',
+    { ...unnamed, runwayConditionCode: 6 },
+    'contradiction /runway/surface/runwayConditionCode',
+    { kind: 'paved', state: 'dry', runwayConditionCode: 6 },
+  ],
+  [
+    'a code beside a braking coefficient',
+    { kind: 'paved', state: 'wet', runwayConditionCode: 3, brakingFrictionCoefficient: 0.1 },
+    'exactly-one-of /runway/surface/brakingFrictionCoefficient',
+    { kind: 'paved', state: 'wet', brakingFrictionCoefficient: 0.1 },
+  ],
   ['dry with frost', on('dry', 'frost'), state, on('contaminated', 'frost')],
   ['dry with ice', on('dry', 'ice'), state, { kind: 'paved', state: 'dry' }],
   ['a depth of ice', on('contaminated', 'ice', deep), noDepth, on('contaminated', 'ice')],
