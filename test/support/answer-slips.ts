@@ -3,7 +3,7 @@ import type { UnitFamily } from '../../src/units/presentation.ts';
 /** The units in which each family answers, by the contract; what is shared by all stands last. */
 const units: Record<UnitFamily, readonly string[]> = {
   'm-kt-kg': ['m', 'ft', 'kt', 'kg', 'degC', 'hPa', 'N', 'kW'],
-  'ft-kt-lb': ['ft', 'kt', 'lb', 'degC', 'inHg', 'lbf', 'hp'],
+  'ft-kt-lb': ['ft', 'in', 'kt', 'lb', 'degC', 'inHg', 'lbf', 'hp'],
   si: ['m', 'm/s', 'kg', 'K', 'Pa', 'N', 'W'],
 };
 const shared = ['deltaC', 'kg/m3', 'percent', 'deg', 's', 'ft/min', 'MJ', 'J', 'm2', 'ft2'];
@@ -131,7 +131,8 @@ function outcomeSlips({ outcome, distances, shortfall, assessment, advisory }: S
     if (!right) slips.push(`${outcome} ${what}`);
   };
   says(/[.]$/.test(advisory.sentence), `is told as ${advisory.sentence}`);
-  says(unreached.test(outcome) === (shortfall !== undefined), 'and its shortfall');
+  if (!beside.includes(outcome)) says(unreached.test(outcome) === (shortfall !== undefined), 'and its shortfall');
+  says(shortfall === undefined || distances === undefined, 'with distances beside a shortfall');
   if (!beside.includes(outcome)) says(unreached.test(outcome) === (distances === undefined), 'and its distances');
   if (outcome.startsWith('enough')) says(results.size === 1 && results.has('passes'), `with ${[...results]}`);
   if (outcome === 'not-enough') says(results.has('fails'), `with ${[...results]}`);
