@@ -1,3 +1,4 @@
+import { landingDetail } from '../planning/detail/landing-detail.ts';
 import { isRefused, type Refused } from '../planning/fault.ts';
 import { planLanding } from '../planning/plan-landing.ts';
 import type { CatalogueLookup } from './catalogue-lookup.ts';
@@ -18,5 +19,7 @@ export function answerLanding(
   if (isRefused(question)) return question;
   const answer = planLanding(question);
   if (isRefused(answer)) return answer;
-  return toLandingResponse(answer, withKnownRunway(request, lookup.aerodromes, 'landing'), question, stamp);
+  const { detail } = request;
+  const whole = detail === undefined ? answer : { ...answer, detail: landingDetail(question, answer, detail) };
+  return toLandingResponse(whole, withKnownRunway(request, lookup.aerodromes, 'landing'), question, stamp);
 }

@@ -25,7 +25,8 @@ const workingLine = z
     formula: z
       .string()
       .meta({
-        description: 'In the symbols of earlier lines, with + - * / ^ and sqrt, ln, exp, sin, cos, min, max, abs.',
+        description:
+          'In the symbols of earlier lines, with + - * / ^ and sqrt, ln, exp, sin, cos, asin, min, max, abs.',
       })
       .exactOptional(),
     from: z.array(z.string()).meta({ description: 'The symbols that the formula uses.' }),

@@ -11,8 +11,18 @@ export interface SpeedChange {
 /** The change from one airspeed to another [m/s] under the forces of a stretch. */
 export type ChangeOn = (stretch: number, from: number, to: number) => SpeedChange;
 
+/** What lies on one stretch of such a change. */
+export interface PathPart {
+  readonly stretch: number;
+  /** airspeeds [m/s] */
+  readonly from: number;
+  readonly to: number;
+}
+
 /** A change of speed over stretches of runway. */
 export interface StretchedPath extends SpeedChange {
+  /** in the order of movement; complete where the speed is reached */
+  readonly parts: readonly PathPart[];
   /** the stretch on which it ends, and the airspeed at which that was entered [m/s] */
   readonly stretch: number;
   readonly entered: number;
@@ -43,6 +53,7 @@ export function stretchedPath(
   changeOn: ChangeOn,
 ): StretchedPath {
   const whole = newPathIntegral();
+  const parts: PathPart[] = [];
   const last = ends.length - 1;
   let at = begin;
   let entered = from;
@@ -53,14 +64,16 @@ export function stretchedPath(
     const rest = changeOn(stretch, entered, to);
     if (stretch === last || (rest.reaches && rest.sum.distance <= length)) {
       gather(whole, rest.sum);
-      return { reaches: rest.reaches, sum: whole, stretch, entered };
+      parts.push({ stretch, from: entered, to });
+      return { reaches: rest.reaches, sum: whole, parts, stretch, entered };
     }
     const left = leavingSpeed(changeOn, stretch, entered, rest.reaches ? to : rest.sum.leastAt, length);
     if (left === undefined) {
       gather(whole, rest.sum);
-      return { reaches: false, sum: whole, stretch, entered };
+      return { reaches: false, sum: whole, parts, stretch, entered };
     }
     gather(whole, changeOn(stretch, entered, left).sum);
+    parts.push({ stretch, from: entered, to: left });
     entered = left;
     at = ends[stretch] as number;
   }

@@ -1,12 +1,15 @@
 import { fc, test } from '@fast-check/vitest';
 import { describe, expect, it } from 'vitest';
+import { answerLanding } from '../../src/contract/answer-landing.ts';
 import { answerTakeoff } from '../../src/contract/answer-takeoff.ts';
+import type { LandingRequest } from '../../src/contract/landing-request.ts';
+import { type LandingResponse, landingResponse } from '../../src/contract/landing-response.ts';
 import type { TakeoffRequest } from '../../src/contract/takeoff-request.ts';
 import { type TakeoffResponse, takeoffResponse } from '../../src/contract/takeoff-response.ts';
 import type { WithKnownRunway } from '../../src/contract/with-known-runway.ts';
 import { isRefused } from '../../src/planning/fault.ts';
 import { unitFamilies } from '../../src/units/presentation.ts';
-import { anyTakeoff, builtIn } from '../support/any-takeoff.ts';
+import { anyLanding, anyTakeoff, builtIn } from '../support/any-question.ts';
 
 const stamp = { modelVersion: '1', rulesDigest: 'r' };
 const all = ['working', 'trajectory', 'sensitivities'] as const;
@@ -194,4 +197,51 @@ describe('detail', () => {
     expect(all.filter((one) => one in answer)).toEqual(['working']);
     expect(answer.working?.map(({ symbol }) => symbol)).toContain('a_2');
   });
+});
+
+describe('the detail of a landing', () => {
+  const answeredLanding = (request: LandingRequest): LandingResponse | undefined => {
+    const answer = answerLanding(request, builtIn, stamp);
+    return isRefused(answer) ? undefined : answer;
+  };
+
+  test.prop([anyLanding], { numRuns: 60 })(
+    'has a trajectory from the screen to a standstill, in the numbers of the answer',
+    (request) => {
+      const answer = answeredLanding({ ...request, detail: ['trajectory'] });
+      fc.pre(answer?.distances !== undefined);
+      const { trajectory, distances, speeds } = answer as LandingResponse;
+      expect(landingResponse.safeParse(answer).error).toBeUndefined();
+      const rows = trajectory?.rows ?? [];
+      const [first, last] = [rows[0], rows.at(-1)];
+      expect(rows).toHaveLength(51);
+      expect([first?.[0], first?.[1]]).toEqual([0, 0]);
+      expect(first?.[3]).toBeCloseTo(speeds.landingReference.tas.value, 6);
+      expect(first?.[4]).toBeCloseTo(distances?.screenHeight.value ?? 0, 6);
+      expect(last?.[0]).toBe(distances?.landingDistance.value);
+      expect(last?.[2]).toBeCloseTo(0, 6);
+      expect(last?.[4]).toBe(0);
+      const seconds = (distances?.groundRollTime.value ?? 0) + (distances?.airTime.value ?? 0);
+      expect(Math.abs((last?.[1] ?? 0) - seconds)).toBeLessThan(0.11);
+    },
+  );
+
+  test.prop([anyLanding], { numRuns: 40 })(
+    'has sensitivities with the signs they must have, that add up',
+    (request) => {
+      const answer = answeredLanding({ ...request, rounding: 'none', detail: ['sensitivities'] });
+      fc.pre(answer?.distances !== undefined);
+      const { sensitivities = [] } = answer as LandingResponse;
+      expect(sensitivities.map(({ of }) => of)).toContain('braking-friction');
+      const signs: Record<string, number> = { slope: -1, headwind: -1, 'braking-friction': -1 };
+      for (const { of, change } of sensitivities) {
+        if (change === undefined) continue;
+        const { groundRoll, airDistance, landingDistance } = change;
+        const sum = groundRoll.value + airDistance.value;
+        expect(Math.abs(sum - landingDistance.value)).toBeLessThan(1e-4 * (1 + Math.abs(sum)));
+        const sign = signs[of];
+        if (sign !== undefined) expect(groundRoll.value * sign, of).toBeGreaterThan(0);
+      }
+    },
+  );
 });

@@ -4,49 +4,16 @@ import { answerTakeoff } from '../../src/contract/answer-takeoff.ts';
 import type { TakeoffRequest } from '../../src/contract/takeoff-request.ts';
 import { type TakeoffResponse, takeoffResponse } from '../../src/contract/takeoff-response.ts';
 import { isRefused } from '../../src/planning/fault.ts';
-import { anyTakeoff, builtIn } from '../support/any-takeoff.ts';
-import { evaluate } from '../support/formula.ts';
+import { anyTakeoff, builtIn } from '../support/any-question.ts';
+import { type Line, slipsIn, unsaidIn } from '../support/working-slips.ts';
 
 const stamp = { modelVersion: '1', rulesDigest: 'r' };
-type Line = NonNullable<TakeoffResponse['working']>[number];
-
 function answered(request: TakeoffRequest): TakeoffResponse | undefined {
   const answer = answerTakeoff({ ...request, detail: ['working'] }, builtIn, stamp);
   return isRefused(answer) ? undefined : answer;
 }
 const linesOf = (answer: TakeoffResponse): Line[] => answer.working ?? [];
 const valuesOf = (lines: readonly Line[]) => new Map(lines.map(({ symbol, value }) => [symbol, value]));
-
-/** What is wrong with lines that should each follow from those they name, and from no other. */
-function slipsIn(lines: readonly Line[]): string[] {
-  const slips: string[] = [];
-  const values = new Map<string, number>();
-  for (const { symbol, origin, formula, from, value } of lines) {
-    if (values.has(symbol)) slips.push(`${symbol} is there twice`);
-    const known = new Map<string, number>();
-    for (const used of from) {
-      const earlier = values.get(used);
-      if (earlier === undefined) slips.push(`${symbol} uses ${used}, which is not above it`);
-      else known.set(used, earlier);
-    }
-    const derived = origin === 'formula' || origin === 'equation';
-    if (derived !== (formula !== undefined) || (!derived && from.length > 0)) slips.push(`${symbol} is ${origin}`);
-    if (formula !== undefined) {
-      const [left, right] = origin === 'equation' ? (formula.split('=') as [string, string]) : [formula, symbol];
-      const found = evaluate(left, new Map([...known, [symbol, value]]));
-      const expected = evaluate(right, new Map([...known, [symbol, value]]));
-      if (!isSame(found, expected)) slips.push(`${symbol} is ${value}, and ${formula} gives ${found}`);
-      if (origin === 'formula' && new RegExp(`\\b${symbol}\\b`).test(formula)) slips.push(`${symbol} uses itself`);
-    }
-    values.set(symbol, value);
-  }
-  return slips;
-}
-
-/** Near to 1e-9, as a share of the larger, or of 1e-6 where both are next to nothing. */
-function isSame(found: number, value: number): boolean {
-  return Math.abs(found - value) <= 1e-9 * Math.max(Math.abs(found), Math.abs(value), 1e-6);
-}
 
 describe('the working of a takeoff', () => {
   test.prop([anyTakeoff], { numRuns: 150 })(
@@ -63,15 +30,7 @@ describe('the working of a takeoff', () => {
     fc.pre(answer !== undefined);
     const whole = answer as TakeoffResponse;
     expect(takeoffResponse.safeParse(whole).error).toBeUndefined();
-    const assumed = new Set(whole.basis.assumed.map(({ at }) => at));
-    const listed = new Set(whole.basis.sources.map(({ key }) => key));
-    const unsaid = linesOf(whole).filter(({ origin, at, source }) => {
-      const nowhere = (origin === 'given' || origin === 'assumed' ? at : source) === undefined;
-      return (
-        nowhere || (at !== undefined && assumed.has(at) !== (origin === 'assumed')) || (source && !listed.has(source))
-      );
-    });
-    expect(unsaid).toEqual([]);
+    expect(unsaidIn(linesOf(whole), whole.basis)).toEqual([]);
   });
 
   test.prop([anyTakeoff], { numRuns: 50 })('shows the numbers of the answer where it says so', (request) => {

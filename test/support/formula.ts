@@ -7,6 +7,7 @@ const functions: Readonly<Record<string, (...given: number[]) => number>> = {
   exp: Math.exp,
   sin: Math.sin,
   cos: Math.cos,
+  asin: Math.asin,
   abs: Math.abs,
   min: Math.min,
   max: Math.max,

@@ -13,10 +13,10 @@ export interface LandingAirDistance {
 }
 
 /** Time from the screen to touchdown [s] and mean speed over the reference speed of an ordinary landing. @see references.Ac25s32 */
-const ordinaryTime = 7;
-const ordinaryMeanRatio = 0.98;
+export const ordinaryTime = 7;
+export const ordinaryMeanRatio = 0.98;
 /** Touchdown speed of an ordinary landing over the reference speed: below it the aeroplane floats. @see references.Ac25s32 */
-const ordinaryTouchdownRatio = 0.96;
+export const ordinaryTouchdownRatio = 0.96;
 
 /**
  * Distance over the ground from the screen to touchdown.

@@ -10,6 +10,11 @@ export interface LandingEstimate {
   readonly airDistance: number;
 }
 
+/** The true airspeed at which the estimate takes the deceleration [m/s]: 0.707 of the ground speed at touchdown, on top of the wind. */
+export function estimateSpeed({ headwind, touchdownSpeed }: Pick<LandingRun, 'headwind' | 'touchdownSpeed'>): number {
+  return headwind + Math.SQRT1_2 * (touchdownSpeed - headwind);
+}
+
 /**
  * The cheap, smooth estimate of a landing from which bands and effects are taken.
  *
@@ -24,7 +29,7 @@ export function landingEstimate(run: LandingRun): LandingEstimate {
   const { headwind, touchdownSpeed, groundLiftCoefficient: liftCoefficient, reverseThrust } = run;
   const groundSpeed = touchdownSpeed - headwind;
   if (!(groundSpeed > 0)) return { groundRoll: Number.NaN, airDistance: Number.NaN };
-  const mean = headwind + Math.SQRT1_2 * groundSpeed;
+  const mean = estimateSpeed(run);
   const phi = groundEffect(run.wingHeight / run.span);
   const q = (0.5 * run.density * run.wingArea * mean * Math.abs(mean)) / run.mass;
   const drag = q * dragCoefficient(run.groundDragCoefficient, run.inducedDragFactor, liftCoefficient, phi);

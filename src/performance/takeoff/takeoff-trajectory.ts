@@ -1,12 +1,14 @@
-import { brent } from '../../numerics/brent.ts';
 import { splitPoints } from '../../numerics/split-points.ts';
-import { pathTable, pointOnPath } from '../path-table.ts';
+import { type AddPiece, addSettled, newPathIntegral } from '../path-integral.ts';
+import { pathLeg } from '../path-leg.ts';
+import { speedLegs, steadyLeg } from '../speed-legs.ts';
+import { type ChangeOn, type PathPart, stretchedPath } from '../stretched-path.ts';
 import { evenSteps, type Leg, type TrajectoryPoint } from '../trajectory.ts';
 import { climbForces, climbGradient, energySine } from './climb-forces.ts';
 import { addClimbPiece, climbJumps } from './climb-piece.ts';
 import { pullUpArcDistance, pullUpArcTime, pullUpArcTop, pullUpRadius } from './pull-up-arc.ts';
+import { rollBetween } from './roll-between.ts';
 import { type RollForces, rollForces, sloped } from './roll-forces.ts';
-import { addRollPiece, rollJumps } from './roll-piece.ts';
 import { underPath } from './takeoff.ts';
 import type { TakeoffRun } from './takeoff-run.ts';
 
@@ -44,70 +46,33 @@ export function takeoffTrajectory(
 
 /** The roll, stretch by stretch of the ground line, with the rotation where V_R is reached. */
 function rollLegs(run: TakeoffRun): Leg[] | undefined {
-  const { headwind, liftOffSpeed } = run;
+  const { headwind, liftOffSpeed, rotationTime } = run;
   if (headwind >= liftOffSpeed) return undefined;
-  const rotationSpeed = Math.min(liftOffSpeed, Math.max(headwind, run.rotationSpeed));
-  const legs: Leg[] = [];
   const forces = rollForces(run);
-  const { ends, slopes } = run.profile ?? { ends: [], slopes: [run.slope] };
-  let speed = headwind;
-  let rotated = false;
-  let begin = 0;
-  for (let i = 0; i < slopes.length && (speed < liftOffSpeed || !rotated); i++) {
-    const here = sloped(forces, slopes[i] as number);
-    // the last slope holds beyond the profile
-    let left = i === slopes.length - 1 ? Number.POSITIVE_INFINITY : (ends[i] as number) - begin;
-    begin = ends[i] ?? begin;
-    while (left > 0 && (speed < liftOffSpeed || !rotated)) {
-      if (!rotated && speed >= rotationSpeed) {
-        legs.push(rotationLeg(run, rotationSpeed));
-        rotated = true;
-        continue;
-      }
-      const stretch = rollLeg(here, headwind, speed, rotated ? liftOffSpeed : rotationSpeed, left);
-      if (stretch === undefined) return undefined;
-      legs.push(stretch.leg);
-      speed = stretch.endSpeed;
-      left = stretch.endSpeed < (rotated ? liftOffSpeed : rotationSpeed) ? 0 : left - stretch.leg.distance;
-    }
-  }
-  return legs;
-}
-
-/** The roll under steady forces to an airspeed, or until a length is used up. */
-function rollLeg(
-  forces: RollForces,
-  headwind: number,
-  from: number,
-  to: number,
-  length: number,
-): { readonly leg: Leg; readonly endSpeed: number } | undefined {
-  const table = pathTable(
-    splitPoints(from, to, rollJumps(forces)),
-    (low, high, sum) => addRollPiece(forces, headwind, low, high, sum),
-    length,
+  const slopes = run.profile?.slopes ?? [run.slope];
+  const here = slopes.map((slope) => sloped(forces, slope));
+  const changeOn: ChangeOn = (stretch, from, to) => rollBetween(here[stretch] as RollForces, headwind, from, to);
+  const { reaches, parts } = stretchedPath(
+    run.profile?.ends ?? [Number.POSITIVE_INFINITY],
+    0,
+    headwind,
+    liftOffSpeed,
+    changeOn,
   );
-  if (table === undefined) return undefined;
-  const whole = table.distances.at(-1) as number;
-  const usedUp = whole > length;
-  const end = usedUp ? pointOnPath(table, length) : { at: to, time: table.times.at(-1) as number };
-  const at = (distance: number): TrajectoryPoint => {
-    const { at: trueAirspeed, time } = pointOnPath(table, distance);
-    return { distance, time, groundSpeed: trueAirspeed - headwind, trueAirspeed, height: 0 };
-  };
-  return { leg: { distance: usedUp ? length : whole, time: end.time, at }, endSpeed: end.at };
+  const rotationSpeed = Math.min(liftOffSpeed, Math.max(headwind, run.rotationSpeed));
+  const slower = parts.filter(({ from }) => from < rotationSpeed).map((part) => upTo(part, rotationSpeed));
+  const faster = parts.filter(({ to }) => to > rotationSpeed).map((part) => onFrom(part, rotationSpeed));
+  const before = speedLegs({ reaches, parts: slower }, changeOn, headwind);
+  const after = speedLegs({ reaches, parts: faster }, changeOn, headwind);
+  return before && after && [...before, steadyLeg(rotationSpeed, headwind, rotationTime), ...after];
 }
 
-function rotationLeg({ headwind, rotationTime }: TakeoffRun, trueAirspeed: number): Leg {
-  const groundSpeed = trueAirspeed - headwind;
-  return {
-    distance: groundSpeed * rotationTime,
-    time: rotationTime,
-    at(distance) {
-      const time = groundSpeed > 0 ? distance / groundSpeed : 0;
-      return { distance, time, groundSpeed, trueAirspeed, height: 0 };
-    },
-  };
+function upTo(part: PathPart, airspeed: number): PathPart {
+  return { ...part, to: Math.min(part.to, airspeed) };
+}
+
+function onFrom(part: PathPart, airspeed: number): PathPart {
+  return { ...part, from: Math.max(part.from, airspeed) };
 }
 
 /** The arc after lift-off, then the climb that energy allows. */
@@ -124,33 +89,29 @@ function airLegs(run: TakeoffRun): Leg[] | undefined {
     return { distance, time, groundSpeed: trueAirspeed * cosine - headwind, trueAirspeed, height };
   };
 
+  const add: AddPiece = (from, to, sum) => addClimbPiece(forces, from, to, sum);
   const arcTime = (height: number) => pullUpArcTime(forces, radius, height);
   const arcDistance = (height: number) => pullUpArcDistance(radius, height) - headwind * arcTime(height);
-  const arc: Leg = {
-    distance: arcDistance(top),
-    time: arcTime(top),
-    at(distance) {
-      const found = brent((height) => arcDistance(height) - distance, 0, top, 1e-12 * top);
-      const height = found.outcome === 'not-bracketed' ? (distance > 0 ? top : 0) : found.root;
-      return pointAt(height, distance, arcTime(height), 1 - height / radius);
-    },
-  };
-  if (top >= screenHeight) return [arc];
-  const table = pathTable(
-    splitPoints(top, screenHeight, climbJumps(forces)),
-    (from, to, sum) => addClimbPiece(forces, from, to, sum),
-    undefined,
-    headwind,
+  const arc = pathLeg(
+    (_, height) => ({ distance: arcDistance(height), time: arcTime(height) }),
+    0,
+    top,
+    (height, distance, time) => pointAt(height, distance, time, 1 - height / radius),
   );
-  if (table === undefined) return undefined;
-  const climb: Leg = {
-    distance: table.distances.at(-1) as number,
-    time: table.times.at(-1) as number,
-    at(distance) {
-      const { at: height, time } = pointOnPath(table, distance);
+  if (top >= screenHeight) return [arc];
+  const climb = pathLeg(
+    (from, to) => {
+      const sum = newPathIntegral();
+      const ends = splitPoints(from, to, climbJumps(forces));
+      for (let i = 1; i < ends.length; i++) addSettled(add, ends[i - 1] as number, ends[i] as number, sum);
+      return { distance: sum.distance - headwind * sum.time, time: sum.time };
+    },
+    top,
+    screenHeight,
+    (height, distance, time) => {
       const sine = energySine(forces, climbGradient(forces, height));
       return pointAt(height, distance, time, Math.sqrt(1 - sine * sine));
     },
-  };
+  );
   return [arc, climb];
 }

@@ -1,3 +1,4 @@
+import { aeroplaneChanged } from './aeroplane-changed.ts';
 import { antiSkidInoperative } from './anti-skid-inoperative.ts';
 import { approachSpeedIncrement } from './approach-speed-increment.ts';
 import { approachSteep } from './approach-steep.ts';
@@ -65,6 +66,7 @@ export const landingCautions: readonly CautionTest<LandingContext>[] = [
   slopeSteep,
   pointAtFullLength,
   runwayChanged,
+  aeroplaneChanged,
   assumptionMatters,
   methodIsEstimate,
 ];

@@ -8,14 +8,17 @@ import type { Measure } from '../answer.ts';
 import type { Question } from '../question.ts';
 import { windAlong } from '../wind-along.ts';
 
-/** One input of a question that a distance hangs on. */
-export interface MainInput<Q extends Question> {
+/** An input, and how much more of it a change is told for. */
+export interface Amount<Q extends Question> {
   readonly of: string;
   readonly at: (question: Q) => string;
-  /** how much more of it a change is told for */
   readonly per: (units: UnitFamily) => Measure | number;
   /** small enough for a slope, large enough for the arithmetic, in SI */
   readonly step: number;
+}
+
+/** One input of a question that a distance hangs on. */
+export interface MainInput<Q extends Question> extends Amount<Q> {
   /** the question with so much more of it; undefined where it cannot have more, or less */
   readonly moved: (question: Q, by: number) => Q | undefined;
 }
@@ -99,7 +102,13 @@ function withMaximumLift<Q extends Question>(question: Q, by: number): Q | undef
   const { aeroplane, configuration: id } = question;
   const configuration = aeroplane.configurations[id];
   if (configuration === undefined) return undefined;
-  const coefficient = maximumLiftCoefficient(configuration.maximumLift, aeroplane.wing.area) + by;
-  const moved: Configuration = { ...configuration, maximumLift: { kind: 'coefficient', coefficient } };
+  const { maximumLift } = configuration;
+  const coefficient = maximumLiftCoefficient(maximumLift, aeroplane.wing.area);
+  // a stated stall speed stays one: rules tell its kinds apart
+  const more: Configuration['maximumLift'] =
+    maximumLift.kind === 'coefficient'
+      ? { kind: 'coefficient', coefficient: coefficient + by }
+      : { ...maximumLift, cas: maximumLift.cas * Math.sqrt(coefficient / (coefficient + by)) };
+  const moved: Configuration = { ...configuration, maximumLift: more };
   return { ...question, aeroplane: { ...aeroplane, configurations: { ...aeroplane.configurations, [id]: moved } } };
 }

@@ -1,5 +1,5 @@
 import type { Check, Factor } from '../answer.ts';
-import type { DeclaredDistances } from '../declared-distances.ts';
+import { countingDistances, type DeclaredDistances } from '../declared-distances.ts';
 import type { Question } from '../question.ts';
 import type { RuleSet } from '../rules/rule-set.ts';
 import type { Worksheet } from './worksheet.ts';
@@ -17,18 +17,18 @@ const startsFrom = {
  * Each check: the distance, its factors, what is required, available and left.
  *
  * @param declared - of the runway
- * @param clearwayShare - the most that counts of a clearway, over the run
+ * @param phase - which declared distances count
  */
 export function checkLines(
   sheet: Worksheet,
   { runway }: Question,
   checks: readonly Check[],
   declared: DeclaredDistances,
-  { source }: RuleSet,
-  clearwayShare: number,
+  { source, takeoff: { clearwayShare } }: RuleSet,
+  phase: 'takeoff' | 'landing',
 ): void {
   sheet.begin('checks');
-  lengthLines(sheet, runway, declared, source, clearwayShare);
+  lengthLines(sheet, runway, declared, source, clearwayShare, countingDistances[phase]);
   for (const check of checks) {
     const { code, required, available, margin } = check;
     if (required === undefined) continue;
@@ -124,13 +124,14 @@ function lengthLines(
   { credited }: DeclaredDistances,
   source: RuleSet['source'],
   clearwayShare: number,
+  counting: readonly ('tora' | 'toda' | 'asda' | 'lda')[],
 ): void {
   const offset = start.kind === 'offset' ? start.offset : 0;
   if (start.kind === 'offset') {
     sheet.stated({ symbol: 'x_0', name: 'start offset', value: offset, unit: 'm', at: '/runway/start/offset' });
   }
   const losses = { tora: lineUp?.tora, toda: lineUp?.tora, asda: lineUp?.asda, lda: undefined };
-  if (lineUp !== undefined) {
+  if (lineUp !== undefined && counting.includes('tora')) {
     sheet.stated({
       symbol: 'x_T',
       name: 'line-up loss of TORA and TODA',
@@ -146,7 +147,7 @@ function lengthLines(
       at: '/runway/lineUp/asda',
     });
   }
-  for (const name of ['tora', 'toda', 'asda', 'lda'] as const) {
+  for (const name of counting) {
     const length = declared[name];
     const available = credited[name];
     if (length === undefined || available === undefined) continue;

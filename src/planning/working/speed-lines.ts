@@ -130,29 +130,39 @@ export function speedLines(
       source: 'AndersonIntroduction',
       shownAs: speed,
     });
-    sheet.formula({
-      symbol: `M_${suffix}`,
-      name: `Mach number of the ${name}`,
-      formula: `sqrt(5*(((p0/p)*((1 + 0.2*(V_${suffix}_cas/a0)^2)^3.5 - 1) + 1)^(2/7) - 1))`,
-      value: machFromEas(speeds.eas, air.pressure),
-      source: 'GraceyRp1046',
-    });
-    sheet.formula({
-      symbol: `V_${suffix}_eas`,
-      name: `${name}, equivalent`,
-      formula: `M_${suffix}*a0*sqrt(p/p0)`,
-      value: speeds.eas,
-      unit: 'm/s',
-      source: 'GraceyRp1046',
-      shownAs: speed,
-    });
-    trueLine(sheet, suffix, name, speeds);
+    calibratedFrom(sheet, suffix, name, speeds, air);
   }
   indicatedLine(sheet, suffix, name, speeds, question.aeroplane.airspeedCalibration);
 }
 
+/** The Mach number of a calibrated airspeed, as a formula. */
+export function machOf(calibrated: string): string {
+  return `sqrt(5*(((p0/p)*((1 + 0.2*(${calibrated}/a0)^2)^3.5 - 1) + 1)^(2/7) - 1))`;
+}
+
+/** Mach number, equivalent and true airspeed of a calibrated one that stands above. */
+export function calibratedFrom(sheet: Worksheet, suffix: string, name: string, speeds: SpeedSet, air: Air): void {
+  sheet.formula({
+    symbol: `M_${suffix}`,
+    name: `Mach number of the ${name}`,
+    formula: machOf(`V_${suffix}_cas`),
+    value: machFromEas(speeds.eas, air.pressure),
+    source: 'GraceyRp1046',
+  });
+  sheet.formula({
+    symbol: `V_${suffix}_eas`,
+    name: `${name}, equivalent`,
+    formula: `M_${suffix}*a0*sqrt(p/p0)`,
+    value: speeds.eas,
+    unit: 'm/s',
+    source: 'GraceyRp1046',
+    shownAs: speed,
+  });
+  trueLine(sheet, suffix, name, speeds);
+}
+
 /** True and calibrated airspeed of an equivalent one. */
-function kindLines(sheet: Worksheet, suffix: string, name: string, speeds: SpeedSet, { pressure }: Air): void {
+export function kindLines(sheet: Worksheet, suffix: string, name: string, speeds: SpeedSet, { pressure }: Air): void {
   trueLine(sheet, suffix, name, speeds);
   sheet.formula({
     symbol: `M_${suffix}`,

@@ -60,7 +60,7 @@ export function takeoffWorking(
   if (answer.assessment !== undefined) {
     const { clearwayShare } = ruleSet.takeoff;
     const declared = declaredDistances(runway, clearwayShare);
-    checkLines(sheet, question, answer.assessment.checks, declared, ruleSet, clearwayShare);
+    checkLines(sheet, question, answer.assessment.checks, declared, ruleSet, 'takeoff');
   }
   return sheet.lines;
 }

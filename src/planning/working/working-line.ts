@@ -8,6 +8,7 @@ export const workingUnits = [
   'm/s',
   'm/s2',
   'kg',
+  'kg/m',
   'kg/m3',
   'K',
   'K/m',

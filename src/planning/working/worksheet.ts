@@ -24,7 +24,7 @@ export interface Stated {
   readonly at: string;
 }
 
-const functions = new Set(['sqrt', 'ln', 'exp', 'sin', 'cos', 'min', 'max', 'abs']);
+const functions = new Set(['sqrt', 'ln', 'exp', 'sin', 'cos', 'asin', 'min', 'max', 'abs']);
 
 /** A working under construction: lines in the order in which they are written down. */
 export class Worksheet {

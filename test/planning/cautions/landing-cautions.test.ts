@@ -422,6 +422,17 @@ const pairs: readonly Pair[] = [
     says: /^Runway 07 is that of some-field, revision 2, with changes of the question: declared\/tora 1400 m/,
   },
   {
+    code: 'aeroplane-changed',
+    severity: 'note',
+    raised: {
+      question: {
+        changes: { basedOn: 'plain-trainer', revision: '1', because: 'larger tyres', changed: ['wheels taken out'] },
+      },
+    },
+    silent: {},
+    says: /^The aeroplane is plain-trainer, revision 1, with changes: wheels taken out\. The reason given: "larger tyres"\./,
+  },
+  {
     code: 'assumption-matters',
     severity: 'caution',
     raised: { runway: { surface: wetPavement } },

@@ -2,6 +2,7 @@ import fc from 'fast-check';
 import { readCatalogue } from '../../src/catalogue/read-catalogue.ts';
 import type { AeroplaneDefinition } from '../../src/contract/aeroplane-definition.ts';
 import type { CatalogueLookup } from '../../src/contract/catalogue-lookup.ts';
+import type { LandingRequest } from '../../src/contract/landing-request.ts';
 import type { TakeoffRequest } from '../../src/contract/takeoff-request.ts';
 import type { WithKnownRunway } from '../../src/contract/with-known-runway.ts';
 import { catalogueLookup } from '../../src/http/catalogue-lookup.ts';
@@ -46,6 +47,14 @@ function calibrated(definition: AeroplaneDefinition): AeroplaneDefinition {
         rotationTime: { value: 1.5, unit: 's' },
         rollingStartAllowance: { value: 35, unit: 'm' },
       },
+      landing: {
+        for: ['landing'],
+        flap: { value: 30, unit: 'deg' },
+        maximumLift: { stallSpeed: { value: 43, unit: 'kt' }, type: 'cas', kind: 'minimum', mass },
+        speeds: { landingReference: { cas: { value: 62, unit: 'kt' }, mass } },
+        approachAngle: { value: 4.5, unit: 'deg' },
+        freeRollTime: { value: 1, unit: 's' },
+      },
     },
     airspeedCalibration: {
       columns: [
@@ -78,11 +87,11 @@ const wind: fc.Arbitrary<TakeoffRequest['weather']['wind']> = fc.oneof(
   }),
 );
 
-/** Takeoffs with every choice of form, of which most but not all have distances. */
-export const anyTakeoff: fc.Arbitrary<WithKnownRunway<TakeoffRequest>> = fc
+type Question = Omit<WithKnownRunway<TakeoffRequest>, 'aeroplane' | 'mass' | 'configuration' | 'procedure'>;
+
+/** Weather, runway and rules with every choice of form. */
+const anySurroundings: fc.Arbitrary<Question> = fc
   .record({
-    definition: fc.constantFrom(...definitions),
-    share: between(0.75, 1),
     altitude: between(0, 6000),
     temperature: q('degC', -15, 38),
     dew: fc.option(between(0, 20), { nil: undefined }),
@@ -101,38 +110,25 @@ export const anyTakeoff: fc.Arbitrary<WithKnownRunway<TakeoffRequest>> = fc
       },
     ),
     obstacles: fc.boolean(),
-    paved: fc.boolean(),
+    surface: fc.constantFrom<Question['runway']['surface']>(
+      { kind: 'paved', state: 'dry' },
+      { kind: 'paved', state: 'wet' },
+      { kind: 'grass', state: 'wet', grass: 'short', firmness: 'firm' },
+      { kind: 'grass', state: 'dry', rollingFrictionCoefficient: 0.06, brakingFrictionCoefficient: 0.21 },
+    ),
     start: fc.constantFrom('threshold' as const, { offset: { value: 60, unit: 'm' as const } }),
     lineUp: fc.boolean(),
     magnetic: fc.boolean(),
-    declared: fc.constantFrom(['tora'], ['tora', 'toda'], ['tora', 'toda', 'asda'], []),
+    declared: fc.constantFrom(['tora', 'lda'], ['tora', 'toda', 'lda'], ['tora', 'toda', 'asda', 'lda'], []),
     wind,
-    rolling: fc.boolean(),
-    reduced: fc.boolean(),
     ruleSet: fc.constantFrom('unfactored', 'eu-class-b'),
     units: fc.constantFrom('m-kt-kg' as const, 'ft-kt-lb' as const, 'si' as const),
     rounding: fc.constantFrom('safe' as const, 'none' as const),
   })
-  .map((any) => {
-    const { definition, temperature, dew, altitude } = any;
-    const configuration = Object.entries(definition.configurations).find(([, one]) => one.for.includes('takeoff'));
-    const { value, unit } = definition.masses.maximumTakeoff;
-    const lengths = { tora: 1900, toda: 2400, asda: 2000 } as const;
-    const weather: TakeoffRequest['weather'] = {
-      temperature,
-      ...(dew === undefined ? {} : { dewPoint: { value: temperature.value - dew, unit: 'degC' as const } }),
-      pressure:
-        any.pressure === 'qnh'
-          ? { qnh: { value: any.setting, unit: 'hPa' } }
-          : any.pressure === 'pressureAltitude'
-            ? { pressureAltitude: { value: altitude, unit: 'ft' } }
-            : { stationPressure: { value: any.setting * (1 - altitude / 40_000), unit: 'hPa' } },
-      wind: any.wind,
-    };
+  .map((any): Question => {
+    const { temperature, dew, altitude } = any;
+    const lengths = { tora: 1900, toda: 2400, asda: 2000, lda: 1800 } as const;
     return {
-      aeroplane: { definition },
-      mass: { value: value * any.share, unit },
-      configuration: configuration?.[0] ?? '',
       runway: {
         designator: '25',
         direction: { value: 247, unit: 'deg' },
@@ -140,16 +136,14 @@ export const anyTakeoff: fc.Arbitrary<WithKnownRunway<TakeoffRequest>> = fc
         magneticVariation: { value: 4, unit: 'deg' },
         elevation: { value: altitude, unit: 'ft' },
         slope: any.slope,
-        surface: any.paved
-          ? { kind: 'paved', state: 'dry' }
-          : { kind: 'grass', state: 'wet', grass: 'short', firmness: 'firm' },
+        surface: any.surface,
         start: any.start,
         ...(any.lineUp ? { lineUp: { tora: { value: 12, unit: 'm' }, asda: { value: 15, unit: 'm' } } } : {}),
         ...(any.obstacles
           ? {
               obstacles: {
-                from: 'brake-release' as const,
-                list: [{ distance: { value: 3100, unit: 'm' as const }, height: { value: 40, unit: 'm' as const } }],
+                from: 'brake-release',
+                list: [{ distance: { value: 3100, unit: 'm' }, height: { value: 40, unit: 'm' } }],
               },
             }
           : {}),
@@ -157,13 +151,64 @@ export const anyTakeoff: fc.Arbitrary<WithKnownRunway<TakeoffRequest>> = fc
           any.declared.map((name) => [name, { value: lengths[name as keyof typeof lengths], unit: 'm' }]),
         ),
       },
-      weather,
-      procedure: {
-        ...(any.rolling && configuration?.[1].rollingStartAllowance !== undefined ? { start: 'rolling' as const } : {}),
-        ...(any.reduced && 'reduced' in (definition.propulsion.powerSettings ?? {}) ? { power: 'reduced' } : {}),
+      weather: {
+        temperature,
+        ...(dew === undefined ? {} : { dewPoint: { value: temperature.value - dew, unit: 'degC' } }),
+        pressure:
+          any.pressure === 'qnh'
+            ? { qnh: { value: any.setting, unit: 'hPa' } }
+            : any.pressure === 'pressureAltitude'
+              ? { pressureAltitude: { value: altitude, unit: 'ft' } }
+              : { stationPressure: { value: any.setting * (1 - altitude / 40_000), unit: 'hPa' } },
+        wind: any.wind,
       },
       ruleSet: any.ruleSet,
       units: any.units,
       rounding: any.rounding,
+    };
+  });
+
+/** One of the definitions in a configuration for this phase, at a mass up to the greatest of the phase. */
+const anyState = (phase: 'takeoff' | 'landing') =>
+  fc.record({ definition: fc.constantFrom(...definitions), share: between(0.75, 1) }).map(({ definition, share }) => {
+    const found = Object.entries(definition.configurations).find(([, one]) => one.for.includes(phase));
+    const [configuration, stated] = found as NonNullable<typeof found>;
+    const { maximumTakeoff, maximumLanding = maximumTakeoff } = definition.masses;
+    const { value, unit } = phase === 'takeoff' ? maximumTakeoff : maximumLanding;
+    return {
+      stated,
+      definition,
+      asked: { aeroplane: { definition }, mass: { value: value * share, unit }, configuration },
+    };
+  });
+
+/** Takeoffs with every choice of form, of which most but not all have distances. */
+export const anyTakeoff: fc.Arbitrary<WithKnownRunway<TakeoffRequest>> = fc
+  .tuple(anyState('takeoff'), anySurroundings, fc.boolean(), fc.boolean())
+  .map(([{ definition, stated, asked }, surroundings, rolling, reduced]) => ({
+    ...asked,
+    ...surroundings,
+    procedure: {
+      ...(rolling && stated.rollingStartAllowance !== undefined ? { start: 'rolling' as const } : {}),
+      ...(reduced && 'reduced' in (definition.propulsion.powerSettings ?? {}) ? { power: 'reduced' } : {}),
+    },
+  }));
+
+/** Landings with every choice of form, of which most but not all have distances. */
+export const anyLanding: fc.Arbitrary<WithKnownRunway<LandingRequest>> = fc
+  .tuple(anyState('landing'), anySurroundings, fc.boolean(), fc.boolean())
+  .map(([{ definition, stated, asked }, surroundings, flown, reverse]) => {
+    const { speeds, approachAngle, freeRollTime } = stated;
+    return {
+      ...asked,
+      ...surroundings,
+      procedure: {
+        ...(flown && speeds?.landingReference !== undefined
+          ? { approachSpeedIncrement: { value: 4, unit: 'kt' as const } }
+          : {}),
+        ...(flown && approachAngle !== undefined ? { approachAngle: { value: 3.3, unit: 'deg' as const } } : {}),
+        ...(flown && freeRollTime !== undefined ? { reactionTime: { value: 3, unit: 's' as const } } : {}),
+        ...(reverse && definition.reverseThrust !== undefined ? { reverse: true } : {}),
+      },
     };
   });
