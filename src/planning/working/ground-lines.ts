@@ -119,6 +119,17 @@ export function takeoffRollLines(sheet: Worksheet, question: Question, run: Take
     unit: 's',
     at: configurationPointer(question, 'rotationTime'),
   });
+  const { contaminantDrag } = run;
+  if (contaminantDrag !== undefined) {
+    sheet.figure('table', {
+      symbol: 'k_C',
+      name: 'drag of the contaminant over the square of the ground speed',
+      value: contaminantDrag,
+      unit: 'kg/m',
+      source: 'HouseContaminant',
+    });
+  }
+  const displaced = (suffix: number) => (contaminantDrag === undefined ? '' : ` - k_C*(V_${suffix} - w)^2`);
   const forces = rollForces(run);
   const speeds = estimateSpeeds(run);
   [1, 2].forEach((suffix, i) => {
@@ -154,7 +165,7 @@ export function takeoffRollLines(sheet: Worksheet, question: Question, run: Take
     sheet.formula({
       symbol: `a_${suffix}`,
       name: `acceleration at V_${suffix}`,
-      formula: `(T_${suffix} - D_${suffix} - mu*max(0, m*g0 - L_${suffix}))/m - g0*slope`,
+      formula: `(T_${suffix} - D_${suffix}${displaced(suffix)} - mu*max(0, m*g0 - L_${suffix}))/m - g0*slope`,
       value: rollAcceleration(forces, airspeed),
       unit: 'm/s2',
       source: 'McCormick1995',
