@@ -1,12 +1,12 @@
 import { createHash } from 'node:crypto';
-import { existsSync, mkdirSync, readdirSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
+import { cpSync, existsSync, mkdirSync, readdirSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { describe, expect, it } from 'vitest';
 import { CatalogueFault } from '../../src/catalogue/catalogue-fault.ts';
 import { manifestName } from '../../src/catalogue/manifest.ts';
 import { readCatalogue } from '../../src/catalogue/read-catalogue.ts';
 import { sealFolder } from '../../src/catalogue/seal-folder.ts';
-import { builtInFolder, inFolder } from '../support/catalogue-folder.ts';
+import { builtInAerodromes, builtInFolder, inFolder } from '../support/catalogue-folder.ts';
 
 describe('sealFolder', () => {
   it('writes the digest of every file, and the catalogue then takes the folder', () => {
@@ -82,6 +82,36 @@ describe('sealFolder', () => {
       expect(() => sealFolder(join(folder, 'absent'))).toThrow('the folder cannot be read (ENOENT)');
       mkdirSync(join(folder, 'within'));
       expect(() => sealFolder(folder)).toThrow('within is not a file');
+    });
+  });
+
+  it('seals the aerodromes within as well, and the catalogue takes both or either', () => {
+    inFolder('built-in', (folder) => {
+      const within = join(folder, 'aerodromes');
+      cpSync(builtInAerodromes, within, { recursive: true });
+      rmSync(join(within, manifestName));
+      expect(() => readCatalogue({ builtIn: false, folder })).toThrow(/aerodromes: there is no manifest.json/);
+      const sealing = sealFolder(folder);
+      expect('sealed' in sealing && sealing.sealed).toHaveLength(11);
+      expect(readFileSync(join(within, manifestName), 'utf8')).toBe(
+        readFileSync(join(builtInAerodromes, manifestName), 'utf8'),
+      );
+      const both = readCatalogue({ builtIn: false, folder });
+      expect([both.aeroplanes.own, both.aerodromes.count.own]).toEqual([7, 4]);
+      expect(() => readCatalogue({ builtIn: true, folder })).toThrow(/is one of the built-in aeroplanes/);
+      for (const name of readdirSync(folder)) if (name !== 'aerodromes') rmSync(join(folder, name));
+      const alone = sealFolder(folder);
+      expect('sealed' in alone && alone.sealed).toHaveLength(4);
+      expect(readCatalogue({ builtIn: false, folder }).aerodromes.get('karvendal-club')?.definition.revision).toBe('1');
+      expect(() => readCatalogue({ builtIn: true, folder })).toThrow(/is one of the built-in aerodromes/);
+      const path = join(within, 'karvendal-club.json');
+      writeFileSync(path, readFileSync(path, 'utf8').replace('"value": 815', '"value": 816'));
+      expect(() => readCatalogue({ builtIn: false, folder })).toThrow(
+        /karvendal-club.json is not the file that was sealed/,
+      );
+      writeFileSync(path, readFileSync(path, 'utf8').replace('"tora"', '"torra"'));
+      const refused = sealFolder(folder);
+      expect('faults' in refused && refused.faults[0]).toContain(`catalogue ${within}: karvendal-club.json: /ends/0/`);
     });
   });
 

@@ -11,14 +11,15 @@ export const crosswindBeyondDemonstrated: CautionTest<ConditionsContext> = {
   test: (context) => {
     const { demonstratedCrosswind, crosswind: limitation } = context.question.aeroplane.limitations ?? {};
     const mean = context.wind.crosswind;
-    const limit = limitation ?? demonstratedCrosswind;
-    if (mean === undefined || limit === undefined) return undefined;
+    if (mean === undefined) return undefined;
     const component = Math.max(mean, context.wind.gust?.crosswind ?? 0);
-    if (component <= limit + 1e-9) return undefined;
+    const isLimited = limitation !== undefined && component > limitation + 1e-9;
+    const limit = isLimited ? limitation : demonstratedCrosswind;
+    if (limit === undefined || component <= limit + 1e-9) return undefined;
     const gusts = component > mean ? ' in gusts' : '';
-    const name = limitation === undefined ? 'demonstrated' : 'limitation';
+    const name = isLimited ? 'limitation' : 'demonstrated';
     return {
-      severity: limitation === undefined ? 'caution' : 'strong',
+      severity: isLimited ? 'strong' : 'caution',
       message: `Crosswind ${textIn(context, 'speed', component)}${gusts} on runway ${context.question.runway.designator} is ${textIn(context, 'speed', component - limit)} beyond the ${name} ${textIn(context, 'speed', limit)}.`,
       at: '/weather/wind',
       value: { kind: 'speed', value: component },

@@ -337,8 +337,22 @@ const pairs: readonly Pair[] = [
     code: 'crosswind-beyond-demonstrated',
     severity: 'strong',
     raised: both(across(21), limit({ crosswind: 20 * kt, demonstratedCrosswind: 15 * kt })),
-    silent: both(across(20), limit({ crosswind: 20 * kt, demonstratedCrosswind: 15 * kt })),
+    silent: both(across(15), limit({ crosswind: 20 * kt, demonstratedCrosswind: 15 * kt })),
     says: /beyond the limitation 20 kt\.$/,
+  },
+  {
+    code: 'crosswind-beyond-demonstrated',
+    severity: 'caution',
+    raised: both(across(20), limit({ crosswind: 20 * kt, demonstratedCrosswind: 15 * kt })),
+    silent: both(across(20), limit({ crosswind: 20 * kt, demonstratedCrosswind: 20 * kt })),
+    says: /is 5 kt beyond the demonstrated 15 kt\.$/,
+  },
+  {
+    code: 'crosswind-beyond-demonstrated',
+    severity: 'strong',
+    raised: both(across(21), limit({ crosswind: 20 * kt })),
+    silent: both(across(20), limit({ crosswind: 20 * kt })),
+    says: /is 1 kt beyond the limitation 20 kt\.$/,
   },
   {
     code: 'crosswind-beyond-demonstrated',
