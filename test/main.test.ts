@@ -111,7 +111,7 @@ describe('the start', () => {
     const { code, stdout, stderr } = await run({ PORT: '1' }, '--check');
     expect([code, stderr]).toEqual([0, '']);
     expect(stdout).toMatch(
-      /^settings and catalogue are in order: 7 built-in aeroplanes and 0 of the operator's own, SHA-256 [0-9a-f]{64}; would listen on 127\.0\.0\.1 port 1\n$/,
+      /^settings and catalogue are in order: 7 built-in aeroplanes and 0 of the operator's own, 4 built-in aerodromes and 0 own, SHA-256 [0-9a-f]{64}; would listen on 127\.0\.0\.1 port 1\n$/,
     );
   });
 });
