@@ -85,6 +85,6 @@ export function sensitivitiesOf<const Whole extends string>(wholeDistance: Whole
     .meta({ id, description: 'What each distance, as stated, changes by with one input.' });
   return z.array(sensitivity).meta({
     description:
-      'By central differences of the whole evaluation: good for small changes, and no substitute for asking again.',
+      'By differences of the whole evaluation, central but at a kink: good for small changes, and no substitute for asking again.',
   });
 }

@@ -157,6 +157,21 @@ describe('the sensitivities of a takeoff', () => {
     );
   });
 
+  it('are those of more where the sides differ: a level runway, on which uphill counts in the air and downhill does not', () => {
+    const on = (percent: number) =>
+      asked({
+        runway: { ...plain.runway, slope: { value: percent, unit: 'percent' } },
+        detail: ['sensitivities'],
+        rounding: 'none',
+      });
+    const { sensitivities = [] } = on(0);
+    const air = sensitivities.find(({ of }) => of === 'slope')?.change?.airDistance.value ?? 0;
+    const more = on(0.1).distances?.airDistance.value ?? 0;
+    const level = on(0).distances?.airDistance.value ?? 0;
+    expect(on(-0.1).distances?.airDistance.value).toBe(level);
+    expect(air / ((more - level) * 10)).toBeCloseTo(1, 1);
+  });
+
   it('are taken from one side where the other has no distances, as at saturation', () => {
     const weather = { ...plain.weather, dewPoint: plain.weather.temperature };
     const { sensitivities = [] } = asked({ weather, detail: ['sensitivities'], rounding: 'none' });

@@ -90,83 +90,84 @@ const wind: fc.Arbitrary<TakeoffRequest['weather']['wind']> = fc.oneof(
 type Question = Omit<WithKnownRunway<TakeoffRequest>, 'aeroplane' | 'mass' | 'configuration' | 'procedure'>;
 
 /** Weather, runway and rules with every choice of form. */
-const anySurroundings: fc.Arbitrary<Question> = fc
-  .record({
-    altitude: between(0, 6000),
-    temperature: q('degC', -15, 38),
-    dew: fc.option(between(0, 20), { nil: undefined }),
-    pressure: fc.constantFrom('qnh' as const, 'pressureAltitude' as const, 'stationPressure' as const),
-    setting: between(985, 1040),
-    slope: fc.oneof(
-      { weight: 4, arbitrary: q('percent', -2, 2) },
-      {
-        weight: 1,
-        arbitrary: fc.array(between(-8, 8), { minLength: 4, maxLength: 4 }).map((heights) => ({
-          profile: {
-            units: ['m', 'm'] as ['m', 'm'],
-            points: [0, ...heights].map((height, i): [number, number] => [i * 700, height]),
-          },
-        })),
-      },
-    ),
-    obstacles: fc.boolean(),
-    surface: fc.constantFrom<Question['runway']['surface']>(
-      { kind: 'paved', state: 'dry' },
-      { kind: 'paved', state: 'wet' },
-      { kind: 'grass', state: 'wet', grass: 'short', firmness: 'firm' },
-      { kind: 'grass', state: 'dry', rollingFrictionCoefficient: 0.06, brakingFrictionCoefficient: 0.21 },
-    ),
-    start: fc.constantFrom('threshold' as const, { offset: { value: 60, unit: 'm' as const } }),
-    lineUp: fc.boolean(),
-    magnetic: fc.boolean(),
-    declared: fc.constantFrom(['tora', 'lda'], ['tora', 'toda', 'lda'], ['tora', 'toda', 'asda', 'lda'], []),
-    wind,
-    ruleSet: fc.constantFrom('unfactored', 'eu-class-b'),
-    units: fc.constantFrom('m-kt-kg' as const, 'ft-kt-lb' as const, 'si' as const),
-    rounding: fc.constantFrom('safe' as const, 'none' as const),
-  })
-  .map((any): Question => {
-    const { temperature, dew, altitude } = any;
-    const lengths = { tora: 1900, toda: 2400, asda: 2000, lda: 1800 } as const;
-    return {
-      runway: {
-        designator: '25',
-        direction: { value: 247, unit: 'deg' },
-        directionReference: any.magnetic ? 'magnetic' : 'true',
-        magneticVariation: { value: 4, unit: 'deg' },
-        elevation: { value: altitude, unit: 'ft' },
-        slope: any.slope,
-        surface: any.surface,
-        start: any.start,
-        ...(any.lineUp ? { lineUp: { tora: { value: 12, unit: 'm' }, asda: { value: 15, unit: 'm' } } } : {}),
-        ...(any.obstacles
-          ? {
-              obstacles: {
-                from: 'brake-release',
-                list: [{ distance: { value: 3100, unit: 'm' }, height: { value: 40, unit: 'm' } }],
-              },
-            }
-          : {}),
-        declared: Object.fromEntries(
-          any.declared.map((name) => [name, { value: lengths[name as keyof typeof lengths], unit: 'm' }]),
-        ),
-      },
-      weather: {
-        temperature,
-        ...(dew === undefined ? {} : { dewPoint: { value: temperature.value - dew, unit: 'degC' } }),
-        pressure:
-          any.pressure === 'qnh'
-            ? { qnh: { value: any.setting, unit: 'hPa' } }
-            : any.pressure === 'pressureAltitude'
-              ? { pressureAltitude: { value: altitude, unit: 'ft' } }
-              : { stationPressure: { value: any.setting * (1 - altitude / 40_000), unit: 'hPa' } },
-        wind: any.wind,
-      },
-      ruleSet: any.ruleSet,
-      units: any.units,
-      rounding: any.rounding,
-    };
-  });
+const anySurroundings = (phase: 'takeoff' | 'landing'): fc.Arbitrary<Question> =>
+  fc
+    .record({
+      altitude: between(0, 6000),
+      temperature: q('degC', -15, 38),
+      dew: fc.option(between(0, 20), { nil: undefined }),
+      pressure: fc.constantFrom('qnh' as const, 'pressureAltitude' as const, 'stationPressure' as const),
+      setting: between(985, 1040),
+      slope: fc.oneof(
+        { weight: 4, arbitrary: q('percent', -2, 2) },
+        {
+          weight: 1,
+          arbitrary: fc.array(between(-8, 8), { minLength: 4, maxLength: 4 }).map((heights) => ({
+            profile: {
+              units: ['m', 'm'] as ['m', 'm'],
+              points: [0, ...heights].map((height, i): [number, number] => [i * 700, height]),
+            },
+          })),
+        },
+      ),
+      obstacles: fc.boolean(),
+      surface: fc.constantFrom<Question['runway']['surface']>(
+        { kind: 'paved', state: 'dry' },
+        { kind: 'paved', state: 'wet' },
+        { kind: 'grass', state: 'wet', grass: 'short', firmness: 'firm' },
+        { kind: 'grass', state: 'dry', rollingFrictionCoefficient: 0.06, brakingFrictionCoefficient: 0.21 },
+      ),
+      start: fc.constantFrom('threshold' as const, { offset: { value: 60, unit: 'm' as const } }),
+      lineUp: fc.boolean(),
+      magnetic: fc.boolean(),
+      declared: fc.constantFrom(['tora', 'lda'], ['tora', 'toda', 'lda'], ['tora', 'toda', 'asda', 'lda'], []),
+      wind,
+      ruleSet: fc.constantFrom('unfactored', 'eu-class-b'),
+      units: fc.constantFrom('m-kt-kg' as const, 'ft-kt-lb' as const, 'si' as const),
+      rounding: fc.constantFrom('safe' as const, 'none' as const),
+    })
+    .map((any): Question => {
+      const { temperature, dew, altitude } = any;
+      const lengths = { tora: 1900, toda: 2400, asda: 2000, lda: 1800 } as const;
+      return {
+        runway: {
+          designator: '25',
+          direction: { value: 247, unit: 'deg' },
+          directionReference: any.magnetic ? 'magnetic' : 'true',
+          magneticVariation: { value: 4, unit: 'deg' },
+          elevation: { value: altitude, unit: 'ft' },
+          slope: any.declared.length === 0 && 'profile' in any.slope ? { value: 1, unit: 'percent' } : any.slope,
+          surface: any.surface,
+          start: any.start,
+          ...(any.lineUp ? { lineUp: { tora: { value: 12, unit: 'm' }, asda: { value: 15, unit: 'm' } } } : {}),
+          ...(any.obstacles && phase === 'takeoff'
+            ? {
+                obstacles: {
+                  from: 'brake-release',
+                  list: [{ distance: { value: 3100, unit: 'm' }, height: { value: 40, unit: 'm' } }],
+                },
+              }
+            : {}),
+          declared: Object.fromEntries(
+            any.declared.map((name) => [name, { value: lengths[name as keyof typeof lengths], unit: 'm' }]),
+          ),
+        },
+        weather: {
+          temperature,
+          ...(dew === undefined ? {} : { dewPoint: { value: temperature.value - dew, unit: 'degC' } }),
+          pressure:
+            any.pressure === 'qnh'
+              ? { qnh: { value: any.setting, unit: 'hPa' } }
+              : any.pressure === 'pressureAltitude'
+                ? { pressureAltitude: { value: altitude, unit: 'ft' } }
+                : { stationPressure: { value: any.setting * (1 - altitude / 40_000), unit: 'hPa' } },
+          wind: any.wind,
+        },
+        ruleSet: any.ruleSet,
+        units: any.units,
+        rounding: any.rounding,
+      };
+    });
 
 /** One of the definitions in a configuration for this phase, at a mass up to the greatest of the phase. */
 const anyState = (phase: 'takeoff' | 'landing') =>
@@ -184,7 +185,7 @@ const anyState = (phase: 'takeoff' | 'landing') =>
 
 /** Takeoffs with every choice of form, of which most but not all have distances. */
 export const anyTakeoff: fc.Arbitrary<WithKnownRunway<TakeoffRequest>> = fc
-  .tuple(anyState('takeoff'), anySurroundings, fc.boolean(), fc.boolean())
+  .tuple(anyState('takeoff'), anySurroundings('takeoff'), fc.boolean(), fc.boolean())
   .map(([{ definition, stated, asked }, surroundings, rolling, reduced]) => ({
     ...asked,
     ...surroundings,
@@ -196,7 +197,7 @@ export const anyTakeoff: fc.Arbitrary<WithKnownRunway<TakeoffRequest>> = fc
 
 /** Landings with every choice of form, of which most but not all have distances. */
 export const anyLanding: fc.Arbitrary<WithKnownRunway<LandingRequest>> = fc
-  .tuple(anyState('landing'), anySurroundings, fc.boolean(), fc.boolean())
+  .tuple(anyState('landing'), anySurroundings('landing'), fc.boolean(), fc.boolean())
   .map(([{ definition, stated, asked }, surroundings, flown, reverse]) => {
     const { speeds, approachAngle, freeRollTime } = stated;
     return {

@@ -24,10 +24,15 @@ export function sensitivities<Q extends Question>(
   );
 }
 
+/** Slopes on the two sides of the question that differ by more than this share are those of a kink. */
+const kink = 0.01;
+
 /**
  * What each distance changes by with one input, by central differences.
  *
- * Where the distances end on one side, as at the last climb gradient that still counts, the other side alone is taken.
+ * Where a kink lies between the sides, as on a level runway, from which a climb counts and a fall does not, it is the change with
+ * more of the input. Where the distances end on one side, as at the last climb gradient that still counts, the other side alone is
+ * taken.
  *
  * @param base - the distances of the question itself [m]
  */
@@ -39,18 +44,39 @@ export function sensitivity<Q extends Question>(
 ): Sensitivity {
   const per = perOf(question.units);
   const named = { of, at: at(question), per };
-  const more = beside(step);
-  const less = beside(-step);
-  if (more === undefined && less === undefined) return named;
-  const between = more !== undefined && less !== undefined ? 2 * step : step;
-  const scale = (typeof per === 'number' ? per : per.value) / between;
-  const [high, low] = [more ?? base, less ?? base];
+  const above = beside(step);
+  const below = beside(-step);
+  const more = above && between(base, above);
+  const less = below && between(below, base);
+  const slope = more === undefined || less === undefined || isKinked(more, less) ? (more ?? less) : mean(more, less);
+  if (slope === undefined) return named;
+  const scale = (typeof per === 'number' ? per : per.value) / step;
   return {
     ...named,
     change: {
-      groundRoll: (high.groundRoll - low.groundRoll) * scale,
-      airDistance: (high.airDistance - low.airDistance) * scale,
-      wholeDistance: (high.wholeDistance - low.wholeDistance) * scale,
+      groundRoll: slope.groundRoll * scale,
+      airDistance: slope.airDistance * scale,
+      wholeDistance: slope.wholeDistance * scale,
     },
   };
+}
+
+function between(low: Changes, high: Changes): Changes {
+  return {
+    groundRoll: high.groundRoll - low.groundRoll,
+    airDistance: high.airDistance - low.airDistance,
+    wholeDistance: high.wholeDistance - low.wholeDistance,
+  };
+}
+
+function mean(one: Changes, other: Changes): Changes {
+  return {
+    groundRoll: (one.groundRoll + other.groundRoll) / 2,
+    airDistance: (one.airDistance + other.airDistance) / 2,
+    wholeDistance: (one.wholeDistance + other.wholeDistance) / 2,
+  };
+}
+
+function isKinked({ wholeDistance: one }: Changes, { wholeDistance: other }: Changes): boolean {
+  return Math.abs(one - other) > kink * Math.max(Math.abs(one), Math.abs(other));
 }
