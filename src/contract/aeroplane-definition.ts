@@ -116,6 +116,13 @@ export const aeroplaneDefinition = z
     name: shortText.meta({ description: 'Name for people to read.' }),
     category: z.enum(categories).meta({ description: 'Number and kind of engines.' }),
     engines: z.number().int().min(1).max(2).meta({ description: 'Number of engines.' }),
+    passengerSeats: z
+      .number()
+      .int()
+      .min(0)
+      .max(300)
+      .meta({ description: 'The most passengers it is operated with; some rules begin or end at 9.' })
+      .exactOptional(),
     certification: z
       .strictObject({
         basis: z.enum(certificationBases).meta({ description: 'Certification specification of the aeroplane.' }),

@@ -2,14 +2,25 @@ import { z } from 'zod';
 import { quantity, source } from './answer-parts.ts';
 import { id } from './text.ts';
 
-const factor = z
-  .strictObject({ code: z.string(), value: z.number(), because: z.string(), source, status: z.string() })
+export const factor = z
+  .strictObject({
+    code: z.string(),
+    value: z.number(),
+    because: z.string(),
+    source,
+    status: z.string(),
+    atLeast: z.literal(true).meta({ description: 'The rule says: or more.' }).exactOptional(),
+  })
   .meta({ id: 'Factor', description: 'A factor of the rule set and what it is for.' });
 
 const startsFrom = z.enum(['reference', 'credited', 'flight-manual']).meta({
   description:
     'The distance the factors multiply: credited wind on a paved, dry, level runway; credited wind on the runway as given; or the flight manual.',
 });
+
+const alternative = z
+  .strictObject({ startsFrom, distance: quantity, factors: z.array(factor), required: quantity, because: z.string() })
+  .meta({ id: 'AlternativeReading', description: 'Another reading of the rule, shown and not chosen.' });
 
 const check = z
   .strictObject({
@@ -18,16 +29,8 @@ const check = z
     startsFrom: startsFrom.exactOptional(),
     distance: quantity.meta({ description: 'Before factors.' }).exactOptional(),
     factors: z.array(factor),
-    alternative: z
-      .strictObject({
-        startsFrom,
-        distance: quantity,
-        factors: z.array(factor),
-        required: quantity,
-        because: z.string(),
-      })
-      .meta({ id: 'AlternativeReading', description: 'Another reading of the rule, shown and not chosen.' })
-      .exactOptional(),
+    alternative: alternative.exactOptional(),
+    furtherAlternatives: z.array(alternative).exactOptional(),
     required: quantity.exactOptional(),
     available: quantity.exactOptional(),
     margin: quantity.meta({ description: 'Available less required.' }).exactOptional(),
@@ -41,6 +44,7 @@ const check = z
 export const assessment = z
   .strictObject({
     ruleSet: id,
+    basedOn: id.meta({ description: "The rule set that an operator's own is based on." }).exactOptional(),
     checks: z.array(check),
     governing: z.string().meta({ description: 'Code of the check with the least margin.' }).exactOptional(),
   })

@@ -3,6 +3,7 @@ import { aeroplaneChoice } from './aeroplane-choice.ts';
 import { detail } from './detail.ts';
 import { mass } from './quantities.ts';
 import { asOf, reference, rounding, select, units } from './question-frame.ts';
+import { ruleSetChoice } from './rule-set-choice.ts';
 import { runwayChoice } from './runway-choice.ts';
 import { id } from './text.ts';
 import { weather } from './weather.ts';
@@ -18,7 +19,7 @@ export function questionShape<Procedure extends z.ZodType>(phase: 'takeoff' | 'l
     runway: runwayChoice,
     weather,
     procedure: z.exactOptional(procedure),
-    ruleSet: id.meta({ description: 'The rule set to assess by; GET /v1/rule-sets lists them.' }),
+    ruleSet: ruleSetChoice,
     stage: z
       .enum(['dispatch', 'in-flight'])
       .meta({ description: 'Whether the question is asked before departure or in flight.' })

@@ -1,7 +1,24 @@
-import { type Surface, surfaceKinds, surfaceStates } from '../planning/question.ts';
-import type { PhaseRules, RuleSet } from '../planning/rules/rule-set.ts';
+import { categories, certificationBases } from '../performance/aeroplane.ts';
+import { contaminantKinds, type Surface, surfaceKinds, surfaceStates } from '../planning/question.ts';
+import type { Asked, PhaseRules, RuledAeroplane, RuleSet } from '../planning/rules/rule-set.ts';
 
-const slopes = [-0.02, -0.01, 0, 0.01, 0.02];
+const sizes = [
+  { masses: { maximumTakeoff: 1000 } },
+  { masses: { maximumTakeoff: 5700 }, passengerSeats: 9 },
+  { masses: { maximumTakeoff: 5700 }, passengerSeats: 10 },
+  { masses: { maximumTakeoff: 5701 }, passengerSeats: 9 },
+];
+const aeroplanes: readonly RuledAeroplane[] = categories.flatMap((category) =>
+  certificationBases.flatMap((basis) =>
+    sizes.map((size) => ({
+      category,
+      engines: category.startsWith('twin') ? 2 : 1,
+      certification: { basis, screenHeight: 15 },
+      ...size,
+    })),
+  ),
+);
+
 const lengths = [
   { tora: 1000, toda: undefined, asda: undefined },
   { tora: 1000, toda: 1000, asda: 1000 },
@@ -9,39 +26,76 @@ const lengths = [
   { tora: 1000, toda: undefined, asda: 1200 },
   { tora: 1000, toda: 1200, asda: 1200 },
 ].map((published) => ({ ...published, lda: 1000 }));
-const grounds: readonly Pick<Surface, 'grass' | 'firmness'>[] = [
-  {},
-  { firmness: 'firm' },
-  { firmness: 'soft' },
-  { grass: 'short' },
-  { grass: 'long' },
+
+const paved = { kind: 'paved', state: 'dry' } as const;
+const surfaces: readonly Surface[] = [
+  ...surfaceKinds.flatMap((kind) => surfaceStates.map((state) => ({ kind, state }))),
+  ...surfaceKinds.flatMap((kind) =>
+    (['dry', 'wet'] as const).map((state) => ({ kind, state, firmness: 'soft' as const })),
+  ),
+  ...surfaceStates.map((state) => ({ kind: 'grass' as const, state, grass: 'short' as const })),
+  ...contaminantKinds.flatMap((kind) =>
+    [undefined, 0.002].flatMap((depth) => {
+      const contaminant = depth === undefined ? { kind } : { kind, depth };
+      return [
+        { ...paved, contaminant },
+        { kind: 'grass' as const, state: 'wet' as const, contaminant },
+      ];
+    }),
+  ),
 ];
-const surfaces: readonly Surface[] = surfaceKinds.flatMap((kind) =>
-  surfaceStates.flatMap((state) => grounds.map((ground) => ({ kind, state, ...ground }))),
-);
+
+const [published] = lengths as [Asked['published']];
+const plain = { surface: paved, conditionCode: undefined, slope: 0, published, reverse: false };
+
+/** Everything a surface rule may look at, over one aeroplane of each kind of engine and of each basis it may tell apart. */
+const onSurfaces: readonly Asked[] = aeroplanes
+  .filter(({ category, masses, certification: { basis } }) => {
+    const isAsked = category === 'twin-jet' ? basis === 'cs-25' || basis === 'none' : basis === 'none';
+    return masses.maximumTakeoff === 1000 && category.startsWith('twin') && isAsked;
+  })
+  .flatMap((aeroplane) =>
+    (aeroplane.category === 'twin-jet' ? [false, true] : [false]).flatMap((reverse) => [
+      ...surfaces.map((surface) => ({ ...plain, aeroplane, surface, reverse })),
+      ...([0, 1, 2, 3, 4, 5, 6] as const).map((conditionCode) => ({ ...plain, aeroplane, conditionCode, reverse })),
+    ]),
+  );
+/** Everything a reading may look at, over every aeroplane. */
+const inCases: readonly Asked[] = aeroplanes.flatMap((aeroplane) => [
+  ...lengths.map((some) => ({ ...plain, aeroplane, published: some })),
+  ...(['wet', 'contaminated'] as const).map((state) => ({
+    ...plain,
+    aeroplane,
+    surface: { kind: 'paved' as const, state },
+  })),
+  { ...plain, aeroplane, conditionCode: 0 as const },
+]);
 
 /**
- * Every figure of a rule set in one tree: what is written down, and what its functions give over all surfaces, some slopes
- * and each pattern of declared distances. A changed figure changes the tree, and so the digest that answers carry.
+ * Every figure of a rule set in one tree: what is written down, and which of it counts over all surfaces, many aeroplanes and each
+ * pattern of declared distances. A changed figure changes the tree, and so the digest that answers carry.
  */
-export function ruleSetFigures({ id, source, windCredit, thinMargin, takeoff, landing }: RuleSet) {
+export function ruleSetFigures(ruleSet: RuleSet) {
+  const { takeoff, landing, landingInFlight } = ruleSet;
+  const phases = [takeoff, landing, ...(landingInFlight === undefined ? [] : [landingInFlight])];
   return {
-    id,
-    source,
-    windCredit,
-    thinMargin,
-    clearwayShare: takeoff.clearwayShare,
-    takeoff: phaseFigures(takeoff),
-    landing: phaseFigures(landing),
+    // functions are no JSON: they leave the figures
+    ruleSet,
+    appliesTo: met(ruleSet.appliesTo.map(({ holds }) => holds)),
+    phases: phases.map(whatCounts),
   };
 }
 
-function phaseFigures({ startsFrom, runwayFactors, requirements }: PhaseRules) {
+function whatCounts({ appliesTo = [], surfaces: rules, readings, demands = [] }: PhaseRules) {
   return {
-    startsFrom,
-    runwayFactors: surfaces.flatMap((surface) => slopes.map((slope) => runwayFactors(surface, slope) ?? 'none')),
-    requirements: lengths.map((published) =>
-      requirements({ published, credited: published, clearwayNotCredited: undefined }),
-    ),
+    appliesTo: met(appliesTo.map(({ holds }) => holds)),
+    surfaces: onSurfaces.map((asked) => rules.findIndex(({ holds }) => holds(asked))).join(' '),
+    readings: inCases.map((asked) => readings.findIndex(({ holds }) => holds(asked))).join(' '),
+    demands: met(demands.map(({ appliesTo: holds }) => holds)),
   };
+}
+
+/** Of each condition the aeroplanes that meet it, by their places. */
+function met(conditions: readonly ((aeroplane: RuledAeroplane) => boolean)[]): readonly string[] {
+  return conditions.map((holds) => aeroplanes.map((aeroplane) => (holds(aeroplane) ? '1' : '0')).join(''));
 }

@@ -26,6 +26,7 @@ export function toAeroplane(definition: AeroplaneDefinition): Aeroplane {
     name: definition.name,
     category: definition.category,
     engines: definition.engines,
+    passengerSeats: definition.passengerSeats,
     certification: {
       basis: definition.certification.basis,
       screenHeight: metres(definition.certification.screenHeight),

@@ -81,7 +81,9 @@ function citedBy({ assessment, cautions, basis, detail }: Answer): ReferenceKey[
   for (const check of assessment?.checks ?? []) {
     keys.push(check.source);
     for (const factor of check.factors) keys.push(factor.source);
-    for (const factor of check.alternative?.factors ?? []) keys.push(factor.source);
+    for (const { factors } of [check.alternative ?? [], check.furtherAlternatives ?? []].flat()) {
+      for (const factor of factors) keys.push(factor.source);
+    }
   }
   for (const { source } of cautions) if (source !== undefined) keys.push(source);
   for (const { source } of basis.assumed) if (source !== undefined) keys.push(source);

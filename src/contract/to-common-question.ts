@@ -1,7 +1,6 @@
 import { configurationPointer } from '../planning/aeroplane-pointer.ts';
 import type { Fault } from '../planning/fault.ts';
 import type { Question } from '../planning/question.ts';
-import { ruleSetOf, ruleSets } from '../planning/rules/rule-sets.ts';
 import type { AeroplaneDefinition } from './aeroplane-definition.ts';
 import type { KnownAeroplane } from './aeroplane-lookup.ts';
 import type { LandingRequest } from './landing-request.ts';
@@ -10,9 +9,11 @@ import { si } from './quantity.ts';
 import { checkAir } from './question-checks/check-air.ts';
 import { checkConfigurationId } from './question-checks/check-configuration-id.ts';
 import { checkMass } from './question-checks/check-mass.ts';
+import { checkRuleSet } from './question-checks/check-rule-set.ts';
 import { checkRunway } from './question-checks/check-runway.ts';
 import { checkWind } from './question-checks/check-wind.ts';
 import { defaultUnits } from './question-frame.ts';
+import type { RuleSetChoice } from './rule-set-choice.ts';
 import type { RunwayOnWire } from './runway.ts';
 import { selectFaults } from './selection/select-faults.ts';
 import type { TakeoffRequest } from './takeoff-request.ts';
@@ -20,7 +21,6 @@ import { takeoffResponse } from './takeoff-response.ts';
 import { aeroplaneAt } from './to-known-aeroplane.ts';
 import { toRunway } from './to-runway.ts';
 import { toWeather } from './to-weather.ts';
-import { unknownId } from './unknown-id.ts';
 import type { WithKnownRunway } from './with-known-runway.ts';
 
 /** What a takeoff and a landing are asked alike. */
@@ -78,24 +78,16 @@ export function toCommonQuestion(
     configuration: request.configuration,
     runway: toRunway(request.runway, phase),
     weather: toWeather(request.weather),
-    ruleSet: request.ruleSet,
+    ...toRuleSet(request.ruleSet),
     ...(request.stage === undefined ? {} : { stage: request.stage }),
     units: request.units ?? defaultUnits,
     defaulted: defaulted(request, known.definition),
   };
 }
 
-function checkRuleSet(given: string): Fault[] {
-  return ruleSetOf(given) === undefined
-    ? [
-        unknownId(
-          '/ruleSet',
-          'rule set',
-          given,
-          ruleSets.map(({ id }) => id),
-        ),
-      ]
-    : [];
+function toRuleSet(given: RuleSetChoice): Pick<Question, 'ruleSet' | 'operatorRules'> {
+  if (typeof given === 'string') return { ruleSet: given };
+  return { ruleSet: given.basedOn, operatorRules: { name: given.name, factors: given.factors } };
 }
 
 /** Pointers of what the gate fills in. */

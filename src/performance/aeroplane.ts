@@ -25,6 +25,8 @@ export interface Aeroplane {
   readonly name: string;
   readonly category: Category;
   readonly engines: number;
+  /** the most passengers it is operated with; rules decide by it */
+  readonly passengerSeats?: number;
   readonly certification: { readonly basis: CertificationBasis; readonly screenHeight: number };
   readonly masses: { readonly empty?: number; readonly maximumTakeoff: number; readonly maximumLanding?: number };
   readonly wing: Wing;

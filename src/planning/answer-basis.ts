@@ -5,7 +5,7 @@ import { defaulted } from './defaulted.ts';
 import { groundSlopeAssumed } from './ground-slope.ts';
 import { notGiven } from './not-given.ts';
 import type { Question } from './question.ts';
-import type { RuleSet } from './rules/rule-set.ts';
+import type { Ruled } from './ruled.ts';
 
 /**
  * What an answer rests on.
@@ -16,7 +16,7 @@ import type { RuleSet } from './rules/rule-set.ts';
 export function answerBasis(
   question: Question,
   phase: 'takeoff' | 'landing',
-  ruleSet: RuleSet,
+  { rules, rulesAssumed }: Pick<Ruled, 'rules' | 'rulesAssumed'>,
   method: Method,
   assumed: readonly AnyAssumed[],
   band: Band | undefined,
@@ -26,10 +26,11 @@ export function answerBasis(
     band: band?.contributions,
     assumed: [
       ...assumed.map(({ assumption }) => assumption),
+      ...rulesAssumed,
       ...groundSlopeAssumed(question.runway, phase),
       ...defaulted(question),
     ],
     notGiven: notGiven(question, phase),
-    sources: [ruleSet[phase].source, ruleSet.windCredit.source],
+    sources: [rules.source, rules.windCredit.source],
   };
 }

@@ -94,27 +94,33 @@ export interface Factor {
   readonly because: string;
   readonly source: ReferenceKey;
   readonly status: string;
+  /** the rule says 'or more': the factor alone cannot show that a length is enough */
+  readonly atLeast?: true;
+}
+
+/** A reading of a rule that is shown and does not decide. */
+export interface AlternativeReading {
+  readonly startsFrom: 'reference' | 'credited' | 'flight-manual';
+  readonly distance: number;
+  readonly factors: readonly Factor[];
+  readonly required: number;
+  readonly because: string;
 }
 
 export interface Check {
   readonly code: string;
   /** what is compared: 'groundRoll', 'takeoffDistance', 'landingDistance' ... */
   readonly of: string;
+  /** the declared distance it is compared with; absent for a check that is not of a distance */
+  readonly against?: 'tora' | 'toda' | 'asda' | 'lda';
   /** absent for a check that is not of a distance */
   readonly startsFrom?: 'reference' | 'credited' | 'flight-manual';
   /** the distance before factors [m], where one exists */
   readonly distance?: number;
   readonly factors: readonly Factor[];
-  /** another reading of the rule, shown and not chosen */
-  readonly alternative?:
-    | {
-        readonly startsFrom: 'reference' | 'credited' | 'flight-manual';
-        readonly distance: number;
-        readonly factors: readonly Factor[];
-        readonly required: number;
-        readonly because: string;
-      }
-    | undefined;
+  /** another reading, shown and not chosen: the rule's own before the one of factors or physics that was not taken */
+  readonly alternative?: AlternativeReading | undefined;
+  readonly furtherAlternatives?: readonly AlternativeReading[];
   readonly unit: Kind;
   readonly required?: number;
   readonly available?: number | undefined;
@@ -173,6 +179,8 @@ export interface Answer {
   readonly assessment?:
     | {
         readonly ruleSet: string;
+        /** id of the set that an operator's own rules are based on */
+        readonly basedOn?: string | undefined;
         readonly checks: readonly Check[];
         /** code of the governing check */
         readonly governing?: string | undefined;

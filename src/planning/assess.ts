@@ -1,12 +1,10 @@
-import { filmAsWet } from '../physics/runway-surface.ts';
 import type { Check, Outcome } from './answer.ts';
 import { type Band, highOverOf } from './band.ts';
 import type { Conditions } from './conditions.ts';
-import type { DeclaredDistances } from './declared-distances.ts';
 import { checkOf, governingCheck } from './margins.ts';
 import { outcomeOf, type ThinBecause, thinBecause } from './outcome.ts';
-import type { Runway } from './question.ts';
-import type { PhaseRules } from './rules/rule-set.ts';
+import { requirements } from './rules/requirements.ts';
+import type { Requirement } from './rules/rule-set.ts';
 import type { Runs } from './runs.ts';
 
 /** The distances of a run that checks are of [m]. */
@@ -18,10 +16,10 @@ export interface Checked {
 
 /** What there is to assess. */
 export interface Assessing {
-  readonly conditions: Pick<Conditions, 'ruleSet' | 'doesNotApply' | 'condition'>;
-  readonly rules: PhaseRules;
-  readonly runway: Pick<Runway, 'surface' | 'slope'>;
-  readonly declared: DeclaredDistances;
+  readonly conditions: Pick<
+    Conditions,
+    'ruleSet' | 'rules' | 'asked' | 'doesNotApply' | 'declared' | 'runwayFactors' | 'condition'
+  >;
   /** why there are no distances; undefined where each run that was asked for has them */
   readonly notReached: { readonly outcome: Outcome } | undefined;
   /** the distances of those runs */
@@ -45,14 +43,12 @@ export interface Assessed {
 
 /** Every check of a rule set in its order, the one that governs, and the outcome. */
 export function assess(assessing: Assessing): Assessed {
-  const { conditions, rules, runway, declared, notReached, distances, band, rollAvailable } = assessing;
+  const { conditions, notReached, distances, band, rollAvailable } = assessing;
   const { ruleSet, doesNotApply } = conditions;
   const { stated, credited, reference } = distances;
   const noSurface = notReached === undefined && credited === undefined && reference === undefined;
   const isAssessed = notReached === undefined && doesNotApply === undefined && !noSurface;
-  const ofRunway = isAssessed
-    ? checksOf(rules, distances, runway, declared, conditions.condition.isSlippery)
-    : undefined;
+  const ofRunway = isAssessed ? checksOf(conditions, distances) : undefined;
   const checks = ofRunway && assessing.further ? [...ofRunway, ...assessing.further(ofRunway)] : ofRunway;
   const thinRatio = ruleSet.thinMargin.ratio;
   const highOver = (of: string) => highOverOf(band, of);
@@ -75,17 +71,14 @@ export function assess(assessing: Assessing): Assessed {
 }
 
 function checksOf(
-  rules: PhaseRules,
+  { rules, asked, declared, runwayFactors, condition }: Assessing['conditions'],
   { credited, reference }: Runs<Checked>,
-  { surface, slope }: Pick<Runway, 'surface' | 'slope'>,
-  declared: DeclaredDistances,
-  isSlippery: boolean,
 ): readonly Check[] {
-  const factors = rules.runwayFactors(filmAsWet(surface), slope);
-  return rules.requirements(declared).map((requirement) => {
-    const of = requirement.of === 'groundRoll' ? 'groundRoll' : 'wholeDistance';
-    const check = checkOf(requirement, { reference: reference?.[of], credited: credited?.[of] }, factors, declared);
-    return isSlippery && requirement.presumesDryOrWet ? withoutStop(check) : check;
+  return requirements(rules, asked).map((requirement) => {
+    const { of } = requirement;
+    const from = { reference: distanceOf(of, reference), credited: distanceOf(of, credited) };
+    const check = checkOf(requirement, from, runwayFactors, declared);
+    return condition.isSlippery && requirement.presumesDryOrWet ? withoutStop(check) : check;
   });
 }
 
@@ -98,4 +91,11 @@ function withoutStop(check: Check): Check {
     result: 'not-assessed',
     why: 'the stop is not computed on this surface, and the factor that stands for it presumes a dry or wet runway',
   };
+}
+
+function distanceOf(of: Requirement['of'], checked: Checked | undefined): number | undefined {
+  if (checked === undefined) return undefined;
+  const { groundRoll, wholeDistance } = checked;
+  if (of === 'groundRoll') return groundRoll;
+  return of === 'takeoffRun' ? (groundRoll + wholeDistance) / 2 : wholeDistance;
 }

@@ -1,17 +1,15 @@
 import type { Configuration } from '../performance/aeroplane.ts';
 import type { Air } from '../performance/air.ts';
-import { filmAsWet } from '../physics/runway-surface.ts';
 import { airAtRunway, chosenConfiguration, chosenRuleSet, isFault } from './chosen.ts';
-import type { Refused } from './fault.ts';
-import type { Question } from './question.ts';
-import type { PhaseRules, RuleSet } from './rules/rule-set.ts';
+import { isRefused, type Refused } from './fault.ts';
+import type { LandingQuestion, TakeoffQuestion } from './question.ts';
+import { type Ruled, ruledBy } from './ruled.ts';
 import { type RunwayCondition, runwayCondition } from './runway-condition.ts';
 import { type WindAlong, windAlong } from './wind-along.ts';
 import { windCredit } from './wind-credit.ts';
 
 /** What a takeoff and a landing begin with. */
-export interface Conditions {
-  readonly ruleSet: RuleSet;
+export interface Conditions extends Ruled {
   readonly configuration: Configuration;
   readonly air: Air;
   readonly wind: WindAlong;
@@ -19,12 +17,13 @@ export interface Conditions {
   readonly condition: RunwayCondition;
   /** [m/s] */
   readonly creditedHeadwind: number;
-  /** why the rule set does not speak of the aeroplane; undefined where it does */
-  readonly doesNotApply: string | undefined;
 }
 
 /** Rule set, configuration, air and wind of a question, or every fault in them. */
-export function conditionsOf(question: Question, phase: 'takeoff' | 'landing'): Conditions | Refused {
+export function conditionsOf(
+  question: TakeoffQuestion | LandingQuestion,
+  phase: 'takeoff' | 'landing',
+): Conditions | Refused {
   const ruleSet = chosenRuleSet(question.ruleSet);
   const configuration = chosenConfiguration(question, phase);
   const air = airAtRunway(question);
@@ -32,27 +31,27 @@ export function conditionsOf(question: Question, phase: 'takeoff' | 'landing'): 
   if (isFault(ruleSet) || isFault(configuration) || isFault(air) || isFault(wind)) {
     return { refused: [ruleSet, configuration, air, wind].filter(isFault) };
   }
+  const ruled = ruledBy(ruleSet, question, phase);
+  if (isRefused(ruled)) return ruled;
+  const condition = runwayCondition(question);
   return {
-    ruleSet,
+    ...ruled,
     configuration,
     air,
     wind,
-    condition: runwayCondition(question),
-    creditedHeadwind: windCredit(wind.headwind, ruleSet.windCredit),
-    doesNotApply: ruleSet.doesNotApply(question.aeroplane),
+    condition,
+    runwayFactors: condition.refusal === undefined ? ruled.runwayFactors : undefined,
+    creditedHeadwind: windCredit(wind.headwind, ruled.rules.windCredit),
   };
 }
 
 /** What the rule set makes of the runs behind an answer; nothing where it does not apply. */
-export function ruledRuns(
-  { creditedHeadwind, wind, condition, doesNotApply }: Conditions,
-  { startsFrom, runwayFactors }: PhaseRules,
-  { surface, slope }: Question['runway'],
-): { readonly creditedHeadwind: number; readonly needsReference: boolean } {
-  if (doesNotApply !== undefined) return { creditedHeadwind: wind.headwind, needsReference: false };
-  const isAnswered = condition.refusal === undefined && startsFrom === 'reference';
+export function ruledRuns({ creditedHeadwind, wind, doesNotApply, runwayFactors }: Conditions): {
+  readonly creditedHeadwind: number;
+  readonly needsReference: boolean;
+} {
   return {
-    creditedHeadwind,
-    needsReference: isAnswered && runwayFactors(filmAsWet(surface), slope) !== undefined,
+    creditedHeadwind: doesNotApply === undefined ? creditedHeadwind : wind.headwind,
+    needsReference: runwayFactors !== undefined,
   };
 }

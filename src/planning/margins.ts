@@ -1,4 +1,4 @@
-import type { Check, Factor } from './answer.ts';
+import type { AlternativeReading, Check, Factor } from './answer.ts';
 import { arithmeticSlack } from './arithmetic-slack.ts';
 import type { DeclaredDistances } from './declared-distances.ts';
 import type { Requirement } from './rules/rule-set.ts';
@@ -24,7 +24,8 @@ interface Reading {
  *
  * The factors of the surface and the slope multiply the reference distance only. Where physics on the actual runway exceeds the
  * reference times those factors, it is taken; the one not taken stands beside it. The overall factor is applied once, to
- * whichever is taken.
+ * whichever is taken. A factor that the rule calls the least it may be shows that a length is not enough, and without physics
+ * beside it never that it is.
  *
  * @param requirement - what is compared, the overall factor
  * @param from - reference and credited distance [m]; at least one
@@ -38,59 +39,87 @@ export function checkOf(
   runwayFactors: readonly Factor[] | undefined,
   declared: DeclaredDistances,
 ): Check {
-  const { code, of, against, factor, source } = requirement;
-  const overall = factor === undefined ? [] : [factor];
-  const { taken, other } = readings(from, runwayFactors, overall);
+  const { code, of, against, source } = requirement;
   const available = declared.credited[against];
+  if (requirement.notAssessed !== undefined) return notAssessed(requirement, available);
+  const { taken, other } = readings(requirement, from, runwayFactors);
   const { startsFrom, distance, factors, required } = taken;
-  const margin = available === undefined ? undefined : available - required;
+  const [alternative, ...further] = [...otherReadings(requirement, taken), ...(other === undefined ? [] : [other])];
+  const passes = available !== undefined && required - available <= arithmeticSlack;
+  const least = from.credited === undefined ? factors.find(({ atLeast }) => atLeast) : undefined;
+  const why =
+    available === undefined
+      ? `${against.toUpperCase()} is not declared`
+      : passes && least !== undefined
+        ? `the factor ${least.value} is the least that the rule asks for (${least.because}), and physics does not speak of this surface`
+        : undefined;
+  const margin = available === undefined || why !== undefined ? undefined : available - required;
   return {
     code,
     of,
+    against,
     startsFrom,
     distance,
     factors,
-    alternative: otherReading(requirement, taken) ?? other,
+    alternative,
+    ...(further.length === 0 ? {} : { furtherAlternatives: further }),
     unit: 'distance',
     required,
     available,
     margin,
     marginRatio: margin === undefined ? undefined : margin / required,
-    result: margin === undefined ? 'not-assessed' : -margin <= arithmeticSlack ? 'passes' : 'fails',
-    why: margin === undefined ? `${against.toUpperCase()} is not declared` : undefined,
+    result: why !== undefined ? 'not-assessed' : passes ? 'passes' : 'fails',
+    why,
     source,
   };
 }
 
+/** A check whose distance is not computed: it stands there so that nobody takes it for passed. */
+function notAssessed(
+  { code, of, against, factor, notAssessed: why, source }: Requirement,
+  available: number | undefined,
+): Check {
+  const factors = factor === undefined ? [] : [factor];
+  return { code, of, against, factors, unit: 'distance', available, result: 'not-assessed', why, source };
+}
+
 function readings(
+  { factor, onRunway = factor, runwayDecides }: Requirement,
   { reference, credited }: StartingDistances,
   runwayFactors: readonly Factor[] | undefined,
-  overall: readonly Factor[],
-): { readonly taken: Reading; readonly other?: Check['alternative'] } {
+): { readonly taken: Reading; readonly other?: AlternativeReading } {
   const byFactors =
     reference === undefined || runwayFactors === undefined
       ? undefined
-      : reading('reference', reference, [...runwayFactors, ...overall]);
-  const byPhysics = credited === undefined ? undefined : reading('credited', credited, overall);
-  if (byFactors === undefined && byPhysics === undefined) {
-    throw new RangeError('from must hold a distance to start from');
+      : reading('reference', reference, [...runwayFactors, ...listed(factor)]);
+  const byPhysics = credited === undefined ? undefined : reading('credited', credited, listed(onRunway));
+  if (byFactors === undefined) {
+    if (byPhysics === undefined) throw new RangeError('from must hold a distance to start from');
+    return { taken: byPhysics };
   }
-  if (byFactors === undefined) return { taken: byPhysics as Reading };
-  if (byPhysics === undefined || byPhysics.required === byFactors.required) return { taken: byFactors };
+  if (byPhysics === undefined) return { taken: byFactors };
+  if (runwayDecides !== undefined) return { taken: byPhysics, other: beside(byFactors, runwayDecides) };
+  if (byPhysics.required === byFactors.required) return { taken: byFactors };
   return byPhysics.required > byFactors.required
     ? { taken: byPhysics, other: beside(byFactors, 'the factors on a paved, dry, level runway ask for less') }
     : { taken: byFactors, other: beside(byPhysics, 'physics on the runway as it is asks for less') };
 }
 
-/** The rule's other reading, from the same distance with its own overall factor. */
-function otherReading({ alternative, factor }: Requirement, taken: Reading): Check['alternative'] {
-  if (alternative === undefined) return undefined;
-  const factors = [...taken.factors.filter((one) => one !== factor), alternative.factor];
-  return beside(reading(taken.startsFrom, taken.distance, factors), alternative.because);
+function listed(factor: Factor | undefined): readonly Factor[] {
+  return factor === undefined ? [] : [factor];
+}
+
+/** The rule's other readings from the same distance, each with its own factor in place of the one of the same code. */
+function otherReadings({ alternatives = [] }: Requirement, taken: Reading): readonly AlternativeReading[] {
+  return alternatives.flatMap(({ factor, because }) => {
+    const factors = taken.factors.map((one) => (one.code === factor.code ? factor : one));
+    if (!factors.includes(factor)) return [];
+    return [beside(reading(taken.startsFrom, taken.distance, factors), because)];
+  });
 }
 
 /** A reading that is shown and not taken. */
-function beside({ startsFrom, distance, factors, required }: Reading, because: string): Check['alternative'] {
+function beside({ startsFrom, distance, factors, required }: Reading, because: string): AlternativeReading {
   return { startsFrom, distance, factors, required, because };
 }
 

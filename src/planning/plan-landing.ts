@@ -7,7 +7,6 @@ import { assess } from './assess.ts';
 import { balkedLandingClimb } from './balked-landing.ts';
 import { raisedCautions } from './cautions/caution-test.ts';
 import { landingCautions } from './cautions/landing-cautions.ts';
-import { declaredDistances } from './declared-distances.ts';
 import { isRefused, type Refused } from './fault.ts';
 import { landingBand } from './landing-band.ts';
 import { landingDistances } from './landing-distances.ts';
@@ -35,10 +34,9 @@ export function planLanding(question: LandingQuestion): LandingAnswer | Refused 
   const prepared = prepareLanding(question);
   if (isRefused(prepared)) return prepared;
   const { conditions, resolved, power, braking, run } = prepared;
-  const { ruleSet, air, wind, condition, creditedHeadwind, doesNotApply } = conditions;
+  const { ruleSet, rules, declared, air, wind, condition, creditedHeadwind, doesNotApply } = conditions;
   const { speeds, reference, raised } = prepared.landingSpeeds;
 
-  const rules = ruleSet.landing;
   const runs = landingRuns(run, prepared.runConditions);
   const notReached = notStopped(runs);
   const stated = notReached === undefined ? stopped(runs.stated) : undefined;
@@ -60,13 +58,9 @@ export function planLanding(question: LandingQuestion): LandingAnswer | Refused 
     speeds.landingReference.tas,
   );
 
-  const declared = declaredDistances(runway, ruleSet.takeoff.clearwayShare);
   const rollAvailable = declared.credited.lda;
   const { outcome, checks, governing, thin } = assess({
     conditions,
-    rules,
-    runway,
-    declared,
     notReached,
     distances: checkedLandings(runs),
     band,
@@ -79,6 +73,8 @@ export function planLanding(question: LandingQuestion): LandingAnswer | Refused 
     phase: 'landing' as const,
     question,
     ruleSet,
+    rules,
+    runwayFactors: conditions.runwayFactors,
     air,
     wind,
     speeds,
@@ -118,8 +114,8 @@ export function planLanding(question: LandingQuestion): LandingAnswer | Refused 
     speeds,
     distances,
     balkedLanding,
-    assessment: checks && { ruleSet: ruleSet.id, checks, governing: governing?.code },
+    assessment: checks && { ruleSet: ruleSet.id, basedOn: conditions.basedOn, checks, governing: governing?.code },
     shortfall: notReached ? landingShortfalls(notReached) : condition.refusal?.shortfall,
-    basis: answerBasis(question, 'landing', ruleSet, method, assumed, band),
+    basis: answerBasis(question, 'landing', conditions, method, assumed, band),
   };
 }

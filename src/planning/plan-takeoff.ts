@@ -6,7 +6,6 @@ import { answerBasis } from './answer-basis.ts';
 import { assess } from './assess.ts';
 import { raisedCautions } from './cautions/caution-test.ts';
 import { takeoffCautions } from './cautions/takeoff-cautions.ts';
-import { declaredDistances } from './declared-distances.ts';
 import { isRefused, type Refused } from './fault.ts';
 import { obstacleCheck, obstaclePathOf } from './obstacle-path.ts';
 import { pathStart } from './path-start.ts';
@@ -36,10 +35,9 @@ export function planTakeoff(question: TakeoffQuestion): TakeoffAnswer | Refused 
   const prepared = prepareTakeoff(question);
   if (isRefused(prepared)) return prepared;
   const { conditions, resolved, speeds, power, thrustIn, friction, run } = prepared;
-  const { ruleSet, air, wind, condition, creditedHeadwind, doesNotApply } = conditions;
+  const { ruleSet, rules, declared, air, wind, condition, creditedHeadwind, doesNotApply } = conditions;
   const { fullPowerRatio, rollingStartAllowance } = prepared.flown;
 
-  const rules = ruleSet.takeoff;
   const runs = takeoffRuns(run, prepared.runConditions);
   const notReached = notReachedOf(runs);
   const stated = notReached === undefined ? reached(runs.stated) : undefined;
@@ -51,20 +49,17 @@ export function planTakeoff(question: TakeoffQuestion): TakeoffAnswer | Refused 
     });
   const distances = stated && band && takeoffDistances(stated, band, aeroplane.certification.screenHeight, method);
 
-  const declared = declaredDistances(runway, rules.clearwayShare);
   const rollAvailable = declared.credited.tora;
   let obstaclePath: ObstaclePath | undefined;
   const { outcome, checks, governing, thin } = assess({
     conditions,
-    rules,
-    runway,
-    declared,
     notReached,
     distances: checkedTakeoffs(runs),
     band,
     rollAvailable,
     further: (ofRunway) => {
-      const demand = rules.obstacles?.appliesTo(aeroplane) === true ? rules.obstacles : undefined;
+      const asked = ruleSet.takeoff.obstacles;
+      const demand = asked?.appliesTo(aeroplane) === true ? asked : undefined;
       const start = pathStart(demand, ofRunway, reached(runs.credited ?? runs.stated));
       obstaclePath = start && obstaclePathOf(question, prepared, start);
       return demand === undefined || obstaclePath === undefined ? [] : [obstacleCheck(demand, obstaclePath)];
@@ -80,6 +75,8 @@ export function planTakeoff(question: TakeoffQuestion): TakeoffAnswer | Refused 
     phase: 'takeoff' as const,
     question,
     ruleSet,
+    rules,
+    runwayFactors: conditions.runwayFactors,
     air,
     wind,
     speeds,
@@ -117,10 +114,10 @@ export function planTakeoff(question: TakeoffQuestion): TakeoffAnswer | Refused 
     distances,
     climb: stated && climbAfterTakeoff(question, prepared),
     obstaclePath,
-    assessment: checks && { ruleSet: ruleSet.id, checks, governing: governing?.code },
+    assessment: checks && { ruleSet: ruleSet.id, basedOn: conditions.basedOn, checks, governing: governing?.code },
     shortfall: notReached
       ? shortfalls(notReached, aeroplanePointer(aeroplaneAt, '/propulsion'))
       : condition.refusal?.shortfall,
-    basis: answerBasis(question, 'takeoff', ruleSet, method, assumed, band),
+    basis: answerBasis(question, 'takeoff', conditions, method, assumed, band),
   };
 }

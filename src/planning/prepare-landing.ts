@@ -42,7 +42,7 @@ export function prepareLanding(question: LandingQuestion): PreparedLanding | Ref
   if (isRefused(conditions)) return conditions;
   const unflyable = landingProcedureFaults(question);
   if (unflyable.length > 0) return { refused: unflyable };
-  const { ruleSet, configuration, air, wind } = conditions;
+  const { configuration, air, wind } = conditions;
 
   const stallAtMaximumMass = configuredStallSpeed(configuration.maximumLift, wing.area, masses.maximumTakeoff);
   const liftOff = takeoffDefaults.liftOffStallRatio.value * stallAtMaximumMass;
@@ -61,7 +61,7 @@ export function prepareLanding(question: LandingQuestion): PreparedLanding | Ref
     contaminantDrag: braking.contaminantDrag,
   });
   const runConditions = {
-    ...ruledRuns(conditions, ruleSet.landing, runway),
+    ...ruledRuns(conditions),
     actualBraking: braking.actual,
     referenceBraking: braking.reference,
   };

@@ -44,7 +44,7 @@ export function prepareTakeoff(question: TakeoffQuestion): PreparedTakeoff | Ref
   if (isRefused(conditions)) return conditions;
   const unflyable = takeoffProcedureFaults(question);
   if (unflyable.length > 0) return { refused: unflyable };
-  const { ruleSet, configuration, air, wind } = conditions;
+  const { configuration, air, wind } = conditions;
   const flown = flownTakeoff(question, configuration);
 
   const resolved = resolveTakeoff(question, configuration);
@@ -65,7 +65,7 @@ export function prepareTakeoff(question: TakeoffQuestion): PreparedTakeoff | Ref
     contaminantDrag: friction.contaminantDrag,
   });
 
-  const { creditedHeadwind, needsReference } = ruledRuns(conditions, ruleSet.takeoff, runway);
+  const { creditedHeadwind, needsReference } = ruledRuns(conditions);
   const runConditions = {
     creditedHeadwind,
     actualFriction: friction.actual,

@@ -19,13 +19,35 @@ export interface Question {
   readonly configuration: string;
   readonly runway: Runway;
   readonly weather: Weather;
+  /** id of a rule set; with operator's rules the one they are based on */
   readonly ruleSet: string;
+  readonly operatorRules?: OperatorRules;
   readonly stage?: 'dispatch' | 'in-flight';
   /** presentation only: the family in which sentences are written */
   readonly units: UnitFamily;
   /** pointers of members that the gate filled in (units, rounding ...): said under basis.assumed */
   readonly defaulted: readonly string[];
 }
+
+/** Factors of an operator's own, each stricter than those of the rule set they stand in for. */
+export interface OperatorRules {
+  readonly name: string;
+  readonly factors: readonly OperatorFactor[];
+}
+
+export type OperatorFactor =
+  | {
+      /** code of a check */
+      readonly check: string;
+      readonly overallFactor: number;
+    }
+  | {
+      readonly phase: 'takeoff' | 'landing';
+      /** of firm ground without contaminant */
+      readonly kind: Surface['kind'];
+      readonly state: Surface['state'];
+      readonly surfaceFactor: number;
+    };
 
 /** What was changed of an aeroplane on file, in words. */
 export interface AeroplaneChanges {

@@ -70,6 +70,6 @@ describe('schemas of the contract', () => {
         if (member !== 'value' && !/(Coefficient|coefficient|Ratio|Factor|Exponent)$/.test(member)) bare.add(member);
       }
     }
-    expect([...bare].sort()).toEqual(['0', '1', '2', 'engines', 'mach', 'tyres']);
+    expect([...bare].sort()).toEqual(['0', '1', '2', 'engines', 'mach', 'passengerSeats', 'tyres']);
   });
 });

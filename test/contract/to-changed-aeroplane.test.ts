@@ -84,6 +84,7 @@ describe('an aeroplane on file with changes', () => {
     const at = '/aeroplane/changes/configurations/takeoff-10';
     expect(answer.basis.assumed.map((one) => one.at).filter((one) => one.startsWith('/aeroplane'))).toEqual([
       `${at}/pullUpLoadFactor`,
+      '/aeroplane/changes/passengerSeats',
       `${at}/maximumLift/kind`,
     ]);
   });

@@ -59,7 +59,7 @@ describe('a check', () => {
   });
   it('shows the other reading of the rule from the same distance, with its own overall factor in place of the first', () => {
     const other = factor('overall', 1.25);
-    const two = { ...requirement, alternative: { factor: other, because: 'the other paragraph' } };
+    const two = { ...requirement, alternatives: [{ factor: other, because: 'the other paragraph' }] };
     const check = checkOf(two, { reference: 600, credited: 500 }, [wet], declared(1000));
     expect(check.alternative).toEqual({
       startsFrom: 'reference',

@@ -7,10 +7,10 @@ import { expectNear } from '../support/near.ts';
 
 describe('the wind that rules credit', () => {
   it.each(creditedWinds)('$title', ({ inputs, expected, tolerance }) => {
-    expectNear(windCredit(inputs.component_kt, euClassB.windCredit), expected, tolerance);
+    expectNear(windCredit(inputs.component_kt, euClassB.takeoff.windCredit), expected, tolerance);
   });
   it('is the wind as given without rules, and nothing is made of a calm', () => {
-    for (const component of [-10, 0, 10]) expect(windCredit(component, unfactored.windCredit)).toBe(component);
-    expect(windCredit(0, euClassB.windCredit)).toBe(0);
+    for (const component of [-10, 0, 10]) expect(windCredit(component, unfactored.takeoff.windCredit)).toBe(component);
+    expect(windCredit(0, euClassB.landing.windCredit)).toBe(0);
   });
 });

@@ -1,5 +1,6 @@
 import type { FastifyInstance } from 'fastify';
-import { ruleSetList, toListedRuleSet } from '../../contract/rule-set-list.ts';
+import { ruleSetList } from '../../contract/rule-set-list.ts';
+import { toRuleSetList } from '../../contract/to-rule-set-list.ts';
 import { ruleSets as all } from '../../planning/rules/rule-sets.ts';
 import { addResource } from '../resource.ts';
 
@@ -8,9 +9,10 @@ export function ruleSets(app: FastifyInstance): void {
     url: '/v1/rule-sets',
     operationId: 'listRuleSets',
     summary: 'Which rule sets are there?',
-    description: 'The operating rules that a question may name.',
+    description:
+      'The operating rules that a question may name, whole: to whom they apply, what they credit of the wind, every factor with its source, and what they ask of the climb.',
     tag: 'lists',
     response: ruleSetList,
-    answer: { ruleSets: all.map(toListedRuleSet) },
+    answer: toRuleSetList(all),
   });
 }

@@ -1,11 +1,11 @@
 import type { Air } from '../../performance/air.ts';
 import type { Kind } from '../../units/presentation.ts';
-import type { BandedDistance, Check, Outcome, SpeedSet } from '../answer.ts';
+import type { BandedDistance, Check, Factor, Outcome, SpeedSet } from '../answer.ts';
 import type { AnyAssumed } from '../assumed.ts';
 import type { DeclaredDistances } from '../declared-distances.ts';
 import type { ThinBecause } from '../outcome.ts';
 import type { Question } from '../question.ts';
-import type { RuleSet } from '../rules/rule-set.ts';
+import type { PhaseRules, RuleSet } from '../rules/rule-set.ts';
 import type { RunwayCondition } from '../runway-condition.ts';
 import { measureText } from '../sentences/measure-text.ts';
 import type { WindAlong } from '../wind-along.ts';
@@ -21,6 +21,10 @@ export interface ConditionsContext {
 export interface AnswerContext extends ConditionsContext {
   readonly phase: 'takeoff' | 'landing';
   readonly ruleSet: RuleSet;
+  /** of this phase and stage */
+  readonly rules: PhaseRules;
+  /** on the reference distance; undefined where the rules do not speak of the aeroplane or of the surface */
+  readonly runwayFactors: readonly Factor[] | undefined;
   readonly declared: DeclaredDistances;
   /** the surface in words: 'short wet grass' */
   readonly surface: string;

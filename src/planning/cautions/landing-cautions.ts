@@ -27,6 +27,7 @@ import { referenceSpeedRaised } from './reference-speed-raised.ts';
 import { reverseCounted } from './reverse-counted.ts';
 import { runwayChanged } from './runway-changed.ts';
 import { slopeSteep } from './slope-steep.ts';
+import { stageNotKnown } from './stage-not-known.ts';
 import { tailwind } from './tailwind.ts';
 import { tailwindBeyondLimit } from './tailwind-beyond-limit.ts';
 import { temperatureAboveLimit } from './temperature-above-limit.ts';
@@ -38,6 +39,7 @@ import { windVariable } from './wind-variable.ts';
 export const landingCautions: readonly CautionTest<LandingContext>[] = [
   marginNegative,
   marginThin,
+  stageNotKnown,
   massAboveMaximumLanding,
   temperatureAboveLimit,
   pressureAltitudeAboveLimit,

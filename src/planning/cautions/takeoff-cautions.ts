@@ -23,6 +23,7 @@ import { rollingStart } from './rolling-start.ts';
 import { runwayChanged } from './runway-changed.ts';
 import { screenSpeedBelowLiftOff } from './screen-speed-below-lift-off.ts';
 import { slopeSteep } from './slope-steep.ts';
+import { stageNotKnown } from './stage-not-known.ts';
 import { stopNotComputed } from './stop-not-computed.ts';
 import { tailwind } from './tailwind.ts';
 import { tailwindBeyondLimit } from './tailwind-beyond-limit.ts';
@@ -35,6 +36,7 @@ import { windVariable } from './wind-variable.ts';
 export const takeoffCautions: readonly CautionTest<TakeoffContext>[] = [
   marginNegative,
   marginThin,
+  stageNotKnown,
   massAboveMaximum,
   temperatureAboveLimit,
   pressureAltitudeAboveLimit,

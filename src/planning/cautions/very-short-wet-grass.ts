@@ -1,4 +1,4 @@
-import { veryShortWetGrass, veryShortWetGrassFactor } from '../rules/operating/eu-class-b-landing.ts';
+import { veryShortWetGrass, veryShortWetGrassFactor } from '../rules/very-short-wet-grass.ts';
 import { percentText } from '../sentences/measure-text.ts';
 import { textIn } from './answer-context.ts';
 import type { CautionTest } from './caution-test.ts';
@@ -12,12 +12,11 @@ export const veryShortWetGrassCaution: CautionTest<LandingContext> = {
     'Very short wet grass on firm subsoil may lengthen the landing by up to 60 %, and no factor of the rules asked for counts that.',
   source: 'EuAirOps335Gm1',
   test: (context) => {
-    const { question, ruleSet, stated } = context;
-    const { surface, slope } = question.runway;
+    const { question, runwayFactors = [], stated } = context;
+    const { surface } = question.runway;
     if (surface.kind !== 'grass' || (surface.state !== 'wet' && surface.state !== 'damp')) return undefined;
     if (surface.grass === 'long') return undefined;
-    const factors = ruleSet.landing.runwayFactors(surface, slope) ?? [];
-    if (factors.some(({ code }) => code === veryShortWetGrass)) return undefined;
+    if (runwayFactors.some(({ code }) => code === veryShortWetGrass)) return undefined;
     const pavement = { braking: context.dryPavementBraking, stretches: undefined, contaminantDrag: undefined };
     const dry = stated && context.landedWith(pavement)?.landingDistance;
     const effect =

@@ -43,21 +43,12 @@ function needs({ governing, question: { units }, ruleSet }: AnswerContext): stri
 }
 
 function lengthName(check: Check | undefined): string {
-  switch (check?.code) {
-    case 'takeoff-distance':
-      return 'TODA';
-    case 'accelerate-stop':
-      return 'ASDA';
-    case 'landing-distance':
-      return 'LDA';
-    default:
-      return 'TORA';
-  }
+  return check?.against?.toUpperCase() ?? 'clearance';
 }
 
 function missing({ checks }: AnswerContext): string {
   const whys = checks.filter(({ result }) => result === 'not-assessed').map(({ why }) => why);
-  return whys.length === 0 ? 'no length is declared' : whys.join(', ');
+  return whys.length === 0 ? 'no length is declared' : [...new Set(whys)].join(', ');
 }
 
 function passing({ checks, question: { units } }: AnswerContext): string {

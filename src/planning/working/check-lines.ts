@@ -44,7 +44,7 @@ export function checkLines(
     sheet.formula({
       symbol: `margin_${symbolOf(code)}`,
       name: `margin of ${code}`,
-      formula: `${lengthOf(check)}_available - required_${symbolOf(code)}`,
+      formula: `${check.against?.toUpperCase()}_available - required_${symbolOf(code)}`,
       value: margin,
       unit: 'm',
       source: check.source,
@@ -170,19 +170,6 @@ function lengthLines(
 
 function symbolOf(code: string): string {
   return code.replaceAll('-', '_');
-}
-
-function lengthOf({ code }: Check): string {
-  switch (code) {
-    case 'takeoff-distance':
-      return 'TODA';
-    case 'accelerate-stop':
-      return 'ASDA';
-    case 'takeoff-run':
-      return 'TORA';
-    default:
-      return 'LDA';
-  }
 }
 
 function worded(of: string): string {

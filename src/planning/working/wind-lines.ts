@@ -59,7 +59,7 @@ export function windLines(sheet: Worksheet, { weather: { wind }, runway }: Quest
     sheet.stated({ ...along, at: wind.kind === 'calm' ? '/weather/wind' : '/weather/wind/headwind' });
   }
   if (conditions.doesNotApply !== undefined) return;
-  const { windCredit } = conditions.ruleSet;
+  const { windCredit } = conditions.rules;
   sheet.figure('decided', {
     symbol: 'k_w',
     name: `share of the wind that is credited: ${windCredit.because}`,

@@ -212,6 +212,27 @@ const pairs: readonly Pair[] = [
     says: /^At the high end of the 90 % band, .* would require 787 m; 786 m is available\.$/,
   },
   {
+    code: 'stage-not-known',
+    severity: 'caution',
+    raised: { question: { ruleSet: 'us-part-135', stage: 'in-flight' } },
+    silent: { question: { ruleSet: 'us-part-135', stage: 'dispatch' } },
+    says: /Part 135\) have no figures of their own for in flight\. Those for before departure are used: landing-distance requires \d+ m\.$/,
+  },
+  {
+    code: 'stage-not-known',
+    severity: 'caution',
+    raised: { question: { ruleSet: 'us-landing-by-condition-code', stage: 'dispatch' } },
+    silent: { question: { ruleSet: 'us-landing-by-condition-code', stage: 'in-flight' } },
+    says: /for the time of arrival alone, and a rule for before departure may ask for more\. They are used: landing-distance requires \d+ m\.$/,
+  },
+  {
+    code: 'stage-not-known',
+    severity: 'caution',
+    raised: { question: { ruleSet: 'us-part-135', stage: 'in-flight' } },
+    silent: { question: { ruleSet: 'eu-class-b', stage: 'in-flight' } },
+    says: /Part 135/,
+  },
+  {
     code: 'mass-above-maximum-landing',
     severity: 'strong',
     raised: { aeroplane: { masses: { maximumTakeoff: 1050, maximumLanding: 1000 } } },

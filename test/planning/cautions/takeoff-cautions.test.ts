@@ -482,6 +482,20 @@ const pairs: readonly Pair[] = [
     says: /^The takeoff is at 90 % of full power\. It lengthens the takeoff distance from 421 m to 4[6-9]\d m\.$/,
   },
   {
+    code: 'stage-not-known',
+    severity: 'caution',
+    raised: { question: { ruleSet: 'eu-class-b', stage: 'in-flight' } },
+    silent: { question: { ruleSet: 'eu-class-b', stage: 'dispatch' } },
+    says: /class B\) have no figures of their own for in flight\. Those for before departure are used: takeoff-run requires 526 m\.$/,
+  },
+  {
+    code: 'stage-not-known',
+    severity: 'caution',
+    raised: { question: { ruleSet: 'eu-class-b', stage: 'in-flight' } },
+    silent: { question: { ruleSet: 'unfactored', stage: 'in-flight' } },
+    says: /class B/,
+  },
+  {
     code: 'rolling-start',
     severity: 'note',
     raised: rolling('rolling'),

@@ -1,43 +1,126 @@
 import { describe, expect, it } from 'vitest';
-import { unfactored } from '../../../src/planning/rules/operating/unfactored.ts';
+import { contaminantKinds, type Surface, surfaceKinds, surfaceStates } from '../../../src/planning/question.ts';
+import { requirements } from '../../../src/planning/rules/requirements.ts';
+import type { PhaseRules, RuleSet } from '../../../src/planning/rules/rule-set.ts';
 import { ruleSetOf, ruleSets } from '../../../src/planning/rules/rule-sets.ts';
+import { runwayFactors } from '../../../src/planning/rules/runway-factors.ts';
 import { references } from '../../../src/references.ts';
-import { statedTrainer } from '../../support/takeoff-question.ts';
+import { asked, ruled } from '../../support/asked.ts';
+
+const aeroplanes = [
+  ruled(),
+  ruled({ category: 'single-piston', engines: 1 }),
+  ruled({ category: 'twin-turboprop', basis: 'cs-23-commuter', kilograms: 6000 }),
+  ruled({ category: 'twin-jet', basis: 'cs-25', kilograms: 9000 }),
+  ruled({ category: 'twin-electric', basis: 'none' }),
+];
+const phasesOf = ({ takeoff, landing, landingInFlight }: RuleSet): readonly PhaseRules[] =>
+  landingInFlight === undefined ? [takeoff, landing] : [takeoff, landing, landingInFlight];
+const phases = ruleSets.flatMap((set) => phasesOf(set).map((rules) => ({ set, rules })));
 
 describe('the rule sets', () => {
   it('have ids in kebab-case, each once, found again by id', () => {
-    expect(ruleSets.map(({ id }) => id)).toEqual(['unfactored', 'eu-class-b']);
+    expect(ruleSets.map(({ id }) => id)).toEqual([
+      'unfactored',
+      'uk-private-factors',
+      'eu-class-a',
+      'eu-class-b',
+      'eu-class-c',
+      'us-part-91',
+      'us-part-121',
+      'us-part-135',
+      'us-landing-by-condition-code',
+    ]);
     for (const set of ruleSets) expect(ruleSetOf(set.id)).toBe(set);
-    expect(ruleSetOf('toString')).toBeUndefined();
+    for (const id of ['toString', 'operator', '']) expect(ruleSetOf(id)).toBeUndefined();
   });
-  it('source every figure', () => {
-    const declared = { tora: 1000, toda: 1200, asda: 1300 };
-    for (const { source, windCredit, thinMargin, takeoff } of ruleSets) {
-      const factors = takeoff.runwayFactors({ kind: 'grass', state: 'wet' }, 0.01) ?? [];
-      const requirements = takeoff.requirements({ published: declared, credited: declared });
-      const overall = requirements.flatMap(({ factor }) => factor ?? []);
-      for (const one of [windCredit, thinMargin, ...requirements, ...factors, ...overall]) {
-        expect(Object.keys(references)).toContain(one.source);
+
+  it('source every figure and every sentence', () => {
+    const keys = Object.keys(references);
+    const check = (node: unknown, path: string): void => {
+      if (typeof node !== 'object' || node === null) return;
+      const { source, value, status } = node as Record<string, unknown>;
+      if (source !== undefined) expect(keys, path).toContain(source);
+      if (typeof value === 'number') {
+        expect(source, path).toBeDefined();
+        expect(['read', 'secondary', 'memory', 'derived', 'judgement'], path).toContain(status);
       }
-      expect(Object.keys(references)).toContain(source);
-      for (const { because, status } of [...factors, ...overall]) {
-        expect(because).not.toBe('');
-        expect(['read', 'secondary', 'memory', 'derived', 'judgement']).toContain(status);
+      for (const [name, child] of Object.entries(node)) {
+        if (typeof child === 'string') expect(child, `${path}/${name}`).not.toBe('');
+        check(child, `${path}/${name}`);
+      }
+    };
+    check(ruleSets, '');
+  });
+
+  it('call no figure better confirmed than its source, but for a paragraph that the source says was read', () => {
+    const rank = { read: 0, secondary: 1, derived: 1, memory: 2, judgement: 2 } as const;
+    const better: string[] = [];
+    const check = (node: unknown): void => {
+      if (typeof node !== 'object' || node === null) return;
+      const { source, status } = node as { source?: keyof typeof references; status?: keyof typeof rank };
+      if (source !== undefined && status !== undefined && rank[status] < rank[references[source].status]) {
+        better.push(`${source} ${status}`);
+      }
+      for (const child of Object.values(node)) check(child);
+    };
+    check(ruleSets);
+    expect(better).toEqual([]);
+  });
+
+  it('have a reading in every case, whatever is declared and whatever the surface', () => {
+    const some = [
+      { tora: 1000, toda: undefined, asda: undefined },
+      { tora: undefined, toda: undefined, asda: undefined },
+      { tora: 1000, toda: 1200, asda: 1100 },
+    ];
+    for (const { rules } of phases) {
+      for (const aeroplane of aeroplanes.filter((one) => !rules.appliesTo?.some(({ holds }) => !holds(one)))) {
+        for (const published of some) {
+          for (const kind of surfaceKinds) {
+            for (const state of surfaceStates) {
+              const given = asked({ aeroplane, published, surface: { kind, state } });
+              expect(requirements(rules, given).length).toBeGreaterThan(0);
+            }
+          }
+        }
       }
     }
   });
-});
 
-describe('unfactored', () => {
-  it('compares the roll with TORA and the distance with TODA, without a factor', () => {
-    const lengths = { tora: 1000, toda: undefined, asda: undefined };
-    const requirements = unfactored.takeoff.requirements({ published: lengths, credited: lengths });
-    expect(requirements.map(({ code, of, against, factor }) => [code, of, against, factor])).toEqual([
-      ['takeoff-run', 'groundRoll', 'tora', undefined],
-      ['takeoff-distance', 'takeoffDistance', 'toda', undefined],
-    ]);
-    expect(unfactored.takeoff.runwayFactors({ kind: 'grass', state: 'wet' }, 0.02)).toBeUndefined();
-    expect(unfactored.takeoff.startsFrom).toBe('credited');
-    expect(unfactored.doesNotApply({ ...statedTrainer, category: 'twin-jet' })).toBeUndefined();
+  it('have no factor under 1 on any surface, slope or check', () => {
+    const contaminants: Surface[] = contaminantKinds.flatMap((kind) =>
+      surfaceKinds.map((of) => ({ kind: of, state: 'contaminated' as const, contaminant: { kind } })),
+    );
+    const plain: Surface[] = surfaceKinds.flatMap((kind) =>
+      surfaceStates.flatMap((state) => [
+        { kind, state },
+        { kind, state, firmness: 'soft' as const },
+      ]),
+    );
+    for (const { rules } of phases) {
+      for (const aeroplane of aeroplanes) {
+        for (const surface of [...plain, ...contaminants]) {
+          for (const slope of [-0.03, 0, 0.03]) {
+            const found = runwayFactors(rules, asked({ aeroplane, surface, slope })) ?? [];
+            for (const { value } of found) expect(value).toBeGreaterThanOrEqual(1);
+          }
+        }
+      }
+      for (const { requirements: asks } of rules.readings) {
+        for (const { factor, onRunway } of asks) {
+          expect(factor?.value ?? 1).toBeGreaterThanOrEqual(1);
+          expect(onRunway?.value ?? 1).toBeGreaterThanOrEqual(1);
+        }
+      }
+    }
+  });
+
+  it('never credit more of a headwind nor less of a tailwind than there is, and half the run of a clearway', () => {
+    for (const { set, rules } of phases) {
+      expect(rules.windCredit.headwind).toBeLessThanOrEqual(1);
+      expect(rules.windCredit.tailwind).toBeGreaterThanOrEqual(1);
+      expect(set.takeoff.clearwayShare).toBe(0.5);
+    }
   });
 });

@@ -1,15 +1,32 @@
 import { clearwayShare } from '../clearway-share.ts';
-import type { Requirement, RuleSet } from '../rule-set.ts';
+import type { PhaseRules, Requirement, RuleSet, TakeoffRules } from '../rule-set.ts';
 import { thinMargin } from '../thin-margin.ts';
+import { windAsGiven } from '../wind-credits.ts';
 
-const takeoff: readonly Requirement[] = [
+const takeoffChecks: readonly Requirement[] = [
   { code: 'takeoff-run', of: 'groundRoll', against: 'tora', source: 'Annex14' },
   { code: 'takeoff-distance', of: 'takeoffDistance', against: 'toda', source: 'Annex14' },
 ];
 
-const landing: readonly Requirement[] = [
+const landingChecks: readonly Requirement[] = [
   { code: 'landing-distance', of: 'landingDistance', against: 'lda', source: 'Annex14' },
 ];
+
+const takeoff: TakeoffRules = {
+  source: 'Judgement',
+  windCredit: windAsGiven,
+  surfaces: [],
+  readings: [{ when: 'always', holds: () => true, requirements: takeoffChecks }],
+  clearwayShare,
+  nothingBeyond: 'the check of a length that is not declared is not assessed',
+};
+
+const landing: PhaseRules = {
+  source: 'Judgement',
+  windCredit: windAsGiven,
+  surfaces: [],
+  readings: [{ when: 'always', holds: () => true, requirements: landingChecks }],
+};
 
 /** No rule at all: the computed distances against the declared ones, wind as given. */
 export const unfactored: RuleSet = {
@@ -17,15 +34,9 @@ export const unfactored: RuleSet = {
   title: 'Distances without factors',
   phrase: 'without factors',
   source: 'Judgement',
-  doesNotApply: () => undefined,
-  windCredit: { headwind: 1, tailwind: 1, because: 'the wind is taken as given', source: 'Judgement' },
+  operations: ['commercial', 'private'],
+  appliesTo: [],
   thinMargin,
-  takeoff: {
-    source: 'Judgement',
-    startsFrom: 'credited',
-    clearwayShare,
-    runwayFactors: () => undefined,
-    requirements: () => takeoff,
-  },
-  landing: { source: 'Judgement', startsFrom: 'credited', runwayFactors: () => undefined, requirements: () => landing },
+  takeoff,
+  landing,
 };

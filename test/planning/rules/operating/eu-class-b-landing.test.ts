@@ -1,35 +1,37 @@
 import { describe, expect, it } from 'vitest';
-import { checkOf } from '../../../../src/planning/margins.ts';
 import type { Surface } from '../../../../src/planning/question.ts';
 import { euClassB } from '../../../../src/planning/rules/operating/eu-class-b.ts';
+import { requirements } from '../../../../src/planning/rules/requirements.ts';
+import { runwayFactors } from '../../../../src/planning/rules/runway-factors.ts';
 import { chains, surfaceFactors, usableParts, usablePartsWithApproval } from '../../../published/eu-class-b-landing.ts';
+import { asked, checksFrom, factorsOn } from '../../../support/asked.ts';
 import { expectNear } from '../../../support/near.ts';
 
 const { landing } = euClassB;
-const lengths = { tora: undefined, toda: undefined, asda: undefined, lda: 1000 };
-const declared = { published: lengths, credited: lengths, clearwayNotCredited: undefined };
-const [requirement] = landing.requirements(declared);
+const [requirement] = requirements(landing, asked());
 if (requirement === undefined) throw new Error('class B has a landing check');
-const factors = (surface: Surface, slope = 0) => landing.runwayFactors(surface, slope)?.map(({ value }) => value);
+const factors = (surface: Surface, slope = 0) => factorsOn(landing, surface, slope);
 
 describe('class B, landing', () => {
   it.each(usableParts)('$title', ({ expected }) => {
     expectNear(1 / (requirement.factor?.value ?? 0), expected, 1e-15);
     expect(requirement).toMatchObject({ code: 'landing-distance', of: 'landingDistance', against: 'lda' });
   });
-  it.each(usablePartsWithApproval)('is not offered: $title', ({ expected }) => {
-    expect(landing.requirements(declared)).toHaveLength(1);
+  it.each(usablePartsWithApproval)('is not applied: $title', ({ expected }) => {
+    expect(requirements(landing, asked())).toHaveLength(1);
     expect(1 / (requirement.factor?.value ?? 0)).toBeLessThan(expected);
+    expectNear(1 / (landing.notApplied?.[0]?.factor.value ?? 0), expected, 1e-15);
   });
   it.each(surfaceFactors)('$title', ({ inputs, expected, status }) => {
-    const found = landing.runwayFactors(inputs, 0) ?? [];
+    const found = runwayFactors(landing, asked({ surface: inputs })) ?? [];
     expect(found.map(({ value }) => value)).toEqual([expected]);
     expect(found[0]?.status).toBe(status);
   });
   it.each(chains)('$title', ({ inputs, expected, tolerance }) => {
-    const onGrass = landing.runwayFactors({ kind: inputs.kind, state: inputs.state }, inputs.slope);
-    const check = checkOf(requirement, { reference: inputs.ld50_m, credited: undefined }, onGrass, declared);
-    expectNear(check.required, expected, tolerance);
+    const { kind, state, slope } = inputs;
+    const given = asked({ surface: { kind, state }, slope });
+    const [check] = checksFrom(landing, given, { reference: inputs.ld50_m, credited: undefined });
+    expectNear(check?.required, expected, tolerance);
   });
 
   it('multiplies grass and wet, and takes 1.60 in place of both only where the grass is said to be short', () => {
