@@ -199,7 +199,7 @@ describe('why there are no distances', () => {
     });
   });
   it('names the wind that the rules credit where only in that one it does not stop', () => {
-    const gentle = { runway: { surface: { kind: 'ice', state: 'dry' }, slope: -0.029 } } as const;
+    const gentle = { runway: { surface: { kind: 'ice', state: 'dry' }, slope: -0.009 } } as const;
     const tail = { ...gentle, weather: { wind: { kind: 'components', headwind: -5 } } } as const;
     expect(landed(changed(plainLanding, tail)).distances).toBeDefined();
     expect(landed(changed(classB, tail)).sentence).toMatch(/^Never stops in the wind that the rules credit: at /);
