@@ -20,7 +20,7 @@ export function answerSentence(context: AnswerContext, notReached: () => string)
     case 'not-enough':
       return `Not enough: ${needs(context)}.`;
     case 'nothing-to-compare':
-      return `Nothing to compare with in full: ${missing(context)}. ${distance(context)}${passing(context)}`;
+      return `Nothing to compare with in full: ${missing(context)}. ${distance(context)}${passing(context)}`.trim();
     case 'roll-longer-than-runway':
       return `The ground roll alone is longer than the ${phase === 'takeoff' ? 'run' : 'runway'}: ${metres(context.roll ?? 0, 'up')} without factors, ${metres(context.rollAvailable ?? 0, 'down')} of ${phase === 'takeoff' ? 'TORA' : 'LDA'} available.`;
     case 'rule-set-does-not-apply':
