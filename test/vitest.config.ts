@@ -9,6 +9,7 @@ export default defineConfig({
     isolate: false,
     setupFiles: ['test/support/setup.ts'],
     maxWorkers: 2,
-    testTimeout: 20_000,
+    testTimeout: 60_000,
+    hookTimeout: 60_000,
   },
 });
