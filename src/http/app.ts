@@ -22,6 +22,7 @@ import { ruleSets } from './routes/rule-sets.ts';
 import { service } from './routes/service.ts';
 import { sources } from './routes/sources.ts';
 import { speeds } from './routes/speeds.ts';
+import { surfaces } from './routes/surfaces.ts';
 import { takeoff } from './routes/takeoff.ts';
 import { defaultSettings, type Settings } from './settings.ts';
 import { stamp } from './stamp.ts';
@@ -71,6 +72,7 @@ export async function buildApp({ catalogue, logger = false, settings }: House): 
   aeroplanes(app, catalogue);
   aerodromes(app, catalogue);
   ruleSets(app);
+  surfaces(app);
   sources(app);
   const lookup = catalogueLookup(catalogue);
   const ours = stamp();

@@ -50,6 +50,7 @@ describe('the OpenAPI document', () => {
       'get /v1/aeroplanes/{id}',
       'get /v1/rule-sets',
       'get /v1/sources',
+      'get /v1/surfaces',
       'get /version',
       'post /v1/air',
       'post /v1/airspeed',
