@@ -24,14 +24,28 @@ export function selectFaults(
   detail: readonly DetailName[] = [],
 ): Fault[] {
   return select.flatMap((pointer, i) => {
-    const at = pointerTo('/select', i);
-    const steps = pointerSteps(pointer);
-    const fault = steps === undefined ? notAPointer() : (missIn(response, steps) ?? notAskedFor(steps[0], detail));
-    return fault === undefined ? [] : [{ pointer: at, received: pointer, ...fault }];
+    const fault = judged(pointer, response) ?? notAskedFor(pointer, detail);
+    return fault === undefined ? [] : [{ pointer: pointerTo('/select', i), received: pointer, ...fault }];
   });
 }
 
 type Told = Omit<Fault, 'pointer' | 'received'>;
+
+/** So many verdicts are kept: a script selects the same few members again and again. */
+const mostKept = 256;
+const verdicts = new WeakMap<z.core.$ZodType, Map<string, Told | undefined>>();
+
+/** What is wrong with a pointer, whoever asks; a walk through the schema costs more than reading the question. */
+function judged(pointer: string, response: z.core.$ZodType): Told | undefined {
+  const kept = verdicts.get(response) ?? new Map<string, Told | undefined>();
+  verdicts.set(response, kept);
+  if (kept.has(pointer)) return kept.get(pointer);
+  const steps = pointerSteps(pointer);
+  const verdict = steps === undefined ? notAPointer() : missIn(response, steps);
+  if (kept.size >= mostKept) kept.clear();
+  kept.set(pointer, verdict);
+  return verdict;
+}
 
 function notAPointer(): Told {
   return {
@@ -41,8 +55,8 @@ function notAPointer(): Told {
   };
 }
 
-function notAskedFor(first: string | undefined, detail: readonly DetailName[]): Told | undefined {
-  const name = details.find((one) => one === first);
+function notAskedFor(pointer: string, detail: readonly DetailName[]): Told | undefined {
+  const name = details.find((one) => pointer === `/${one}` || pointer.startsWith(`/${one}/`));
   if (name === undefined || detail.includes(name)) return undefined;
   return {
     code: 'contradiction',

@@ -49,6 +49,12 @@ describe('selectFaults', () => {
     expect(JSON.stringify(found)).toMatch(says);
   });
 
+  it('judges alike however often and after however many others it is asked', () => {
+    const first = faults('/distances', '/nowhere');
+    for (let i = 0; i < 600; i++) expect(faults(`/nowhere-${i}`)).toHaveLength(1);
+    expect(faults('/distances', '/nowhere')).toEqual(first);
+  });
+
   it('names every wrong pointer at once', () => {
     expect(named(faults('/x', '/outcome', 'y'))).toEqual(['unknown-member /select/0', 'wrong-type /select/2']);
   });
