@@ -6,7 +6,7 @@ import { groundEffect } from '../../physics/ground-effect.ts';
 import { aeroplanePointer, configurationPointer } from '../aeroplane-pointer.ts';
 import type { Question } from '../question.ts';
 import { effectLine } from './ground-lines.ts';
-import type { ThrustAt } from './thrust-lines.ts';
+import type { ThrustAt } from './worked-thrust.ts';
 import type { Worksheet } from './worksheet.ts';
 
 /** The climb at half the screen height, and the estimate of the air distance from it. */

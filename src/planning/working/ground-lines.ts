@@ -5,7 +5,7 @@ import { dragCoefficient } from '../../physics/drag.ts';
 import { groundEffect, leastHeightRatio } from '../../physics/ground-effect.ts';
 import { aeroplanePointer, configurationPointer } from '../aeroplane-pointer.ts';
 import type { Question } from '../question.ts';
-import type { ThrustAt } from './thrust-lines.ts';
+import type { ThrustAt } from './worked-thrust.ts';
 import type { Worksheet } from './worksheet.ts';
 
 /** What of a definition decides lift and drag, as the resolved configuration has it. */
@@ -96,22 +96,23 @@ export function effectLine(sheet: Worksheet, suffix: string, where: string, rati
   });
 }
 
+/** The one slope of the runway; where it has a profile, the one that planning takes for the whole. */
+export function slopeLine(sheet: Worksheet, { slope, profile }: Pick<TakeoffRun, 'slope' | 'profile'>): void {
+  const throughout = { name: 'slope of the runway, uphill positive', at: '/runway/slope' };
+  const overall = { name: 'slope of the straight line over the runway', at: '/runway/slope/profile' };
+  sheet.stated({ symbol: 'slope', value: slope, ...(profile === undefined ? throughout : overall) });
+}
+
 /** The acceleration at two speeds of the takeoff roll, and the estimate of the roll from them. */
 export function takeoffRollLines(sheet: Worksheet, question: Question, run: TakeoffRun, thrustAt: ThrustAt): void {
-  const { mass, headwind, slope, rollingFriction, rotationTime } = run;
+  const { mass, headwind, rollingFriction, rotationTime } = run;
   sheet.stated({
     symbol: 'mu',
     name: 'rolling friction',
     value: rollingFriction,
     at: '/runway/surface/rollingFrictionCoefficient',
   });
-  sheet.stated({
-    symbol: 'slope',
-    name:
-      run.profile === undefined ? 'slope of the runway, uphill positive' : 'slope of the straight line over the run',
-    value: slope,
-    at: run.profile === undefined ? '/runway/slope' : '/runway/slope/profile',
-  });
+  slopeLine(sheet, run);
   sheet.stated({
     symbol: 't_R',
     name: 'time of the rotation',

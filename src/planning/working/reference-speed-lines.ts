@@ -2,7 +2,8 @@ import { aeroplanePointer } from '../aeroplane-pointer.ts';
 import type { PreparedLanding } from '../prepare-landing.ts';
 import type { LandingQuestion } from '../question.ts';
 import { referenceSpeedRules } from '../rules/certification/reference-speed.ts';
-import { calibratedFrom, kindLines, machOf, speedLines } from './speed-lines.ts';
+import { calibratedFrom, kindLines, machOf } from './speed-kind-lines.ts';
+import { speedLines } from './speed-lines.ts';
 import type { Worksheet } from './worksheet.ts';
 
 const speed = { kind: 'speed', direction: 'nearest' } as const;
