@@ -38,7 +38,7 @@ const listedSurface = z
       })
       .exactOptional(),
   })
-  .meta({ id: 'SurfaceState', description: 'A surface and its state with what is known of it.' });
+  .meta({ id: 'KnownSurface', description: 'A surface and its state with what is known of it.' });
 
 /** The answer of GET /v1/surfaces. */
 export const surfaceList = z.strictObject({ surfaces: z.array(listedSurface) }).meta({
