@@ -28,8 +28,10 @@ export interface StretchedPath extends SpeedChange {
   readonly entered: number;
 }
 
-/** On the airspeed at which a stretch is left [m/s]: a micrometre of runway. */
+/** On the airspeed at which a stretch is left [m/s]: a micrometre of runway, and some more where the speed hardly changes. */
 const speedTolerance = 1e-9;
+/** How much of a stretch may be missing where it is left [m]; where forces jump the root may only be the jump. */
+const lengthTolerance = 0.01;
 
 /**
  * A change of speed over stretches of runway that each have their own steady forces, speeding up or slowing down.
@@ -67,7 +69,7 @@ export function stretchedPath(
       parts.push({ stretch, from: entered, to });
       return { reaches: rest.reaches, sum: whole, parts, stretch, entered };
     }
-    const left = leavingSpeed(changeOn, stretch, entered, rest.reaches ? to : rest.sum.leastAt, length);
+    const left = leavingSpeed(changeOn, stretch, entered, to, length);
     if (left === undefined) {
       gather(whole, rest.sum);
       return { reaches: false, sum: whole, parts, stretch, entered };
@@ -84,7 +86,7 @@ function leavingSpeed(
   changeOn: ChangeOn,
   stretch: number,
   from: number,
-  upTo: number,
+  to: number,
   length: number,
 ): number | undefined {
   const over = (airspeed: number) => {
@@ -93,7 +95,8 @@ function leavingSpeed(
     // where the speed stops changing the length would never be used up: beyond the root
     return change.reaches ? change.sum.distance - length : length;
   };
-  const found = brent(over, from, upTo, speedTolerance);
+  const found = brent(over, from, to, speedTolerance);
   if (found.outcome !== 'root' || found.root === from) return undefined;
-  return changeOn(stretch, from, found.root).reaches ? found.root : undefined;
+  const change = changeOn(stretch, from, found.root);
+  return change.reaches && length - change.sum.distance <= lengthTolerance ? found.root : undefined;
 }

@@ -92,7 +92,7 @@ describe('codeBraking', () => {
 
   it('never brakes better on a worse code, at any speed, pressure, system and own figure', () => {
     const brakes = fc.record({
-      dry: fc.double({ min: 0.1, max: 0.6, noNaN: true }),
+      dry: fc.double({ min: 0.005, max: 0.6, noNaN: true }),
       antiSkid: fc.constantFrom('none', 'on-off', 'quasi-modulating', 'fully-modulating'),
       tyrePressure: fc.double({ min: 20 * psi, max: 350 * psi, noNaN: true }),
       hydroplaningSpeed: fc.option(fc.double({ min: 10, max: 90, noNaN: true }), { nil: undefined }),

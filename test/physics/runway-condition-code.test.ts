@@ -30,6 +30,10 @@ describe('runwayConditionCode', () => {
     expect(code({ kind: 'paved', state: 'flooded' })).toBe(2);
   });
 
+  it('is 5 with frost on a runway that is said to be dry', () => {
+    expect(code({ kind: 'paved', state: 'dry', contaminant: { kind: 'frost' } })).toBe(5);
+  });
+
   it('reads water on a runway that is said to be wet as no deeper than that', () => {
     expect(code({ kind: 'paved', state: 'wet', contaminant: { kind: 'water' } })).toBe(5);
     expect(code({ kind: 'paved', state: 'wet', contaminant: { kind: 'water', depth: 0.004 } })).toBe(2);

@@ -34,6 +34,8 @@ describe('wetBrakingCurve', () => {
       expect(at(30)).toBe(at(50));
       expect(at(400)).toBe(at(300));
     }
+    // -0.0331 x 8 + 0.252 x 4 - 0.658 x 2 + 0.692
+    expect(wetBrakingCurve(200 * psi)(200 * knot)).toBeCloseTo(0.1192, 12);
     expect(wetBrakingCurve(200 * psi)(300 * knot)).toBe(wetBrakingCurve(200 * psi)(200 * knot));
   });
 

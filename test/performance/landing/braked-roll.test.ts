@@ -203,6 +203,14 @@ describe('brakedRoll over stretches of runway', () => {
     expect(brakedRoll(run, 10)).toMatchObject({ outcome: 'stops' });
   });
 
+  it('never stops where a friction that jumps holds it at a speed on a long stretch, whatever lies behind', () => {
+    // 0.2 - 0.05 slows it from 15 to 12 m/s in 27.5 m; below 12, 0.02 - 0.05 would not
+    const braking = { at: (speed: number) => (speed < 12 ? 0.02 : 0.2), kinks: [12] };
+    const run = { ...plain, stretches: [{ end: 300, braking, slope: -0.05 }, third(900, 0.3)] };
+    expect(brakedRoll(run, 15)).toMatchObject({ outcome: 'never-stops', atGroundSpeed: expect.closeTo(12, 1) });
+    expect(brakedRoll(run, 15, 280)).toMatchObject({ outcome: 'stops' });
+  });
+
   it('is never shorter for a worse code, on the whole runway or on any third of it', () => {
     const anyCode = fc.integer({ min: 1, max: 6 }) as fc.Arbitrary<RunwayConditionCode>;
     const brakes = fc.record({
