@@ -46,7 +46,12 @@ const surfaces: readonly Surface[] = [
 ];
 
 const [published] = lengths as [Asked['published']];
-const plain = { surface: paved, conditionCode: undefined, slope: 0, published, reverse: false };
+const plain = { surface: paved, isSlippery: false, conditionCode: undefined, slope: 0, published, reverse: false };
+
+/** Whether more than moisture lies on a surface. */
+function isUnder({ state, contaminant }: Surface): boolean {
+  return state === 'flooded' || state === 'contaminated' || contaminant !== undefined;
+}
 
 /** Everything a surface rule may look at, over one aeroplane of each kind of engine and of each basis it may tell apart. */
 const onSurfaces: readonly Asked[] = aeroplanes
@@ -56,7 +61,7 @@ const onSurfaces: readonly Asked[] = aeroplanes
   })
   .flatMap((aeroplane) =>
     (aeroplane.category === 'twin-jet' ? [false, true] : [false]).flatMap((reverse) => [
-      ...surfaces.map((surface) => ({ ...plain, aeroplane, surface, reverse })),
+      ...surfaces.map((surface) => ({ ...plain, aeroplane, surface, reverse, isSlippery: isUnder(surface) })),
       ...([0, 1, 2, 3, 4, 5, 6] as const).map((conditionCode) => ({ ...plain, aeroplane, conditionCode, reverse })),
     ]),
   );
@@ -67,8 +72,8 @@ const inCases: readonly Asked[] = aeroplanes.flatMap((aeroplane) => [
     ...plain,
     aeroplane,
     surface: { kind: 'paved' as const, state },
+    isSlippery: state === 'contaminated',
   })),
-  { ...plain, aeroplane, conditionCode: 0 as const },
 ]);
 
 /**

@@ -16,10 +16,7 @@ export interface Checked {
 
 /** What there is to assess. */
 export interface Assessing {
-  readonly conditions: Pick<
-    Conditions,
-    'ruleSet' | 'rules' | 'asked' | 'doesNotApply' | 'declared' | 'runwayFactors' | 'condition'
-  >;
+  readonly conditions: Pick<Conditions, 'ruleSet' | 'rules' | 'asked' | 'doesNotApply' | 'declared' | 'runwayFactors'>;
   /** why there are no distances; undefined where each run that was asked for has them */
   readonly notReached: { readonly outcome: Outcome } | undefined;
   /** the distances of those runs */
@@ -71,14 +68,14 @@ export function assess(assessing: Assessing): Assessed {
 }
 
 function checksOf(
-  { rules, asked, declared, runwayFactors, condition }: Assessing['conditions'],
+  { rules, asked, declared, runwayFactors }: Assessing['conditions'],
   { credited, reference }: Runs<Checked>,
 ): readonly Check[] {
   return requirements(rules, asked).map((requirement) => {
     const { of } = requirement;
     const from = { reference: distanceOf(of, reference), credited: distanceOf(of, credited) };
     const check = checkOf(requirement, from, runwayFactors, declared);
-    return condition.isSlippery && requirement.presumesDryOrWet ? withoutStop(check) : check;
+    return asked.isSlippery && requirement.presumesDryOrWet ? withoutStop(check) : check;
   });
 }
 

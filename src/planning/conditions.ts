@@ -31,16 +31,15 @@ export function conditionsOf(
   if (isFault(ruleSet) || isFault(configuration) || isFault(air) || isFault(wind)) {
     return { refused: [ruleSet, configuration, air, wind].filter(isFault) };
   }
-  const ruled = ruledBy(ruleSet, question, phase);
-  if (isRefused(ruled)) return ruled;
   const condition = runwayCondition(question);
+  const ruled = ruledBy(ruleSet, question, phase, condition);
+  if (isRefused(ruled)) return ruled;
   return {
     ...ruled,
     configuration,
     air,
     wind,
     condition,
-    runwayFactors: condition.refusal === undefined ? ruled.runwayFactors : undefined,
     creditedHeadwind: windCredit(wind.headwind, ruled.rules.windCredit),
   };
 }

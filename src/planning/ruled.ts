@@ -1,7 +1,7 @@
+import type { RunwayConditionCode } from '../physics/runway-condition-code.ts';
 import { filmAsWet } from '../physics/runway-surface.ts';
 import { aeroplanePointer } from './aeroplane-pointer.ts';
 import type { Assumption, Factor } from './answer.ts';
-import { conditionCode } from './condition-code.ts';
 import { type DeclaredDistances, declaredDistances } from './declared-distances.ts';
 import type { Refused } from './fault.ts';
 import type { LandingQuestion, TakeoffQuestion } from './question.ts';
@@ -9,6 +9,7 @@ import { applicability, doesNotApply } from './rules/applies.ts';
 import { operatorFaults, operatorRuleSet, operatorRules } from './rules/operating/operator.ts';
 import type { Asked, PhaseRules, RuleSet } from './rules/rule-set.ts';
 import { runwayFactors } from './rules/runway-factors.ts';
+import type { RunwayCondition } from './runway-condition.ts';
 
 type AnyQuestion = TakeoffQuestion | LandingQuestion;
 type Phase = 'takeoff' | 'landing';
@@ -24,7 +25,7 @@ export interface Ruled {
   /** why the rule set does not speak of the aeroplane; undefined where it does */
   readonly doesNotApply: string | undefined;
   readonly declared: DeclaredDistances;
-  /** on the reference distance; undefined where the rules do not speak of the aeroplane or of the surface */
+  /** on the reference distance; undefined where the rules do not speak of the aeroplane or the surface, or the surface is refused */
   readonly runwayFactors: readonly Factor[] | undefined;
   /** what the rules decide by and the question does not say */
   readonly rulesAssumed: readonly Assumption[];
@@ -34,16 +35,23 @@ export interface Ruled {
  * The rules of a set for a question, at its stage; where that is not said, before departure.
  *
  * @param base - the set named, which an operator's own rules may make stricter
+ * @param condition - what lies on the runway
  * @returns what they make of it, or every factor of the operator that is below the set's
  */
-export function ruledBy(base: RuleSet, question: AnyQuestion, phase: Phase): Ruled | Refused {
-  const { aeroplane, runway, weather, procedure, operatorRules: own } = question;
+export function ruledBy(
+  base: RuleSet,
+  question: AnyQuestion,
+  phase: Phase,
+  condition: RunwayCondition,
+): Ruled | Refused {
+  const { aeroplane, runway, procedure, operatorRules: own } = question;
   const baseRules = rulesOf(base, phase, question.stage);
   const declared = declaredDistances(runway, base.takeoff.clearwayShare);
   const asked: Asked = {
     aeroplane,
     surface: filmAsWet(runway.surface),
-    conditionCode: conditionCode(runway.surface, weather.temperature),
+    isSlippery: condition.isSlippery,
+    conditionCode: condition.codes && (Math.min(...condition.codes) as RunwayConditionCode),
     slope: runway.slope,
     published: declared.published,
     reverse: procedure !== undefined && 'reverse' in procedure && procedure.reverse === true,
@@ -59,7 +67,7 @@ export function ruledBy(base: RuleSet, question: AnyQuestion, phase: Phase): Rul
     asked,
     doesNotApply: why,
     declared,
-    runwayFactors: why === undefined ? runwayFactors(rules, asked) : undefined,
+    runwayFactors: why === undefined && condition.refusal === undefined ? runwayFactors(rules, asked) : undefined,
     rulesAssumed: rulesAssumed(base, baseRules, question, phase),
   };
 }

@@ -40,6 +40,7 @@ export function asked(some: Partial<Asked> = {}): Asked {
   return {
     aeroplane: smallTwin,
     surface: dryPavement,
+    isSlippery: false,
     conditionCode: undefined,
     slope: 0,
     published,

@@ -15,9 +15,8 @@ export const dryGrass: Test = (asked) =>
 export const wetGrass: Test = (asked) => asked.surface.kind === 'grass' && moist(asked) && firm(asked) && clear(asked);
 /** Said to be short. */
 export const shortWetGrass: Test = (asked) => wetGrass(asked) && asked.surface.grass === 'short';
-/** What lies on the runway, or that nobody says what, is more than moisture. */
-export const contaminated: Test = (asked) =>
-  asked.surface.state === 'flooded' || asked.surface.state === 'contaminated' || !clear(asked);
+/** Neither dry nor wet. */
+export const contaminated: Test = ({ isSlippery }) => isSlippery;
 
 const soft = ({ surface: { kind, firmness } }: Asked) => kind !== 'paved' && kind !== 'ice' && firmness === 'soft';
 export const softGrass =
@@ -28,6 +27,6 @@ export const softGrass =
     clear(asked) &&
     (state === 'dry' ? asked.surface.state === 'dry' : moist(asked));
 /** Soft, whatever it is of. */
-export const softGround: Test = (asked) => soft(asked) && !contaminated(asked);
+export const softGround: Test = (asked) => soft(asked) && clear(asked);
 export const snow: Test = ({ surface: { kind, contaminant } }) =>
   contaminant === undefined ? kind === 'snow' : contaminant.kind.endsWith('-snow');

@@ -14,7 +14,10 @@ export type RuledAeroplane = Pick<Aeroplane, 'category' | 'engines' | 'certifica
 /** What decides which figures of a rule set count. */
 export interface Asked {
   readonly aeroplane: RuledAeroplane;
+  /** a film of a contaminant read as wet */
   readonly surface: Surface;
+  /** neither dry nor wet: contaminated, or medium to poor and worse */
+  readonly isSlippery: boolean;
   /** the worst along the runway; undefined where there is none */
   readonly conditionCode: RunwayConditionCode | undefined;
   /** uphill positive in the direction of movement */
@@ -82,8 +85,6 @@ export interface Requirement {
   readonly against: 'tora' | 'toda' | 'asda' | 'lda';
   /** the overall factor, applied once; absent: 1 without a word */
   readonly factor?: Factor;
-  /** the factor stands for a stop that the rule means to be on a dry or wet runway */
-  readonly presumesDryOrWet?: true;
   /** the overall factor on the distance on the runway as it is, where it is another one */
   readonly onRunway?: Factor;
   /**
@@ -95,6 +96,8 @@ export interface Requirement {
   readonly alternatives?: readonly { readonly factor: Factor; readonly because: string }[];
   /** why the rule's own distance is not there to be compared */
   readonly notAssessed?: string;
+  /** the factor stands for a stop that the rule means to be on a dry or wet runway */
+  readonly presumesDryOrWet?: true;
   readonly source: ReferenceKey;
 }
 

@@ -15,13 +15,13 @@ const wet: Factor = {
 };
 
 const surfaces: readonly SurfaceRule[] = [
-  { when: 'dry pavement', holds: dryPavement, factors: [] },
-  { when: 'wet or damp pavement', holds: wetPavement, factors: [wet] },
   {
     when: 'contaminated pavement',
     holds: (asked) => asked.surface.kind === 'paved' && contaminated(asked),
     factors: [{ ...wet, because: 'contaminated: not less than on a wet runway', atLeast: true }],
   },
+  { when: 'dry pavement', holds: dryPavement, factors: [] },
+  { when: 'wet or damp pavement', holds: wetPavement, factors: [wet] },
 ];
 
 function part(share: number, because: string): Factor {

@@ -91,14 +91,7 @@ const landing: PhaseRules = {
   stage: 'in-flight',
   windCredit,
   surfaces,
-  readings: [
-    {
-      when: 'runway condition code 0',
-      holds: ({ conditionCode }) => conditionCode === 0,
-      requirements: [{ ...requirement, notAssessed: 'at runway condition code 0 no landing is to be made' }],
-    },
-    { when: 'any other runway', holds: () => true, requirements: [requirement] },
-  ],
+  readings: [{ when: 'always', holds: () => true, requirements: [requirement] }],
   notApplied,
 };
 
