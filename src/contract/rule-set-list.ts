@@ -23,7 +23,10 @@ const multiplies = z.enum(['reference', 'credited']).meta({
 
 const surfaceRule = z
   .strictObject({ when: text.meta({ description: 'The surface.' }), multiplies, factors: z.array(factor) })
-  .meta({ id: 'ListedSurface', description: 'The factors of one kind of surface; the first kind that fits counts.' });
+  .meta({
+    id: 'ListedSurfaceRule',
+    description: 'The factors of one kind of surface; the first kind that fits counts.',
+  });
 
 const slopeRule = z
   .strictObject({

@@ -1,15 +1,15 @@
 import type { AntiSkid } from '../performance/aeroplane.ts';
 import type { BrakedStretch } from '../performance/landing/landing-run.ts';
 import { type BrakingFriction, brakingFriction, constantBraking, scaledBraking } from '../physics/braking-friction.ts';
-import { type CodeBrakes, codeBraking } from '../physics/code-braking.ts';
+import type { CodeBrakes } from '../physics/code-braking.ts';
 import { hydroplaningSpeed } from '../physics/hydroplaning-speed.ts';
 import { limitedBraking } from '../physics/limited-braking.ts';
-import { poorerBraking } from '../physics/poorer-braking.ts';
 import type { RunwayConditionCode } from '../physics/runway-condition-code.ts';
 import { type StoppingDrag, stoppingDrag } from '../physics/stopping-drag.ts';
 import { aeroplanePointer } from './aeroplane-pointer.ts';
 import type { Assumption } from './answer.ts';
 import { type ContaminantRoll, contaminantRoll } from './contaminant-roll.ts';
+import { gripOn } from './grip-on.ts';
 import type { LandingQuestion, Runway, Surface } from './question.ts';
 import { groundText } from './resolve-friction.ts';
 import type { LandingAssumed } from './resolve-landing.ts';
@@ -148,18 +148,6 @@ export function resolveBraking(
     return { end: ends[third] as number, braking, contaminantDrag: helped.drag.contaminantDrag };
   });
   return { ...resolved, stretches };
-}
-
-/** The poorer of what a surface and what its code give; either alone where the other has no data. */
-function gripOn(
-  found: BrakingFriction | 'no-data',
-  code: RunwayConditionCode | undefined,
-  brakes: CodeBrakes,
-): BrakingFriction | 'no-data' {
-  if (code === undefined || code === 6) return found;
-  const byCode = codeBraking(code, brakes);
-  if (found === 'no-data' || byCode === 'no-data') return byCode;
-  return poorerBraking(found, byCode);
 }
 
 /** What is counted of a contaminant's drag in a stop. */

@@ -2,7 +2,7 @@ import type { Aeroplane } from '../performance/aeroplane.ts';
 import { type DescribedCode, type RunwayConditionCode, runwayConditionCode } from '../physics/runway-condition-code.ts';
 import { deepContaminant } from '../physics/runway-surface.ts';
 import type { Shortfall } from './answer.ts';
-import type { Question } from './question.ts';
+import type { Question, Surface } from './question.ts';
 import { deepestForLight, heaviestLight } from './rules/contaminated-runway.ts';
 import { depthText, surfaceText } from './sentences/surface-text.ts';
 
@@ -28,6 +28,13 @@ export interface RunwayCondition {
   readonly refusal: SurfaceRefusal | undefined;
 }
 
+/** What the condition of a runway follows from. */
+export interface ConditionAsked {
+  readonly aeroplane: Pick<Aeroplane, 'category' | 'masses'>;
+  readonly runway: { readonly surface: Surface };
+  readonly weather: Pick<Question['weather'], 'temperature'>;
+}
+
 /**
  * The condition of the runway: as given, and as it follows from what is reported, the worse of the two.
  *
@@ -35,7 +42,7 @@ export interface RunwayCondition {
  *
  * @see references.Rcam; references.HouseContaminant for the worse of two and the refusal of light aeroplanes
  */
-export function runwayCondition(question: Pick<Question, 'aeroplane' | 'runway' | 'weather'>): RunwayCondition {
+export function runwayCondition(question: ConditionAsked): RunwayCondition {
   const { surface } = question.runway;
   const found = runwayConditionCode(surface, question.weather.temperature);
   const derived = found === 'no-data' ? undefined : found;
@@ -53,7 +60,7 @@ export function runwayCondition(question: Pick<Question, 'aeroplane' | 'runway' 
   };
 }
 
-function thirdsOf(given: Question['runway']['surface']['runwayConditionCode']): Thirds | undefined {
+function thirdsOf(given: Surface['runwayConditionCode']): Thirds | undefined {
   if (given === undefined) return undefined;
   return (typeof given === 'number' ? [given, given, given] : given) as Thirds;
 }
@@ -65,7 +72,7 @@ function worse(given: Thirds | undefined, derived: RunwayConditionCode | undefin
 }
 
 function refusalOf(
-  { aeroplane, runway: { surface } }: Pick<Question, 'aeroplane' | 'runway'>,
+  { aeroplane, runway: { surface } }: ConditionAsked,
   poorest: number | undefined,
 ): SurfaceRefusal | undefined {
   if (poorest === 0) {
@@ -97,6 +104,6 @@ function refusalOf(
 }
 
 /** Piston and electric aeroplanes, and any of no more than 5 700 kg. */
-function isLight({ category, masses }: Aeroplane): boolean {
+function isLight({ category, masses }: ConditionAsked['aeroplane']): boolean {
   return category.endsWith('-piston') || category.endsWith('-electric') || masses.maximumTakeoff <= heaviestLight;
 }

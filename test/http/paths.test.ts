@@ -16,6 +16,7 @@ const lists = [
   '/v1/aeroplanes',
   '/v1/rule-sets',
   '/v1/sources',
+  '/v1/surfaces',
   '/health/live',
   '/health/ready',
   '/version',

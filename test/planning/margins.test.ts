@@ -69,6 +69,44 @@ describe('a check', () => {
       because: 'the other paragraph',
     });
   });
+  it('shows both the rule\u2019s other reading and the one of factors or physics that was not taken', () => {
+    const other = factor('overall', 1.25);
+    const two = { ...requirement, alternatives: [{ factor: other, because: 'the other paragraph' }] };
+    const check = checkOf(two, { reference: 600, credited: 900 }, [wet], declared(2000));
+    expect([check.alternative?.startsFrom, check.alternative?.required]).toEqual(['credited', 900 * 1.25]);
+    expect(check.furtherAlternatives?.map((one) => [one.startsFrom, one.required])).toEqual([
+      ['reference', 600 * 1.3 * 1.15],
+    ]);
+    const three = { ...requirement, alternatives: [{ factor: factor('surface', 1.2), because: 'another print' }] };
+    const byPhysics = checkOf(three, { reference: 600, credited: 900 }, [wet], declared(1));
+    expect(byPhysics.alternative?.because).toMatch(/ask for less$/);
+  });
+  it('takes another overall factor on the runway as it is where the rule has one', () => {
+    const two = { ...requirement, onRunway: factor('overall', 1.05) };
+    const at = (credited: number) => checkOf(two, { reference: 600, credited }, [wet], declared(2000));
+    expect(at(850)).toMatchObject({ startsFrom: 'reference', required: 600 * 1.3 * 1.15 });
+    expect(at(860)).toMatchObject({ startsFrom: 'credited', required: 860 * 1.05 });
+  });
+  it('decides by the runway as it is where the rule says so, although the factors ask for more', () => {
+    const two = { ...requirement, onRunway: factor('overall', 1.05), runwayDecides: 'the other length' };
+    const check = checkOf(two, { reference: 600, credited: 500 }, [wet], declared(2000));
+    expect(check).toMatchObject({ startsFrom: 'credited', required: 525 });
+    expect([check.alternative?.required, check.alternative?.because]).toEqual([600 * 1.3 * 1.15, 'the other length']);
+    const silent = checkOf(two, { reference: 600, credited: undefined }, [wet], declared(2000));
+    expect(silent).toMatchObject({ startsFrom: 'reference', required: 600 * 1.3 * 1.15 });
+  });
+  it('is not assessed where what the rule compares is not computed, with what is available and nothing required', () => {
+    const two = { ...requirement, notAssessed: 'not computed' };
+    const check = checkOf(two, { reference: undefined, credited: 1 }, [], declared(9));
+    expect(check).toMatchObject({ result: 'not-assessed', why: 'not computed', available: 9, factors: [overall] });
+    expect([check.required, check.distance, check.startsFrom]).toEqual([undefined, undefined, undefined]);
+  });
+  it('never passes by a factor that is the least it may be, where physics is silent, and fails by it', () => {
+    const least: Factor = { ...wet, atLeast: true };
+    const at = (toda: number, credited?: number) =>
+      checkOf(requirement, { reference: 600, credited }, [least], declared(toda)).result;
+    expect([at(896), at(897), at(897, 600)]).toEqual(['fails', 'not-assessed', 'passes']);
+  });
   it('is not assessed where its length is not declared, and still says what would be required', () => {
     const check = checkOf(requirement, { reference: 600, credited: undefined }, [wet], declared());
     expect([check.result, check.why, check.margin]).toEqual(['not-assessed', 'TODA is not declared', undefined]);

@@ -73,3 +73,58 @@ export const chains = figures(
     },
   ],
 );
+
+/** The factors of class B in one place, as a worked question lists them: takeoff and landing. */
+export const listed = figures(
+  {
+    source: 'CAT.POL.A.305, A.330, A.335 with AMC',
+    section: 'REG-3',
+    status: 'read',
+    quantity: 'factor, class B',
+    unit: '1',
+  },
+  [
+    {
+      id: 'no_stopway_clearway',
+      inputs: { overall: 'takeoff-run', more: 'none' } as const,
+      expected: 1.25,
+      tolerance: 0,
+    },
+    { id: 'TORA_with', inputs: { overall: 'takeoff-run', more: 'both' } as const, expected: 1, tolerance: 0 },
+    { id: 'TODA', inputs: { overall: 'takeoff-distance', more: 'both' } as const, expected: 1.15, tolerance: 0 },
+    { id: 'ASDA', inputs: { overall: 'accelerate-stop', more: 'both' } as const, expected: 1.3, tolerance: 0 },
+    { id: 'LDR', inputs: { overall: 'landing-distance', more: 'both' } as const, expected: 1.43, tolerance: 0.005 },
+  ],
+);
+
+/** The same for surface and slope. */
+export const listedOnRunways = figures(
+  {
+    source: 'CAT.POL.A.305, A.330, A.335 with AMC',
+    section: 'REG-3',
+    status: 'read',
+    quantity: 'product of the factors of the runway, class B',
+    unit: '1',
+  },
+  [
+    { id: 'dry_grass_TO', inputs: on('takeoff', 'grass', 'dry', 0), expected: 1.2, tolerance: 0 },
+    { id: 'wet_grass_TO', inputs: on('takeoff', 'grass', 'wet', 0), expected: 1.3, tolerance: 0 },
+    { id: 'upslope_per_1%', inputs: on('takeoff', 'paved', 'dry', 0.01), expected: 1.05, tolerance: 1e-12 },
+    { id: 'no credit downhill', inputs: on('takeoff', 'paved', 'dry', -0.01), expected: 1, tolerance: 0 },
+    { id: 'grass_landing', inputs: on('landing', 'grass', 'dry', 0), expected: 1.15, tolerance: 0 },
+    { id: 'wet_landing', inputs: on('landing', 'paved', 'wet', 0), expected: 1.15, tolerance: 0 },
+    { id: 'downslope_landing_per_1%', inputs: on('landing', 'paved', 'dry', -0.01), expected: 1.05, tolerance: 1e-12 },
+    { id: 'no credit uphill', inputs: on('landing', 'paved', 'dry', 0.01), expected: 1, tolerance: 0 },
+  ],
+);
+
+interface OnRunway {
+  readonly phase: 'takeoff' | 'landing';
+  readonly kind: 'paved' | 'grass';
+  readonly state: 'dry' | 'wet';
+  readonly slope: number;
+}
+
+function on(phase: OnRunway['phase'], kind: OnRunway['kind'], state: OnRunway['state'], slope: number): OnRunway {
+  return { phase, kind, state, slope };
+}

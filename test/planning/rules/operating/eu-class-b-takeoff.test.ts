@@ -4,7 +4,13 @@ import { contaminantKinds, type Surface } from '../../../../src/planning/questio
 import { euClassB } from '../../../../src/planning/rules/operating/eu-class-b.ts';
 import { requirements } from '../../../../src/planning/rules/requirements.ts';
 import { runwayFactors } from '../../../../src/planning/rules/runway-factors.ts';
-import { chains, overallFactors, surfaceFactors } from '../../../published/eu-class-b-takeoff.ts';
+import {
+  chains,
+  listed,
+  listedOnRunways,
+  overallFactors,
+  surfaceFactors,
+} from '../../../published/eu-class-b-takeoff.ts';
 import { asked, checksFrom, factorsOn } from '../../../support/asked.ts';
 import { expectNear } from '../../../support/near.ts';
 
@@ -33,6 +39,16 @@ describe('class B, takeoff', () => {
     });
     const checks = checksFrom(takeoff, given, { reference: inputs.tod50_m, credited: undefined });
     expectNear(checks.find(({ code }) => code === inputs.check)?.required, expected, tolerance);
+  });
+  it.each(listed)('$title', ({ inputs, expected, tolerance }) => {
+    const phase = inputs.overall === 'landing-distance' ? euClassB.landing : takeoff;
+    const found = requirements(phase, asked({ published: lengths(inputs.more) }));
+    expectNear(found.find(({ code }) => code === inputs.overall)?.factor?.value, expected, tolerance);
+  });
+  it.each(listedOnRunways)('$title', ({ inputs, expected, tolerance }) => {
+    const { phase, kind, state, slope } = inputs;
+    const product = factorsOn(euClassB[phase], { kind, state }, slope)?.reduce((one, other) => one * other, 1);
+    expectNear(product, expected, tolerance);
   });
 
   it('reads (b)(1) where nothing lies beyond the run, and (b)(2) with (b)(1) beside it elsewhere', () => {
