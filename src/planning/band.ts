@@ -27,6 +27,6 @@ export function highOver(deviation: number): number {
 
 /** The high end over the middle of what a check is of; 1 where there is no band. */
 export function highOverOf(band: Band | undefined, of: string): number {
-  if (of === 'obstacleClearance') return 1;
+  if (of === 'obstacleClearance' || of === 'climbGradient') return 1;
   return highOver((of === 'groundRoll' ? band?.groundRoll : band?.wholeDistance) ?? 0);
 }

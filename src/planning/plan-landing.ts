@@ -7,6 +7,7 @@ import { assess } from './assess.ts';
 import { balkedLandingClimb } from './balked-landing.ts';
 import { raisedCautions } from './cautions/caution-test.ts';
 import { landingCautions } from './cautions/landing-cautions.ts';
+import { climbChecks } from './climb-checks.ts';
 import { isRefused, type Refused } from './fault.ts';
 import { landingBand } from './landing-band.ts';
 import { landingDistances } from './landing-distances.ts';
@@ -65,6 +66,10 @@ export function planLanding(question: LandingQuestion): LandingAnswer | Refused 
     distances: checkedLandings(runs),
     band,
     rollAvailable,
+    further: () => {
+      const gradient = balkedLanding.outcome === 'computed' ? balkedLanding.gradient : undefined;
+      return climbChecks(rules.demands, question.aeroplane, gradient);
+    },
   });
 
   const assumed = [...landingEffects([...resolved.assumed, ...braking.assumed], stated && run), ...power.assumed];

@@ -6,6 +6,7 @@ import { answerBasis } from './answer-basis.ts';
 import { assess } from './assess.ts';
 import { raisedCautions } from './cautions/caution-test.ts';
 import { takeoffCautions } from './cautions/takeoff-cautions.ts';
+import { climbChecks } from './climb-checks.ts';
 import { isRefused, type Refused } from './fault.ts';
 import { obstacleCheck, obstaclePathOf } from './obstacle-path.ts';
 import { pathStart } from './path-start.ts';
@@ -50,6 +51,7 @@ export function planTakeoff(question: TakeoffQuestion): TakeoffAnswer | Refused 
   const distances = stated && band && takeoffDistances(stated, band, aeroplane.certification.screenHeight, method);
 
   const rollAvailable = declared.credited.tora;
+  const climb = stated && climbAfterTakeoff(question, prepared);
   let obstaclePath: ObstaclePath | undefined;
   const { outcome, checks, governing, thin } = assess({
     conditions,
@@ -62,7 +64,10 @@ export function planTakeoff(question: TakeoffQuestion): TakeoffAnswer | Refused 
       const demand = asked?.appliesTo(aeroplane) === true ? asked : undefined;
       const start = pathStart(demand, ofRunway, reached(runs.credited ?? runs.stated));
       obstaclePath = start && obstaclePathOf(question, prepared, start);
-      return demand === undefined || obstaclePath === undefined ? [] : [obstacleCheck(demand, obstaclePath)];
+      const climbs = climbChecks(rules.demands, aeroplane, climb?.gradient);
+      return demand === undefined || obstaclePath === undefined
+        ? climbs
+        : [...climbs, obstacleCheck(demand, obstaclePath)];
     },
   });
 
@@ -112,7 +117,7 @@ export function planTakeoff(question: TakeoffQuestion): TakeoffAnswer | Refused 
     wind: windAnswer(wind, creditedHeadwind),
     speeds,
     distances,
-    climb: stated && climbAfterTakeoff(question, prepared),
+    climb,
     obstaclePath,
     assessment: checks && { ruleSet: ruleSet.id, basedOn: conditions.basedOn, checks, governing: governing?.code },
     shortfall: notReached

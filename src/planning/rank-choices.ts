@@ -7,7 +7,7 @@ export type Ranked = Pick<Answer, 'outcome' | 'assessment'>;
  * The order in which choices are worth looking at, best first, as indices.
  *
  * Enough ones come first, by the largest least margin as per cent of what is required; then those that are not enough, by the
- * least shortfall as a length; one whose checks are not all assessed stands before those that fail and after those that pass; last
+ * least shortfall of runway (a climb or a clearance is no length and does not rank); one whose checks are not all assessed stands before those that fail and after those that pass; last
  * those without distances. Ties keep the order in which they were asked.
  */
 export function rankChoices(answers: readonly Ranked[]): number[] {
@@ -28,7 +28,7 @@ function keyOf({ outcome, assessment }: Ranked): Key {
   }
   if (checks.length === 0) return [3, 0];
   if (outcome === 'nothing-to-compare') return [1, least(checks.map(({ marginRatio }) => marginRatio))];
-  return [2, least(checks.map(({ margin }) => margin))];
+  return [2, least(checks.filter(({ unit }) => unit === 'distance').map(({ margin }) => margin))];
 }
 
 function least(numbers: readonly (number | undefined)[]): number {

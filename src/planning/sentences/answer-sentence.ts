@@ -37,13 +37,16 @@ function needs({ governing, question: { units }, ruleSet }: AnswerContext): stri
   const { required = 0, available = 0, margin = 0 } = governing ?? {};
   const passes = governing?.result === 'passes';
   const spare = passes ? Math.max(0, margin) : margin;
-  const difference = measureText(units, 'distance', passes ? spare : -spare, passes ? 'down' : 'up');
-  const text = (si: number, direction: 'up' | 'down') => measureText(units, 'distance', si, direction);
-  return `needs ${text(required, 'up')} of ${lengthName(governing)} ${ruleSet.phrase}, ${text(available, 'down')} available: ${passes ? 'spare' : 'short by'} ${difference}`;
+  const kind = governing?.unit ?? 'distance';
+  const difference = measureText(units, kind, passes ? spare : -spare, passes ? 'down' : 'up');
+  const text = (si: number, direction: 'up' | 'down') => measureText(units, kind, si, direction);
+  return `needs ${text(required, 'up')} of ${comparedName(governing)} ${ruleSet.phrase}, ${text(available, 'down')} available: ${passes ? 'spare' : 'short by'} ${difference}`;
 }
 
-function lengthName(check: Check | undefined): string {
-  return check?.against?.toUpperCase() ?? 'clearance';
+/** What a check compares, as a sentence names it. */
+function comparedName(check: Check | undefined): string {
+  if (check?.of === 'climbGradient') return 'climb gradient';
+  return check?.against?.toUpperCase() ?? 'clearance over obstacles';
 }
 
 function missing({ checks }: AnswerContext): string {
@@ -56,7 +59,7 @@ function passing({ checks, question: { units } }: AnswerContext): string {
   if (passed.length === 0) return '';
   const each = passed.map(
     (check) =>
-      `${lengthName(check)} passes with ${measureText(units, 'distance', Math.max(0, check.margin ?? 0), 'down')} spare`,
+      `${comparedName(check)} passes with ${measureText(units, check.unit, Math.max(0, check.margin ?? 0), 'down')} spare`,
   );
   return ` ${each.join(', ')}.`;
 }
