@@ -17,6 +17,9 @@ export const landingContribution = z
   .strictObject({ ...contributionShape, landingDistancePercent: z.number() })
   .meta({ id: 'LandingBandContribution', description: contributionText });
 
+export type TakeoffContribution = z.infer<typeof takeoffContribution>;
+export type LandingContribution = z.infer<typeof landingContribution>;
+
 /** What an answer rests on. */
 export function basisOf<Contribution extends z.ZodType>(contribution: Contribution, id: string) {
   return z

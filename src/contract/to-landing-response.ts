@@ -1,6 +1,7 @@
 import type { BalkedLanding, LandingAnswer } from '../planning/answer.ts';
 import type { Question } from '../planning/question.ts';
 import { asUnderstood } from './as-understood.ts';
+import type { LandingContribution } from './basis.ts';
 import type { LandingRequest } from './landing-request.ts';
 import type { LandingResponse } from './landing-response.ts';
 import type { Draft } from './present.ts';
@@ -44,10 +45,11 @@ export function toLandingResponse(
   if (working !== undefined) response.working = toWorking(how, working);
   if (trajectory !== undefined) response.trajectory = toTrajectory(how, trajectory);
   if (sensitivities !== undefined) response.sensitivities = toSensitivities(how, sensitivities, 'landingDistance');
-  response.basis = toBasis(how, answer, question.aeroplaneDigest, stamp, (one) => ({
-    ...toContribution(how, one),
-    landingDistancePercent: shownPercent(how, one.wholeDistance, 'nearest'),
-  }));
+  response.basis = toBasis(how, answer, question.aeroplaneDigest, stamp, (one) => {
+    const band = toContribution(how, one) as Draft<LandingContribution>;
+    band.landingDistancePercent = shownPercent(how, one.wholeDistance, 'nearest');
+    return band;
+  });
   response.question = asUnderstood(request, question);
   return response;
 }

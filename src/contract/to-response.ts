@@ -1,6 +1,7 @@
 import type { TakeoffAnswer } from '../planning/answer.ts';
 import type { Question } from '../planning/question.ts';
 import { asUnderstood } from './as-understood.ts';
+import type { TakeoffContribution } from './basis.ts';
 import type { Draft } from './present.ts';
 import { defaultRounding } from './question-frame.ts';
 import { type Presentation, shownPercent, shownQuantity } from './shown-quantity.ts';
@@ -47,10 +48,11 @@ export function toResponse(
   if (working !== undefined) response.working = toWorking(how, working);
   if (trajectory !== undefined) response.trajectory = toTrajectory(how, trajectory);
   if (sensitivities !== undefined) response.sensitivities = toSensitivities(how, sensitivities, 'takeoffDistance');
-  response.basis = toBasis(how, answer, question.aeroplaneDigest, stamp, (one) => ({
-    ...toContribution(how, one),
-    takeoffDistancePercent: shownPercent(how, one.wholeDistance, 'nearest'),
-  }));
+  response.basis = toBasis(how, answer, question.aeroplaneDigest, stamp, (one) => {
+    const band = toContribution(how, one) as Draft<TakeoffContribution>;
+    band.takeoffDistancePercent = shownPercent(how, one.wholeDistance, 'nearest');
+    return band;
+  });
   response.question = asUnderstood(request, question);
   return response;
 }

@@ -31,9 +31,9 @@ export function looseContaminant({ contaminant }: RunwaySurface): LooseContamina
  * @see references.Rcam; references.Amc25s1591 for the 3 mm
  */
 export function filmAsWet(surface: RunwaySurface): RunwaySurface {
-  const { contaminant, ...rest } = surface;
   const kind = looseContaminant(surface);
-  if (kind === undefined || rest.state === 'flooded') return surface;
+  if (kind === undefined || surface.state === 'flooded') return surface;
+  const { contaminant, ...rest } = surface;
   const depth = contaminant?.depth;
   const isSaidWet = kind === 'water' && (rest.state === 'damp' || rest.state === 'wet');
   const isFilm = depth === undefined ? isSaidWet : depth <= deepestWet;

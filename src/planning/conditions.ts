@@ -34,8 +34,16 @@ export function conditionsOf(
   const condition = runwayCondition(question);
   const ruled = ruledBy(ruleSet, question, phase, condition);
   if (isRefused(ruled)) return ruled;
+  // member by member: spreading an object of this size costs more than an evaluation
   return {
-    ...ruled,
+    ruleSet: ruled.ruleSet,
+    basedOn: ruled.basedOn,
+    rules: ruled.rules,
+    asked: ruled.asked,
+    doesNotApply: ruled.doesNotApply,
+    declared: ruled.declared,
+    runwayFactors: ruled.runwayFactors,
+    rulesAssumed: ruled.rulesAssumed,
     configuration,
     air,
     wind,

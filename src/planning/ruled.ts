@@ -18,7 +18,7 @@ type Phase = 'takeoff' | 'landing';
 export interface Ruled {
   readonly ruleSet: RuleSet;
   /** id of the set that an operator's own rules are based on; absent where they are not the operator's */
-  readonly basedOn?: string;
+  readonly basedOn: string | undefined;
   /** of this phase and stage */
   readonly rules: PhaseRules;
   readonly asked: Asked;
@@ -62,7 +62,7 @@ export function ruledBy(
   const rules = own === undefined ? baseRules : operatorRules(baseRules, phase, own);
   return {
     ruleSet: own === undefined ? base : operatorRuleSet(base, own),
-    ...(own === undefined ? {} : { basedOn: base.id }),
+    basedOn: own === undefined ? undefined : base.id,
     rules,
     asked,
     doesNotApply: why,
