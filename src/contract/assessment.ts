@@ -13,9 +13,9 @@ export const factor = z
   })
   .meta({ id: 'Factor', description: 'A factor of the rule set and what it is for.' });
 
-const startsFrom = z.enum(['reference', 'credited', 'flight-manual']).meta({
+const startsFrom = z.enum(['reference', 'credited', 'level', 'flight-manual']).meta({
   description:
-    'The distance the factors multiply: credited wind on a paved, dry, level runway; credited wind on the runway as given; or the flight manual.',
+    'The distance the factors multiply: credited wind on a paved, dry, level runway; credited wind on the runway as given; credited wind on that surface and level, where the rules give no credit for a slope that helps; or the flight manual.',
 });
 
 const alternative = z

@@ -1,11 +1,12 @@
 import type { Basis, Method } from './answer.ts';
 import type { AnyAssumed } from './assumed.ts';
 import type { Band } from './band.ts';
+import { conditionCodeAssumed } from './condition-code-assumed.ts';
+import type { Conditions } from './conditions.ts';
 import { defaulted } from './defaulted.ts';
 import { groundSlopeAssumed } from './ground-slope.ts';
 import { notGiven } from './not-given.ts';
 import type { Question } from './question.ts';
-import type { Ruled } from './ruled.ts';
 
 /**
  * What an answer rests on.
@@ -16,7 +17,7 @@ import type { Ruled } from './ruled.ts';
 export function answerBasis(
   question: Question,
   phase: 'takeoff' | 'landing',
-  { rules, rulesAssumed }: Pick<Ruled, 'rules' | 'rulesAssumed'>,
+  { rules, rulesAssumed, condition }: Pick<Conditions, 'rules' | 'rulesAssumed' | 'condition'>,
   method: Method,
   assumed: readonly AnyAssumed[],
   band: Band | undefined,
@@ -27,6 +28,7 @@ export function answerBasis(
     assumed: [
       ...assumed.map(({ assumption }) => assumption),
       ...rulesAssumed,
+      ...conditionCodeAssumed(condition, phase),
       ...groundSlopeAssumed(question.runway, phase),
       ...defaulted(question),
     ],

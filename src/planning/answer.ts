@@ -98,9 +98,12 @@ export interface Factor {
   readonly atLeast?: true;
 }
 
+/** The distance that the factors of a check multiply; 'level' is 'credited' where a slope that helps earns nothing. */
+export type StartsFrom = 'reference' | 'credited' | 'level' | 'flight-manual';
+
 /** A reading of a rule that is shown and does not decide. */
 export interface AlternativeReading {
-  readonly startsFrom: 'reference' | 'credited' | 'flight-manual';
+  readonly startsFrom: StartsFrom;
   readonly distance: number;
   readonly factors: readonly Factor[];
   readonly required: number;
@@ -114,7 +117,7 @@ export interface Check {
   /** the declared distance it is compared with; absent for a check that is not of a distance */
   readonly against?: 'tora' | 'toda' | 'asda' | 'lda';
   /** absent for a check that is not of a distance */
-  readonly startsFrom?: 'reference' | 'credited' | 'flight-manual';
+  readonly startsFrom?: StartsFrom;
   /** the distance before factors [m], where one exists */
   readonly distance?: number;
   readonly factors: readonly Factor[];

@@ -69,11 +69,15 @@ export function assess(assessing: Assessing): Assessed {
 
 function checksOf(
   { rules, asked, declared, runwayFactors }: Assessing['conditions'],
-  { credited, reference }: Runs<Checked>,
+  { credited, level, reference }: Runs<Checked>,
 ): readonly Check[] {
   return requirements(rules, asked).map((requirement) => {
     const { of } = requirement;
-    const from = { reference: distanceOf(of, reference), credited: distanceOf(of, credited) };
+    const from = {
+      reference: distanceOf(of, reference),
+      credited: distanceOf(of, credited),
+      level: distanceOf(of, level),
+    };
     const check = checkOf(requirement, from, runwayFactors, declared);
     return asked.isSlippery && requirement.presumesDryOrWet ? withoutStop(check) : check;
   });

@@ -53,12 +53,14 @@ export function conditionsOf(
 }
 
 /** What the rule set makes of the runs behind an answer; nothing where it does not apply. */
-export function ruledRuns({ creditedHeadwind, wind, doesNotApply, runwayFactors }: Conditions): {
+export function ruledRuns({ creditedHeadwind, wind, doesNotApply, runwayFactors, rules }: Conditions): {
   readonly creditedHeadwind: number;
   readonly needsReference: boolean;
+  readonly slopeEarnsNothing: boolean;
 } {
   return {
     creditedHeadwind: doesNotApply === undefined ? creditedHeadwind : wind.headwind,
     needsReference: runwayFactors !== undefined,
+    slopeEarnsNothing: doesNotApply === undefined && rules.slope !== undefined,
   };
 }

@@ -17,7 +17,7 @@ export type NotStopped = Exclude<LandingResult, Stopped>;
 /** The distances behind an answer to a landing. */
 export type LandingRuns = Runs<LandingResult>;
 
-/** What differs between the three. */
+/** What differs between them. */
 export interface LandingConditions {
   /** [m/s] */
   readonly creditedHeadwind: number;
@@ -26,6 +26,8 @@ export interface LandingConditions {
   readonly referenceBraking: BrakingFriction;
   /** whether the rule set multiplies the reference distance */
   readonly needsReference: boolean;
+  /** whether a slope that helps earns nothing under the rule set */
+  readonly slopeEarnsNothing: boolean;
 }
 
 /** What of the weather and the runway a run needs beside its question. */
@@ -77,15 +79,16 @@ export function statedLanding(
 }
 
 /**
- * The three runs behind an answer.
+ * The runs behind an answer.
  *
  * No reverse thrust shortens the distance that factors multiply: it stands for the flight manual's, which counts none.
  */
 export function landingRuns(run: LandingRun, conditions: LandingConditions): LandingRuns {
-  const { creditedHeadwind, actualBraking, referenceBraking, needsReference } = conditions;
+  const { creditedHeadwind, actualBraking, referenceBraking, needsReference, slopeEarnsNothing } = conditions;
   return runsOf(landing, run, {
     known: actualBraking !== undefined,
     creditedHeadwind,
+    alsoLevel: slopeEarnsNothing && (run.profile !== undefined || run.slope > 0),
     reference: needsReference
       ? {
           ...run,
@@ -113,14 +116,19 @@ export function stopped(result: LandingResult | undefined): Stopped | undefined 
   return result !== undefined && isStopped(result) ? result : undefined;
 }
 
-/** The first of the three that does not stop, in the order stated, credited, reference. */
+/** The first of them that does not stop, in their order. */
 export function notStopped(runs: LandingRuns): NotStopped | undefined {
   return firstWithout(runs, isStopped);
 }
 
 /** What checks are of, of each run that stops. */
 export function checkedLandings(runs: LandingRuns): Runs<Checked> {
-  return { stated: checked(runs.stated), credited: checked(runs.credited), reference: checked(runs.reference) };
+  return {
+    stated: checked(runs.stated),
+    credited: checked(runs.credited),
+    level: checked(runs.level),
+    reference: checked(runs.reference),
+  };
 }
 
 function checked(result: LandingResult | undefined): Checked | undefined {

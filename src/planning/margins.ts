@@ -9,9 +9,11 @@ export interface StartingDistances {
   readonly reference: number | undefined;
   /** credited wind; the runway as it is */
   readonly credited: number | undefined;
+  /** credited wind; the surface as it is, level; only where a slope that helps earns nothing */
+  readonly level?: number | undefined;
 }
 
-type Start = 'reference' | 'credited';
+type Start = 'reference' | 'credited' | 'level';
 interface Reading {
   readonly startsFrom: Start;
   readonly distance: number;
@@ -24,7 +26,8 @@ interface Reading {
  *
  * The factors of the surface and the slope multiply the reference distance only. Where physics on the actual runway exceeds the
  * reference times those factors, it is taken; the one not taken stands beside it. The overall factor is applied once, to
- * whichever is taken. A factor that the rule calls the least it may be shows that a length is not enough, and without physics
+ * whichever is taken. Where the rules give no credit for a slope that helps, physics on the same surface and level is taken if that
+ * is longer, and the runway as it is stands beside it. A factor that the rule calls the least it may be shows that a length is not enough, and without physics
  * beside it never that it is.
  *
  * @param requirement - what is compared, the overall factor
@@ -42,9 +45,9 @@ export function checkOf(
   const { code, of, against, source } = requirement;
   const available = declared.credited[against];
   if (requirement.notAssessed !== undefined) return notAssessed(requirement, available);
-  const { taken, other } = readings(requirement, from, runwayFactors);
+  const { taken, others } = readings(requirement, from, runwayFactors);
   const { startsFrom, distance, factors, required } = taken;
-  const [alternative, ...further] = [...otherReadings(requirement, taken), ...(other === undefined ? [] : [other])];
+  const [alternative, ...further] = [...otherReadings(requirement, taken), ...others];
   const passes = available !== undefined && required - available <= arithmeticSlack;
   const least = from.credited === undefined ? factors.find(({ atLeast }) => atLeast) : undefined;
   const why =
@@ -85,24 +88,32 @@ function notAssessed(
 
 function readings(
   { factor, onRunway = factor, runwayDecides }: Requirement,
-  { reference, credited }: StartingDistances,
+  { reference, credited, level }: StartingDistances,
   runwayFactors: readonly Factor[] | undefined,
-): { readonly taken: Reading; readonly other?: AlternativeReading } {
+): { readonly taken: Reading; readonly others: readonly AlternativeReading[] } {
   const byFactors =
     reference === undefined || runwayFactors === undefined
       ? undefined
       : reading('reference', reference, [...runwayFactors, ...listed(factor)]);
-  const byPhysics = credited === undefined ? undefined : reading('credited', credited, listed(onRunway));
-  if (byFactors === undefined) {
-    if (byPhysics === undefined) throw new RangeError('from must hold a distance to start from');
-    return { taken: byPhysics };
+  if (credited === undefined) {
+    if (byFactors === undefined) throw new RangeError('from must hold a distance to start from');
+    return { taken: byFactors, others: [] };
   }
-  if (byPhysics === undefined) return { taken: byFactors };
-  if (runwayDecides !== undefined) return { taken: byPhysics, other: beside(byFactors, runwayDecides) };
-  if (byPhysics.required === byFactors.required) return { taken: byFactors };
-  return byPhysics.required > byFactors.required
-    ? { taken: byPhysics, other: beside(byFactors, 'the factors on a paved, dry, level runway ask for less') }
-    : { taken: byFactors, other: beside(byPhysics, 'physics on the runway as it is asks for less') };
+  const asItIs = reading('credited', credited, listed(onRunway));
+  const helped = level !== undefined && level > credited;
+  const byPhysics = helped ? reading('level', level, listed(onRunway)) : asItIs;
+  const uncredited = helped ? [beside(asItIs, 'the rules give no credit for a slope that helps')] : [];
+  if (byFactors === undefined) return { taken: byPhysics, others: uncredited };
+  if (runwayDecides !== undefined) {
+    return { taken: byPhysics, others: [beside(byFactors, runwayDecides), ...uncredited] };
+  }
+  if (byPhysics.required > byFactors.required) {
+    const less = beside(byFactors, 'the factors on a paved, dry, level runway ask for less');
+    return { taken: byPhysics, others: [less, ...uncredited] };
+  }
+  return asItIs.required === byFactors.required
+    ? { taken: byFactors, others: [] }
+    : { taken: byFactors, others: [beside(asItIs, 'physics on the runway as it is asks for less')] };
 }
 
 function listed(factor: Factor | undefined): readonly Factor[] {

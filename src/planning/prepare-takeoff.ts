@@ -65,13 +65,11 @@ export function prepareTakeoff(question: TakeoffQuestion): PreparedTakeoff | Ref
     contaminantDrag: friction.contaminantDrag,
   });
 
-  const { creditedHeadwind, needsReference } = ruledRuns(conditions);
   const runConditions = {
-    creditedHeadwind,
+    ...ruledRuns(conditions),
     actualFriction: friction.actual,
     referenceFriction: friction.reference,
     rollingStartAllowance: flown.rollingStartAllowance,
-    needsReference,
   };
   return { conditions, flown, resolved, speeds, power, thrustIn, friction, run, runConditions };
 }

@@ -16,7 +16,7 @@ export type NotReached = Exclude<TakeoffResult, Reached>;
 /** The distances behind an answer to a takeoff. */
 export type TakeoffRuns = Runs<TakeoffResult>;
 
-/** What differs between the three. */
+/** What differs between them. */
 export interface RunConditions {
   /** [m/s] */
   readonly creditedHeadwind: number;
@@ -27,6 +27,8 @@ export interface RunConditions {
   readonly rollingStartAllowance: number;
   /** whether the rule set multiplies the reference distance */
   readonly needsReference: boolean;
+  /** whether a slope that helps earns nothing under the rule set */
+  readonly slopeEarnsNothing: boolean;
 }
 
 /** What of the weather and the runway a run needs beside its question. */
@@ -93,13 +95,21 @@ export function takeoffOf(run: TakeoffRun, rollingStartAllowance: number): Takeo
   };
 }
 
-/** The three runs behind an answer. */
+/** The runs behind an answer. */
 export function takeoffRuns(run: TakeoffRun, conditions: RunConditions): TakeoffRuns {
-  const { creditedHeadwind, actualFriction, referenceFriction, rollingStartAllowance, needsReference } = conditions;
+  const {
+    creditedHeadwind,
+    actualFriction,
+    referenceFriction,
+    rollingStartAllowance,
+    needsReference,
+    slopeEarnsNothing,
+  } = conditions;
   const compute = (other: TakeoffRun) => takeoffOf(other, rollingStartAllowance);
   return runsOf(compute, run, {
     known: actualFriction !== undefined,
     creditedHeadwind,
+    alsoLevel: slopeEarnsNothing && (run.profile !== undefined || run.slope < 0),
     reference: needsReference
       ? {
           ...run,
@@ -118,14 +128,19 @@ export function takeoffRuns(run: TakeoffRun, conditions: RunConditions): Takeoff
   });
 }
 
-/** The first of the three that has no distance, in the order stated, credited, reference. */
+/** The first of them that has no distance, in their order. */
 export function notReached(runs: TakeoffRuns): NotReached | undefined {
   return firstWithout(runs, isReached);
 }
 
 /** What checks are of, of each run that has distances. */
 export function checkedTakeoffs(runs: TakeoffRuns): Runs<Checked> {
-  return { stated: checked(runs.stated), credited: checked(runs.credited), reference: checked(runs.reference) };
+  return {
+    stated: checked(runs.stated),
+    credited: checked(runs.credited),
+    level: checked(runs.level),
+    reference: checked(runs.reference),
+  };
 }
 
 function checked(result: TakeoffResult | undefined): Checked | undefined {

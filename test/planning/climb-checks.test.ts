@@ -73,7 +73,9 @@ describe('a class B twin', () => {
   });
 
   it('fails on its climb in per cent, in the sentence and in the caution', () => {
-    const answer = planTakeoff(changed(asked, { aeroplane: { drag: { zeroLiftCoefficient: 0.39, oswaldFactor: 0.72 } } }));
+    const answer = planTakeoff(
+      changed(asked, { aeroplane: { drag: { zeroLiftCoefficient: 0.39, oswaldFactor: 0.72 } } }),
+    );
     if (isRefused(answer)) throw new Error('refused');
     const check = answer.assessment?.checks.find(({ code }) => code === 'climb-all-engines');
     expect(check?.result).toBe('fails');

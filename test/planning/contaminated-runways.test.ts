@@ -147,6 +147,20 @@ describe('the stop that a factor stands for', () => {
     expect(stop(ice)?.margin).toBeUndefined();
     expect(asda(ice).outcome).toBe('nothing-to-compare');
   });
+  it('is the same where TORA alone is declared, whose 1.25 stands for the stop as well', () => {
+    const alone = (surface: Surface, tora: number, more: object = {}) =>
+      takeoffOn(surface, wheels, {
+        runway: { surface, declared: { tora, ...more } },
+        question: { ruleSet: 'eu-class-b' },
+      });
+    const [check, ...others] = alone(ice, 1500).assessment?.checks ?? [];
+    expect([check?.code, check?.result, others]).toEqual(['takeoff-run', 'not-assessed', []]);
+    expect(check?.why).toMatch(/presumes a dry or wet runway/);
+    expect(alone(ice, 1500).outcome).toBe('nothing-to-compare');
+    expect(alone(ice, 1500, { toda: 1500, asda: 1500 }).outcome).toBe('nothing-to-compare');
+    expect(alone(ice, 300).outcome).toBe('not-enough');
+    expect(alone({ kind: 'paved', state: 'wet' }, 1500).assessment?.checks[0]?.result).toBe('passes');
+  });
   it('is assessed on a dry or wet one, and fails on ice where the factor alone fails', () => {
     expect(stop({ kind: 'paved', state: 'wet' })?.result).toBe('passes');
     expect(stop(ice, 300)?.result).toBe('fails');
@@ -154,10 +168,52 @@ describe('the stop that a factor stands for', () => {
   });
 });
 
+describe('a takeoff by condition code', () => {
+  const ofThirds = (runwayConditionCode: NonNullable<Surface['runwayConditionCode']>, ruleSet = 'unfactored') => {
+    const { outcome, sentence, cautions, distances, assessment, basis } = takeoffOn(
+      paved('wet', runwayConditionCode),
+      wheels,
+      {
+        question: { ruleSet },
+      },
+    );
+    return { outcome, sentence, cautions, distances, assessment, assumed: basis.assumed };
+  };
+  it('is the same for three like thirds as for the one code', () => {
+    for (const ruleSet of ['unfactored', 'eu-class-b']) {
+      for (const code of [6, 5, 4, 3, 2, 1, 0]) {
+        expect(ofThirds([code, code, code], ruleSet)).toEqual(ofThirds(code, ruleSet));
+      }
+    }
+  });
+  it('takes the poorest third throughout, and says so', () => {
+    for (const thirds of [
+      [5, 5, 2],
+      [5, 2, 5],
+      [2, 5, 5],
+    ] as const) {
+      const found = ofThirds([...thirds]);
+      const { assumed, ...rest } = ofThirds(2);
+      expect(found).toMatchObject(rest);
+      expect(found.assumed.filter((one) => !assumed.some(({ at }) => at === one.at))).toMatchObject([
+        { at: '/runway/surface/runwayConditionCode', value: 2, because: expect.stringMatching(/the poorest counts/) },
+      ]);
+    }
+  });
+});
+
 describe('a landing by condition code', () => {
   const roll = (surface: Surface, runway = {}) => landingOn(surface, runway).distances?.groundRoll.value ?? Number.NaN;
   it('is the same for three like thirds as for the one code', () => {
     for (const code of [5, 4, 3, 2, 1]) expect(roll(paved('wet', [code, code, code]))).toBe(roll(paved('wet', code)));
+    const required = (runwayConditionCode: NonNullable<Surface['runwayConditionCode']>) =>
+      landed(
+        changed(plainLanding, {
+          runway: { surface: paved('wet', runwayConditionCode) },
+          question: { ruleSet: 'us-landing-by-condition-code' },
+        }),
+      ).assessment?.checks;
+    for (const code of [5, 4, 3, 2, 1]) expect(required([code, code, code])).toEqual(required(code));
   });
   it('never gets shorter as a code gets worse', () => {
     const rolls = [6, 5, 4, 3, 2, 1].map((code) => roll(paved('wet', code)));

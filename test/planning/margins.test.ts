@@ -95,6 +95,21 @@ describe('a check', () => {
     const silent = checkOf(two, { reference: 600, credited: undefined }, [wet], declared(2000));
     expect(silent).toMatchObject({ startsFrom: 'reference', required: 600 * 1.3 * 1.15 });
   });
+  it('takes the level runway where that is longer than the one as it is, which stands beside it', () => {
+    const at = (credited: number, factors?: readonly Factor[]) =>
+      checkOf(requirement, { reference: 600, credited, level: 700 }, factors, declared(2000));
+    const alone = at(650);
+    expect(alone).toMatchObject({ startsFrom: 'level', distance: 700, required: 700 * 1.15 });
+    expect(alone.alternative).toMatchObject({ startsFrom: 'credited', required: 650 * 1.15 });
+    expect(at(710)).toMatchObject({ startsFrom: 'credited', required: 710 * 1.15, alternative: undefined });
+    const byFactors = at(650, [wet]);
+    expect(byFactors).toMatchObject({ startsFrom: 'reference', required: 600 * 1.3 * 1.15 });
+    expect([byFactors.alternative?.startsFrom, byFactors.furtherAlternatives]).toEqual(['credited', undefined]);
+    const byPhysics = at(650, [factor('surface', 1.1)]);
+    expect(byPhysics.startsFrom).toBe('level');
+    expect(byPhysics.alternative).toMatchObject({ startsFrom: 'reference', required: 600 * 1.1 * 1.15 });
+    expect(byPhysics.furtherAlternatives).toMatchObject([{ startsFrom: 'credited', required: 650 * 1.15 }]);
+  });
   it('is not assessed where what the rule compares is not computed, with what is available and nothing required', () => {
     const two = { ...requirement, notAssessed: 'not computed' };
     const check = checkOf(two, { reference: undefined, credited: 1 }, [], declared(9));

@@ -218,7 +218,11 @@ describe('rules that do not apply', () => {
     const conditions = conditionsOf(heavy, 'landing');
     if (isRefused(conditions)) throw new Error('refused');
     const ruled = ruledRuns(conditions);
-    expect(ruled).toEqual({ creditedHeadwind: conditions.wind.headwind, needsReference: false });
+    expect(ruled).toEqual({
+      creditedHeadwind: conditions.wind.headwind,
+      needsReference: false,
+      slopeEarnsNothing: false,
+    });
     const applies = conditionsOf(changed(heavy, { aeroplane: { masses: { maximumTakeoff: 1050 } } }), 'landing');
     if (isRefused(applies)) throw new Error('refused');
     expectRatio(ruledRuns(applies).creditedHeadwind, 1.5 * applies.wind.headwind, 1e-12);

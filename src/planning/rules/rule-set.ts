@@ -61,7 +61,7 @@ export interface SurfaceRule {
   readonly factors: readonly Factor[];
 }
 
-/** What a slope the unfavourable way adds to the reference distance; the other way earns nothing. */
+/** What a slope the unfavourable way adds to the reference distance; the other way earns nothing, by physics neither. */
 export interface SlopeRule {
   readonly unfavourable: 'uphill' | 'downhill';
   /** the factor for a slope of `step`, a ratio */
@@ -96,7 +96,7 @@ export interface Requirement {
   readonly alternatives?: readonly { readonly factor: Factor; readonly because: string }[];
   /** why the rule's own distance is not there to be compared */
   readonly notAssessed?: string;
-  /** the factor stands for a stop that the rule means to be on a dry or wet runway */
+  /** the factor stands for a stop too, which the rule means to be on a dry or wet runway */
   readonly presumesDryOrWet?: true;
   readonly source: ReferenceKey;
 }

@@ -10,6 +10,7 @@ const down = { kind: 'distance', direction: 'down' } as const;
 const startsFrom = {
   reference: 'in the credited wind on a paved, dry, level runway',
   credited: 'in the credited wind on the runway as given',
+  level: 'in the credited wind on the surface as given, level',
   'flight-manual': 'by the flight manual',
 } as const;
 

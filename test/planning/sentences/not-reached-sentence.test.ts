@@ -4,7 +4,7 @@ import { shortfalls } from '../../../src/planning/shortfalls.ts';
 import type { NotReached } from '../../../src/planning/takeoff-runs.ts';
 
 const said = (stated: NotReached) =>
-  notReachedSentence({ stated, credited: undefined, reference: undefined }, 'm-kt-kg');
+  notReachedSentence({ stated, credited: undefined, level: undefined, reference: undefined }, 'm-kt-kg');
 
 describe('why there are no distances', () => {
   it('tells where the acceleration is gone, and the least one as met elsewhere', () => {

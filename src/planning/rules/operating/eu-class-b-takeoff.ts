@@ -55,7 +55,8 @@ const readings: readonly Reading[] = [
   {
     when: 'neither TODA nor ASDA is declared, or both are TORA',
     holds: nothingBeyond,
-    requirements: [{ ...shared, code: 'takeoff-run', against: 'tora', factor: runAlone }],
+    // 1.25 stands here for the stop as well: with (b)(2) that same runway would have to hold 1.30 times the distance as ASDA
+    requirements: [{ ...shared, code: 'takeoff-run', against: 'tora', factor: runAlone, presumesDryOrWet: true }],
   },
   {
     when: 'a TODA or ASDA beyond TORA is declared, or one of them alone',

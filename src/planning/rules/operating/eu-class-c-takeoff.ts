@@ -29,7 +29,14 @@ function requirement(value: number, number: string | undefined): Requirement {
     source: 'EuAirOps400',
     status: 'read',
   };
-  return { code: 'takeoff-run', of: 'takeoffDistance', against: 'tora', factor, source: 'EuAirOps400' };
+  return {
+    code: 'takeoff-run',
+    of: 'takeoffDistance',
+    against: 'tora',
+    factor,
+    presumesDryOrWet: true,
+    source: 'EuAirOps400',
+  };
 }
 
 const readings: readonly Reading[] = byEngines.flatMap((value, index) => {
