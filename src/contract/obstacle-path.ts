@@ -8,7 +8,10 @@ const cleared = z
   .strictObject({
     distance: length,
     height: altitude,
-    pathHeight: altitude.meta({ description: 'Of the path there; 0 before the path begins.' }),
+    pathHeight: altitude.meta({
+      description:
+        'Of the path there, from where the height of the obstacle is measured; before the path begins, of the ground.',
+    }),
     clearance: altitude.meta({ description: 'Path less obstacle.' }),
   })
   .meta({ id: 'ClearedObstacle', description: 'One obstacle and the path above it.' });

@@ -85,13 +85,14 @@ export function climbOut({ from, rise, stages, stateAt, headwind, ...aeroplane }
 /**
  * Height of the path above brake release at a distance from it [m].
  *
- * @returns 0 before the path begins, where the aeroplane may still be on the ground; the last height beyond its end
+ * @param distance - [m], not before the path begins
+ * @returns the last height beyond its end
  */
 export function pathHeight(
   { distances, heights }: Extract<ClimbPath, { outcome: 'climbs' }>,
   distance: number,
 ): number {
-  if (distance < (distances[0] as number)) return 0;
+  if (distance < (distances[0] as number)) throw new RangeError('distance must not lie before the path begins');
   const height = interpolate(distances, heights, distance);
   return height === 'outside' ? (heights[heights.length - 1] as number) : height;
 }

@@ -1,6 +1,7 @@
 import type { Air } from '../performance/air.ts';
 import { airOf } from '../performance/air.ts';
 import { type ClimbPath, type ClimbStage, climbOut, pathHeight } from '../performance/climb-out.ts';
+import { groundRise } from '../performance/ground-rise.ts';
 import { tasFromEas } from '../physics/airspeed.ts';
 import { lapseRate } from '../physics/constants.ts';
 import { inducedDragFactor } from '../physics/drag.ts';
@@ -22,8 +23,9 @@ export interface PathStart {
 /**
  * The path past the obstacles of a question: straight ahead, all engines, at the screen speed.
  *
- * The runway's plane is followed to where the path begins; from there the climb is steady, in air that thins with height by the
- * standard lapse. Drag falls as the configuration says gear and flap come up.
+ * The ground line is followed to where the path begins; from there the climb is steady, in air that thins with height by the
+ * standard lapse. Drag falls as the configuration says gear and flap come up. A start offset brings the end of TODA nearer by
+ * itself.
  *
  * @returns undefined where no obstacles are given
  */
@@ -32,18 +34,21 @@ export function obstaclePathOf(
   prepared: PreparedTakeoff,
   start: PathStart,
 ): ObstaclePath | undefined {
-  const { obstacles, lineUp, declared, slope } = question.runway;
+  const { runway } = question;
+  const { obstacles, lineUp } = runway;
   if (obstacles === undefined) return undefined;
-  const rise = prepared.run.slope * start.distance;
+  const rise = groundRise(runway, start.distance);
   const path = pathFrom(question, prepared, {
     distance: start.distance,
     height: question.aeroplane.certification.screenHeight + rise,
   });
   if (path.outcome !== 'climbs') return path;
-  const origin = obstacles.from === 'brake-release' ? 0 : (declared?.toda ?? 0) - (lineUp?.tora ?? 0);
-  const level = slope * origin;
+  const { toda = 0 } = prepared.conditions.declared.published;
+  const origin = obstacles.from === 'brake-release' ? 0 : Math.max(0, toda - (lineUp?.tora ?? 0));
+  const level = groundRise(runway, origin);
   const cleared = obstacles.list.map(({ distance, height }) => {
-    const found = pathHeight(path, origin + distance) - level;
+    const along = origin + distance;
+    const found = (along < start.distance ? groundRise(runway, along) : pathHeight(path, along)) - level;
     return { distance, height, pathHeight: found, clearance: found - height };
   });
   const least = Math.min(...cleared.map(({ clearance }) => clearance));

@@ -59,7 +59,7 @@ describe('a runway end on file', () => {
       surface: { kind: 'paved', state: 'dry' },
       start: { point: 'C1' },
       declared: { tora: metres(720), toda: metres(945), asda: metres(785) },
-      onFile: { aerodrome: 'tavolny-regional', revision: '1', full: { tora: metres(1465) } },
+      onFile: { aerodrome: 'tavolny-regional', revision: '2', full: { tora: metres(1465) } },
     });
     // the line on file, from 745 m on: 95 - 225/460 x 0.9 m up there, and its later points 745 m nearer
     const { points } = answer.question.runway.slope.profile;
@@ -146,6 +146,74 @@ describe('a runway end on file', () => {
       mass: { value: 7000, unit: 'kg' },
     });
     expect(found.map(({ pointer }) => pointer).sort()).toEqual(['/mass', '/runway/aerodrome']);
+  });
+
+  describe('with obstacles on file', () => {
+    const twin = { aeroplane: { id: 'duvassel-twin' }, mass: { value: 1990, unit: 'kg' }, configuration: 'takeoff-13' };
+    const onFile = {
+      from: 'end-of-toda',
+      list: [
+        { distance: metres(285), height: metres(11) },
+        { distance: metres(1140), height: metres(43) },
+      ],
+    };
+    const taken = async (start: unknown, more: object = {}) =>
+      answered(runwayOf('tavolny-regional', '30', start, more), '/v1/takeoff', twin);
+    const clearances = ({ obstaclePath }: { obstaclePath: { obstacles: { clearance: { value: number } }[] } }) =>
+      obstaclePath.obstacles.map(({ clearance }) => clearance.value);
+
+    it('counts them in a takeoff from any start point, and echoes them', async () => {
+      for (const start of ['threshold', { offset: metres(200) }, { point: 'D' }]) {
+        const answer = await taken(start);
+        expect(answer.question.runway.obstacles).toEqual(onFile);
+        expect(clearances(answer)).toHaveLength(2);
+        const check = answer.assessment.checks.at(-1);
+        expect([check.code, check.available.value]).toEqual(['obstacle-all-engines', Math.min(...clearances(answer))]);
+      }
+    });
+
+    // ground on file: 97.6 m at 0, 94.1 at 485, 91.6 at 1 690, the end of TODA
+    it.each([
+      ['the threshold', 'threshold', 1690, 91.6 - 97.6],
+      ['a start offset of 200 m', { offset: metres(200) }, 1490, 91.6 - (97.6 - (3.5 * 200) / 485)],
+      ['point D at 380 m', { point: 'D' }, 1310, 91.6 - (97.6 - (3.5 * 380) / 485)],
+    ])('measures them from the end of TODA as by hand from brake release: %s', async (_, start, whole, fall) => {
+      const list = onFile.list.map(({ distance, height }) => ({
+        distance: metres(whole + distance.value),
+        height: metres(height.value + fall),
+      }));
+      const [byFile, byHand] = [await taken(start), await taken(start, { obstacles: { from: 'brake-release', list } })];
+      for (const [i, clearance] of clearances(byFile).entries()) {
+        expect(clearance).toBeCloseTo(clearances(byHand)[i] as number, 4);
+      }
+    });
+
+    it('comes nearer to them by a start offset, and lets them govern', async () => {
+      const [whole, later] = [await taken('threshold'), await taken({ offset: metres(600) })];
+      for (const [i, clearance] of clearances(later).entries())
+        expect(clearance).toBeLessThan(clearances(whole)[i] ?? 0);
+      const high = { from: 'end-of-toda', list: [{ distance: metres(900), height: metres(240) }] };
+      const blocked = await taken('threshold', { obstacles: high });
+      expect([blocked.outcome, blocked.assessment.governing]).toEqual(['not-enough', 'obstacle-all-engines']);
+    });
+
+    it('takes those of the question in their place, all of them, and says so', async () => {
+      const own = { from: 'brake-release', list: [{ distance: metres(2400), height: metres(52) }] };
+      const answer = await taken('threshold', { obstacles: own });
+      expect(answer.question.runway.obstacles).toEqual(own);
+      expect(clearances(answer)).toHaveLength(1);
+      const note = answer.advisory.cautions.find(({ code }: { code: string }) => code === 'runway-changed');
+      expect(note.message).toMatch(/obstacles\/from brake-release in place of end-of-toda.*obstacles\/list replaced/);
+    });
+
+    it('has none in a landing, nor off the other end', async () => {
+      const lander = { ...twin, configuration: 'landing-37' };
+      const landed = await answered(runwayOf('tavolny-regional', '30', 'threshold'), '/v1/landing', lander);
+      expect(landed.question.runway.obstacles).toBeUndefined();
+      const other = await answered(runwayOf('tavolny-regional', '12', 'threshold'), '/v1/takeoff', twin);
+      expect(other.obstaclePath).toBeUndefined();
+      expect(other.basis.notGiven).toContain('/runway/obstacles');
+    });
   });
 
   it('turns a magnetic wind by the variation on file', async () => {

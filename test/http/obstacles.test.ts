@@ -89,8 +89,18 @@ describe('obstacles of a takeoff', () => {
     expect(high.assessment.governing).toBe('obstacle-all-engines');
   });
 
+  it('stands on the ground before the path begins, on a slope too', async () => {
+    for (const slope of [-2, 0, 1]) {
+      const answer = await ask({
+        slope,
+        obstacles: { from: 'brake-release', list: [{ distance: m(150), height: m(1) }] },
+      });
+      expectNear(answer.obstaclePath.obstacles[0].pathHeight.value, (150 * slope) / 100, 1e-9);
+    }
+  });
+
   it('measures from the end of TODA as from brake release with TODA on top, on a slope too', async () => {
-    for (const slope of [0, 1.5]) {
+    for (const slope of [0, 1.5, -1.2]) {
       const fromEnd = await ask({
         slope,
         obstacles: { from: 'end-of-toda', list: [{ distance: m(700), height: m(30) }] },

@@ -66,9 +66,10 @@ describe('climbOut', () => {
     expectRatio((path.distances.at(-1) as number) - share, 300 / gradient, 1e-9);
   });
 
-  it('stands on the ground before it begins and ends at its last height', () => {
+  it('has no height before it begins and ends at its last height', () => {
     const path = climbing(still);
-    expect(pathHeight(path, 599)).toBe(0);
+    expect(() => pathHeight(path, 599)).toThrow('distance');
+    expectRatio(pathHeight(path, 600), 15.24, 1e-12);
     expectRatio(pathHeight(path, 1e6), 415.24, 1e-12);
   });
 

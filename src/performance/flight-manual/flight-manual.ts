@@ -103,7 +103,15 @@ interface NoteSays {
 }
 
 export interface ProportionalNote extends NoteSays {
-  readonly about: 'headwind' | 'tailwind' | 'uphill' | 'downhill' | 'aboveStandard' | 'belowStandard' | 'aboveMass' | 'belowMass';
+  readonly about:
+    | 'headwind'
+    | 'tailwind'
+    | 'uphill'
+    | 'downhill'
+    | 'aboveStandard'
+    | 'belowStandard'
+    | 'aboveMass'
+    | 'belowMass';
   /** change per step: 0.1 is 10 % more; a list by band of pressure altitude, each up to its bound, the last without */
   readonly change: number | readonly { readonly upTo?: number; readonly change: number }[];
   /** one step: m/s, ratio, K or kg */
