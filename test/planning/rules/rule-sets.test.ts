@@ -4,8 +4,12 @@ import { requirements } from '../../../src/planning/rules/requirements.ts';
 import type { PhaseRules, RuleSet } from '../../../src/planning/rules/rule-set.ts';
 import { ruleSetOf, ruleSets } from '../../../src/planning/rules/rule-sets.ts';
 import { runwayFactors } from '../../../src/planning/rules/runway-factors.ts';
+import { windCredit } from '../../../src/planning/wind-credit.ts';
 import { references } from '../../../src/references.ts';
+import { clearwayShares } from '../../published/declared-distances.ts';
+import { creditedWinds } from '../../published/wind.ts';
 import { asked, ruled } from '../../support/asked.ts';
+import { expectNear } from '../../support/near.ts';
 
 const aeroplanes = [
   ruled(),
@@ -17,6 +21,9 @@ const aeroplanes = [
 const phasesOf = ({ takeoff, landing, landingInFlight }: RuleSet): readonly PhaseRules[] =>
   landingInFlight === undefined ? [takeoff, landing] : [takeoff, landing, landingInFlight];
 const phases = ruleSets.flatMap((set) => phasesOf(set).map((rules) => ({ set, rules })));
+
+/** Sets that let the wind be taken as given; every other set has the 50 and 150 per cent. */
+const setsWithWindAsGiven = ['unfactored'];
 
 describe('the rule sets', () => {
   it('have ids in kebab-case, each once, found again by id', () => {
@@ -116,11 +123,30 @@ describe('the rule sets', () => {
     }
   });
 
-  it('never credit more of a headwind nor less of a tailwind than there is, and half the run of a clearway', () => {
-    for (const { set, rules } of phases) {
+  const ruledByWind = phases.filter(({ set }) => !setsWithWindAsGiven.includes(set.id));
+  it.each(
+    ruledByWind.flatMap(({ set, rules }) =>
+      creditedWinds.map((row) => [set.id, rules.source, row.title, rules, row] as const),
+    ),
+  )('%s, %s: %s', (_, __, ___, { windCredit: credit }, { inputs, expected, tolerance }) => {
+    expectNear(windCredit(inputs.component_kt, credit), expected, tolerance);
+  });
+  it('take the wind as given where no rule speaks of it', () => {
+    const others = phases.filter(({ set }) => setsWithWindAsGiven.includes(set.id));
+    expect(others).toHaveLength(2);
+    for (const { rules } of others) expect(rules.windCredit).toMatchObject({ headwind: 1, tailwind: 1 });
+  });
+  it.each(ruleSets.flatMap((set) => clearwayShares.map((row) => [set.id, row.title, set, row] as const)))(
+    '%s: %s',
+    (_, __, { takeoff }, { expected, tolerance }) => {
+      expectNear(takeoff.clearwayShare, expected, tolerance);
+    },
+  );
+
+  it('never credit more of a headwind nor less of a tailwind than there is', () => {
+    for (const { rules } of phases) {
       expect(rules.windCredit.headwind).toBeLessThanOrEqual(1);
       expect(rules.windCredit.tailwind).toBeGreaterThanOrEqual(1);
-      expect(set.takeoff.clearwayShare).toBe(0.5);
     }
   });
 });
