@@ -12,9 +12,11 @@ interface Asked {
   readonly configuration?: string;
   readonly mass?: number;
   readonly slope?: number;
+  /** in place of the slope: [m, m] */
+  readonly line?: readonly (readonly [number, number])[];
 }
 
-function question({ obstacles, ruleSet = 'eu-class-b', slope = 0, ...asked }: Asked): object {
+function question({ obstacles, ruleSet = 'eu-class-b', slope = 0, line, ...asked }: Asked): object {
   const { aeroplane = 'duvassel-twin', configuration = 'takeoff-13', mass = 1990 } = asked;
   return {
     aeroplane: { id: aeroplane },
@@ -25,7 +27,7 @@ function question({ obstacles, ruleSet = 'eu-class-b', slope = 0, ...asked }: As
       direction: { value: 90, unit: 'deg' },
       directionReference: 'true',
       elevation: m(0),
-      slope: { value: slope, unit: 'percent' },
+      slope: line === undefined ? { value: slope, unit: 'percent' } : { profile: { units: ['m', 'm'], points: line } },
       surface: { kind: 'paved', state: 'dry' },
       start: 'threshold',
       declared: { tora: m(1400), toda: m(1500), asda: m(1400) },
@@ -87,6 +89,31 @@ describe('obstacles of a takeoff', () => {
     expect(low.outcome).not.toBe('not-enough');
     expect(high.outcome).toBe('not-enough');
     expect(high.assessment.governing).toBe('obstacle-all-engines');
+  });
+
+  it('begins at the screen height over the ground line, by hand on a hump and in a hollow', async () => {
+    const lines = [
+      [
+        [0, 100],
+        [500, 104],
+        [1500, 99],
+      ],
+      [
+        [0, 100],
+        [500, 95],
+        [1500, 101],
+      ],
+    ] as const;
+    for (const line of lines) {
+      const at = (distance: number) => ({ from: 'brake-release', list: [{ distance: m(distance), height: m(1) }] });
+      const begins = (await ask({ line, obstacles: at(300) })).obstaclePath.begins.value;
+      expect(begins).toBeGreaterThan(500);
+      expect(begins).toBeLessThan(1500);
+      const [, [x1, h1], [x2, h2]] = line;
+      const ground = h1 + ((h2 - h1) * (begins - x1)) / (x2 - x1) - 100;
+      const found = (await ask({ line, obstacles: at(begins + 1e-3) })).obstaclePath.obstacles[0];
+      expectNear(found.pathHeight.value, 15.24 + ground, 1e-3);
+    }
   });
 
   it('stands on the ground before the path begins, on a slope too', async () => {

@@ -19,6 +19,20 @@ describe('why there are no distances', () => {
     );
   });
 
+  it('names the run that has none: in the wind credited, on a level runway, or where rules start from', () => {
+    const none: NotReached = {
+      outcome: 'never-reaches-lift-off-speed',
+      atAirspeed: 15,
+      leastAccelerationRatio: -0.01,
+    };
+    const [credited, level, reference] = [{ ...none }, { ...none }, { ...none }];
+    const runs = { stated: undefined, credited: undefined, level: undefined, reference: undefined };
+    const of = (some: object) => notReachedSentence({ ...runs, ...some }, 'm-kt-kg');
+    expect(of({ credited })).toMatch(/^Never reaches the lift-off speed in the wind that the rules credit:/);
+    expect(of({ level, reference })).toMatch(/speed on a level runway, since the rules give no credit for a slope/);
+    expect(of({ reference })).toMatch(/speed on the paved, dry, level runway that the rules start from:/);
+  });
+
   it('never shows a gradient that misses what is needed as if it reached it', () => {
     const result: NotReached = {
       outcome: 'never-reaches-screen-height',
