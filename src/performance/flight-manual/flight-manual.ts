@@ -141,13 +141,17 @@ export interface WorkedExample {
   readonly within: number;
 }
 
+export const manualSpeedNames = ['rotation', 'liftOff', 'screen', 'landingReference', 'touchdown', 'stall'] as const;
+export type ManualSpeed = (typeof manualSpeedNames)[number];
+
 /** Speeds by mass. */
 export interface SpeedTable {
   readonly id: string;
   readonly page: string;
   readonly configurations: readonly string[];
   readonly airspeed: 'cas' | 'ias';
-  readonly speeds: readonly ('rotation' | 'liftOff' | 'screen' | 'landingReference' | 'touchdown' | 'stall')[];
+  readonly speeds: readonly ManualSpeed[];
+  /** rising */
   readonly masses: readonly number[];
   /** [row][speed], calibrated [m/s]: the gate has taken indicated ones through the calibration page */
   readonly cells: readonly (readonly number[])[];
@@ -175,5 +179,6 @@ export interface GraphPanel {
   readonly parameter: ManualAxis | 'previous';
   /** where the guide lines begin; on a guide panel only */
   readonly reference?: number;
+  /** parameters rising, and along each curve its points */
   readonly curves: readonly { readonly parameter: number; readonly points: readonly (readonly [number, number])[] }[];
 }

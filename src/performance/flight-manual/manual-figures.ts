@@ -1,5 +1,5 @@
 import type { RunwaySurface } from '../../physics/runway-surface.ts';
-import type { ManualAxis, ManualNote } from './flight-manual.ts';
+import type { ManualAxis, ManualNote, ManualSpeed } from './flight-manual.ts';
 
 /** What the manual is asked, in SI. */
 export interface ManualAsked {
@@ -27,8 +27,8 @@ export interface ManualAsked {
 /** Where what was asked for lies outside a sheet, and where that ends. */
 export interface ManualBound {
   readonly sheet: string;
-  /** an axis, or what a note is about */
-  readonly axis: ManualAxis | ManualNote['about'];
+  /** an axis, what a note is about, or on a graph what the panel before gave, in the measure of the graph's output */
+  readonly axis: ManualAxis | ManualNote['about'] | 'previous';
   /** SI */
   readonly given: number;
   readonly bound: number;
@@ -59,6 +59,28 @@ export interface ManualFigures {
   readonly notes: readonly AppliedNote[];
   readonly silent: readonly ManualSilence[];
   /** where an edge stands for what lies beyond it */
+  readonly edges: readonly ManualBound[];
+}
+
+/** The manual's own climb. */
+export interface ManualClimb {
+  readonly outcome: 'climb';
+  /** ratio; absent where the manual gives the rate alone */
+  readonly gradient: number | undefined;
+  /** [m/s] */
+  readonly rate: number | undefined;
+  readonly sheets: readonly { readonly id: string; readonly page: string }[];
+  readonly notes: readonly AppliedNote[];
+  readonly edges: readonly ManualBound[];
+}
+
+/** The manual's own speeds of the procedure. */
+export interface ManualSpeeds {
+  readonly outcome: 'speeds';
+  /** CAS [m/s] */
+  readonly speeds: Readonly<Partial<Record<ManualSpeed, number>>>;
+  readonly sheet: { readonly id: string; readonly page: string };
+  /** where the lightest mass stands for a lighter one */
   readonly edges: readonly ManualBound[];
 }
 
