@@ -1,6 +1,7 @@
 import { z } from 'zod';
 import { antiSkids, categories, certificationBases, wheelArrangements } from '../performance/aeroplane.ts';
 import { configuration } from './configuration.ts';
+import { flightManual } from './flight-manual/flight-manual.ts';
 import { propulsion } from './propulsion.ts';
 import {
   airspeed,
@@ -181,6 +182,7 @@ export const aeroplaneDefinition = z
     engineOut: engineOut.exactOptional(),
     limitations: limitations.exactOptional(),
     airspeedCalibration: airspeedCalibration.exactOptional(),
+    flightManual: flightManual.exactOptional(),
   })
   .meta({ id: 'AeroplaneDefinition', description: 'A whole aeroplane.' });
 

@@ -250,3 +250,31 @@ export const brakeEnergy = quantitySchema(
   1000,
   1e9,
 );
+export const manualDistance = quantitySchema(
+  'ManualDistance',
+  'A distance that a flight manual prints.',
+  'length',
+  metresOrFeet,
+  10,
+  10_000,
+);
+export const rateOfClimb = quantitySchema('RateOfClimb', 'A rate of climb.', 'speed', ['ft/min', 'm/s'], -20, 60);
+export const climbGradient = quantitySchema(
+  'ClimbGradient',
+  'Height gained over distance.',
+  'proportion',
+  ['percent'],
+  -0.3,
+  1,
+);
+export const windStep = quantitySchema('WindStep', 'So much wind along the runway.', 'speed', airspeedUnits, 0.05, 40);
+export const slopeStep = quantitySchema('SlopeStep', 'So much slope.', 'proportion', ['percent'], 0.0005, 0.1);
+export const temperatureStep = quantitySchema(
+  'TemperatureStep',
+  'So much difference of temperature.',
+  'temperatureDifference',
+  ['deltaC', 'deltaF'],
+  0.1,
+  100,
+);
+export const massStep = quantitySchema('MassStep', 'So much mass.', 'mass', ['kg', 't', 'lb'], 0.4, 100_000);

@@ -40,7 +40,8 @@ export function toRunway(given: RunwayOnWire, phase: 'takeoff' | 'landing'): Run
   return { ...runway, profile, slope: groundSlope(profile, runway, phase) };
 }
 
-function toSurface({ contaminant, ...surface }: RunwayOnWire['surface']): Surface {
+/** A surface in SI. */
+export function toSurface({ contaminant, ...surface }: RunwayOnWire['surface']): Surface {
   if (contaminant === undefined) return surface;
   const { kind, depth } = contaminant;
   return { ...surface, contaminant: depth === undefined ? { kind } : { kind, depth: si('length', depth) } };

@@ -1,3 +1,5 @@
+import type { FlightManual } from './flight-manual/flight-manual.ts';
+
 /**
  * An aeroplane's definition in SI: the same members as the JSON of the contract, bare numbers.
  *
@@ -66,6 +68,8 @@ export interface Aeroplane {
     readonly maximumPressureAltitude?: number;
   };
   readonly airspeedCalibration?: AirspeedCalibration;
+  /** the manual's own figures, as printed */
+  readonly flightManual?: FlightManual;
 }
 
 export const antiSkids = ['none', 'on-off', 'quasi-modulating', 'fully-modulating'] as const;

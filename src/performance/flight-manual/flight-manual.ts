@@ -131,9 +131,9 @@ export interface SurfaceNote extends NoteSays {
 
 /** Something the manual itself works out, that the sheet must give again. */
 export interface WorkedExample {
+  /** the headwind too where it is no axis, for the notes */
   readonly given: Readonly<Partial<Record<ManualAxis, number>>>;
-  /** wind, slope and surface for the notes */
-  readonly headwind?: number;
+  /** slope and surface for the notes */
   readonly slope?: number;
   readonly surface?: RunwaySurface;
   readonly reads: Readonly<Partial<Record<ManualOutput, number>>>;

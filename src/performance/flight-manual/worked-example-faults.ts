@@ -50,10 +50,10 @@ function faultsOf(sheet: Sheet, example: WorkedExample, index: number, rollSheet
   return faults;
 }
 
-function askedOf(sheet: Sheet, { given, headwind = 0, slope = 0, surface }: WorkedExample): ManualAsked {
+function askedOf(sheet: Sheet, { given, slope = 0, surface }: WorkedExample): ManualAsked {
   const pressureAltitude = given.pressureAltitude ?? 0;
   const standard = standardTemperature(pressureAltitude);
-  const wind = given.headwind ?? headwind;
+  const wind = given.headwind ?? 0;
   const asked: ManualAsked = {
     phase: sheet.phase === 'landing' ? 'landing' : 'takeoff',
     configuration: sheet.configurations[0] as string,
