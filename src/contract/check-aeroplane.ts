@@ -1,6 +1,7 @@
 import type { Fault } from '../planning/fault.ts';
 import { checkConfiguration } from './aeroplane-checks/check-configuration.ts';
 import { checkCounts, mostConfigurations } from './aeroplane-checks/check-counts.ts';
+import { checkFlightManual } from './aeroplane-checks/check-flight-manual.ts';
 import { checkMasses } from './aeroplane-checks/check-masses.ts';
 import { checkPowerplant } from './aeroplane-checks/check-powerplant.ts';
 import { checkTables } from './aeroplane-checks/check-tables.ts';
@@ -32,5 +33,6 @@ export function checkAeroplane(definition: AeroplaneDefinition, at: string): Fau
     ...checkPowerplant(definition, at),
     ...tables,
     ...ids.slice(0, mostConfigurations).flatMap((id) => checkConfiguration(id, definition, wingArea, calibration, at)),
+    ...checkFlightManual(definition, calibration, at),
   ];
 }

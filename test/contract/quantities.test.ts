@@ -43,6 +43,7 @@ const toSi: Record<string, (value: number) => number> = {
   kt: (v) => (v * 1852) / 3600,
   'km/h': (v) => v / 3.6,
   mph: (v) => (v * 1609.344) / 3600,
+  'ft/min': (v) => (v * 0.3048) / 60,
   kg: (v) => v,
   t: (v) => v * 1000,
   lb: (v) => v * 0.45359237,

@@ -15,7 +15,8 @@ import type { ManualNoteOnWire } from './manual-note.ts';
 import type { ManualTableOnWire } from './manual-table.ts';
 import type { WorkedExampleOnWire } from './worked-example.ts';
 
-type SheetOnWire = Pick<
+/** What tables and graphs share. */
+export type SheetOnWire = Pick<
   ManualTableOnWire,
   'id' | 'page' | 'for' | 'configurations' | 'conditions' | 'contains' | 'notes'
 >;

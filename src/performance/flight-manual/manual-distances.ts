@@ -1,3 +1,4 @@
+import { surfaceNotes } from './apply-notes.ts';
 import { bestSheet, sheetsFor, together } from './best-sheet.ts';
 import type { FlightManual } from './flight-manual.ts';
 import type { ManualAsked, ManualFigures, OutsideManual } from './manual-figures.ts';
@@ -6,16 +7,18 @@ import { isPavedDry, speaksOfSurface } from './speaks-of-surface.ts';
 /**
  * The manual's own ground roll and distance to or from the screen, its notes applied, never extrapolated.
  *
- * A sheet for the very surface comes first, else the ones for a dry paved runway with their surface notes. Both distances come
- * from one sheet where one gives both, else from two.
+ * A sheet for the very surface comes first, then one with a note on it, then those for a dry paved runway, silent on the surface.
+ * Both distances come from one sheet where one gives both, else from two.
  *
  * @returns undefined where the manual has no sheet for this phase and configuration on this surface or a dry paved one
  */
 export function manualDistances(manual: FlightManual, asked: ManualAsked): ManualFigures | OutsideManual | undefined {
   const whole = asked.phase === 'takeoff' ? 'takeoffDistance' : 'landingDistance';
   const sheets = sheetsFor(manual, asked.phase, asked.configuration);
-  const own = sheets.filter(({ conditions }) => speaksOfSurface(conditions.surface, asked.surface));
-  const usable = own.length > 0 ? own : sheets.filter(({ conditions }) => isPavedDry(conditions.surface));
+  const usable =
+    some(sheets.filter(({ conditions }) => speaksOfSurface(conditions.surface, asked.surface))) ??
+    some(sheets.filter((sheet) => surfaceNotes(sheet, asked).length > 0)) ??
+    sheets.filter(({ conditions }) => isPavedDry(conditions.surface));
   const roll = bestSheet(usable, 'groundRoll', asked);
   const distance = bestSheet(usable, whole, asked, roll?.sheet);
   const used = together(roll, distance);
@@ -26,4 +29,8 @@ export function manualDistances(manual: FlightManual, asked: ManualAsked): Manua
     wholeDistance: distance?.figures.outputs[whole],
     ...used,
   };
+}
+
+function some<T>(list: readonly T[]): readonly T[] | undefined {
+  return list.length > 0 ? list : undefined;
 }
