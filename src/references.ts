@@ -208,6 +208,11 @@ export const references = entries({
       'Contaminants the longer way: their drag whole in a takeoff, at most half in a stop; the poorer braking figure',
     status: 'judgement',
   },
+  HouseManual: {
+    title:
+      'Flight-manual figures: edges, silences carried by the ratio of two runs of physics, and how far the two may differ',
+    status: 'judgement',
+  },
   HouseFriction: {
     title: 'Rolling and braking friction by surface: the long-distance end of the published ranges',
     status: 'judgement',

@@ -1,6 +1,7 @@
 import { z } from 'zod';
 import { assumption, digest, modelVersion, sources } from './answer-parts.ts';
 import { method } from './distances.ts';
+import { manualUse, otherMethod } from './manual-use.ts';
 
 const contributionShape = {
   of: z.string().meta({ description: 'What may be off.' }),
@@ -25,6 +26,8 @@ export function basisOf<Contribution extends z.ZodType>(contribution: Contributi
   return z
     .strictObject({
       method,
+      other: otherMethod.exactOptional(),
+      flightManual: manualUse.exactOptional(),
       band: z.array(contribution).meta({ description: 'What the 90 % bands are made of.' }).exactOptional(),
       assumed: z.array(assumption),
       notGiven: z.array(z.string()).meta({ description: 'JSON pointers of what could have been given.' }),

@@ -13,6 +13,10 @@ export const bandedDistance = z
     low: z.number().meta({ description: 'Lower end of the 90 % band.' }),
     high: z.number().meta({ description: 'Upper end of the 90 % band.' }),
     method,
+    edge: z
+      .string()
+      .meta({ description: 'The table of the flight manual whose edge stands for what lies beyond it.' })
+      .exactOptional(),
   })
   .meta({ id: 'BandedDistance', description: 'A distance as stated, without any factor, with its 90 % band.' });
 
@@ -22,4 +26,5 @@ export const distancesShape = {
   groundRoll: bandedDistance,
   airDistance: bandedDistance,
 };
-export const timesShape = { groundRollTime: time, airTime: time };
+/** Absent where the flight manual gives a distance and physics none. */
+export const timesShape = { groundRollTime: time.exactOptional(), airTime: time.exactOptional() };

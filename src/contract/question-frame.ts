@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { methodsAsked } from '../planning/question.ts';
 import { unitFamilies } from '../units/presentation.ts';
 import { shortText } from './text.ts';
 
@@ -10,6 +11,14 @@ export const asOf = z.iso
   .meta({ description: 'The time the question is asked for, RFC 3339; echoed.' });
 export const units = z.enum(unitFamilies).meta({
   description: 'Units of the answer: metres, knots, kilograms (altitudes in feet); feet, knots, pounds; or SI.',
+});
+export const method = z.enum(methodsAsked).meta({
+  description:
+    'Where the distances come from. best: the flight manual where it has a table for the configuration, else physics. A method by name is that one or a refusal; physics asked for by name is computed outside the tables too, and says so.',
+});
+export const edges = z.enum(['use', 'refuse']).meta({
+  description:
+    'Whether the edge of a table of the flight manual stands for what lies beyond it where the table shows its edge to be the longer distance (lighter, colder, lower, more headwind); refuse ends there.',
 });
 export const rounding = z
   .enum(['safe', 'none'])

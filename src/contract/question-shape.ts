@@ -2,7 +2,7 @@ import { z } from 'zod';
 import { aeroplaneChoice } from './aeroplane-choice.ts';
 import { detail } from './detail.ts';
 import { mass } from './quantities.ts';
-import { asOf, reference, rounding, select, units } from './question-frame.ts';
+import { asOf, edges, method, reference, rounding, select, units } from './question-frame.ts';
 import { ruleSetChoice } from './rule-set-choice.ts';
 import { runwayChoice } from './runway-choice.ts';
 import { id } from './text.ts';
@@ -24,6 +24,8 @@ export function questionShape<Procedure extends z.ZodType>(phase: 'takeoff' | 'l
       .enum(['dispatch', 'in-flight'])
       .meta({ description: 'Whether the question is asked before departure or in flight.' })
       .exactOptional(),
+    method: method.exactOptional(),
+    edges: edges.exactOptional(),
     units: units.exactOptional(),
     rounding: rounding.exactOptional(),
     detail: detail.exactOptional(),

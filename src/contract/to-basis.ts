@@ -6,6 +6,7 @@ import type { BasisOnWire } from './basis.ts';
 import type { Draft } from './present.ts';
 import { type Presentation, shownPercent } from './shown-quantity.ts';
 import { toMeasure } from './to-advisory.ts';
+import { toManualUse, toOtherMethod } from './to-manual-use.ts';
 
 type ShownAssumption = z.infer<typeof assumption>;
 
@@ -64,8 +65,10 @@ export function toBasis<Band>(
   stamp: Stamp,
   toBand: (contribution: BandContribution) => Band,
 ) {
-  const { method, band, assumed, notGiven, sources } = answer.basis;
+  const { method, other, flightManual, band, assumed, notGiven, sources } = answer.basis;
   const basis = { method } as Draft<BasisOnWire<Band>>;
+  if (other !== undefined) basis.other = toOtherMethod(how, other);
+  if (flightManual !== undefined) basis.flightManual = toManualUse(how, flightManual);
   if (band !== undefined) basis.band = band.map(toBand);
   basis.assumed = toAssumed(how, assumed);
   basis.notGiven = [...notGiven];

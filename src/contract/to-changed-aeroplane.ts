@@ -39,7 +39,13 @@ export function toChangedAeroplane(
     definition: read.value,
     aeroplane: toAeroplane(read.value),
     digest: lookup.digestOf(read.value),
-    changes: { basedOn, revision: base.aeroplane.revision, because, changed: members.filter(differs).map(changeText) },
+    changes: {
+      basedOn,
+      revision: base.aeroplane.revision,
+      because,
+      changed: members.filter(differs).map(changeText),
+      ...(members.filter(differs).some(movesDistances) ? { flewAs: base.aeroplane } : {}),
+    },
   };
 }
 
@@ -68,6 +74,23 @@ function idleFaults(members: readonly ChangedMember[], { aeroplane, definition }
       ...(near.length === 0 ? {} : { hint: `Perhaps ${near[0]}.` }),
     };
   }
+}
+
+/** Members that no distance hangs on, or that hold distances themselves. */
+const named = [
+  'id',
+  'revision',
+  'name',
+  'passengerSeats',
+  'certification',
+  'masses',
+  'limitations',
+  'flightManual',
+  'fit',
+];
+
+function movesDistances({ at }: ChangedMember): boolean {
+  return !named.includes(at.split('/')[1] as string);
 }
 
 function differs({ before, after }: ChangedMember): boolean {

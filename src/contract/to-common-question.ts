@@ -80,6 +80,8 @@ export function toCommonQuestion(
     weather: toWeather(request.weather),
     ...toRuleSet(request.ruleSet),
     ...(request.stage === undefined ? {} : { stage: request.stage }),
+    ...(request.method === undefined ? {} : { method: request.method }),
+    ...(request.edges === undefined ? {} : { edges: request.edges }),
     units: request.units ?? defaultUnits,
     defaulted: defaulted(request, known.definition),
   };
@@ -92,12 +94,16 @@ function toRuleSet(given: RuleSetChoice): Pick<Question, 'ruleSet' | 'operatorRu
 
 /** Pointers of what the gate fills in. */
 function defaulted(
-  { units, rounding, aeroplane, configuration }: CommonRequest,
-  { configurations }: AeroplaneDefinition,
+  { units, rounding, method, edges, aeroplane, configuration }: CommonRequest,
+  { configurations, flightManual }: AeroplaneDefinition,
 ): string[] {
   const pointers: string[] = [];
   if (units === undefined) pointers.push('/units');
   if (rounding === undefined) pointers.push('/rounding');
+  if (flightManual !== undefined) {
+    if (method === undefined) pointers.push('/method');
+    if (edges === undefined && method !== 'stated' && method !== 'fitted') pointers.push('/edges');
+  }
   const lift = configurations[configuration]?.maximumLift;
   if (lift && 'stallSpeed' in lift && lift.kind === undefined) {
     pointers.push(configurationPointer({ aeroplaneAt: aeroplaneAt(aeroplane), configuration }, 'maximumLift/kind'));

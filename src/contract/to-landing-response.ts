@@ -55,14 +55,16 @@ export function toLandingResponse(
 }
 
 function toDistances(how: Presentation, given: NonNullable<LandingAnswer['distances']>) {
-  return {
+  const distances: Draft<NonNullable<LandingResponse['distances']>> = {
     screenHeight: shownQuantity(how, 'altitude', given.screenHeight),
     airDistance: toBandedDistance(how, given.airDistance),
     groundRoll: toBandedDistance(how, given.groundRoll),
     landingDistance: toBandedDistance(how, given.landingDistance),
-    airTime: shownQuantity(how, 'time', given.airTime),
-    groundRollTime: shownQuantity(how, 'time', given.groundRollTime),
   };
+  const { airTime, groundRollTime } = given;
+  if (airTime !== undefined) distances.airTime = shownQuantity(how, 'time', airTime);
+  if (groundRollTime !== undefined) distances.groundRollTime = shownQuantity(how, 'time', groundRollTime);
+  return distances;
 }
 
 function toBalkedLanding(how: Presentation, given: BalkedLanding): LandingResponse['balkedLanding'] {

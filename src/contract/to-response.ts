@@ -67,12 +67,14 @@ function toSpeeds(how: Presentation, { stall, rotation, liftOff, screen }: Takeo
 }
 
 function toDistances(how: Presentation, given: NonNullable<TakeoffAnswer['distances']>) {
-  return {
+  const distances: Draft<NonNullable<TakeoffResponse['distances']>> = {
     screenHeight: shownQuantity(how, 'altitude', given.screenHeight),
     groundRoll: toBandedDistance(how, given.groundRoll),
     airDistance: toBandedDistance(how, given.airDistance),
     takeoffDistance: toBandedDistance(how, given.takeoffDistance),
-    groundRollTime: shownQuantity(how, 'time', given.groundRollTime),
-    airTime: shownQuantity(how, 'time', given.airTime),
   };
+  const { groundRollTime, airTime } = given;
+  if (groundRollTime !== undefined) distances.groundRollTime = shownQuantity(how, 'time', groundRollTime);
+  if (airTime !== undefined) distances.airTime = shownQuantity(how, 'time', airTime);
+  return distances;
 }

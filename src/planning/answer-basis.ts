@@ -1,9 +1,10 @@
-import type { Basis, Method } from './answer.ts';
+import type { Basis } from './answer.ts';
 import type { AnyAssumed } from './assumed.ts';
 import type { Band } from './band.ts';
 import { conditionCodeAssumed } from './condition-code-assumed.ts';
 import type { Conditions } from './conditions.ts';
 import { defaulted } from './defaulted.ts';
+import type { Found } from './found.ts';
 import { groundSlopeAssumed } from './ground-slope.ts';
 import { notGiven } from './not-given.ts';
 import type { Question } from './question.ts';
@@ -18,12 +19,14 @@ export function answerBasis(
   question: Question,
   phase: 'takeoff' | 'landing',
   { rules, rulesAssumed, condition }: Pick<Conditions, 'rules' | 'rulesAssumed' | 'condition'>,
-  method: Method,
+  { method, other, flightManual }: Pick<Found<unknown>, 'method' | 'other' | 'flightManual'>,
   assumed: readonly AnyAssumed[],
   band: Band | undefined,
 ): Basis {
   return {
     method,
+    other,
+    flightManual,
     band: band?.contributions,
     assumed: [
       ...assumed.map(({ assumption }) => assumption),

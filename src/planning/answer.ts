@@ -1,6 +1,8 @@
+import type { ManualFigures } from '../performance/flight-manual/manual-figures.ts';
 import type { ReferenceKey } from '../references.ts';
 import type { Direction, Kind } from '../units/presentation.ts';
 import type { Detail } from './detail/detail.ts';
+import type { Silence } from './manual/silence.ts';
 
 /**
  * An answer in SI, as planning hands it to the contract's gate out. Sentences are already in the asked units; numbers are
@@ -86,6 +88,8 @@ export interface BandedDistance {
   readonly low: number;
   readonly high: number;
   readonly method: Method;
+  /** the sheet of the flight manual whose edge stands for what lies beyond it */
+  readonly edge?: string | undefined;
 }
 
 export interface Factor {
@@ -165,11 +169,31 @@ export interface BandContribution {
 
 export interface Basis {
   readonly method: Method;
+  /** the whole distance by the method that was not taken, where it has one [m] */
+  readonly other?: OtherMethod | undefined;
+  /** what was read in the flight manual */
+  readonly flightManual?: ManualUse | undefined;
   /** absent where there are no distances */
   readonly band?: readonly BandContribution[] | undefined;
   readonly assumed: readonly Assumption[];
   readonly notGiven: readonly string[];
   readonly sources: readonly ReferenceKey[];
+}
+
+/** The takeoff or landing distance by another method, and over the one taken. */
+export interface OtherMethod {
+  readonly method: Method;
+  readonly distance: number;
+  readonly ratio: number;
+}
+
+/** What an answer took from the flight manual. */
+export interface ManualUse {
+  readonly document: string;
+  readonly revision: string;
+  readonly figures: ManualFigures;
+  /** what it does not speak of, by whose physics its figures are carried */
+  readonly silences: readonly Silence[];
 }
 
 /** What the answers to a takeoff and to a landing share. */
@@ -200,8 +224,9 @@ export interface Distances {
   readonly screenHeight: number;
   readonly groundRoll: BandedDistance;
   readonly airDistance: BandedDistance;
-  readonly groundRollTime: number;
-  readonly airTime: number;
+  /** absent where the flight manual gives a distance and physics none */
+  readonly groundRollTime?: number | undefined;
+  readonly airTime?: number | undefined;
 }
 
 /** The climb after takeoff: all engines, flap and gear as at the screen, at the screen speed, out of ground effect. */

@@ -1,4 +1,4 @@
-import type { Check, Outcome } from './answer.ts';
+import type { Check, Factor, Outcome } from './answer.ts';
 import { type Band, highOverOf } from './band.ts';
 import type { Conditions } from './conditions.ts';
 import { checkOf, governingCheck } from './margins.ts';
@@ -16,7 +16,11 @@ export interface Checked {
 
 /** What there is to assess. */
 export interface Assessing {
-  readonly conditions: Pick<Conditions, 'ruleSet' | 'rules' | 'asked' | 'doesNotApply' | 'declared' | 'runwayFactors'>;
+  readonly conditions: Pick<Conditions, 'ruleSet' | 'rules' | 'asked' | 'doesNotApply' | 'declared'>;
+  /** on the reference distance; undefined where the rules do not speak of the aeroplane or the surface */
+  readonly runwayFactors: readonly Factor[] | undefined;
+  /** what that distance is */
+  readonly startsFrom: 'reference' | 'flight-manual';
   /** why there are no distances; undefined where each run that was asked for has them */
   readonly notReached: { readonly outcome: Outcome } | undefined;
   /** the distances of those runs */
@@ -45,7 +49,7 @@ export function assess(assessing: Assessing): Assessed {
   const { stated, credited, reference } = distances;
   const noSurface = notReached === undefined && credited === undefined && reference === undefined;
   const isAssessed = notReached === undefined && doesNotApply === undefined && !noSurface;
-  const ofRunway = isAssessed ? checksOf(conditions, distances) : undefined;
+  const ofRunway = isAssessed ? checksOf(assessing) : undefined;
   const checks = ofRunway && assessing.further ? [...ofRunway, ...assessing.further(ofRunway)] : ofRunway;
   const thinRatio = ruleSet.thinMargin.ratio;
   const highOver = (of: string) => highOverOf(band, of);
@@ -67,16 +71,16 @@ export function assess(assessing: Assessing): Assessed {
   };
 }
 
-function checksOf(
-  { rules, asked, declared, runwayFactors }: Assessing['conditions'],
-  { credited, level, reference }: Runs<Checked>,
-): readonly Check[] {
+function checksOf({ conditions, runwayFactors, startsFrom, distances }: Assessing): readonly Check[] {
+  const { rules, asked, declared } = conditions;
+  const { credited, level, reference } = distances;
   return requirements(rules, asked).map((requirement) => {
     const { of } = requirement;
     const from = {
       reference: distanceOf(of, reference),
       credited: distanceOf(of, credited),
       level: distanceOf(of, level),
+      startsFrom,
     };
     const check = checkOf(requirement, from, runwayFactors, declared);
     return asked.isSlippery && requirement.presumesDryOrWet ? withoutStop(check) : check;

@@ -1,4 +1,4 @@
-import type { BandContribution, BandedDistance, Method } from './answer.ts';
+import type { BandContribution, BandedDistance } from './answer.ts';
 
 /** Standard deviations from the middle to either end of a 90 % band of a normal distribution. */
 export const ninetyPerCent = 1.6448536269514722;
@@ -15,9 +15,13 @@ export interface Band {
 }
 
 /** A distance with its 90 % band. */
-export function banded(value: number, deviation: number, method: Method): BandedDistance {
+export function banded(
+  value: number,
+  deviation: number,
+  { method, edge }: Pick<BandedDistance, 'method' | 'edge'>,
+): BandedDistance {
   const over = highOver(deviation);
-  return { value, low: value / over, high: value * over, method };
+  return { value, low: value / over, high: value * over, method, edge };
 }
 
 /** The high end of the band over its middle. */

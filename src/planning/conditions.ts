@@ -1,7 +1,8 @@
 import type { Configuration } from '../performance/aeroplane.ts';
 import type { Air } from '../performance/air.ts';
 import { airAtRunway, chosenConfiguration, chosenRuleSet, isFault } from './chosen.ts';
-import { isRefused, type Refused } from './fault.ts';
+import { type Fault, isRefused, type Refused } from './fault.ts';
+import { type ChosenMethod, chosenMethod } from './method.ts';
 import type { LandingQuestion, TakeoffQuestion } from './question.ts';
 import { type Ruled, ruledBy } from './ruled.ts';
 import { type RunwayCondition, runwayCondition } from './runway-condition.ts';
@@ -11,6 +12,7 @@ import { windCredit } from './wind-credit.ts';
 /** What a takeoff and a landing begin with. */
 export interface Conditions extends Ruled {
   readonly configuration: Configuration;
+  readonly chosen: ChosenMethod;
   readonly air: Air;
   readonly wind: WindAlong;
   /** what lies on the runway */
@@ -26,10 +28,22 @@ export function conditionsOf(
 ): Conditions | Refused {
   const ruleSet = chosenRuleSet(question.ruleSet);
   const configuration = chosenConfiguration(question, phase);
+  const chosen = isFault(configuration) ? undefined : chosenMethod(question, phase);
   const air = airAtRunway(question);
   const wind = windAlong(question.runway, question.weather.wind);
-  if (isFault(ruleSet) || isFault(configuration) || isFault(air) || isFault(wind)) {
-    return { refused: [ruleSet, configuration, air, wind].filter(isFault) };
+  if (
+    isFault(ruleSet) ||
+    isFault(configuration) ||
+    isFault(air) ||
+    isFault(wind) ||
+    chosen === undefined ||
+    isFault(chosen)
+  ) {
+    return {
+      refused: [ruleSet, configuration, air, wind, chosen].filter(
+        (one) => one !== undefined && isFault(one),
+      ) as Fault[],
+    };
   }
   const condition = runwayCondition(question);
   const ruled = ruledBy(ruleSet, question, phase, condition);
@@ -45,6 +59,7 @@ export function conditionsOf(
     runwayFactors: ruled.runwayFactors,
     rulesAssumed: ruled.rulesAssumed,
     configuration,
+    chosen,
     air,
     wind,
     condition,

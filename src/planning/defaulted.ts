@@ -9,6 +9,8 @@ export function defaulted({ defaulted, units }: Pick<Question, 'defaulted' | 'un
 function filledIn(at: string, units: string): string {
   if (at === '/units') return units;
   if (at === '/rounding') return 'safe';
+  if (at === '/method') return 'best';
+  if (at === '/edges') return 'use';
   if (at === '/procedure/power') return 'full';
   if (at === '/procedure/start') return 'standing';
   if (at === '/procedure/approachSpeedIncrement') return 'none';

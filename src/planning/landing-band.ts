@@ -3,8 +3,7 @@ import type { LandingRun } from '../performance/landing/landing-run.ts';
 import { scaledBraking } from '../physics/braking-friction.ts';
 import type { Method } from './answer.ts';
 import type { Band } from './band.ts';
-import { BandParts } from './band-parts.ts';
-import type { Stopped } from './landing-runs.ts';
+import { BandParts, type Parts } from './band-parts.ts';
 import type { Surface } from './question.ts';
 import { brakingUncertainty, inputUncertainties } from './rules/input-uncertainties.ts';
 
@@ -21,7 +20,7 @@ type Changing = { -readonly [K in keyof LandingRun]: LandingRun[K] };
  */
 export function landingBand(
   stated: LandingRun,
-  result: Stopped,
+  result: Parts,
   surface: Surface,
   method: Method,
   densityAt: (temperatureOff: number, pressureOff: number) => number | undefined,

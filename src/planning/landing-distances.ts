@@ -1,20 +1,26 @@
-import type { LandingAnswer, Method } from './answer.ts';
+import type { BandedDistance, LandingAnswer } from './answer.ts';
 import { type Band, banded } from './band.ts';
-import type { Stopped } from './landing-runs.ts';
+import type { Parts } from './band-parts.ts';
 
-/** The distances as stated, each with its 90 % band. */
+/**
+ * The distances as stated, each with its 90 % band.
+ *
+ * @param by - the method, and the edge of a table where one stands for the rest
+ * @param times - of physics, where it has them [s]
+ */
 export function landingDistances(
-  stated: Stopped,
+  { groundRoll, airDistance }: Parts,
   band: Band,
   screenHeight: number,
-  method: Method,
+  by: Pick<BandedDistance, 'method' | 'edge'>,
+  times: { readonly airTime: number; readonly freeRollTime: number; readonly brakedRollTime: number } | undefined,
 ): NonNullable<LandingAnswer['distances']> {
   return {
     screenHeight,
-    airDistance: banded(stated.airDistance, band.airDistance, method),
-    groundRoll: banded(stated.groundRoll, band.groundRoll, method),
-    landingDistance: banded(stated.landingDistance, band.wholeDistance, method),
-    airTime: stated.airTime,
-    groundRollTime: stated.freeRollTime + stated.brakedRollTime,
+    airDistance: banded(airDistance, band.airDistance, by),
+    groundRoll: banded(groundRoll, band.groundRoll, by),
+    landingDistance: banded(airDistance + groundRoll, band.wholeDistance, by),
+    airTime: times?.airTime,
+    groundRollTime: times && times.freeRollTime + times.brakedRollTime,
   };
 }

@@ -4,7 +4,7 @@ import type { BrakingFriction } from '../physics/braking-friction.ts';
 import { inducedDragFactor } from '../physics/drag.ts';
 import type { StoppingDrag } from '../physics/stopping-drag.ts';
 import type { LandingAnswer } from './answer.ts';
-import type { Checked } from './assess.ts';
+import type { Shares } from './manual/shares.ts';
 import type { LandingQuestion } from './question.ts';
 import type { ResolvedLanding } from './resolve-landing.ts';
 import { landingScreenHeight } from './rules/landing-defaults.ts';
@@ -121,19 +121,23 @@ export function notStopped(runs: LandingRuns): NotStopped | undefined {
   return firstWithout(runs, isStopped);
 }
 
-/** What checks are of, of each run that stops. */
-export function checkedLandings(runs: LandingRuns): Runs<Checked> {
+/** A run whose ground roll and air distance are so many times as long, in as many times the time. */
+export function scaledLanding(result: Stopped, shares: Shares | undefined): Stopped {
+  if (shares === undefined) return result;
+  const groundRoll = result.groundRoll * shares.groundRoll;
+  const airDistance = result.airDistance * shares.airDistance;
   return {
-    stated: checked(runs.stated),
-    credited: checked(runs.credited),
-    level: checked(runs.level),
-    reference: checked(runs.reference),
+    ...result,
+    airDistance,
+    airTime: result.airTime * shares.airDistance,
+    floatDistance: result.floatDistance * shares.airDistance,
+    freeRoll: result.freeRoll * shares.groundRoll,
+    freeRollTime: result.freeRollTime * shares.groundRoll,
+    brakedRoll: result.brakedRoll * shares.groundRoll,
+    brakedRollTime: result.brakedRollTime * shares.groundRoll,
+    groundRoll,
+    landingDistance: groundRoll + airDistance,
   };
-}
-
-function checked(result: LandingResult | undefined): Checked | undefined {
-  const found = stopped(result);
-  return found && { groundRoll: found.groundRoll, wholeDistance: found.landingDistance };
 }
 
 function isStopped(result: LandingResult): result is Stopped {

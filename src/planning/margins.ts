@@ -1,4 +1,4 @@
-import type { AlternativeReading, Check, Factor } from './answer.ts';
+import type { AlternativeReading, Check, Factor, StartsFrom } from './answer.ts';
 import { arithmeticSlack } from './arithmetic-slack.ts';
 import type { DeclaredDistances } from './declared-distances.ts';
 import type { Requirement } from './rules/rule-set.ts';
@@ -11,11 +11,12 @@ export interface StartingDistances {
   readonly credited: number | undefined;
   /** credited wind; the surface as it is, level; only where a slope that helps earns nothing */
   readonly level?: number | undefined;
+  /** what the first of them is: of physics, or the flight manual's own figure; absent: of physics */
+  readonly startsFrom?: 'reference' | 'flight-manual';
 }
 
-type Start = 'reference' | 'credited' | 'level';
 interface Reading {
-  readonly startsFrom: Start;
+  readonly startsFrom: StartsFrom;
   readonly distance: number;
   readonly factors: readonly Factor[];
   readonly required: number;
@@ -88,13 +89,13 @@ function notAssessed(
 
 function readings(
   { factor, onRunway = factor, runwayDecides }: Requirement,
-  { reference, credited, level }: StartingDistances,
+  { reference, credited, level, startsFrom = 'reference' }: StartingDistances,
   runwayFactors: readonly Factor[] | undefined,
 ): { readonly taken: Reading; readonly others: readonly AlternativeReading[] } {
   const byFactors =
     reference === undefined || runwayFactors === undefined
       ? undefined
-      : reading('reference', reference, [...runwayFactors, ...listed(factor)]);
+      : reading(startsFrom, reference, [...runwayFactors, ...listed(factor)]);
   if (credited === undefined) {
     if (byFactors === undefined) throw new RangeError('from must hold a distance to start from');
     return { taken: byFactors, others: [] };
@@ -134,7 +135,7 @@ function beside({ startsFrom, distance, factors, required }: Reading, because: s
   return { startsFrom, distance, factors, required, because };
 }
 
-function reading(startsFrom: Start, distance: number, factors: readonly Factor[]): Reading {
+function reading(startsFrom: StartsFrom, distance: number, factors: readonly Factor[]): Reading {
   let required = distance;
   for (const { value } of factors) required *= value;
   return { startsFrom, distance, factors, required };

@@ -9,11 +9,16 @@ import { raisedCautions } from './cautions/caution-test.ts';
 import { landingCautions } from './cautions/landing-cautions.ts';
 import { climbChecks } from './climb-checks.ts';
 import { isRefused, type Refused } from './fault.ts';
+import { checkedRuns } from './found.ts';
+import { foundLanding } from './found-landing.ts';
 import { landingBand } from './landing-band.ts';
 import { landingDistances } from './landing-distances.ts';
 import { landingEffects } from './landing-effects.ts';
-import { checkedLandings, landingRuns, notStopped, stopped } from './landing-runs.ts';
+import { landingRuns, scaledLanding, stopped } from './landing-runs.ts';
 import { landingShortfalls } from './landing-shortfalls.ts';
+import { outsideManualSentence } from './manual/outside-manual-sentence.ts';
+import { outsideManualShortfalls } from './manual/outside-manual-shortfalls.ts';
+import { sharesOf } from './manual/shares.ts';
 import { prepareLanding } from './prepare-landing.ts';
 import type { LandingQuestion } from './question.ts';
 import { resolveBraking } from './resolve-braking.ts';
@@ -21,12 +26,9 @@ import { answerSentence } from './sentences/answer-sentence.ts';
 import { notStoppedSentence } from './sentences/not-stopped-sentence.ts';
 import { windAnswer } from './wind-along.ts';
 
-/** Distances come from the stated figures of the definition by physics. */
-const method = 'stated';
-
 /**
  * The landing, from a question in SI to an answer in SI, in the order of the work: air, wind, speeds, the aeroplane as
- * configured, the distances, what is declared, the checks, the outcome, what should be said, and what it rests on.
+ * configured, the distances by physics and by the flight manual, what is declared, the checks, the outcome, what should be said, and what it rests on.
  *
  * @returns the answer, or every fault that the question's own values bring about
  */
@@ -38,9 +40,10 @@ export function planLanding(question: LandingQuestion): LandingAnswer | Refused 
   const { ruleSet, rules, declared, air, wind, condition, creditedHeadwind, doesNotApply } = conditions;
   const { speeds, reference, raised } = prepared.landingSpeeds;
 
-  const runs = landingRuns(run, prepared.runConditions);
-  const notReached = notStopped(runs);
-  const stated = notReached === undefined ? stopped(runs.stated) : undefined;
+  const physics = landingRuns(run, prepared.runConditions);
+  const found = foundLanding(question, prepared, physics);
+  const { method, edge, runs, notReached, runwayFactors } = found;
+  const stated = notReached === undefined ? runs.stated : undefined;
   const band =
     stated &&
     landingBand(
@@ -50,7 +53,10 @@ export function planLanding(question: LandingQuestion): LandingAnswer | Refused 
       method,
       (temperatureOff, pressureOff) => airBeside(question, temperatureOff, pressureOff)?.density,
     );
-  const distances = stated && band && landingDistances(stated, band, run.screenHeight, method);
+  const byPhysics = stopped(physics.stated);
+  const shares = sharesOf(stated, byPhysics);
+  const asAnswered = byPhysics && scaledLanding(byPhysics, shares);
+  const distances = stated && band && landingDistances(stated, band, run.screenHeight, { method, edge }, asAnswered);
   const balkedLanding = balkedLandingClimb(
     question,
     prepared.thrust,
@@ -62,8 +68,10 @@ export function planLanding(question: LandingQuestion): LandingAnswer | Refused 
   const rollAvailable = declared.credited.lda;
   const { outcome, checks, governing, thin } = assess({
     conditions,
+    runwayFactors,
+    startsFrom: found.startsFrom,
     notReached,
-    distances: checkedLandings(runs),
+    distances: checkedRuns(runs),
     band,
     rollAvailable,
     further: () => {
@@ -72,14 +80,23 @@ export function planLanding(question: LandingQuestion): LandingAnswer | Refused 
     },
   });
 
-  const assumed = [...landingEffects([...resolved.assumed, ...braking.assumed], stated && run), ...power.assumed];
-  const landedWith = (change: Partial<LandingRun>) => stopped(landing({ ...run, ...change }));
+  const assumed = [
+    ...landingEffects(
+      [...resolved.assumed, ...braking.assumed],
+      found.startsFrom === 'reference' && stated ? run : undefined,
+    ),
+    ...power.assumed,
+  ];
+  const landedWith = (change: Partial<LandingRun>) => {
+    const result = stopped(landing({ ...run, ...change }));
+    return result && scaledLanding(result, shares);
+  };
   const context = {
     phase: 'landing' as const,
     question,
     ruleSet,
     rules,
-    runwayFactors: conditions.runwayFactors,
+    runwayFactors,
     air,
     wind,
     speeds,
@@ -97,7 +114,8 @@ export function planLanding(question: LandingQuestion): LandingAnswer | Refused 
     assumed,
     wheelSpeed: speeds.touchdown,
     run,
-    stated,
+    found,
+    stated: stated && asAnswered,
     landedWith,
     brakingWithAntiSkid: () => {
       const { actual, stretches } = resolveBraking({ ...question, procedure: {} }, runway, condition);
@@ -110,9 +128,12 @@ export function planLanding(question: LandingQuestion): LandingAnswer | Refused 
     rollAvailable,
     wholeDistance: distances?.landingDistance,
   };
+  const isOutside = notReached?.outcome === 'outside-flight-manual';
   return {
     outcome,
-    sentence: answerSentence(context, () => notStoppedSentence(runs, units)),
+    sentence: answerSentence(context, () =>
+      isOutside ? outsideManualSentence(notReached, units) : notStoppedSentence(notReached, physics, units),
+    ),
     cautions: raisedCautions(landingCautions, context),
     air,
     wind: windAnswer(wind, creditedHeadwind),
@@ -120,7 +141,11 @@ export function planLanding(question: LandingQuestion): LandingAnswer | Refused 
     distances,
     balkedLanding,
     assessment: checks && { ruleSet: ruleSet.id, basedOn: conditions.basedOn, checks, governing: governing?.code },
-    shortfall: notReached ? landingShortfalls(notReached) : condition.refusal?.shortfall,
-    basis: answerBasis(question, 'landing', conditions, method, assumed, band),
+    shortfall: isOutside
+      ? outsideManualShortfalls(notReached)
+      : notReached
+        ? landingShortfalls(notReached)
+        : condition.refusal?.shortfall,
+    basis: answerBasis(question, 'landing', conditions, found, assumed, band),
   };
 }

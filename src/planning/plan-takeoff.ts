@@ -1,4 +1,5 @@
 import { propulsionThrust } from '../performance/propulsion.ts';
+import type { TakeoffRun } from '../performance/takeoff/takeoff-run.ts';
 import { aeroplanePointer } from './aeroplane-pointer.ts';
 import { airBeside } from './air-beside.ts';
 import type { ObstaclePath, TakeoffAnswer } from './answer.ts';
@@ -8,6 +9,11 @@ import { raisedCautions } from './cautions/caution-test.ts';
 import { takeoffCautions } from './cautions/takeoff-cautions.ts';
 import { climbChecks } from './climb-checks.ts';
 import { isRefused, type Refused } from './fault.ts';
+import { checkedRuns } from './found.ts';
+import { foundTakeoff } from './found-takeoff.ts';
+import { outsideManualSentence } from './manual/outside-manual-sentence.ts';
+import { outsideManualShortfalls } from './manual/outside-manual-shortfalls.ts';
+import { sharesOf } from './manual/shares.ts';
 import { obstacleCheck, obstaclePathOf } from './obstacle-path.ts';
 import { pathStart } from './path-start.ts';
 import { prepareTakeoff } from './prepare-takeoff.ts';
@@ -19,15 +25,13 @@ import { takeoffBand } from './takeoff-band.ts';
 import { climbAfterTakeoff } from './takeoff-climb.ts';
 import { takeoffDistances } from './takeoff-distances.ts';
 import { takeoffEffects } from './takeoff-effects.ts';
-import { checkedTakeoffs, notReached as notReachedOf, reached, takeoffOf, takeoffRuns } from './takeoff-runs.ts';
+import { reached, scaledTakeoff, takeoffOf, takeoffRuns } from './takeoff-runs.ts';
 import { windAnswer } from './wind-along.ts';
-
-/** Distances come from the stated figures of the definition by physics. */
-const method = 'stated';
 
 /**
  * The takeoff, from a question in SI to an answer in SI, in the order of the work: air, wind, speeds, the aeroplane as
- * configured, the distances, what is declared, the checks, the outcome, what should be said, and what it rests on.
+ * configured, the distances by physics and by the flight manual, what is declared, the checks, the outcome, what should be
+ * said, and what it rests on.
  *
  * @returns the answer, or every fault that the question's own values bring about
  */
@@ -39,30 +43,40 @@ export function planTakeoff(question: TakeoffQuestion): TakeoffAnswer | Refused 
   const { ruleSet, rules, declared, air, wind, condition, creditedHeadwind, doesNotApply } = conditions;
   const { fullPowerRatio, rollingStartAllowance } = prepared.flown;
 
-  const runs = takeoffRuns(run, prepared.runConditions);
-  const notReached = notReachedOf(runs);
-  const stated = notReached === undefined ? reached(runs.stated) : undefined;
+  const physics = takeoffRuns(run, prepared.runConditions);
+  const found = foundTakeoff(question, prepared, physics);
+  const { method, edge, runs, notReached, runwayFactors } = found;
+  const stated = notReached === undefined ? runs.stated : undefined;
   const band =
     stated &&
     takeoffBand(run, stated, runway.surface, method, (temperatureOff, pressureOff) => {
       const beside = airBeside(question, temperatureOff, pressureOff);
       return beside && { density: beside.density, thrust: thrustIn(beside, aeroplane.propulsion, power.thrustFactor) };
     });
-  const distances = stated && band && takeoffDistances(stated, band, aeroplane.certification.screenHeight, method);
+  const byPhysics = reached(physics.stated);
+  const shares = sharesOf(stated, byPhysics);
+  const asAnswered = byPhysics && scaledTakeoff(byPhysics, shares);
+  const distances =
+    stated &&
+    band &&
+    takeoffDistances(stated, band, aeroplane.certification.screenHeight, { method, edge }, asAnswered);
 
   const rollAvailable = declared.credited.tora;
   const climb = stated && climbAfterTakeoff(question, prepared);
+  const checked = checkedRuns(runs);
   let obstaclePath: ObstaclePath | undefined;
   const { outcome, checks, governing, thin } = assess({
     conditions,
+    runwayFactors,
+    startsFrom: found.startsFrom,
     notReached,
-    distances: checkedTakeoffs(runs),
+    distances: checked,
     band,
     rollAvailable,
     further: (ofRunway) => {
       const asked = ruleSet.takeoff.obstacles;
       const demand = asked?.appliesTo(aeroplane) === true ? asked : undefined;
-      const start = pathStart(demand, ofRunway, reached(runs.credited ?? runs.stated));
+      const start = pathStart(demand, ofRunway, (checked.credited ?? checked.stated)?.wholeDistance);
       obstaclePath = start && obstaclePathOf(question, prepared, start);
       const climbs = climbChecks(rules.demands, aeroplane, climb?.gradient);
       return demand === undefined || obstaclePath === undefined
@@ -73,15 +87,19 @@ export function planTakeoff(question: TakeoffQuestion): TakeoffAnswer | Refused 
 
   const assumed = takeoffEffects(
     [...resolved.assumed, ...power.assumed, ...friction.assumed],
-    stated && run,
+    found.startsFrom === 'reference' && stated ? run : undefined,
     (propulsion, factor) => thrustIn(air, propulsion, factor),
   );
+  const takenOff = (other: TakeoffRun) => {
+    const result = reached(takeoffOf(other, rollingStartAllowance));
+    return result && scaledTakeoff(result, shares);
+  };
   const context = {
     phase: 'takeoff' as const,
     question,
     ruleSet,
     rules,
-    runwayFactors: conditions.runwayFactors,
+    runwayFactors,
     air,
     wind,
     speeds,
@@ -96,22 +114,26 @@ export function planTakeoff(question: TakeoffQuestion): TakeoffAnswer | Refused 
     governing,
     thin,
     assumed,
+    found,
     wheelSpeed: speeds.liftOff,
-    stated,
+    stated: stated && asAnswered,
     roll: stated?.groundRoll,
-    rollInStillAir: () => reached(takeoffOf({ ...run, headwind: 0 }, rollingStartAllowance))?.groundRoll,
+    rollInStillAir: () => takenOff({ ...run, headwind: 0 })?.groundRoll,
     fullPowerRatio,
     wholeAtFullPower: () => {
       const full = propulsionThrust(aeroplane.propulsion, aeroplane.engines, air, power.thrustFactor);
-      return reached(takeoffOf({ ...run, thrust: full }, rollingStartAllowance))?.takeoffDistance;
+      return takenOff({ ...run, thrust: full })?.takeoffDistance;
     },
     rollingStartAllowance,
     rollAvailable,
     wholeDistance: distances?.takeoffDistance,
   };
+  const isOutside = notReached?.outcome === 'outside-flight-manual';
   return {
     outcome,
-    sentence: answerSentence(context, () => notReachedSentence(runs, units)),
+    sentence: answerSentence(context, () =>
+      isOutside ? outsideManualSentence(notReached, units) : notReachedSentence(notReached, physics, units),
+    ),
     cautions: raisedCautions(takeoffCautions, context),
     air,
     wind: windAnswer(wind, creditedHeadwind),
@@ -120,9 +142,11 @@ export function planTakeoff(question: TakeoffQuestion): TakeoffAnswer | Refused 
     climb,
     obstaclePath,
     assessment: checks && { ruleSet: ruleSet.id, basedOn: conditions.basedOn, checks, governing: governing?.code },
-    shortfall: notReached
-      ? shortfalls(notReached, aeroplanePointer(aeroplaneAt, '/propulsion'))
-      : condition.refusal?.shortfall,
-    basis: answerBasis(question, 'takeoff', conditions, method, assumed, band),
+    shortfall: isOutside
+      ? outsideManualShortfalls(notReached)
+      : notReached
+        ? shortfalls(notReached, aeroplanePointer(aeroplaneAt, '/propulsion'))
+        : condition.refusal?.shortfall,
+    basis: answerBasis(question, 'takeoff', conditions, found, assumed, band),
   };
 }

@@ -23,11 +23,19 @@ export interface Question {
   readonly ruleSet: string;
   readonly operatorRules?: OperatorRules;
   readonly stage?: 'dispatch' | 'in-flight';
+  /** where the distances come from; absent: the best there is, the flight manual first */
+  readonly method?: MethodAsked;
+  /** whether the edge of a manual's sheet stands for what lies beyond it on its longer side; absent: it does, and is named */
+  readonly edges?: 'use' | 'refuse';
   /** presentation only: the family in which sentences are written */
   readonly units: UnitFamily;
   /** pointers of members that the gate filled in (units, rounding ...): said under basis.assumed */
   readonly defaulted: readonly string[];
 }
+
+/** Where distances may be asked to come from. */
+export const methodsAsked = ['best', 'flight-manual', 'fitted', 'stated'] as const;
+export type MethodAsked = (typeof methodsAsked)[number];
 
 /** Factors of an operator's own, each stricter than those of the rule set they stand in for. */
 export interface OperatorRules {
@@ -57,6 +65,8 @@ export interface AeroplaneChanges {
   readonly because: string;
   /** one text a change: 'wing/area 13.4 m2 in place of 12.9 m2' */
   readonly changed: readonly string[];
+  /** the aeroplane on file, where what is changed moves its distances; absent: names and limits alone are changed */
+  readonly flewAs?: Aeroplane;
 }
 
 /** How a takeoff is flown; a member that is absent takes the configuration's own figure, and full power. */

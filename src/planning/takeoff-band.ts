@@ -3,11 +3,10 @@ import type { TakeoffRun } from '../performance/takeoff/takeoff-run.ts';
 import type { Thrust } from '../physics/thrust/thrust.ts';
 import type { Method } from './answer.ts';
 import type { Band } from './band.ts';
-import { BandParts } from './band-parts.ts';
+import { BandParts, type Parts } from './band-parts.ts';
 import { heldThrust } from './held-thrust.ts';
 import type { Surface } from './question.ts';
 import { contaminantDragUncertainty, frictionUncertainty, inputUncertainties } from './rules/input-uncertainties.ts';
-import type { Reached } from './takeoff-runs.ts';
 
 /** Density and thrust in air that is a little off. */
 export interface OtherAir {
@@ -28,7 +27,7 @@ type Changing = { -readonly [K in keyof TakeoffRun]: TakeoffRun[K] };
  */
 export function takeoffBand(
   stated: TakeoffRun,
-  result: Reached,
+  result: Parts,
   surface: Surface,
   method: Method,
   airAt: (temperatureOff: number, pressureOff: number) => OtherAir | undefined,

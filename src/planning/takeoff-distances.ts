@@ -1,20 +1,26 @@
-import type { Method, TakeoffAnswer } from './answer.ts';
+import type { BandedDistance, TakeoffAnswer } from './answer.ts';
 import { type Band, banded } from './band.ts';
-import type { Reached } from './takeoff-runs.ts';
+import type { Parts } from './band-parts.ts';
 
-/** The distances as stated, each with its 90 % band. */
+/**
+ * The distances as stated, each with its 90 % band.
+ *
+ * @param by - the method, and the edge of a table where one stands for the rest
+ * @param times - of physics, where it has them [s]
+ */
 export function takeoffDistances(
-  stated: Reached,
+  { groundRoll, airDistance }: Parts,
   band: Band,
   screenHeight: number,
-  method: Method,
+  by: Pick<BandedDistance, 'method' | 'edge'>,
+  times: { readonly groundRollTime: number; readonly airTime: number } | undefined,
 ): NonNullable<TakeoffAnswer['distances']> {
   return {
     screenHeight,
-    groundRoll: banded(stated.groundRoll, band.groundRoll, method),
-    airDistance: banded(stated.airDistance, band.airDistance, method),
-    takeoffDistance: banded(stated.takeoffDistance, band.wholeDistance, method),
-    groundRollTime: stated.groundRollTime,
-    airTime: stated.airTime,
+    groundRoll: banded(groundRoll, band.groundRoll, by),
+    airDistance: banded(airDistance, band.airDistance, by),
+    takeoffDistance: banded(groundRoll + airDistance, band.wholeDistance, by),
+    groundRollTime: times?.groundRollTime,
+    airTime: times?.airTime,
   };
 }

@@ -3,7 +3,7 @@ import type { TakeoffResult, TakeoffRun } from '../performance/takeoff/takeoff-r
 import { inducedDragFactor } from '../physics/drag.ts';
 import type { Thrust } from '../physics/thrust/thrust.ts';
 import type { TakeoffAnswer } from './answer.ts';
-import type { Checked } from './assess.ts';
+import type { Shares } from './manual/shares.ts';
 import type { Question } from './question.ts';
 import type { ResolvedTakeoff } from './resolve-takeoff.ts';
 import { firstWithout, type Runs, runsOf } from './runs.ts';
@@ -133,19 +133,19 @@ export function notReached(runs: TakeoffRuns): NotReached | undefined {
   return firstWithout(runs, isReached);
 }
 
-/** What checks are of, of each run that has distances. */
-export function checkedTakeoffs(runs: TakeoffRuns): Runs<Checked> {
+/** A run whose ground roll and air distance are so many times as long, in as many times the time. */
+export function scaledTakeoff(result: Reached, shares: Shares | undefined): Reached {
+  if (shares === undefined) return result;
+  const groundRoll = result.groundRoll * shares.groundRoll;
+  const airDistance = result.airDistance * shares.airDistance;
   return {
-    stated: checked(runs.stated),
-    credited: checked(runs.credited),
-    level: checked(runs.level),
-    reference: checked(runs.reference),
+    ...result,
+    groundRoll,
+    airDistance,
+    takeoffDistance: groundRoll + airDistance,
+    groundRollTime: result.groundRollTime * shares.groundRoll,
+    airTime: result.airTime * shares.airDistance,
   };
-}
-
-function checked(result: TakeoffResult | undefined): Checked | undefined {
-  const found = reached(result);
-  return found && { groundRoll: found.groundRoll, wholeDistance: found.takeoffDistance };
 }
 
 function isReached(result: TakeoffResult): result is Reached {

@@ -65,7 +65,7 @@ describe('the trajectory of a takeoff', () => {
       expect([first?.[0], first?.[1], first?.[2], first?.[4]]).toEqual([0, 0, 0, 0]);
       expect(last?.[0]).toBe(distances?.takeoffDistance.value);
       expect(trajectory?.columns[0]?.unit).toBe(distances?.takeoffDistance.unit);
-      const seconds = (distances?.groundRollTime.value ?? 0) + (distances?.airTime.value ?? 0);
+      const seconds = (distances?.groundRollTime?.value ?? 0) + (distances?.airTime?.value ?? 0);
       expect(Math.abs((last?.[1] ?? 0) - seconds)).toBeLessThan(0.11);
       expect(last?.[4]).toBeCloseTo(distances?.screenHeight.value ?? 0, 9);
       expect(trajectory?.columns[4]?.unit).toBe(distances?.screenHeight.unit);
@@ -236,7 +236,7 @@ describe('the detail of a landing', () => {
       expect(last?.[0]).toBe(distances?.landingDistance.value);
       expect(last?.[2]).toBeCloseTo(0, 6);
       expect(last?.[4]).toBe(0);
-      const seconds = (distances?.groundRollTime.value ?? 0) + (distances?.airTime.value ?? 0);
+      const seconds = (distances?.groundRollTime?.value ?? 0) + (distances?.airTime?.value ?? 0);
       expect(Math.abs((last?.[1] ?? 0) - seconds)).toBeLessThan(0.11);
     },
   );

@@ -50,7 +50,10 @@ describe('an aeroplane on file with changes', () => {
       revision: '3',
       because: 'a new propeller',
       changed: ['propulsion/staticThrust 2550 N in place of 2400 N', 'wheels taken out'],
+      flewAs: lookup.get('sample-tourer')?.aeroplane,
     });
+    const renamed = known({ name: 'Sample Tourer II (invented)' });
+    expect(Array.isArray(renamed) ? renamed : renamed.changes).not.toHaveProperty('flewAs');
   });
 
   it('leaves the aeroplane on file as it is', () => {

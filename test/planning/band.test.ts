@@ -10,7 +10,7 @@ const of = (name: string, question = plainQuestion) => contributions(question).f
 describe('the 90 % band', () => {
   it('reaches 1.645 standard deviations of ln s to either side [normal distribution, 5 % and 95 % points]', () => {
     expectNear(ninetyPerCent, 1.645, 5e-4);
-    const { low, high } = banded(500, 0.2, 'stated');
+    const { low, high } = banded(500, 0.2, { method: 'stated' });
     expectRatio(high / 500, Math.exp(0.329), 1e-4);
     expectRatio(low * high, 250_000, 1e-12);
     expect(highOver(0)).toBe(1);

@@ -3,6 +3,7 @@ import type { Kind } from '../../units/presentation.ts';
 import type { BandedDistance, Check, Factor, Outcome, SpeedSet } from '../answer.ts';
 import type { AnyAssumed } from '../assumed.ts';
 import type { DeclaredDistances } from '../declared-distances.ts';
+import type { Found } from '../found.ts';
 import type { ThinBecause } from '../outcome.ts';
 import type { Question } from '../question.ts';
 import type { PhaseRules, RuleSet } from '../rules/rule-set.ts';
@@ -38,6 +39,8 @@ export interface AnswerContext extends ConditionsContext {
   readonly governing: Check | undefined;
   readonly thin: ThinBecause | undefined;
   readonly assumed: readonly AnyAssumed[];
+  /** the method of the distances, and what stands beside them */
+  readonly found: Pick<Found<unknown>, 'method' | 'flightManual' | 'outside' | 'noSheet' | 'other'>;
   /** the speed at which the wheels leave or meet the runway */
   readonly wheelSpeed: SpeedSet;
   /** the ground roll as stated, without factors, and what it would be in still air [m]; undefined where there is none */

@@ -13,6 +13,10 @@ import { densityAltitudeHigh } from './density-altitude-high.ts';
 import { downslope } from './downslope.ts';
 import { filmCountsAsWet } from './film-counts-as-wet.ts';
 import { flareAboveScreen } from './flare-above-screen.ts';
+import { flightManualAndPhysicsDiffer } from './flight-manual-and-physics-differ.ts';
+import { flightManualEdge } from './flight-manual-edge.ts';
+import { flightManualNotUsed } from './flight-manual-not-used.ts';
+import { flightManualSilent } from './flight-manual-silent.ts';
 import { gustNotCredited } from './gust-not-credited.ts';
 import { hydroplaning } from './hydroplaning.ts';
 import type { LandingContext } from './landing-context.ts';
@@ -40,6 +44,10 @@ export const landingCautions: readonly CautionTest<LandingContext>[] = [
   marginNegative,
   marginThin,
   stageNotKnown,
+  flightManualNotUsed,
+  flightManualEdge,
+  flightManualSilent,
+  flightManualAndPhysicsDiffer,
   massAboveMaximumLanding,
   temperatureAboveLimit,
   pressureAltitudeAboveLimit,

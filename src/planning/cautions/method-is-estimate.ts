@@ -1,3 +1,4 @@
+import { isPhysicsByName } from '../method.ts';
 import { type AnswerContext, measureDown, textIn } from './answer-context.ts';
 import type { CautionTest } from './caution-test.ts';
 
@@ -10,7 +11,9 @@ export const methodIsEstimate: CautionTest<AnswerContext> = {
   source: 'SpaEfbAmc5',
   test: (context) => {
     const distance = context.wholeDistance;
-    if (distance === undefined || distance.method === 'flight-manual') return undefined;
+    const { flightManual } = context.found;
+    const isCarried = flightManual !== undefined && !isPhysicsByName(context.question);
+    if (distance === undefined || distance.method === 'flight-manual' || isCarried) return undefined;
     return {
       message: `The distances are computed from ${context.phase === 'takeoff' ? 'stated thrust, lift and drag' : 'stated lift, drag and brakes'}, not read from the flight manual. The ${context.phase} distance of ${textIn(context, 'distance', distance.value)} has a 90 % band from ${measureDown(context, distance.low)} to ${textIn(context, 'distance', distance.high)}.`,
       at: '/aeroplane',

@@ -9,6 +9,10 @@ import { contaminantHoldsBack } from './contaminant-holds-back.ts';
 import { crosswindBeyondDemonstrated } from './crosswind-beyond-demonstrated.ts';
 import { densityAltitudeHigh } from './density-altitude-high.ts';
 import { filmCountsAsWet } from './film-counts-as-wet.ts';
+import { flightManualAndPhysicsDiffer } from './flight-manual-and-physics-differ.ts';
+import { flightManualEdge } from './flight-manual-edge.ts';
+import { flightManualNotUsed } from './flight-manual-not-used.ts';
+import { flightManualSilent } from './flight-manual-silent.ts';
 import { gustNotCredited } from './gust-not-credited.ts';
 import { hydroplaning } from './hydroplaning.ts';
 import { marginNegative } from './margin-negative.ts';
@@ -37,6 +41,10 @@ export const takeoffCautions: readonly CautionTest<TakeoffContext>[] = [
   marginNegative,
   marginThin,
   stageNotKnown,
+  flightManualNotUsed,
+  flightManualEdge,
+  flightManualSilent,
+  flightManualAndPhysicsDiffer,
   massAboveMaximum,
   temperatureAboveLimit,
   pressureAltitudeAboveLimit,

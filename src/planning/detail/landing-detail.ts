@@ -3,7 +3,8 @@ import { landingTrajectory } from '../../performance/landing/landing-trajectory.
 import type { BrakingFriction } from '../../physics/braking-friction.ts';
 import type { LandingAnswer } from '../answer.ts';
 import { isRefused } from '../fault.ts';
-import { stopped } from '../landing-runs.ts';
+import { scaledLanding, stopped } from '../landing-runs.ts';
+import { sharesOf } from '../manual/shares.ts';
 import { planLanding } from '../plan-landing.ts';
 import { type PreparedLanding, prepareLanding } from '../prepare-landing.ts';
 import type { LandingQuestion } from '../question.ts';
@@ -44,7 +45,7 @@ export function landingDetail(question: LandingQuestion, answer: LandingAnswer, 
       : {
           sensitivities: [
             ...sensitivities(question, inputs, base, distancesOf),
-            sensitivity(question, brakingFriction, base, withBraking(prepared)),
+            sensitivity(question, brakingFriction, base, withBraking(prepared, base)),
           ],
         }),
   };
@@ -62,7 +63,8 @@ function changesOf({ distances }: LandingAnswer): Changes | undefined {
 }
 
 /** The landing as stated with so much more friction under the brakes. */
-function withBraking({ run }: PreparedLanding): Beside {
+function withBraking({ run }: PreparedLanding, base: Changes): Beside {
+  const shares = sharesOf(base, stopped(landing(run)));
   return (by) => {
     const more = (braking: BrakingFriction): BrakingFriction => ({
       ...braking,
@@ -71,7 +73,7 @@ function withBraking({ run }: PreparedLanding): Beside {
     const stretches = run.stretches?.map((stretch) => ({ ...stretch, braking: more(stretch.braking) }));
     const found = stopped(landing({ ...run, braking: more(run.braking), stretches }));
     if (found === undefined) return undefined;
-    const { groundRoll, airDistance, landingDistance: wholeDistance } = found;
+    const { groundRoll, airDistance, landingDistance: wholeDistance } = scaledLanding(found, shares);
     return { groundRoll, airDistance, wholeDistance };
   };
 }

@@ -1,11 +1,10 @@
 import type { UnitFamily } from '../../units/presentation.ts';
-import { notReached, type TakeoffRuns } from '../takeoff-runs.ts';
+import type { NotReached, TakeoffRuns } from '../takeoff-runs.ts';
 import { measureText, percentText } from './measure-text.ts';
 import { whichRun } from './which-run.ts';
 
 /** Why there are no distances, in words and numbers. */
-export function notReachedSentence(runs: TakeoffRuns, units: UnitFamily): string {
-  const result = notReached(runs);
+export function notReachedSentence(result: NotReached | undefined, runs: TakeoffRuns, units: UnitFamily): string {
   if (result === undefined) return 'There are no distances.';
   const speed = (si: number) => measureText(units, 'speed', si);
   const where = whichRun(runs, result);

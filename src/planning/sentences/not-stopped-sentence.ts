@@ -1,11 +1,10 @@
 import type { UnitFamily } from '../../units/presentation.ts';
-import { type LandingRuns, notStopped } from '../landing-runs.ts';
+import type { LandingRuns, NotStopped } from '../landing-runs.ts';
 import { measureText, percentText } from './measure-text.ts';
 import { whichRun } from './which-run.ts';
 
 /** Why a landing has no distances, in words and numbers. */
-export function notStoppedSentence(runs: LandingRuns, units: UnitFamily): string {
-  const result = notStopped(runs);
+export function notStoppedSentence(result: NotStopped | undefined, runs: LandingRuns, units: UnitFamily): string {
   if (result === undefined) return 'There are no distances.';
   const speed = (si: number) => measureText(units, 'speed', si);
   if (result.outcome === 'ground-speed-not-positive') {

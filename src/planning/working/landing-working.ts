@@ -1,5 +1,6 @@
 import type { LandingAnswer } from '../answer.ts';
 import { declaredDistances } from '../declared-distances.ts';
+import { isPhysicsByName } from '../method.ts';
 import type { PreparedLanding } from '../prepare-landing.ts';
 import type { LandingQuestion } from '../question.ts';
 import { airLines, constantLines } from './air-lines.ts';
@@ -7,6 +8,7 @@ import { checkLines } from './check-lines.ts';
 import { dragLines } from './ground-lines.ts';
 import { landingFlightLines } from './landing-flight-lines.ts';
 import { landingRollLines } from './landing-roll-lines.ts';
+import { manualLines } from './manual-lines.ts';
 import { referenceSpeedLines } from './reference-speed-lines.ts';
 import { speedLines, stallLines } from './speed-lines.ts';
 import { windLines } from './wind-lines.ts';
@@ -31,6 +33,7 @@ export function landingWorking(
   const { conditions, resolved, landingSpeeds, braking, run } = prepared;
   const { air, configuration, ruleSet } = conditions;
   const { stall, touchdown } = landingSpeeds.speeds;
+  const manual = isPhysicsByName(question) ? undefined : answer.basis.flightManual;
   const sheet = new Worksheet(answer.basis.assumed);
   constantLines(sheet);
   airLines(sheet, question, air);
@@ -43,7 +46,12 @@ export function landingWorking(
     landingFlightLines(sheet, question, prepared, screen);
     dragLines(sheet, question, resolved, run);
     landingRollLines(sheet, question, prepared);
-    distanceLines(sheet, answer);
+    if (manual === undefined) distanceLines(sheet, answer);
+  }
+  const { distances } = answer;
+  if (manual !== undefined && distances !== undefined) {
+    const whole = { symbol: 's_L', name: 'landing distance', value: distances.landingDistance.value };
+    manualLines(sheet, manual, distances, whole);
   }
   if (answer.assessment !== undefined) {
     const declared = declaredDistances(question.runway, ruleSet.takeoff.clearwayShare);

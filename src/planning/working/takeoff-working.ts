@@ -1,12 +1,14 @@
 import { aeroplanePointer } from '../aeroplane-pointer.ts';
 import type { TakeoffAnswer } from '../answer.ts';
 import { declaredDistances } from '../declared-distances.ts';
+import { isPhysicsByName } from '../method.ts';
 import type { PreparedTakeoff } from '../prepare-takeoff.ts';
 import type { TakeoffQuestion } from '../question.ts';
 import { airLines, constantLines } from './air-lines.ts';
 import { checkLines } from './check-lines.ts';
 import { takeoffFlightLines } from './flight-lines.ts';
 import { dragLines, takeoffRollLines } from './ground-lines.ts';
+import { manualLines } from './manual-lines.ts';
 import { speedLines, stallLines } from './speed-lines.ts';
 import { thrustLines } from './thrust-lines.ts';
 import { windLines } from './wind-lines.ts';
@@ -31,6 +33,7 @@ export function takeoffWorking(
   const { conditions, flown, resolved, speeds, power, run } = prepared;
   const { air, configuration, ruleSet } = conditions;
   const { aeroplane, aeroplaneAt, runway } = question;
+  const manual = isPhysicsByName(question) ? undefined : answer.basis.flightManual;
   const sheet = new Worksheet(answer.basis.assumed);
   constantLines(sheet);
   airLines(sheet, question, air);
@@ -55,7 +58,12 @@ export function takeoffWorking(
     dragLines(sheet, question, resolved, run);
     takeoffRollLines(sheet, question, run, thrustAt);
     takeoffFlightLines(sheet, question, run, thrustAt);
-    distanceLines(sheet, flown.rollingStartAllowance, answer);
+    if (manual === undefined) distanceLines(sheet, flown.rollingStartAllowance, answer);
+  }
+  const { distances } = answer;
+  if (manual !== undefined && distances !== undefined) {
+    const whole = { symbol: 's_T', name: 'takeoff distance', value: distances.takeoffDistance.value };
+    manualLines(sheet, manual, distances, whole);
   }
   if (answer.assessment !== undefined) {
     const { clearwayShare } = ruleSet.takeoff;

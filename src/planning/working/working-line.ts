@@ -22,7 +22,17 @@ export const workingUnits = [
 export type WorkingUnit = (typeof workingUnits)[number];
 
 /** The parts of a working, in the order of the work. */
-export const workingParts = ['constants', 'air', 'wind', 'speeds', 'thrust', 'ground', 'flight', 'checks'] as const;
+export const workingParts = [
+  'constants',
+  'air',
+  'wind',
+  'speeds',
+  'thrust',
+  'ground',
+  'flight',
+  'flight-manual',
+  'checks',
+] as const;
 export type WorkingPart = (typeof workingParts)[number];
 
 /**

@@ -3,6 +3,7 @@ import { landingCautions } from '../../../src/planning/cautions/landing-cautions
 import { takeoffCautions } from '../../../src/planning/cautions/takeoff-cautions.ts';
 import type { contaminantKinds } from '../../../src/planning/question.ts';
 import { references } from '../../../src/references.ts';
+import { manualOf, withManual } from '../../support/flown-by-manual.ts';
 import {
   along,
   type LandingChanges,
@@ -106,6 +107,41 @@ interface Pair {
 }
 
 const pairs: readonly Pair[] = [
+  {
+    code: 'flight-manual-edge',
+    severity: 'caution',
+    raised: withManual(manualOf(), -5),
+    silent: withManual(manualOf(), 0),
+    says: /landing-table begins at a temperature of 0 °C, and -5 °C is asked\. The figure at its edge is used as it stands/,
+  },
+  {
+    code: 'flight-manual-silent',
+    severity: 'caution',
+    raised: { ...withManual(), runway: { ...withManual().runway, slope: 0.01 } },
+    silent: withManual(),
+    says: /does not speak of a slope of 1 % uphill\. Its landing distance of 424 m is carried there by physics on stated figures: the landing distance is \d+ m\.$/,
+  },
+  {
+    code: 'flight-manual-and-physics-differ',
+    severity: 'caution',
+    raised: withManual(manualOf({}, { contains: { factor: 0.5, windAllowance: false } })),
+    silent: withManual(),
+    says: /^The flight manual gives a landing distance of [\d ]+ m, physics \d+ m: [\d.]+ % less\.$/,
+  },
+  {
+    code: 'flight-manual-not-used',
+    severity: 'caution',
+    raised: { ...withManual(), question: { method: 'stated' } },
+    silent: withManual(),
+    says: /physics on stated figures, as asked\. The flight manual has its own/,
+  },
+  {
+    code: 'flight-manual-not-used',
+    severity: 'strong',
+    raised: { ...withManual(manualOf(), 45), question: { method: 'stated' } },
+    silent: withManual(manualOf(), 45),
+    says: /The flight manual has none: landing-table ends at a temperature of 40 °C, and 45 °C is asked\.$/,
+  },
   {
     code: 'condition-code-too-good',
     severity: 'caution',

@@ -4,7 +4,7 @@ import { shortfalls } from '../../../src/planning/shortfalls.ts';
 import type { NotReached } from '../../../src/planning/takeoff-runs.ts';
 
 const said = (stated: NotReached) =>
-  notReachedSentence({ stated, credited: undefined, level: undefined, reference: undefined }, 'm-kt-kg');
+  notReachedSentence(stated, { stated, credited: undefined, level: undefined, reference: undefined }, 'm-kt-kg');
 
 describe('why there are no distances', () => {
   it('tells where the acceleration is gone, and the least one as met elsewhere', () => {
@@ -27,10 +27,12 @@ describe('why there are no distances', () => {
     };
     const [credited, level, reference] = [{ ...none }, { ...none }, { ...none }];
     const runs = { stated: undefined, credited: undefined, level: undefined, reference: undefined };
-    const of = (some: object) => notReachedSentence({ ...runs, ...some }, 'm-kt-kg');
-    expect(of({ credited })).toMatch(/^Never reaches the lift-off speed in the wind that the rules credit:/);
-    expect(of({ level, reference })).toMatch(/speed on a level runway, since the rules give no credit for a slope/);
-    expect(of({ reference })).toMatch(/speed on the paved, dry, level runway that the rules start from:/);
+    const of = (one: NotReached, some: object) => notReachedSentence(one, { ...runs, ...some }, 'm-kt-kg');
+    expect(of(credited, { credited })).toMatch(/^Never reaches the lift-off speed in the wind that the rules credit:/);
+    expect(of(level, { level, reference })).toMatch(
+      /speed on a level runway, since the rules give no credit for a slope/,
+    );
+    expect(of(reference, { reference })).toMatch(/speed on the paved, dry, level runway that the rules start from:/);
   });
 
   it('never shows a gradient that misses what is needed as if it reached it', () => {

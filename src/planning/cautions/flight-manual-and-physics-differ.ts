@@ -1,0 +1,34 @@
+import { percentText } from '../sentences/measure-text.ts';
+import { type AnswerContext, textIn } from './answer-context.ts';
+import type { CautionTest } from './caution-test.ts';
+
+/** Beyond these ratios one of the two is suspected, as a difference of ln: twice the model form of the physics. @see references.HouseManual */
+const spread = { fitted: 0.1, stated: 0.3 } as const;
+
+/** The flight manual and the aeroplane's physics give different distances. */
+export const flightManualAndPhysicsDiffer: CautionTest<AnswerContext> = {
+  code: 'flight-manual-and-physics-differ',
+  severity: 'caution',
+  meaning:
+    "The flight manual and the aeroplane's physics differ by more than twice what the physics is usually off; a table, a unit or the definition may be wrong.",
+  source: 'HouseManual',
+  test: (context) => {
+    const { found, wholeDistance, phase } = context;
+    const { other, method } = found;
+    if (other === undefined || wholeDistance === undefined) return undefined;
+    const physics = [method, other.method].includes('fitted') ? 'fitted' : 'stated';
+    const threshold = spread[physics];
+    if (Math.abs(Math.log(other.ratio)) <= threshold) return undefined;
+    const [names, otherName] =
+      other.method === 'stated' || other.method === 'fitted'
+        ? ['The flight manual', 'physics']
+        : ['Physics', 'the flight manual'];
+    const off = other.ratio - 1;
+    return {
+      message: `${names} gives a ${phase} distance of ${textIn(context, 'distance', wholeDistance.value)}, ${otherName} ${textIn(context, 'distance', other.distance)}: ${percentText(Math.abs(off))} ${off < 0 ? 'less' : 'more'}.`,
+      at: '/aeroplane',
+      value: other.ratio,
+      threshold: Math.exp(threshold),
+    };
+  },
+};

@@ -1,0 +1,175 @@
+import { describe, expect, it } from 'vitest';
+import type { ManualNote } from '../../src/performance/flight-manual/flight-manual.ts';
+import type { TakeoffQuestion } from '../../src/planning/question.ts';
+import { byManual, grassNote, headwindNote, manualOf, tailwindNote } from '../support/flown-by-manual.ts';
+import { expectRatio } from '../support/near.ts';
+import { answered, type Changes, changed } from '../support/takeoff-question.ts';
+
+const ft = 0.3048;
+const kt = 1852 / 3600;
+const headwind = (knots: number): Changes => ({ weather: { wind: { kind: 'components', headwind: knots * kt } } });
+const slope = (percent: number): Changes => ({ runway: { slope: percent / 100 } });
+const dryGrass: Changes = { runway: { surface: { kind: 'grass', state: 'dry', grass: 'short', firmness: 'firm' } } };
+const underClassB: Changes = { question: { ruleSet: 'eu-class-b' } };
+const toraAlone: Changes = { runway: { declared: { tora: 2000 } } };
+
+const distances = (question: TakeoffQuestion) => {
+  const { distances: found } = answered(question);
+  if (found === undefined) throw new Error('there must be distances');
+  return found;
+};
+const physics = (question: TakeoffQuestion) => distances({ ...question, method: 'stated' });
+const check = (question: TakeoffQuestion, code: string) => {
+  const found = answered(question).assessment?.checks.find((one) => one.code === code);
+  if (found === undefined) throw new Error(`there must be a check ${code}`);
+  return found;
+};
+
+describe('a takeoff by its flight manual', () => {
+  it('is the printed cell at a node, of both columns, by the method flight-manual', () => {
+    const { groundRoll, takeoffDistance, airDistance } = distances(byManual());
+    expectRatio(groundRoll.value, 1110 * ft, 1e-12);
+    expectRatio(takeoffDistance.value, 2010 * ft, 1e-12);
+    expectRatio(airDistance.value, 900 * ft, 1e-12);
+    expect([groundRoll.method, airDistance.method, takeoffDistance.method]).toEqual(Array(3).fill('flight-manual'));
+    expect(answered(byManual()).basis.method).toBe('flight-manual');
+  });
+
+  it('shows the physics of the same aeroplane beside it, with the ratio', () => {
+    const { other } = answered(byManual()).basis;
+    const { value } = physics(byManual()).takeoffDistance;
+    expect(other?.method).toBe('stated');
+    expectRatio(other?.distance ?? 0, value, 1e-12);
+    expectRatio(other?.ratio ?? 0, value / (2010 * ft), 1e-12);
+  });
+
+  it('multiplies the printed figure by the overall factor alone on dry pavement [A.305(b): 1.25 on TORA alone, read]', () => {
+    const required = check(byManual([], underClassB, toraAlone), 'takeoff-run');
+    expect(required.startsFrom).toBe('flight-manual');
+    expectRatio(required.required ?? 0, 1.25 * 2010 * ft, 1e-12);
+  });
+
+  it('takes the rules’ grass factor on the printed figure where its notes are silent [AMC1 A.305: 1.20, read], and says whose', () => {
+    const question = byManual([], underClassB, toraAlone, dryGrass);
+    const required = check(question, 'takeoff-run');
+    expect(required.startsFrom).toBe('flight-manual');
+    expectRatio(required.required ?? 0, 1.25 * 1.2 * 2010 * ft, 1e-12);
+    expect(required.factors.map(({ code }) => code)).toContain('surface');
+    expect(required.alternative?.startsFrom).toBe('credited');
+  });
+
+  it('takes its own grass note and no factor of the rules besides', () => {
+    const question = byManual([grassNote], underClassB, toraAlone, dryGrass);
+    const { groundRoll, takeoffDistance } = distances(question);
+    expectRatio(groundRoll.value, 1.15 * 1110 * ft, 1e-12);
+    expectRatio(takeoffDistance.value, (2010 + 0.15 * 1110) * ft, 1e-12);
+    expect(takeoffDistance.method).toBe('flight-manual');
+    const required = check(question, 'takeoff-run');
+    expectRatio(required.required ?? 0, 1.25 * (2010 + 0.15 * 1110) * ft, 1e-12);
+    expect(required.factors.map(({ code }) => code)).not.toContain('surface');
+  });
+
+  it('carries each part by its own ratio of physics where it is silent on a slope, and nothing at all on the level', () => {
+    const uphill = byManual([], slope(1.5));
+    const [sloping, level] = [physics(uphill), physics(byManual())];
+    const found = distances(uphill);
+    expectRatio(found.groundRoll.value, 1110 * ft * (sloping.groundRoll.value / level.groundRoll.value), 1e-12);
+    expectRatio(found.airDistance.value, 900 * ft * (sloping.airDistance.value / level.airDistance.value), 1e-12);
+    expect(found.takeoffDistance.method).toBe('stated');
+    expectRatio(distances(byManual([], slope(1e-7))).takeoffDistance.value, 2010 * ft, 1e-6);
+    const silent = answered(uphill).basis.flightManual;
+    expect(silent?.silences).toEqual(['slope']);
+  });
+
+  it('carries a wind it has no note for, and keeps its figure in calm air', () => {
+    const windy = byManual([], headwind(10));
+    const ratio = physics(windy).groundRoll.value / physics(byManual()).groundRoll.value;
+    expect(ratio).toBeLessThan(0.8);
+    expectRatio(distances(windy).groundRoll.value, 1110 * ft * ratio, 1e-12);
+  });
+
+  it('enters a note that holds 50 and 150 per cent with the wind as given, and the credit of the rules comes no second time', () => {
+    const notes = [headwindNote, tailwindNote];
+    const into = byManual(notes, underClassB, toraAlone, headwind(9));
+    expectRatio(distances(into).takeoffDistance.value, 0.9 * 2010 * ft, 1e-9);
+    expectRatio(check(into, 'takeoff-run').required ?? 0, 1.25 * 0.9 * 2010 * ft, 1e-9);
+    const before = byManual(notes, underClassB, toraAlone, headwind(-4));
+    expectRatio(check(before, 'takeoff-run').required ?? 0, 1.25 * 1.2 * 2010 * ft, 1e-9);
+  });
+
+  it('credits half of a headwind through a note that holds no allowance [A.305(c): 50 %, read]', () => {
+    const into = byManual(
+      [{ ...headwindNote, windAllowance: false } as ManualNote],
+      underClassB,
+      toraAlone,
+      headwind(9),
+    );
+    expectRatio(distances(into).takeoffDistance.value, 0.9 * 2010 * ft, 1e-9);
+    expectRatio(check(into, 'takeoff-run').required ?? 0, 1.25 * 0.95 * 2010 * ft, 1e-9);
+  });
+
+  it('has no figure beyond its table and says where that ends; physics has one only by name, marked on every number', () => {
+    const hot = byManual([], { weather: { temperature: 316.15 } });
+    const outside = answered(hot);
+    expect(outside.outcome).toBe('outside-flight-manual');
+    expect(outside.distances).toBeUndefined();
+    expect(outside.shortfall).toEqual([
+      {
+        at: '/weather/temperature',
+        axis: 'temperature',
+        table: 'takeoff-table',
+        given: { kind: 'temperature', value: 316.15 },
+        bound: { kind: 'temperature', value: 313.15 },
+        side: 'above',
+      },
+    ]);
+    expect(outside.sentence).toContain('takeoff-table ends at a temperature of 40 °C, and 43 °C is asked');
+    const named = answered({ ...hot, method: 'stated' });
+    expect(named.distances?.takeoffDistance.method).toBe('stated');
+    expect(named.cautions.find(({ code }) => code === 'flight-manual-not-used')?.severity).toBe('strong');
+  });
+
+  it('holds the edge on the side where the table shows it to be the longer, names it, and ends there when asked to', () => {
+    const cold = byManual([], { weather: { temperature: 263.15 } });
+    expectRatio(distances(cold).takeoffDistance.value, 1760 * ft, 1e-12);
+    expect(distances(cold).takeoffDistance.edge).toBe('takeoff-table');
+    expect(answered(cold).cautions.map(({ code }) => code)).toContain('flight-manual-edge');
+    expect(answered({ ...cold, edges: 'refuse' }).outcome).toBe('outside-flight-manual');
+  });
+
+  it('scales the manual’s figure by the ratio of physics with and without changes to the aeroplane', () => {
+    const base = byManual();
+    const heavierDrag = changed(base, { aeroplane: { drag: { zeroLiftCoefficient: 0.05, oswaldFactor: 0.72 } } });
+    const question: TakeoffQuestion = {
+      ...heavierDrag,
+      changes: { basedOn: 'stated-trainer', revision: '1', because: 'floats', changed: [], flewAs: base.aeroplane },
+    };
+    const [asChanged, onFile] = [physics(heavierDrag), physics(base)];
+    const found = distances(question);
+    expectRatio(found.groundRoll.value, 1110 * ft * (asChanged.groundRoll.value / onFile.groundRoll.value), 1e-12);
+    expectRatio(found.airDistance.value, 900 * ft * (asChanged.airDistance.value / onFile.airDistance.value), 1e-12);
+    expect(found.takeoffDistance.method).toBe('stated');
+    expect(answered(question).basis.flightManual?.silences).toEqual(['changes']);
+  });
+
+  it('carries a friction stated as a number, which no manual speaks of', () => {
+    const rough = byManual([grassNote], {
+      runway: { surface: { kind: 'grass', state: 'dry', rollingFrictionCoefficient: 0.09 } },
+    });
+    expect(answered(rough).basis.flightManual?.silences).toEqual(['surface']);
+    expect(distances(rough).groundRoll.value).toBeGreaterThan(1110 * ft);
+  });
+
+  it('gives no credit for a fall that neither rules nor manual credit', () => {
+    const downhill = byManual([], underClassB, toraAlone, slope(-1.5));
+    expect(distances(downhill).takeoffDistance.value).toBeLessThan(2010 * ft);
+    expectRatio(check(downhill, 'takeoff-run').required ?? 0, 1.25 * 2010 * ft, 1e-12);
+  });
+
+  it('refuses a method by name that the aeroplane does not have', () => {
+    const none = changed(byManual(), { aeroplane: { flightManual: manualOf({ configurations: ['another'] }) } });
+    expect(() => answered({ ...none, method: 'flight-manual' })).toThrow(/method/);
+    expect(() => answered({ ...byManual(), method: 'fitted' })).toThrow(/method/);
+    expect(distances(none).takeoffDistance.method).toBe('stated');
+  });
+});
