@@ -156,6 +156,16 @@ export const references = entries({
   },
   Judgement: { title: 'A choice made for this service where no public source decides', status: 'judgement' },
   AbramowitzStegun: { title: 'Abramowitz & Stegun, Handbook of Mathematical Functions, 1964', status: 'memory' },
+  GolubVanLoan: { title: 'Golub & Van Loan, Matrix Computations, 3rd edition', status: 'memory' },
+  Marquardt1963: {
+    title: 'Marquardt, An Algorithm for Least-Squares Estimation of Nonlinear Parameters, J. SIAM 11 (1963)',
+    status: 'memory',
+  },
+  More1978: {
+    title:
+      'More, The Levenberg-Marquardt Algorithm: Implementation and Theory, Lecture Notes in Mathematics 630 (1978)',
+    status: 'memory',
+  },
   Brent1973: { title: 'Brent, Algorithms for Minimization without Derivatives, 1973', status: 'memory' },
   Wieselsberger1922: { title: 'Wieselsberger, Wing Resistance near the Ground, NACA TM 77, 1922', status: 'secondary' },
   Lowry1995: {
