@@ -157,6 +157,11 @@ export const references = entries({
   Judgement: { title: 'A choice made for this service where no public source decides', status: 'judgement' },
   AbramowitzStegun: { title: 'Abramowitz & Stegun, Handbook of Mathematical Functions, 1964', status: 'memory' },
   GolubVanLoan: { title: 'Golub & Van Loan, Matrix Computations, 3rd edition', status: 'memory' },
+  HollandWelsch1977: {
+    title: 'Holland & Welsch, Robust Regression Using Iteratively Reweighted Least-Squares, Comm. Statist. A6 (1977)',
+    status: 'memory',
+  },
+  Atkinson1992: { title: 'Atkinson & Donev, Optimum Experimental Designs, 1992', status: 'memory' },
   Marquardt1963: {
     title: 'Marquardt, An Algorithm for Least-Squares Estimation of Nonlinear Parameters, J. SIAM 11 (1963)',
     status: 'memory',
@@ -234,6 +239,11 @@ export const references = entries({
   HouseTurbineLapse: {
     title: 'Turboprop power against temperature, low end of the usual reserve',
     status: 'judgement',
+  },
+  HouseFit: {
+    title:
+      'Fits of thrust, drag, lapses and braking to published tables: bounds, priors and weights tried on two of them',
+    status: 'derived',
   },
   HouseThrustFactor: {
     title: "Thrust factors of propulsion nobody has fitted, held to Torenbeek's mean takeoff thrust",

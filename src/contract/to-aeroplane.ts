@@ -44,6 +44,7 @@ export function toAeroplane(definition: AeroplaneDefinition): Aeroplane {
     limitations: perhaps(toLimitations, definition.limitations),
     airspeedCalibration: calibration,
     flightManual: perhaps((manual) => toFlightManual(manual, calibration), definition.flightManual),
+    fit: undefined,
   });
 }
 

@@ -24,6 +24,8 @@ export function toConfiguration(given: ConfigurationOnWire, calibration?: Airspe
     rollingStartAllowance: perhaps((length) => si('length', length), given.rollingStartAllowance),
     approachAngle: perhaps((angle) => si('angle', angle), given.approachAngle),
     flareLoadFactor: given.flareLoadFactor,
+    // by a fit alone, never by a definition's configuration
+    flareFitted: undefined,
     floatDecelerationRatio: given.floatDecelerationRatio,
     freeRollTime: perhaps(seconds, given.freeRollTime),
     idleThrust: perhaps((force) => si('force', force), given.idleThrust),

@@ -48,11 +48,17 @@ export interface LeastSquaresSolution {
   readonly iterations: number;
 }
 
-const greatestIterations = 200;
-/** Cosine between residuals and every column of the Jacobian below which a point is a minimum. */
-const flat = 1e-8;
-/** The same where no further descent can be seen for rounding. */
+/** Cosine where no further descent can be seen for rounding. */
 const flatToRounding = 1e-5;
+
+/** How far to search. */
+export interface Search {
+  /** cosine between the residuals and each column of the Jacobian below which a point is a minimum */
+  readonly flatness: number;
+  readonly greatestIterations: number;
+}
+
+const thorough: Search = { flatness: 1e-8, greatestIterations: 60 };
 
 /**
  * Parameters inside bounds at which the sum of squares of residuals is least, by damped Gauss-Newton steps.
@@ -63,6 +69,7 @@ const flatToRounding = 1e-5;
  * @param residuals - r, each over its standard deviation
  * @param count - how many, at least one
  * @param parameters - start inside the bounds
+ * @param search - how far; absent: to the minimum
  * @returns work that yields once an iteration, and then the solution or the name of why there is none
  * @remarks A local minimum: one start. Covariance holds for residuals of unit variance near a linear problem.
  * @see references.Marquardt1963; references.More1978
@@ -71,6 +78,7 @@ export function* leastSquares(
   residuals: Residuals,
   count: number,
   parameters: readonly LeastSquaresParameter[],
+  { flatness, greatestIterations } = thorough,
 ): Work<LeastSquares> {
   const n = parameters.length;
   let x: Float64Array = Float64Array.from(parameters, ({ start, low, high }) => Math.min(high, Math.max(low, start)));
@@ -106,7 +114,7 @@ export function* leastSquares(
     };
     if (normal.some((value, i) => i % (n + 1) === 0 && !(value > 0))) return { outcome: 'undetermined', parameters: x };
     const slope = steepness(normal, gradient, held, sum);
-    if (slope <= flat) return done();
+    if (slope <= flatness) return done();
     for (;;) {
       const next = stepped(parameters, x, normal, gradient, held, damping);
       const nextResiduals = new Float64Array(count);
@@ -127,7 +135,9 @@ export function* leastSquares(
       }
       damping *= 10;
       if (damping > 1e14) {
-        return slope <= flatToRounding ? done() : { outcome: 'no-convergence', parameters: x, sumOfSquares: sum };
+        return slope <= Math.max(flatness, flatToRounding)
+          ? done()
+          : { outcome: 'no-convergence', parameters: x, sumOfSquares: sum };
       }
     }
     yield;

@@ -1,3 +1,4 @@
+import type { Fit } from './fit/fit.ts';
 import type { FlightManual } from './flight-manual/flight-manual.ts';
 
 /**
@@ -70,6 +71,8 @@ export interface Aeroplane {
   readonly airspeedCalibration?: AirspeedCalibration;
   /** the manual's own figures, as printed */
   readonly flightManual?: FlightManual;
+  /** what its physics was fitted to */
+  readonly fit?: Fit;
 }
 
 export const antiSkids = ['none', 'on-off', 'quasi-modulating', 'fully-modulating'] as const;
@@ -131,6 +134,8 @@ export interface Configuration {
   readonly rollingStartAllowance?: number;
   readonly approachAngle?: number;
   readonly flareLoadFactor?: number;
+  /** the approach angle holds the flare as it was fitted: the air distance is the arc alone, without float */
+  readonly flareFitted?: boolean;
   /** (D - T)/W while floating */
   readonly floatDecelerationRatio?: number;
   readonly freeRollTime?: number;

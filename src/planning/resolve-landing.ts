@@ -34,7 +34,8 @@ export interface ResolvedLanding {
   readonly approachSpeedIncrement: number;
   readonly approachAngle: number;
   readonly flareLoadFactor: number;
-  readonly floatDecelerationRatio: number;
+  /** undefined: the flare was fitted, and the arc alone is the air distance */
+  readonly floatDecelerationRatio: number | undefined;
   readonly freeRollTime: number;
   /** of the whole aeroplane [N] */
   readonly idleThrust: number;
@@ -79,13 +80,15 @@ export function resolveLanding(
       standing: d.flareLoadFactor,
       runMember: 'flareLoadFactor',
     }),
-    floatDecelerationRatio: figures.figure({
-      member: 'floatDecelerationRatio',
-      name: 'the deceleration while floating',
-      stated: configuration.floatDecelerationRatio,
-      standing: d.floatDecelerationRatio,
-      runMember: 'floatDecelerationRatio',
-    }),
+    floatDecelerationRatio: configuration.flareFitted
+      ? undefined
+      : figures.figure({
+          member: 'floatDecelerationRatio',
+          name: 'the deceleration while floating',
+          stated: configuration.floatDecelerationRatio,
+          standing: d.floatDecelerationRatio,
+          runMember: 'floatDecelerationRatio',
+        }),
     freeRollTime: figures.figure({
       member: 'freeRollTime',
       name: 'the time from touchdown to braking',

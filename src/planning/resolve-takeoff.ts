@@ -1,4 +1,5 @@
-import type { Configuration, ScheduledSpeed } from '../performance/aeroplane.ts';
+import type { Configuration } from '../performance/aeroplane.ts';
+import type { TakeoffFigures } from '../performance/takeoff/takeoff-figures.ts';
 import type { TakeoffRun } from '../performance/takeoff/takeoff-run.ts';
 import type { Assumed } from './assumed.ts';
 import { ConfigurationFigures } from './configuration-figures.ts';
@@ -7,15 +8,7 @@ import type { Question } from './question.ts';
 import { takeoffDefaults } from './rules/takeoff-defaults.ts';
 
 /** A takeoff configuration with nothing left out, in SI. */
-export interface ResolvedTakeoff {
-  readonly rotation: ScheduledSpeed;
-  readonly liftOff: ScheduledSpeed;
-  readonly screen: ScheduledSpeed;
-  readonly rotationTime: number;
-  readonly pullUpLoadFactor: number;
-  readonly groundLiftCoefficient: number;
-  readonly groundDragIncrement: number;
-  readonly airDragIncrement: number;
+export interface ResolvedTakeoff extends TakeoffFigures {
   readonly assumed: readonly Assumed[];
 }
 

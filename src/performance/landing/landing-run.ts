@@ -68,7 +68,7 @@ export interface LandingRun extends BrakedRun {
    * (D - T)/W in the float, about 0.12: an aeroplane nobody has fitted takes at least seven seconds to touch down and floats from
    * 0.96 of the reference speed; absent: the arc alone, for an aeroplane whose flare was fitted
    */
-  readonly floatDecelerationRatio?: number;
+  readonly floatDecelerationRatio?: number | undefined;
 }
 
 /** What came of it: the distances, or the name of why there are none with the number that shows it. */

@@ -5,6 +5,7 @@ import {
   ordinaryTouchdownRatio,
 } from '../../performance/landing/landing-air-distance.ts';
 import { landingArc } from '../../performance/landing/landing-arc.ts';
+import type { LandingRun } from '../../performance/landing/landing-run.ts';
 import { configurationPointer } from '../aeroplane-pointer.ts';
 import type { PreparedLanding } from '../prepare-landing.ts';
 import type { LandingQuestion } from '../question.ts';
@@ -101,6 +102,29 @@ export function landingFlightLines(
     unit: 'm',
     source: 'Raymer',
   });
+  const { floatDecelerationRatio } = resolved;
+  if (floatDecelerationRatio !== undefined) floatLines(sheet, question, run, floatDecelerationRatio, screen);
+  sheet.formula({
+    symbol: 's_A',
+    name: 'air distance',
+    formula: floatDecelerationRatio === undefined ? 's_arc' : 'max(s_arc, s_ordinary) + s_float',
+    value: air.distance,
+    unit: 'm',
+    source: floatDecelerationRatio === undefined ? 'HouseFit' : 'Ac25s32',
+    shownAs: distance,
+  });
+}
+
+/** The time and the float of an aeroplane whose flare nobody has fitted. */
+function floatLines(
+  sheet: Worksheet,
+  question: LandingQuestion,
+  run: LandingRun,
+  floatDecelerationRatio: number,
+  screen: string,
+): void {
+  const { referenceSpeed, touchdownSpeed, headwind } = run;
+  const air = landingAirDistance(run);
   const ordinary = ordinaryTime * (ordinaryMeanRatio * referenceSpeed - headwind);
   sheet.formula({
     symbol: 's_ordinary',
@@ -113,8 +137,8 @@ export function landingFlightLines(
   sheet.stated({
     symbol: 'd_F',
     name: 'deceleration in the float over g',
-    value: resolved.floatDecelerationRatio,
-    at: configured('floatDecelerationRatio'),
+    value: floatDecelerationRatio,
+    at: configurationPointer(question, 'floatDecelerationRatio'),
   });
   const floatFrom = ordinaryTouchdownRatio * referenceSpeed;
   sheet.formula({
@@ -135,14 +159,5 @@ export function landingFlightLines(
     value: air.floatDistance,
     unit: 'm',
     source: 'HouseEnergyPath',
-  });
-  sheet.formula({
-    symbol: 's_A',
-    name: 'air distance',
-    formula: 'max(s_arc, s_ordinary) + s_float',
-    value: air.distance,
-    unit: 'm',
-    source: 'Ac25s32',
-    shownAs: distance,
   });
 }
