@@ -42,7 +42,7 @@ export function outliers(
     const { distance, relativeSd, printed } = place.observation;
     const ratio = logRatios[i] as number;
     const { difference, scatter } = beside[i] as Beside;
-    const exchanged = exchangedThatGoes(place, difference, Math.max(scatter, relativeSd / 2));
+    const exchanged = exchangedThatGoes(place, ratio, difference, Math.max(scatter, relativeSd / 2));
     const offStep = printed !== undefined && printed.step >= 5 * printed.unit && !isMultiple(distance, printed.step);
     const far =
       Math.abs(ratio) > farFromFit * scale * relativeSd ||
@@ -78,8 +78,13 @@ function besideNeighbours(points: readonly FitPoint[], places: readonly Placed[]
   });
 }
 
-/** The exchange of two neighbouring digits that brings a figure to its neighbours, where one does. */
-function exchangedThatGoes({ observation }: Placed, difference: number, scatter: number): number | undefined {
+/** The exchange of two neighbouring digits that brings a figure to its neighbours or to the fit, where one does. */
+function exchangedThatGoes(
+  { observation }: Placed,
+  ratio: number,
+  difference: number,
+  scatter: number,
+): number | undefined {
   const { distance, printed } = observation;
   if (printed === undefined) return undefined;
   const { unit, step } = printed;
@@ -87,7 +92,8 @@ function exchangedThatGoes({ observation }: Placed, difference: number, scatter:
     .map((figure) => figure * unit)
     .filter((other) => step < 5 * unit || isMultiple(other, step))
     .find((other) => {
-      const left = Math.abs(difference + Math.log(distance / other));
+      const change = Math.log(distance / other);
+      const left = Math.min(Math.abs(difference + change), Math.abs(ratio + change));
       return left < 3 * scatter && left < Math.abs(difference) / 3;
     });
 }
