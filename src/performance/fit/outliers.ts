@@ -15,6 +15,8 @@ export interface Outlier {
 const farFromFit = 4.5;
 /** The same from its neighbours, for a figure that an exchange of digits would put right. */
 const farFromNeighbours = 6;
+/** Standard deviations from the fit within which an exchanged figure goes with the rest. */
+const goesWithFit = 2.5;
 const neighbours = 4;
 /** Least scatter among neighbours, over the distance: a smooth table is still rounded. */
 const leastScatter = 0.002;
@@ -93,8 +95,9 @@ function exchangedThatGoes(
     .filter((other) => step < 5 * unit || isMultiple(other, step))
     .find((other) => {
       const change = Math.log(distance / other);
-      const left = Math.min(Math.abs(difference + change), Math.abs(ratio + change));
-      return left < 3 * scatter && left < Math.abs(difference) / 3;
+      const goes =
+        Math.abs(difference + change) < 3 * scatter || Math.abs(ratio + change) < goesWithFit * observation.relativeSd;
+      return goes && Math.abs(ratio + change) < Math.abs(ratio) / 3;
     });
 }
 
