@@ -50,7 +50,7 @@ export function checkEntries(
 const outputsOf: Readonly<Record<ManualPhase, readonly ManualOutput[]>> = {
   takeoff: ['groundRoll', 'takeoffDistance', 'liftOff', 'screen'],
   landing: ['groundRoll', 'landingDistance', 'landingReference'],
-  climb: ['climbGradient', 'climbRate', 'screen'],
+  climb: ['climbGradient', 'climbRate'],
 };
 const speeds: readonly ManualOutput[] = ['liftOff', 'screen', 'landingReference'];
 

@@ -1,10 +1,12 @@
 import type { ManualAxis } from '../../performance/flight-manual/flight-manual.ts';
+import { speaksOfSurface } from '../../performance/flight-manual/speaks-of-surface.ts';
 import type { FlightManualOnWire } from '../flight-manual/flight-manual.ts';
 import type { ManualGraphOnWire } from '../flight-manual/manual-graph.ts';
 import type { ManualTableOnWire } from '../flight-manual/manual-table.ts';
 import type { SheetOnWire } from '../flight-manual/to-manual-sheet.ts';
 import { isAxis, isOutput } from '../flight-manual/to-manual-table.ts';
 import type { WorkedExampleOnWire } from '../flight-manual/worked-example.ts';
+import { toSurface } from '../to-runway.ts';
 import { entriesOf } from './check-manual-graph.ts';
 
 /** A table or a graph with what it is entered with and gives: what its notes and examples are checked against. */
@@ -41,7 +43,8 @@ export function enteredSheets({ tables = [], graphs = [] }: FlightManualOnWire, 
       ({ sheet, outputs }) =>
         outputs.includes('groundRoll') &&
         sheet.for === one.sheet.for &&
-        one.sheet.configurations.every((id) => sheet.configurations.includes(id)),
+        one.sheet.configurations.every((id) => sheet.configurations.includes(id)) &&
+        speaksOfSurface(toSurface(sheet.conditions.surface), toSurface(one.sheet.conditions.surface)),
     ),
   }));
 }

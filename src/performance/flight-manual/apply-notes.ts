@@ -88,8 +88,11 @@ function apply(
   figures: CorrectedFigures,
 ): void {
   const { factor } = made;
-  const added = (figures.groundRoll ?? 0) * (factor - 1);
   const { multiplies } = note;
+  if (multiplies === 'groundRollAddedToBoth' && figures.groundRoll === undefined) {
+    throw new RangeError(`a share of the ground roll is added on ${id}, and there is none`);
+  }
+  const added = (figures.groundRoll ?? 0) * (factor - 1);
   if (multiplies === 'climb') figures.climbFactor *= factor;
   if (figures.groundRoll !== undefined) {
     if (multiplies === 'both' || multiplies === 'groundRoll') figures.groundRoll *= factor;

@@ -1,6 +1,6 @@
-import type { FlightManual, ManualOutput, ManualPhase } from './flight-manual.ts';
+import type { FlightManual, ManualOutput, ManualPhase, Sheet } from './flight-manual.ts';
 import type { AppliedNote, ManualAsked, ManualBound, ManualSilence, OutsideManual } from './manual-figures.ts';
-import { type Sheet, type SheetFigures, sheetFigures } from './sheet-figures.ts';
+import { type SheetFigures, sheetFigures } from './sheet-figures.ts';
 
 /** A sheet and what it makes of the question. */
 export interface SheetFound {
@@ -22,20 +22,20 @@ export function gives(sheet: Sheet, output: ManualOutput): boolean {
 /**
  * Of several sheets for an output the first that holds the point, else the one on the fewest edges and for the nearest mass.
  *
- * @param rollSheet - where the ground roll comes from, for sheets that do not give it
+ * @param others - sheets of the manual from which a ground roll may come that a note adds a share of
  * @returns undefined where no sheet gives the output; with the bounds of every sheet where none reaches
  */
 export function bestSheet(
   sheets: readonly Sheet[],
   output: ManualOutput,
   asked: ManualAsked,
-  rollSheet?: Sheet,
+  others: readonly Sheet[] = [],
 ): SheetFound | undefined {
   const giving = sheets.filter((sheet) => gives(sheet, output));
   const bounds: ManualBound[] = [];
   let best: SheetFound | undefined;
   for (const sheet of giving) {
-    const figures = sheetFigures(sheet, asked, rollSheet);
+    const figures = sheetFigures(sheet, asked, others);
     const found = { sheet, figures };
     if (figures.outside.length > 0) bounds.push(...figures.outside);
     else if (figures.edges.length === 0) return found;
@@ -72,11 +72,18 @@ export function together(
   if (found.length === 0) return undefined;
   const used = one?.sheet === other?.sheet ? found.slice(0, 1) : found;
   const outside = used.flatMap(({ figures }) => figures.outside);
-  if (outside.length > 0) return { outcome: 'outside-flight-manual', bounds: outside };
+  if (outside.length > 0) return { outcome: 'outside-flight-manual', bounds: once(outside) };
   return {
     sheets: used.map(({ sheet: { id, page } }) => ({ id, page })),
     notes: used.flatMap(({ figures }) => figures.notes),
     silent: [...new Set(used.flatMap(({ figures }) => figures.silent))],
-    edges: used.flatMap(({ figures }) => figures.edges),
+    edges: once(used.flatMap(({ figures }) => figures.edges)),
   };
+}
+
+function once(bounds: readonly ManualBound[]): ManualBound[] {
+  return bounds.filter(
+    ({ sheet, axis, side }, i) =>
+      bounds.findIndex((other) => other.sheet === sheet && other.axis === axis && other.side === side) === i,
+  );
 }

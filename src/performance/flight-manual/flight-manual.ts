@@ -165,6 +165,9 @@ export interface ManualGraph extends ManualSheet {
   readonly workedExamples: readonly WorkedExample[];
 }
 
+/** A sheet to be read, whichever way it is printed. */
+export type Sheet = ManualTable | ManualGraph;
+
 /**
  * One panel of digitised curves.
  *

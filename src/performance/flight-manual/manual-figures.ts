@@ -48,6 +48,9 @@ export interface AppliedNote {
 /** What the manual does not speak of, though the question has it. */
 export type ManualSilence = 'wind' | 'slope' | 'surface';
 
+/** A speed that a sheet prints beside its distances. */
+export type PrintedSpeed = 'liftOff' | 'screen' | 'landingReference';
+
 /** The manual's own figures, its notes applied in its order [m]. */
 export interface ManualFigures {
   readonly outcome: 'figures';
@@ -55,6 +58,8 @@ export interface ManualFigures {
   readonly groundRoll: number | undefined;
   /** to or from the screen; absent where it gives the roll alone */
   readonly wholeDistance: number | undefined;
+  /** those that the sheet prints beside its distances, CAS [m/s] */
+  readonly speeds: Readonly<Partial<Record<PrintedSpeed, number>>>;
   readonly sheets: readonly { readonly id: string; readonly page: string }[];
   readonly notes: readonly AppliedNote[];
   readonly silent: readonly ManualSilence[];

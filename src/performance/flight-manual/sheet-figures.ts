@@ -1,11 +1,10 @@
 import { applyNotes, type CorrectedFigures, surfaceNotes } from './apply-notes.ts';
-import type { ManualGraph, ManualOutput, ManualTable } from './flight-manual.ts';
+import type { ManualOutput, Sheet } from './flight-manual.ts';
 import type { AppliedNote, ManualAsked, ManualBound, ManualSilence } from './manual-figures.ts';
 import { offConditions, silentOn } from './off-conditions.ts';
 import { axesOf, readSheet } from './read-sheet.ts';
+import { rollBeside } from './roll-beside.ts';
 import { speaksOfSurface } from './speaks-of-surface.ts';
-
-export type Sheet = ManualTable | ManualGraph;
 
 /** What one sheet makes of a question, its notes applied [SI]. */
 export interface SheetFigures {
@@ -20,26 +19,22 @@ export interface SheetFigures {
 /**
  * The figures of one sheet: as printed, without the factor that they hold, corrected by its notes.
  *
- * @param rollSheet - of a sheet without a ground roll: the one that gives it, for notes that add a share of the roll
+ * @param others - sheets of the manual, one of which gives the ground roll where this one adds a share of it and does not
  */
-export function sheetFigures(sheet: Sheet, asked: ManualAsked, rollSheet?: Sheet): SheetFigures {
+export function sheetFigures(sheet: Sheet, asked: ManualAsked, others: readonly Sheet[] = []): SheetFigures {
   const read = readSheet(sheet, asked);
-  const roll = sheet.outputs.some((output) => output === 'groundRoll')
-    ? undefined
-    : rollSheet && readSheet(rollSheet, asked);
   const { standardTemperature, outputs } = read;
   const axes = axesOf(sheet);
   const off = offConditions(sheet, axes, asked, standardTemperature);
-  const whole = outputs.takeoffDistance ?? outputs.landingDistance;
+  const beside = needsRoll(sheet) ? rollBeside(sheet, asked, others) : undefined;
   const { factor } = sheet.contains;
   const figures: CorrectedFigures = {
-    groundRoll:
-      unfactored(outputs.groundRoll, factor) ?? unfactored(roll?.outputs.groundRoll, rollSheet?.contains.factor),
-    wholeDistance: unfactored(whole, factor),
+    groundRoll: unfactored(outputs.groundRoll, factor) ?? beside?.groundRoll,
+    wholeDistance: unfactored(outputs.takeoffDistance ?? outputs.landingDistance, factor),
     climbFactor: 1,
     notes: [],
-    edges: [...read.edges, ...off.edges],
-    outside: [...read.outside, ...off.outside, ...(roll?.outside ?? [])],
+    edges: [...read.edges, ...off.edges, ...(beside?.edges ?? [])],
+    outside: [...read.outside, ...off.outside, ...(beside?.outside ?? [])],
   };
   applyNotes(sheet, asked, figures, standardTemperature);
   return {
@@ -51,7 +46,14 @@ export function sheetFigures(sheet: Sheet, asked: ManualAsked, rollSheet?: Sheet
   };
 }
 
-function unfactored(distance: number | undefined, factor = 1): number | undefined {
+function needsRoll({ outputs, notes }: Sheet): boolean {
+  return (
+    !outputs.some((output) => output === 'groundRoll') &&
+    notes.some(({ multiplies }) => multiplies === 'groundRollAddedToBoth')
+  );
+}
+
+function unfactored(distance: number | undefined, factor: number): number | undefined {
   return distance === undefined ? undefined : distance / factor;
 }
 

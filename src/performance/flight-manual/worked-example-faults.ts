@@ -1,8 +1,8 @@
 import { standardTemperature } from '../../physics/atmosphere.ts';
-import type { FlightManual, ManualOutput, WorkedExample } from './flight-manual.ts';
+import type { FlightManual, ManualOutput, Sheet, WorkedExample } from './flight-manual.ts';
 import type { ManualAsked, ManualBound } from './manual-figures.ts';
 import { readSheet } from './read-sheet.ts';
-import { type Sheet, sheetFigures } from './sheet-figures.ts';
+import { sheetFigures } from './sheet-figures.ts';
 
 /** A worked example of the manual that its own sheet does not give again. */
 export interface WorkedExampleFault {
@@ -28,14 +28,11 @@ export interface WorkedExampleFault {
  */
 export function workedExampleFaults({ tables, graphs }: FlightManual): WorkedExampleFault[] {
   const sheets: readonly Sheet[] = [...tables, ...graphs];
-  return sheets.flatMap((sheet) => {
-    const rollSheet = sheets.find((other) => givesRollFor(other, sheet));
-    return sheet.workedExamples.flatMap((example, i) => faultsOf(sheet, example, i, rollSheet));
-  });
+  return sheets.flatMap((sheet) => sheet.workedExamples.flatMap((example, i) => faultsOf(sheet, example, i, sheets)));
 }
 
-function faultsOf(sheet: Sheet, example: WorkedExample, index: number, rollSheet?: Sheet): WorkedExampleFault[] {
-  const { outputs, outside, silent } = sheetFigures(sheet, askedOf(sheet, example), rollSheet);
+function faultsOf(sheet: Sheet, example: WorkedExample, index: number, others: readonly Sheet[]): WorkedExampleFault[] {
+  const { outputs, outside, silent } = sheetFigures(sheet, askedOf(sheet, example), others);
   const faults: WorkedExampleFault[] = [];
   for (const [output, theirs] of Object.entries(example.reads) as [ManualOutput, number][]) {
     const told = { sheet: sheet.id, example: index, output, theirs, within: example.within, outside, silent };
@@ -70,14 +67,6 @@ function askedOf(sheet: Sheet, { given, slope = 0, surface }: WorkedExample): Ma
   };
   const isStandardDay = given.temperature === undefined && given.temperatureDeviation === undefined;
   return isStandardDay ? { ...asked, temperature: readSheet(sheet, asked).standardTemperature } : asked;
-}
-
-function givesRollFor(other: Sheet, { phase, configurations }: Sheet): boolean {
-  return (
-    other.phase === phase &&
-    other.outputs.some((output) => output === 'groundRoll') &&
-    other.configurations.some((id) => configurations.includes(id))
-  );
 }
 
 function isDistance(output: ManualOutput): boolean {
