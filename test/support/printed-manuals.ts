@@ -136,3 +136,140 @@ export function askedOf(given: {
     ...given.rest,
   };
 }
+
+/** A manual with every kind of sheet that a definition of the sample tourer can have, in order; its graph is straight lines. */
+export function fullManual() {
+  const example = (given: object, reads: object, unit: 'ft' | 'percent') => ({
+    given,
+    reads,
+    within: { value: 1, unit },
+  });
+  return {
+    document: 'Flight manual of the Sample Tourer (invented)',
+    revision: 'B',
+    tables: [
+      handbookTakeoff(),
+      knowledgeTestLanding(),
+      {
+        id: 'climb',
+        for: 'climb',
+        configurations: ['takeoff-10'],
+        page: '5-9',
+        conditions: { surface: pavedDry },
+        columns: [
+          { name: 'flap', unit: 'deg' },
+          { name: 'mass', unit: 'kg' },
+          { name: 'pressureAltitude', unit: 'ft' },
+          { name: 'climbGradient', unit: 'percent' },
+        ],
+        rows: [
+          [10, 900, 0, 11],
+          [10, 900, 4000, 8],
+          [10, 1030, 0, 9],
+          [10, 1030, 4000, 6.5],
+        ],
+        notes: [
+          {
+            about: 'aboveStandard',
+            byPressureAltitude: [{ upTo: { value: 2000, unit: 'ft' }, changePercent: -5 }, { changePercent: -8 }],
+            per: { value: 10, unit: 'deltaC' },
+            multiplies: 'climb',
+          },
+        ],
+        workedExamples: [
+          example(
+            {
+              flap: { value: 10, unit: 'deg' },
+              mass: { value: 965, unit: 'kg' },
+              pressureAltitude: { value: 0, unit: 'ft' },
+            },
+            { climbGradient: { value: 10, unit: 'percent' } },
+            'percent',
+          ),
+        ],
+      },
+    ],
+    speedTables: [
+      {
+        id: 'takeoff-speeds',
+        configurations: ['takeoff-10'],
+        page: '4-3',
+        airspeed: 'ias',
+        columns: [
+          { name: 'mass', unit: 'kg' },
+          { name: 'liftOff', unit: 'kt' },
+          { name: 'screen', unit: 'kt' },
+        ],
+        rows: [
+          [900, 50, 56],
+          [1030, 54, 60],
+        ],
+      },
+    ],
+    graphs: [
+      {
+        id: 'landing-graph',
+        for: 'landing',
+        configurations: ['landing-full'],
+        page: '5-12',
+        conditions: { surface: pavedDry },
+        output: { name: 'landingDistance', unit: 'ft' },
+        panels: [
+          {
+            kind: 'curves',
+            across: { name: 'temperature', unit: 'degC' },
+            parameter: { name: 'pressureAltitude', unit: 'ft' },
+            curves: [
+              {
+                parameter: 0,
+                points: [
+                  [-10, 1000],
+                  [40, 1200],
+                ],
+              },
+              {
+                parameter: 6000,
+                points: [
+                  [-10, 1300],
+                  [40, 1500],
+                ],
+              },
+            ],
+          },
+          {
+            kind: 'guide',
+            across: { name: 'mass', unit: 'kg' },
+            reference: 1030,
+            curves: [
+              {
+                parameter: 900,
+                points: [
+                  [800, 700],
+                  [1030, 900],
+                ],
+              },
+              {
+                parameter: 1600,
+                points: [
+                  [800, 1300],
+                  [1030, 1600],
+                ],
+              },
+            ],
+          },
+        ],
+        workedExamples: [
+          example(
+            {
+              temperature: { value: 15, unit: 'degC' },
+              pressureAltitude: { value: 3000, unit: 'ft' },
+              mass: { value: 1030, unit: 'kg' },
+            },
+            { landingDistance: { value: 1250, unit: 'ft' } },
+            'ft',
+          ),
+        ],
+      },
+    ],
+  };
+}

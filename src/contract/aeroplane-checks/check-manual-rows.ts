@@ -17,7 +17,8 @@ export function checkManualRows(given: ManualTableOnWire, at: string): Fault[] {
   const table = toManualTable(asCalibrated);
   const faults = [...checkDuplicates(given, table, at), ...checkConstant(given, table, at)];
   if (faults.length > 0) return faults;
-  return [...checkTotals(given, table, at), ...checkStandard(given, table, at), ...checkMonotone(given, table, at)];
+  const figures = [...checkTotals(given, table, at), ...checkStandard(given, table, at)];
+  return figures.length > 0 ? figures : checkMonotone(given, table, at);
 }
 
 /** Rows for one combination twice. */

@@ -84,7 +84,7 @@ export function toWorkedExample({ given, reads, within }: WorkedExampleOnWire): 
     slope: perhaps((rise) => si('proportion', rise), slope),
     surface: perhaps(toSurface, surface),
     reads: inSi(reads) as WorkedExample['reads'],
-    within: within.unit === 'percent' ? within.value / 100 : toleranceOf(within),
+    within: toleranceOf(within),
   });
 }
 
@@ -96,5 +96,6 @@ function inSi(quantities: Readonly<Partial<Record<ManualAxis | ManualOutput, Q>>
 }
 
 function toleranceOf({ value, unit }: Q): number {
+  if (unit === 'percent') return toSi('proportion', value, unit);
   return unit === 'm' || unit === 'ft' ? toSi('length', value, unit) : toSi('speed', value, unit as never);
 }

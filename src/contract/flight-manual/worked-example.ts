@@ -12,17 +12,25 @@ import {
   temperature,
   temperatureAboveStandard,
 } from '../quantities.ts';
+import type { Q } from '../quantity.ts';
 import { manualSurface } from './manual-sheet.ts';
+
+/** The greatest of such a difference in each unit; our choice. */
+const greatestWithin = { m: 100, ft: 300, percent: 2, 'ft/min': 100, 'm/s': 3, kt: 5, 'km/h': 10, mph: 6 } as const;
+type WithinUnit = keyof typeof greatestWithin;
 
 /** How near to what the manual reads, in the measure of what it reads. */
 const within = z
-  .discriminatedUnion('unit', [
-    z.strictObject({ value: z.number().min(0).max(100), unit: z.enum(['m', 'ft']) }),
-    z.strictObject({ value: z.number().min(0).max(2), unit: z.literal('percent') }),
-    z.strictObject({ value: z.number().min(0).max(100), unit: z.literal('ft/min') }),
-    z.strictObject({ value: z.number().min(0).max(5), unit: z.enum(['m/s', 'kt', 'km/h', 'mph']) }),
-  ])
-  .meta({ id: 'ManualTolerance', description: 'Greatest difference from what the manual reads, itself included.' });
+  .discriminatedUnion(
+    'unit',
+    Object.entries(greatestWithin).map(([unit, most]) =>
+      z.strictObject({ value: z.number().min(0).max(most), unit: z.literal(unit as WithinUnit) }),
+    ) as unknown as [z.ZodObject, ...z.ZodObject[]],
+  )
+  .meta({
+    id: 'ManualTolerance',
+    description: 'Greatest difference from what the manual reads, itself included.',
+  }) as unknown as z.ZodType<Q<WithinUnit>>;
 
 /** Something that the manual works out itself, and that its sheet must give again. */
 export const workedExample = z
