@@ -4,7 +4,7 @@ import { percent, rateOfClimb, speed, speedSet } from './answer-parts.ts';
 import { answerBegin, answerEnd } from './answer-shape.ts';
 import { basisOf, landingContribution } from './basis.ts';
 import { sensitivitiesOf } from './detail.ts';
-import { bandedDistance, distancesShape, timesShape } from './distances.ts';
+import { bandedDistance, distancesShape, method, timesShape } from './distances.ts';
 import { landingRequest } from './landing-request.ts';
 import { rounding, units } from './question-frame.ts';
 import { runway } from './runway.ts';
@@ -28,6 +28,7 @@ const balkedLanding = z
       outcome: z.literal('computed'),
       gradient: percent.meta({ description: 'Height over distance in still air; below 0 where the aeroplane sinks.' }),
       rate: rateOfClimb,
+      method,
     }),
     z.strictObject({
       outcome: z.literal('outside-stated-data'),

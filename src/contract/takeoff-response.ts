@@ -4,7 +4,7 @@ import { percent, rateOfClimb, speedSet } from './answer-parts.ts';
 import { answerBegin, answerEnd } from './answer-shape.ts';
 import { basisOf, takeoffContribution } from './basis.ts';
 import { sensitivitiesOf } from './detail.ts';
-import { bandedDistance, distancesShape, timesShape } from './distances.ts';
+import { bandedDistance, distancesShape, method, timesShape } from './distances.ts';
 import { obstaclePath } from './obstacle-path.ts';
 import { rounding, units } from './question-frame.ts';
 import { runway } from './runway.ts';
@@ -38,6 +38,7 @@ export const takeoffResponse = z
       .strictObject({
         gradient: percent.meta({ description: 'Height over distance in still air.' }),
         rate: rateOfClimb,
+        method,
       })
       .meta({
         id: 'TakeoffClimb',

@@ -73,6 +73,7 @@ function toBalkedLanding(how: Presentation, given: BalkedLanding): LandingRespon
         outcome: given.outcome,
         gradient: shownQuantity(how, 'gradient', given.gradient, 'down'),
         rate: shownQuantity(how, 'rateOfClimb', given.rate, 'down'),
+        method: given.method,
       }
     : {
         outcome: given.outcome,

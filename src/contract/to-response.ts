@@ -39,6 +39,7 @@ export function toResponse(
     response.climb = {
       gradient: shownQuantity(how, 'gradient', answer.climb.gradient, 'down'),
       rate: shownQuantity(how, 'rateOfClimb', answer.climb.rate, 'down'),
+      method: answer.climb.method,
     };
   }
   if (answer.obstaclePath !== undefined) response.obstaclePath = toObstaclePath(how, answer.obstaclePath);

@@ -229,13 +229,17 @@ export interface Distances {
   readonly airTime?: number | undefined;
 }
 
-/** The climb after takeoff: all engines, flap and gear as at the screen, at the screen speed, out of ground effect. */
-export interface TakeoffClimb {
+/** A climb with all engines. */
+export interface ClimbFigures {
   /** height over distance in still air, below 0 where the aeroplane sinks */
   readonly gradient: number;
   /** [m/s] */
   readonly rate: number;
+  readonly method: Method;
 }
+
+/** The climb after takeoff: all engines, flap and gear as at the screen, at the screen speed, out of ground effect. */
+export type TakeoffClimb = ClimbFigures;
 
 /** One obstacle and the path above it [m], heights above the runway where the distances are measured from. */
 export interface ObstacleCleared {
@@ -280,13 +284,7 @@ export interface TakeoffAnswer extends Answer {
 
 /** The climb after a balked landing: all engines at full power, in the landing configuration, at the landing reference speed. */
 export type BalkedLanding =
-  | {
-      readonly outcome: 'computed';
-      /** height over distance in still air, below 0 where the aeroplane sinks */
-      readonly gradient: number;
-      /** [m/s] */
-      readonly rate: number;
-    }
+  | ({ readonly outcome: 'computed' } & ClimbFigures)
   | {
       readonly outcome: 'outside-stated-data';
       /** true airspeed at which the thrust is asked for, and where its data end [m/s] */

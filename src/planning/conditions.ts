@@ -2,6 +2,7 @@ import type { Configuration } from '../performance/aeroplane.ts';
 import type { Air } from '../performance/air.ts';
 import { airAtRunway, chosenConfiguration, chosenRuleSet, isFault } from './chosen.ts';
 import { type Fault, isRefused, type Refused } from './fault.ts';
+import { atManualSpeeds } from './manual/at-manual-speeds.ts';
 import { type ChosenMethod, chosenMethod } from './method.ts';
 import type { LandingQuestion, TakeoffQuestion } from './question.ts';
 import { type Ruled, ruledBy } from './ruled.ts';
@@ -27,7 +28,8 @@ export function conditionsOf(
   phase: 'takeoff' | 'landing',
 ): Conditions | Refused {
   const ruleSet = chosenRuleSet(question.ruleSet);
-  const configuration = chosenConfiguration(question, phase);
+  const stated = chosenConfiguration(question, phase);
+  const configuration = isFault(stated) ? stated : atManualSpeeds(stated, question);
   const chosen = isFault(configuration) ? undefined : chosenMethod(question, phase);
   const air = airAtRunway(question);
   const wind = windAlong(question.runway, question.weather.wind);

@@ -57,13 +57,7 @@ export function planLanding(question: LandingQuestion): LandingAnswer | Refused 
   const shares = sharesOf(stated, byPhysics);
   const asAnswered = byPhysics && scaledLanding(byPhysics, shares);
   const distances = stated && band && landingDistances(stated, band, run.screenHeight, { method, edge }, asAnswered);
-  const balkedLanding = balkedLandingClimb(
-    question,
-    prepared.thrust,
-    resolved.airDragIncrement,
-    air.density,
-    speeds.landingReference.tas,
-  );
+  const balkedLanding = balkedLandingClimb(question, prepared);
 
   const rollAvailable = declared.credited.lda;
   const { outcome, checks, governing, thin } = assess({

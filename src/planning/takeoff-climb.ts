@@ -1,21 +1,24 @@
 import { steadyClimb } from '../performance/steady-climb.ts';
 import type { TakeoffClimb } from './answer.ts';
+import { climbByManual } from './manual/climb-by-manual.ts';
 import type { PreparedTakeoff } from './prepare-takeoff.ts';
 import type { TakeoffQuestion } from './question.ts';
 
 /**
- * The climb after takeoff: all engines, flap and gear as at the screen, at the screen speed, out of ground effect.
+ * The climb after takeoff by the flight manual, else by physics: all engines, flap and gear as at the screen, at the screen speed, out of ground effect.
  *
  * @returns undefined where that airspeed lies outside measured thrust
  */
 export function climbAfterTakeoff(
-  { mass }: Pick<TakeoffQuestion, 'mass'>,
-  { run }: PreparedTakeoff,
+  question: TakeoffQuestion,
+  { run, conditions, flown }: PreparedTakeoff,
 ): TakeoffClimb | undefined {
-  const { thrust, screenSpeed: airspeed, wingArea, inducedDragFactor, density } = run;
+  const { mass, thrust, screenSpeed: airspeed, wingArea, inducedDragFactor, density } = run;
+  const byManual = flown.fullPowerRatio === 1 ? climbByManual(question, conditions, airspeed) : undefined;
+  if (byManual !== undefined) return byManual;
   const [lowest, highest] = thrust.domain ?? [0, airspeed];
   if (airspeed < lowest || airspeed > highest) return undefined;
-  return steadyClimb({
+  const climb = steadyClimb({
     mass,
     wingArea,
     zeroLiftDragCoefficient: run.airDragCoefficient,
@@ -24,4 +27,5 @@ export function climbAfterTakeoff(
     airspeed,
     thrust: thrust.at(airspeed),
   });
+  return { ...climb, method: conditions.chosen.physics };
 }

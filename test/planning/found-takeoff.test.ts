@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
-import type { ManualNote } from '../../src/performance/flight-manual/flight-manual.ts';
+import type { ManualNote, ManualTable, SpeedTable } from '../../src/performance/flight-manual/flight-manual.ts';
 import type { TakeoffQuestion } from '../../src/planning/question.ts';
-import { byManual, grassNote, headwindNote, manualOf, tailwindNote } from '../support/flown-by-manual.ts';
+import { byManual, grassNote, headwindNote, manualOf, tailwindNote, takeoffTable } from '../support/flown-by-manual.ts';
 import { expectRatio } from '../support/near.ts';
 import { answered, type Changes, changed } from '../support/takeoff-question.ts';
 
@@ -171,5 +171,45 @@ describe('a takeoff by its flight manual', () => {
     expect(() => answered({ ...none, method: 'flight-manual' })).toThrow(/method/);
     expect(() => answered({ ...byManual(), method: 'fitted' })).toThrow(/method/);
     expect(distances(none).takeoffDistance.method).toBe('stated');
+  });
+});
+
+describe('what else the flight manual prints', () => {
+  const climbTable: ManualTable = {
+    ...takeoffTable,
+    id: 'climb-table',
+    phase: 'climb',
+    outputs: ['climbGradient'],
+    cells: takeoffTable.cells.map((_, i) => [0.12 - 0.01 * i]),
+  };
+  const speedTable: SpeedTable = {
+    id: 'speeds',
+    page: '5-10',
+    configurations: ['takeoff'],
+    airspeed: 'cas',
+    speeds: ['liftOff', 'screen'],
+    masses: [900, 1000, 1100],
+    cells: [
+      [48, 53],
+      [50, 56],
+      [52, 58],
+    ].map((row) => row.map((knots) => knots * kt)),
+  };
+
+  it('is the climb it prints, its rate from the gradient at the speed of the screen [V sin gamma]', () => {
+    const question = byManual();
+    const flightManual = { ...manualOf(), tables: [...manualOf().tables, climbTable] };
+    const { climb, speeds } = answered(changed(question, { aeroplane: { flightManual } }));
+    expect(climb?.method).toBe('flight-manual');
+    expectRatio(climb?.gradient ?? 0, 0.08, 1e-12);
+    expectRatio(climb?.rate ?? 0, speeds.screen.tas * Math.sin(Math.atan(0.08)), 1e-12);
+    expect(answered(question).climb?.method).toBe('stated');
+  });
+
+  it('is the speed schedule at the mass asked, in place of the one stated', () => {
+    const flightManual = { ...manualOf(), speedTables: [speedTable] };
+    const { speeds } = answered(changed(byManual(), { aeroplane: { flightManual } }));
+    expectRatio(speeds.liftOff.cas, 50.2 * kt, 1e-12);
+    expectRatio(speeds.screen.cas, 56.2 * kt, 1e-12);
   });
 });
