@@ -1,3 +1,4 @@
+import type { Aeroplane } from '../performance/aeroplane.ts';
 import { type Fault, isRefused } from '../planning/fault.ts';
 import type { ChangedAeroplaneChoice } from './aeroplane-choice.ts';
 import type { AeroplaneLookup, KnownAeroplane } from './aeroplane-lookup.ts';
@@ -35,16 +36,18 @@ export function toChangedAeroplane(
   if (isRefused(read)) return [...idle, ...read.refused.map((fault) => atChange(fault, changes))];
   const faults = [...idle, ...checkAeroplane(read.value, '').map((fault) => atChange(fault, changes))];
   if (faults.length > 0) return faults;
+  const really = members.filter(differs);
+  const isRefitted = really.some(standsForFit);
   return {
     definition: read.value,
-    aeroplane: toAeroplane(read.value),
+    aeroplane: withoutFit(toAeroplane(read.value), isRefitted),
     digest: lookup.digestOf(read.value),
     changes: {
       basedOn,
       revision: base.aeroplane.revision,
       because,
-      changed: members.filter(differs).map(changeText),
-      ...(members.filter(differs).some(movesDistances) ? { flewAs: base.aeroplane } : {}),
+      changed: really.map(changeText),
+      ...(really.some(movesDistances) ? { flewAs: withoutFit(base.aeroplane, isRefitted) } : {}),
     },
   };
 }
@@ -91,6 +94,21 @@ const named = [
 
 function movesDistances({ at }: ChangedMember): boolean {
   return !named.includes(at.split('/')[1] as string);
+}
+
+/** Members whose figures a fit puts its own in place of: changed, they would be lost in it. */
+const fittedMembers =
+  /^\/(propulsion\/(thrustFactor|altitudeLapseCoefficient|temperatureExponent|humidityFactor|kind)|brakes\/(brakingFrictionCoefficient|loadFactor)|configurations\/[^/]+\/(airDragIncrementCoefficient|pullUpLoadFactor|approachAngle|flareLoadFactor))$|^\/(propulsion|brakes)$/;
+
+function standsForFit({ at }: ChangedMember): boolean {
+  return fittedMembers.test(at);
+}
+
+/** The aeroplane as its physics is stated, where a change and a fit speak of the same figure. */
+function withoutFit(aeroplane: Aeroplane, isRefitted: boolean): Aeroplane {
+  if (!isRefitted || aeroplane.fit === undefined) return aeroplane;
+  const { fit: _, ...stated } = aeroplane;
+  return stated;
 }
 
 function differs({ before, after }: ChangedMember): boolean {

@@ -1,3 +1,4 @@
+import { fittedForLanding, fittedForTakeoff } from '../performance/fit/fitted-aeroplane.ts';
 import type { FlightManual, ManualPhase } from '../performance/flight-manual/flight-manual.ts';
 import type { Method } from './answer.ts';
 import type { Fault } from './fault.ts';
@@ -25,8 +26,31 @@ export function chosenMethod(
   const manual = hasSheet(aeroplane.flightManual, phase, configuration) ? aeroplane.flightManual : undefined;
   if (method === 'flight-manual' && manual === undefined)
     return unknownMethod(method, phase, 'table of the flight manual');
-  if (method === 'fitted') return unknownMethod(method, phase, 'fit to a flight manual');
-  return { physics: 'stated', manual, byManual: manual !== undefined && !isPhysicsByName({ method }) };
+  const isFitted = aeroplane.fit?.[phase]?.[configuration] !== undefined;
+  if (method === 'fitted' && !isFitted) return unknownMethod(method, phase, 'fit to a flight manual');
+  return {
+    physics: isFitted && method !== 'stated' ? 'fitted' : 'stated',
+    manual,
+    byManual: manual !== undefined && !isPhysicsByName({ method }),
+  };
+}
+
+/**
+ * A question asked of the aeroplane as its physics was fitted to the flight manual; of the aeroplane as stated where it was not, or
+ * stated figures are asked for.
+ */
+export function askedAsFitted<Q extends Question>(question: Q, phase: 'takeoff' | 'landing'): Q {
+  const { aeroplane, configuration, method, changes } = question;
+  if (method === 'stated' || aeroplane.fit?.[phase]?.[configuration] === undefined) return question;
+  const fitted = phase === 'takeoff' ? fittedForTakeoff : fittedForLanding;
+  const flewAs = changes?.flewAs;
+  return {
+    ...question,
+    aeroplane: fitted(aeroplane, configuration) ?? aeroplane,
+    ...(changes === undefined || flewAs === undefined
+      ? {}
+      : { changes: { ...changes, flewAs: fitted(flewAs, configuration) ?? flewAs } }),
+  };
 }
 
 /** Whether physics is asked for by name, whatever the flight manual has. */

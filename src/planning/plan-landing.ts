@@ -19,6 +19,7 @@ import { landingShortfalls } from './landing-shortfalls.ts';
 import { outsideManualSentence } from './manual/outside-manual-sentence.ts';
 import { outsideManualShortfalls } from './manual/outside-manual-shortfalls.ts';
 import { sharesOf } from './manual/shares.ts';
+import { askedAsFitted } from './method.ts';
 import { prepareLanding } from './prepare-landing.ts';
 import type { LandingQuestion } from './question.ts';
 import { resolveBraking } from './resolve-braking.ts';
@@ -32,7 +33,8 @@ import { windAnswer } from './wind-along.ts';
  *
  * @returns the answer, or every fault that the question's own values bring about
  */
-export function planLanding(question: LandingQuestion): LandingAnswer | Refused {
+export function planLanding(asked: LandingQuestion): LandingAnswer | Refused {
+  const question = askedAsFitted(asked, 'landing');
   const { runway, units } = question;
   const prepared = prepareLanding(question);
   if (isRefused(prepared)) return prepared;

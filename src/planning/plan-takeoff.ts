@@ -14,6 +14,7 @@ import { foundTakeoff } from './found-takeoff.ts';
 import { outsideManualSentence } from './manual/outside-manual-sentence.ts';
 import { outsideManualShortfalls } from './manual/outside-manual-shortfalls.ts';
 import { sharesOf } from './manual/shares.ts';
+import { askedAsFitted } from './method.ts';
 import { obstacleCheck, obstaclePathOf } from './obstacle-path.ts';
 import { pathStart } from './path-start.ts';
 import { prepareTakeoff } from './prepare-takeoff.ts';
@@ -35,7 +36,8 @@ import { windAnswer } from './wind-along.ts';
  *
  * @returns the answer, or every fault that the question's own values bring about
  */
-export function planTakeoff(question: TakeoffQuestion): TakeoffAnswer | Refused {
+export function planTakeoff(asked: TakeoffQuestion): TakeoffAnswer | Refused {
+  const question = askedAsFitted(asked, 'takeoff');
   const { aeroplane, aeroplaneAt, runway, units } = question;
   const prepared = prepareTakeoff(question);
   if (isRefused(prepared)) return prepared;
@@ -74,8 +76,8 @@ export function planTakeoff(question: TakeoffQuestion): TakeoffAnswer | Refused 
     band,
     rollAvailable,
     further: (ofRunway) => {
-      const asked = ruleSet.takeoff.obstacles;
-      const demand = asked?.appliesTo(aeroplane) === true ? asked : undefined;
+      const obstacles = ruleSet.takeoff.obstacles;
+      const demand = obstacles?.appliesTo(aeroplane) === true ? obstacles : undefined;
       const start = pathStart(demand, ofRunway, (checked.credited ?? checked.stated)?.wholeDistance);
       obstaclePath = start && obstaclePathOf(question, prepared, start);
       const climbs = climbChecks(rules.demands, aeroplane, climb?.gradient);

@@ -1,9 +1,10 @@
 import { describe, expect, it } from 'vitest';
+import type { Fit } from '../../src/performance/fit/fit.ts';
 import type { ManualNote, ManualTable, SpeedTable } from '../../src/performance/flight-manual/flight-manual.ts';
 import type { TakeoffQuestion } from '../../src/planning/question.ts';
 import { byManual, grassNote, headwindNote, manualOf, tailwindNote, takeoffTable } from '../support/flown-by-manual.ts';
 import { expectRatio } from '../support/near.ts';
-import { answered, type Changes, changed } from '../support/takeoff-question.ts';
+import { answered, type Changes, changed, plainQuestion } from '../support/takeoff-question.ts';
 
 const ft = 0.3048;
 const kt = 1852 / 3600;
@@ -211,5 +212,46 @@ describe('what else the flight manual prints', () => {
     const { speeds } = answered(changed(byManual(), { aeroplane: { flightManual } }));
     expectRatio(speeds.liftOff.cas, 50.2 * kt, 1e-12);
     expectRatio(speeds.screen.cas, 56.2 * kt, 1e-12);
+  });
+});
+
+describe('physics fitted to the flight manual', () => {
+  const values = { thrustFactor: 0.9, airDragShift: 0.01, altitudeLapseCoefficient: 0.16, temperatureExponent: 0.8 };
+  const digest = '0'.repeat(64);
+  const fit = { takeoff: { takeoff: { values, digest, modelVersion: '1.0.0', rms: 0.01 } } } as unknown as Fit;
+  const { propulsion } = plainQuestion.aeroplane;
+  const asFitted: Changes = {
+    aeroplane: {
+      propulsion: {
+        ...propulsion,
+        thrustFactor: 0.9,
+        altitudeLapseCoefficient: 0.16,
+        temperatureExponent: 0.8,
+        humidityFactor: 0,
+      } as typeof propulsion,
+    },
+    configuration: { airDragIncrementCoefficient: 0.01, pullUpLoadFactor: 1.15 },
+  };
+
+  it('is the same as the fitted figures stated one by one [the pull-up of a fit is 1.15, read]', () => {
+    const withFit = changed(plainQuestion, { aeroplane: { fit } });
+    const byHand = physics(changed(plainQuestion, asFitted));
+    const found = distances(withFit);
+    expectRatio(found.takeoffDistance.value, byHand.takeoffDistance.value, 1e-12);
+    expect(found.takeoffDistance.method).toBe('fitted');
+    expect(distances({ ...withFit, method: 'stated' }).takeoffDistance.value).toBeLessThan(found.takeoffDistance.value);
+  });
+
+  it('carries the manual where it is silent, in place of stated figures, and is marked so', () => {
+    const uphill = changed(byManual([], slope(1.5)), { aeroplane: { flightManual: manualOf(), fit } });
+    const found = distances(uphill);
+    const [sloping, level] = [uphill, changed(uphill, slope(0))].map((one) => distances({ ...one, method: 'fitted' }));
+    expectRatio(
+      found.groundRoll.value,
+      1110 * ft * ((sloping?.groundRoll.value ?? 0) / (level?.groundRoll.value ?? 1)),
+      1e-12,
+    );
+    expect(found.takeoffDistance.method).toBe('fitted');
+    expect(answered(uphill).cautions.find(({ code }) => code === 'flight-manual-silent')?.severity).toBe('note');
   });
 });

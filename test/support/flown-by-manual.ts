@@ -102,3 +102,18 @@ export function byManual(notes: readonly ManualNote[] = [], ...changes: readonly
   const base = changed(plainQuestion, withManual(manualOf({ notes })));
   return changes.reduce((question, change) => changed(question, change), base);
 }
+
+/** An aeroplane whose physics was fitted to masses up to one [kg], wide in all else, and is as stated. */
+export const fittedUpTo = (mass: number): OfAnyPhase => {
+  const of = {
+    fittedTo: '0'.repeat(64),
+    modelVersion: '1.0.0',
+    values: {},
+    standardDeviations: {},
+    correlation: [],
+    rms: 0.01,
+    greatest: 0.02,
+    hull: { mass: [800, mass], pressureAltitude: [-500, 3000], temperature: [240, 320] },
+  } as const;
+  return { aeroplane: { fit: { takeoff: { takeoff: of }, landing: { landing: of } } } };
+};

@@ -12,6 +12,7 @@ import { decelerationMarginal } from './deceleration-marginal.ts';
 import { densityAltitudeHigh } from './density-altitude-high.ts';
 import { downslope } from './downslope.ts';
 import { filmCountsAsWet } from './film-counts-as-wet.ts';
+import { fitOutsideRange } from './fit-outside-range.ts';
 import { flareAboveScreen } from './flare-above-screen.ts';
 import { flightManualAndPhysicsDiffer } from './flight-manual-and-physics-differ.ts';
 import { flightManualEdge } from './flight-manual-edge.ts';
@@ -48,6 +49,7 @@ export const landingCautions: readonly CautionTest<LandingContext>[] = [
   flightManualEdge,
   flightManualSilent,
   flightManualAndPhysicsDiffer,
+  fitOutsideRange,
   massAboveMaximumLanding,
   temperatureAboveLimit,
   pressureAltitudeAboveLimit,

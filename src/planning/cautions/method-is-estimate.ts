@@ -1,3 +1,4 @@
+import type { Method } from '../answer.ts';
 import { isPhysicsByName } from '../method.ts';
 import { type AnswerContext, measureDown, textIn } from './answer-context.ts';
 import type { CautionTest } from './caution-test.ts';
@@ -15,8 +16,13 @@ export const methodIsEstimate: CautionTest<AnswerContext> = {
     const isCarried = flightManual !== undefined && !isPhysicsByName(context.question);
     if (distance === undefined || distance.method === 'flight-manual' || isCarried) return undefined;
     return {
-      message: `The distances are computed from ${context.phase === 'takeoff' ? 'stated thrust, lift and drag' : 'stated lift, drag and brakes'}, not read from the flight manual. The ${context.phase} distance of ${textIn(context, 'distance', distance.value)} has a 90 % band from ${measureDown(context, distance.low)} to ${textIn(context, 'distance', distance.high)}.`,
+      message: `The distances are computed ${origin(context.phase, distance.method)}, not read from the flight manual. The ${context.phase} distance of ${textIn(context, 'distance', distance.value)} has a 90 % band from ${measureDown(context, distance.low)} to ${textIn(context, 'distance', distance.high)}.`,
       at: '/aeroplane',
     };
   },
 };
+
+function origin(phase: 'takeoff' | 'landing', method: Method): string {
+  if (method === 'fitted') return 'by physics fitted to published or measured distances';
+  return phase === 'takeoff' ? 'from stated thrust, lift and drag' : 'from stated lift, drag and brakes';
+}

@@ -9,6 +9,7 @@ import { contaminantHoldsBack } from './contaminant-holds-back.ts';
 import { crosswindBeyondDemonstrated } from './crosswind-beyond-demonstrated.ts';
 import { densityAltitudeHigh } from './density-altitude-high.ts';
 import { filmCountsAsWet } from './film-counts-as-wet.ts';
+import { fitOutsideRange } from './fit-outside-range.ts';
 import { flightManualAndPhysicsDiffer } from './flight-manual-and-physics-differ.ts';
 import { flightManualEdge } from './flight-manual-edge.ts';
 import { flightManualNotUsed } from './flight-manual-not-used.ts';
@@ -45,6 +46,7 @@ export const takeoffCautions: readonly CautionTest<TakeoffContext>[] = [
   flightManualEdge,
   flightManualSilent,
   flightManualAndPhysicsDiffer,
+  fitOutsideRange,
   massAboveMaximum,
   temperatureAboveLimit,
   pressureAltitudeAboveLimit,

@@ -5,6 +5,7 @@ import type { LandingAnswer } from '../answer.ts';
 import { isRefused } from '../fault.ts';
 import { scaledLanding, stopped } from '../landing-runs.ts';
 import { sharesOf } from '../manual/shares.ts';
+import { askedAsFitted } from '../method.ts';
 import { planLanding } from '../plan-landing.ts';
 import { type PreparedLanding, prepareLanding } from '../prepare-landing.ts';
 import type { LandingQuestion } from '../question.ts';
@@ -25,7 +26,8 @@ const brakingFriction: Amount<LandingQuestion> = {
 };
 
 /** The parts of an answer to a landing that were asked for beyond it. */
-export function landingDetail(question: LandingQuestion, answer: LandingAnswer, asked: readonly DetailName[]): Detail {
+export function landingDetail(given: LandingQuestion, answer: LandingAnswer, asked: readonly DetailName[]): Detail {
+  const question = askedAsFitted(given, 'landing');
   const prepared = prepareLanding(question);
   if (isRefused(prepared)) return {};
   const base = changesOf(answer);
@@ -44,7 +46,7 @@ export function landingDetail(question: LandingQuestion, answer: LandingAnswer, 
       ? {}
       : {
           sensitivities: [
-            ...sensitivities(question, inputs, base, distancesOf),
+            ...sensitivities(given, inputs, base, distancesOf),
             sensitivity(question, brakingFriction, base, withBraking(prepared, base)),
           ],
         }),

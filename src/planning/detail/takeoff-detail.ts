@@ -1,6 +1,7 @@
 import { takeoffTrajectory } from '../../performance/takeoff/takeoff-trajectory.ts';
 import type { TakeoffAnswer } from '../answer.ts';
 import { isRefused } from '../fault.ts';
+import { askedAsFitted } from '../method.ts';
 import { planTakeoff } from '../plan-takeoff.ts';
 import { prepareTakeoff } from '../prepare-takeoff.ts';
 import type { TakeoffQuestion } from '../question.ts';
@@ -24,7 +25,8 @@ const inputs: readonly MainInput<TakeoffQuestion>[] = [
 ];
 
 /** An answer to a takeoff with the parts that were asked for. */
-export function takeoffDetail(question: TakeoffQuestion, answer: TakeoffAnswer, asked: readonly DetailName[]): Detail {
+export function takeoffDetail(given: TakeoffQuestion, answer: TakeoffAnswer, asked: readonly DetailName[]): Detail {
+  const question = askedAsFitted(given, 'takeoff');
   const prepared = prepareTakeoff(question);
   if (isRefused(prepared)) return {};
   const { run, flown } = prepared;
@@ -35,9 +37,7 @@ export function takeoffDetail(question: TakeoffQuestion, answer: TakeoffAnswer, 
       ? takeoffTrajectory(run, flown.rollingStartAllowance, trajectorySteps)
       : undefined;
   const moved =
-    base !== undefined && asked.includes('sensitivities')
-      ? sensitivities(question, inputs, base, distancesOf)
-      : undefined;
+    base !== undefined && asked.includes('sensitivities') ? sensitivities(given, inputs, base, distancesOf) : undefined;
   return {
     ...(working === undefined ? {} : { working }),
     ...(points === undefined || answer.distances === undefined

@@ -3,7 +3,7 @@ import { landingCautions } from '../../../src/planning/cautions/landing-cautions
 import { takeoffCautions } from '../../../src/planning/cautions/takeoff-cautions.ts';
 import type { contaminantKinds } from '../../../src/planning/question.ts';
 import { references } from '../../../src/references.ts';
-import { manualOf, withManual } from '../../support/flown-by-manual.ts';
+import { fittedUpTo, manualOf, withManual } from '../../support/flown-by-manual.ts';
 import {
   along,
   type LandingChanges,
@@ -107,6 +107,20 @@ interface Pair {
 }
 
 const pairs: readonly Pair[] = [
+  {
+    code: 'fit-outside-range',
+    severity: 'caution',
+    raised: fittedUpTo(1000),
+    silent: fittedUpTo(1010),
+    says: /^The physics was fitted to masses from 800 kg to 1 000 kg, and 1 010 kg is asked: the landing distance of \d+ m is beyond/,
+  },
+  {
+    code: 'method-is-estimate',
+    severity: 'note',
+    raised: fittedUpTo(1010),
+    silent: withManual(),
+    says: /computed by physics fitted to published or measured distances, not read from the flight manual\./,
+  },
   {
     code: 'flight-manual-edge',
     severity: 'caution',
