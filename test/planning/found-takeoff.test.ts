@@ -2,7 +2,15 @@ import { describe, expect, it } from 'vitest';
 import type { Fit } from '../../src/performance/fit/fit.ts';
 import type { ManualNote, ManualTable, SpeedTable } from '../../src/performance/flight-manual/flight-manual.ts';
 import type { TakeoffQuestion } from '../../src/planning/question.ts';
-import { byManual, grassNote, headwindNote, manualOf, tailwindNote, takeoffTable } from '../support/flown-by-manual.ts';
+import {
+  byManual,
+  fitUpTo,
+  grassNote,
+  headwindNote,
+  manualOf,
+  tailwindNote,
+  takeoffTable,
+} from '../support/flown-by-manual.ts';
 import { expectRatio } from '../support/near.ts';
 import { answered, type Changes, changed, plainQuestion } from '../support/takeoff-question.ts';
 
@@ -217,8 +225,7 @@ describe('what else the flight manual prints', () => {
 
 describe('physics fitted to the flight manual', () => {
   const values = { thrustFactor: 0.9, airDragShift: 0.01, altitudeLapseCoefficient: 0.16, temperatureExponent: 0.8 };
-  const digest = '0'.repeat(64);
-  const fit = { takeoff: { takeoff: { values, digest, modelVersion: '1.0.0', rms: 0.01 } } } as unknown as Fit;
+  const fit: Fit = { takeoff: { takeoff: { ...fitUpTo(1010), values } } };
   const { propulsion } = plainQuestion.aeroplane;
   const asFitted: Changes = {
     aeroplane: {

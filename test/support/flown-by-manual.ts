@@ -103,9 +103,9 @@ export function byManual(notes: readonly ManualNote[] = [], ...changes: readonly
   return changes.reduce((question, change) => changed(question, change), base);
 }
 
-/** An aeroplane whose physics was fitted to masses up to one [kg], wide in all else, and is as stated. */
-export const fittedUpTo = (mass: number): OfAnyPhase => {
-  const of = {
+/** A fit to masses up to one [kg], wide in all else, that leaves every figure as stated. */
+export const fitUpTo = (mass: number) =>
+  ({
     fittedTo: '0'.repeat(64),
     modelVersion: '1.0.0',
     values: {},
@@ -114,6 +114,9 @@ export const fittedUpTo = (mass: number): OfAnyPhase => {
     rms: 0.01,
     greatest: 0.02,
     hull: { mass: [800, mass], pressureAltitude: [-500, 3000], temperature: [240, 320] },
-  } as const;
-  return { aeroplane: { fit: { takeoff: { takeoff: of }, landing: { landing: of } } } };
-};
+  }) as const;
+
+/** An aeroplane with that fit of both phases. */
+export const fittedUpTo = (mass: number): OfAnyPhase => ({
+  aeroplane: { fit: { takeoff: { takeoff: fitUpTo(mass) }, landing: { landing: fitUpTo(mass) } } },
+});
