@@ -19,6 +19,7 @@ export const references = entries({
   SI9: { title: 'BIPM, The International System of Units, 9th edition, 2019', status: 'memory' },
   Icao5: { title: 'ICAO Annex 5, Units of Measurement to be Used in Air and Ground Operations', status: 'memory' },
   Rfc6901: { title: 'RFC 6901, JavaScript Object Notation (JSON) Pointer, 2013', status: 'memory' },
+  Rfc4180: { title: 'RFC 4180, Common Format and MIME Type for Comma-Separated Values, 2005', status: 'memory' },
   Rfc7396: { title: 'RFC 7396, JSON Merge Patch, 2014', status: 'memory' },
   Rfc8259: { title: 'RFC 8259, The JavaScript Object Notation (JSON) Data Interchange Format, 2017', status: 'memory' },
   Rfc9110: { title: 'RFC 9110, HTTP Semantics, 2022', status: 'memory' },

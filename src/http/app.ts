@@ -23,6 +23,7 @@ import { service } from './routes/service.ts';
 import { sources } from './routes/sources.ts';
 import { speeds } from './routes/speeds.ts';
 import { surfaces } from './routes/surfaces.ts';
+import { tables } from './routes/tables.ts';
 import { takeoff } from './routes/takeoff.ts';
 import { defaultSettings, type Settings } from './settings.ts';
 import { stamp } from './stamp.ts';
@@ -83,6 +84,7 @@ export async function buildApp({ catalogue, logger = false, settings }: House): 
     landingChoices(app, lookup, ours),
     speeds(app, lookup, ours),
     airspeed(app, lookup, ours),
+    tables(app, lookup),
     air(app, ours),
   ];
   await documentPages(app);

@@ -27,6 +27,8 @@ export interface Operation<Request extends z.ZodType, Response extends z.ZodType
   readonly response: Response;
   /** one request that the document shows */
   readonly example: z.input<Request>;
+  /** pointers of texts whose own reader judges their characters: such a text has more than one line */
+  readonly ownText?: readonly string[];
   /** the questions that must be answered before the service says ready */
   readonly warmUp: readonly z.input<Request>[];
   readonly answer: (question: z.output<Request>) => z.output<Response> | Refused;
@@ -52,15 +54,16 @@ export class AnswerFault extends Error {}
 export function exchange<Request extends z.ZodType, Response extends z.ZodType>(
   operation: Operation<Request, Response>,
 ): Exchange {
-  const { shown } = operation;
+  const { shown, ownText = [] } = operation;
   const read = reader(operation.request);
   const lawful = z.compile(operation.response, { strict: true });
   return (body) => {
     const json = readStrictJson(body);
     if (isRefused(json)) return toProblem(json);
     const question = read(json.value);
-    if (isRefused(question)) return toProblem({ refused: together(json.slips, question.refused) });
-    if (json.slips.length > 0) return toProblem({ refused: json.slips });
+    const slips = json.slips.filter(({ pointer }) => !ownText.includes(pointer));
+    if (isRefused(question)) return toProblem({ refused: together(slips, question.refused) });
+    if (slips.length > 0) return toProblem({ refused: slips });
     const answer = operation.answer(question.value);
     if (isRefused(answer as object)) return toProblem(answer as Refused);
     if (!lawful.validate(answer)) throw new AnswerFault(faultsOf(operation.response, answer));

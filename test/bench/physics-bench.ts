@@ -13,20 +13,10 @@ import { landingVectorRun } from '../support/landing-runs.ts';
 import { odex } from '../support/odex.ts';
 import { standardAir } from '../support/standard-air.ts';
 import { vectorRun } from '../support/vector-run.ts';
+import { microseconds } from './microseconds.ts';
 import { pathOf, steppedAir, steppedRoll } from './small-steps.ts';
 
 type Print = (line: string) => void;
-
-/** Least time of one call [us] over many short batches, by turns over the arguments. */
-function microseconds<T>(work: (argument: T) => unknown, given: readonly T[], calls: number, batches = 200): number {
-  let least = Number.POSITIVE_INFINITY;
-  for (let batch = 0; batch < batches; batch++) {
-    const start = performance.now();
-    for (let i = 0; i < calls; i++) work(given[i % given.length] as T);
-    least = Math.min(least, (1000 * (performance.now() - start)) / calls);
-  }
-  return least;
-}
 
 /** Time of a fixed chain of square roots and divisions [ns each]: what this machine does at this moment. */
 function calibration(): number {

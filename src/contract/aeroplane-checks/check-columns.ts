@@ -33,7 +33,7 @@ export function checkColumns({ columns, rows }: Columns, at: string): Fault[] {
       faults.push({
         pointer: `${at}/rows/${i}`,
         code: 'contradiction',
-        message: `Row ${i} has ${row.length} numbers for ${columns.length} columns.`,
+        message: `The row has ${row.length} numbers for ${columns.length} columns.`,
         received: row.length,
         allowed: `${columns.length} numbers`,
         hint: 'A combination that the manual leaves blank has no row.',

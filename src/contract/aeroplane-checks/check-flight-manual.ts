@@ -11,7 +11,7 @@ import { checkExampleForms, checkWorkedExamples } from './check-worked-examples.
 import { enteredSheets, examplesOf } from './entered-sheet.ts';
 
 /**
- * The flight manual of a definition: each sheet against itself, against the aeroplane, and against the manual's own examples.
+ * The flight manual of a definition: its sheets, and the configurations of the aeroplane that they are for.
  *
  * @param calibration - 'at-fault' where it is at fault itself, so that nothing can be said of indicated speeds
  */
@@ -23,23 +23,36 @@ export function checkFlightManual(
   const { flightManual } = definition;
   if (flightManual === undefined) return [];
   const here = `${at}/flightManual`;
-  const calibrationAt = `${at}/airspeedCalibration`;
-  const { tables = [], speedTables = [], graphs = [] } = flightManual;
-  const entered = enteredSheets(flightManual, here);
+  return [
+    ...checkManualConfigurations(definition, flightManual, here),
+    ...checkManualSheets(flightManual, calibration, here, `${at}/airspeedCalibration`),
+  ];
+}
+
+/**
+ * The sheets of a flight manual: each against itself, and against the manual's own worked examples.
+ *
+ * @param calibrationAt - pointer to where the airspeed calibration would be
+ */
+export function checkManualSheets(
+  manual: FlightManualOnWire,
+  calibration: AirspeedCalibration | 'at-fault' | undefined,
+  at: string,
+  calibrationAt: string,
+): Fault[] {
+  const { tables = [], speedTables = [], graphs = [] } = manual;
+  const entered = enteredSheets(manual, at);
   const examples = entered.flatMap(examplesOf);
   const faults = [
-    ...checkSheets(flightManual, here),
-    ...checkManualConfigurations(definition, flightManual, here),
-    ...tables.flatMap((table, i) => checkManualTable(table, calibration, `${here}/tables/${i}`, calibrationAt)),
-    ...graphs.flatMap((graph, i) => checkManualGraph(graph, `${here}/graphs/${i}`)),
+    ...checkSheets(manual, at),
+    ...tables.flatMap((table, i) => checkManualTable(table, calibration, `${at}/tables/${i}`, calibrationAt)),
+    ...graphs.flatMap((graph, i) => checkManualGraph(graph, `${at}/graphs/${i}`)),
     ...entered.flatMap((sheet) => checkManualNotes(sheet)),
-    ...speedTables.flatMap((table, i) =>
-      checkSpeedTable(table, calibration, `${here}/speedTables/${i}`, calibrationAt),
-    ),
+    ...speedTables.flatMap((table, i) => checkSpeedTable(table, calibration, `${at}/speedTables/${i}`, calibrationAt)),
     ...checkExampleForms(examples),
   ];
   if (faults.length > 0 || calibration === 'at-fault') return faults;
-  return checkWorkedExamples(flightManual, calibration, examples);
+  return checkWorkedExamples(manual, calibration, examples);
 }
 
 /** How many sheets there are, and that no two have one id. */

@@ -23,12 +23,11 @@ export function checkManualRows(given: ManualTableOnWire, at: string): Fault[] {
 
 /** Rows for one combination twice. */
 function checkDuplicates({ columns, rows }: ManualTableOnWire, { axes, nodes }: ManualTable, at: string): Fault[] {
-  const first = new Map<string, number>();
+  const known = new Set<string>();
   return nodes.flatMap((node, row) => {
     const key = node.join();
-    const before = first.get(key);
-    if (before === undefined) {
-      first.set(key, row);
+    if (!known.has(key)) {
+      known.add(key);
       return [];
     }
     const combination = columns.flatMap(({ name, unit }, column) =>
@@ -38,7 +37,7 @@ function checkDuplicates({ columns, rows }: ManualTableOnWire, { axes, nodes }: 
       {
         pointer: `${at}/rows/${row}`,
         code: 'contradiction' as const,
-        message: `Row ${before} is for ${combination.join(', ')} already.`,
+        message: `A row before it is for ${combination.join(', ')} already.`,
         allowed: 'each combination once',
       },
     ];

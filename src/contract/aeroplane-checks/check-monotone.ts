@@ -54,7 +54,7 @@ function faultOf(given: ManualTableOnWire, slip: Slip, row: number, column: numb
     code: 'contradiction',
     message:
       `${name} is ${cells(row)[column]} ${unit} at ${axis} ${cells(row)[entry]} ${axisUnit}, ` +
-      `and ${cells(other)[column]} ${unit} at ${cells(other)[entry]} ${axisUnit} in row ${other}: ` +
+      `and ${cells(other)[column]} ${unit} at ${cells(other)[entry]} ${axisUnit}: ` +
       `it does not ${way === 1 ? 'fall' : 'rise'} as ${axis} rises.`,
     received: cells(row)[column] as number,
     allowed: `${bound} ${cells(other)[column]} ${unit}`,
