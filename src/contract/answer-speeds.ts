@@ -1,6 +1,7 @@
 import { turnLoadFactor } from '../physics/stall-speed.ts';
 import { raisedCautions } from '../planning/cautions/caution-test.ts';
 import { referenceSpeedRaised } from '../planning/cautions/reference-speed-raised.ts';
+import { takeoffSpeedsRaised } from '../planning/cautions/takeoff-speeds-raised.ts';
 import { isRefused, type Refused } from '../planning/fault.ts';
 import { measureText } from '../planning/sentences/measure-text.ts';
 import { asChosen } from './aeroplane-choice.ts';
@@ -44,8 +45,11 @@ export function answerSpeeds(request: SpeedsRequest, lookup: AeroplaneLookup, st
   if (isRefused(found)) return found;
   const how = presentationOf(request);
   const question = { aeroplane: known.aeroplane, units: how.units };
-  const raised = found.landing && raisedCautions([referenceSpeedRaised], { ...found.landing, question });
-  const cautions = [...changedCautions(known), ...(raised ?? [])];
+  const cautions = [
+    ...changedCautions(known),
+    ...raisedCautions([takeoffSpeedsRaised], { question, raised: found.raised }),
+    ...(found.landing === undefined ? [] : raisedCautions([referenceSpeedRaised], { ...found.landing, question })),
+  ];
   return {
     outcome: 'computed',
     advisory: toAdvisory(how, sentenceOf(how, found, configured.mass, configuration), cautions),

@@ -7,7 +7,7 @@ import type { Refused } from '../planning/fault.ts';
 import { type LandingSpeeds, landingSpeeds } from '../planning/landing-speeds.ts';
 import { resolveLandingSpeeds } from '../planning/resolve-landing.ts';
 import { resolveTakeoff } from '../planning/resolve-takeoff.ts';
-import { takeoffSpeeds } from '../planning/takeoff-speeds.ts';
+import { type RaisedSpeed, takeoffSpeeds } from '../planning/takeoff-speeds.ts';
 
 /** Where a configured aeroplane stands in a question, and its mass [kg]. */
 export interface Configured {
@@ -28,6 +28,8 @@ export interface FoundSpeeds {
     readonly landingReference?: SpeedSet;
     readonly touchdown?: SpeedSet;
   };
+  /** takeoff speeds that the certification basis has raised */
+  readonly raised: readonly RaisedSpeed[];
   /** of a landing configuration: whether its reference speed was raised */
   readonly landing?: LandingSpeeds;
   readonly assumed: readonly Assumption[];
@@ -51,22 +53,26 @@ export function foundSpeeds(configured: Configured, air: Air, loadFactor: number
   if (stallInBank !== undefined && isFault(stallInBank)) return { refused: [stallInBank] };
 
   let takeoff = {};
+  const raised: RaisedSpeed[] = [];
   const assumed: Assumption[] = [];
   if (configuration.for.includes('takeoff')) {
     const resolved = resolveTakeoff(configured, configuration);
-    const speeds = takeoffSpeeds(configured, configuration, resolved, air);
-    if (isFault(speeds)) return { refused: [speeds] };
+    const found = takeoffSpeeds(configured, configuration, resolved, air);
+    if (isFault(found)) return { refused: [found] };
+    const { speeds } = found;
+    raised.push(...found.raised);
     takeoff = { rotation: speeds.rotation, liftOff: speeds.liftOff, screen: speeds.screen };
     assumed.push(...resolved.assumed.map(({ assumption }) => assumption).filter(({ at }) => at.includes('/speeds/')));
   }
   const spoken = { stall, ...(stallInBank === undefined ? {} : { stallInBank }), ...takeoff };
-  if (!configuration.for.includes('landing')) return { speeds: spoken, assumed };
+  if (!configuration.for.includes('landing')) return { speeds: spoken, raised, assumed };
   const resolved = resolveLandingSpeeds(configured, configuration);
   const landing = landingSpeeds(configured, configuration, resolved, air);
   if (isFault(landing)) return { refused: [landing] };
   const { landingReference, touchdown } = landing.speeds;
   return {
     speeds: { ...spoken, landingReference, touchdown },
+    raised,
     landing,
     assumed: [...assumed, ...resolved.assumed.map(({ assumption }) => assumption)],
   };

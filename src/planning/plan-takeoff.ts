@@ -41,7 +41,7 @@ export function planTakeoff(asked: TakeoffQuestion): TakeoffAnswer | Refused {
   const { aeroplane, aeroplaneAt, runway, units } = question;
   const prepared = prepareTakeoff(question);
   if (isRefused(prepared)) return prepared;
-  const { conditions, resolved, speeds, power, thrustIn, friction, run } = prepared;
+  const { conditions, resolved, speeds, raised, power, thrustIn, friction, run } = prepared;
   const { ruleSet, rules, declared, air, wind, condition, creditedHeadwind, doesNotApply } = conditions;
   const { fullPowerRatio, rollingStartAllowance } = prepared.flown;
 
@@ -105,6 +105,7 @@ export function planTakeoff(asked: TakeoffQuestion): TakeoffAnswer | Refused {
     air,
     wind,
     speeds,
+    raised,
     surface: friction.surface,
     noData: friction.noData,
     condition,

@@ -4,7 +4,6 @@ import { propulsionAtSetting } from '../performance/power-setting.ts';
 import { propulsionThrust } from '../performance/propulsion.ts';
 import type { TakeoffRun } from '../performance/takeoff/takeoff-run.ts';
 import type { Thrust } from '../physics/thrust/thrust.ts';
-import type { TakeoffAnswer } from './answer.ts';
 import { isFault } from './chosen.ts';
 import { type Conditions, conditionsOf, ruledRuns } from './conditions.ts';
 import { isRefused, type Refused } from './fault.ts';
@@ -15,14 +14,18 @@ import { type ResolvedFriction, resolveFriction } from './resolve-friction.ts';
 import { type ResolvedTakeoff, resolveTakeoff } from './resolve-takeoff.ts';
 import { type ResolvedThrust, resolveThrust } from './resolve-thrust.ts';
 import { type RunConditions, statedRun } from './takeoff-runs.ts';
-import { takeoffSpeeds } from './takeoff-speeds.ts';
+import { type RaisedSpeed, type TakeoffSpeeds, takeoffSpeeds } from './takeoff-speeds.ts';
 
 /** A takeoff before anything is integrated. */
 export interface PreparedTakeoff {
   readonly conditions: Conditions;
   readonly flown: FlownTakeoff;
   readonly resolved: ResolvedTakeoff;
-  readonly speeds: TakeoffAnswer['speeds'];
+  readonly speeds: TakeoffSpeeds['speeds'];
+  /** as the configuration has them; the same object where none is raised */
+  readonly scheduled: TakeoffSpeeds['scheduled'];
+  /** which of them the certification basis has raised */
+  readonly raised: readonly RaisedSpeed[];
   readonly power: ResolvedThrust;
   /** thrust of another definition in other air, at the setting that is flown */
   readonly thrustIn: (air: Air, propulsion: Propulsion, thrustFactor: number) => Thrust;
@@ -48,8 +51,9 @@ export function prepareTakeoff(question: TakeoffQuestion): PreparedTakeoff | Ref
   const flown = flownTakeoff(question, configuration);
 
   const resolved = resolveTakeoff(question, configuration);
-  const speeds = takeoffSpeeds(question, configuration, resolved, air);
-  if (isFault(speeds)) return { refused: [speeds] };
+  const found = takeoffSpeeds(question, configuration, resolved, air);
+  if (isFault(found)) return { refused: [found] };
+  const { speeds, scheduled, raised } = found;
 
   const liftOffAtMaximumMass = speeds.liftOff.eas * Math.sqrt(aeroplane.masses.maximumTakeoff / mass);
   const power = resolveThrust(aeroplane, aeroplaneAt, liftOffAtMaximumMass, weather.dewPoint !== undefined);
@@ -71,5 +75,5 @@ export function prepareTakeoff(question: TakeoffQuestion): PreparedTakeoff | Ref
     referenceFriction: friction.reference,
     rollingStartAllowance: flown.rollingStartAllowance,
   };
-  return { conditions, flown, resolved, speeds, power, thrustIn, friction, run, runConditions };
+  return { conditions, flown, resolved, speeds, scheduled, raised, power, thrustIn, friction, run, runConditions };
 }

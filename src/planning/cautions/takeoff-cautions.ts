@@ -33,6 +33,7 @@ import { stopNotComputed } from './stop-not-computed.ts';
 import { tailwind } from './tailwind.ts';
 import { tailwindBeyondLimit } from './tailwind-beyond-limit.ts';
 import type { TakeoffContext } from './takeoff-context.ts';
+import { takeoffSpeedsRaised } from './takeoff-speeds-raised.ts';
 import { temperatureAboveLimit } from './temperature-above-limit.ts';
 import { temperatureFarFromStandard } from './temperature-far-from-standard.ts';
 import { windVariable } from './wind-variable.ts';
@@ -69,6 +70,7 @@ export const takeoffCautions: readonly CautionTest<TakeoffContext>[] = [
   pointAtFullLength,
   runwayChanged,
   clearwayCapped,
+  takeoffSpeedsRaised,
   screenSpeedBelowLiftOff,
   reducedPower,
   rollingStart,

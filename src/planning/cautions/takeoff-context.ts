@@ -1,10 +1,13 @@
 import type { TakeoffAnswer } from '../answer.ts';
 import type { Reached } from '../takeoff-runs.ts';
+import type { RaisedSpeed } from '../takeoff-speeds.ts';
 import type { AnswerContext } from './answer-context.ts';
 
 /** What the cautions of a takeoff may look at. */
 export interface TakeoffContext extends AnswerContext {
   readonly speeds: TakeoffAnswer['speeds'];
+  /** speeds of the schedule that the certification basis has raised */
+  readonly raised: readonly RaisedSpeed[];
   /** what came of the run as stated, where physics speaks of the surface and the screen is reached */
   readonly stated: Reached | undefined;
   /** of a loose contaminant over the square of the ground speed [kg/m] */

@@ -9,7 +9,8 @@ import { checkLines } from './check-lines.ts';
 import { takeoffFlightLines } from './flight-lines.ts';
 import { dragLines, takeoffRollLines } from './ground-lines.ts';
 import { manualLines } from './manual-lines.ts';
-import { speedLines, stallLines } from './speed-lines.ts';
+import { stallLines } from './speed-lines.ts';
+import { takeoffSpeedLines } from './takeoff-speed-lines.ts';
 import { thrustLines } from './thrust-lines.ts';
 import { windLines } from './wind-lines.ts';
 import type { WorkingLine } from './working-line.ts';
@@ -40,11 +41,11 @@ export function takeoffWorking(
   windLines(sheet, question, conditions);
   stallLines(sheet, question, configuration, speeds.stall, air);
   const worked = [
-    { suffix: 'R', name: 'rotation speed', member: 'rotation', schedule: resolved.rotation, speeds: speeds.rotation },
-    { suffix: 'LOF', name: 'lift-off speed', member: 'liftOff', schedule: resolved.liftOff, speeds: speeds.liftOff },
-    { suffix: 'scr', name: 'speed at the screen', member: 'screen', schedule: resolved.screen, speeds: speeds.screen },
-  ];
-  for (const one of worked) speedLines(sheet, question, one, air);
+    { suffix: 'R', name: 'rotation speed', member: 'rotation', schedule: resolved.rotation },
+    { suffix: 'LOF', name: 'lift-off speed', member: 'liftOff', schedule: resolved.liftOff },
+    { suffix: 'scr', name: 'speed at the screen', member: 'screen', schedule: resolved.screen },
+  ] as const;
+  takeoffSpeedLines(sheet, question, configuration, worked, prepared, air);
   if (isComputed(prepared)) {
     const thrustAt = thrustLines(sheet, {
       propulsion: aeroplane.propulsion,

@@ -46,6 +46,18 @@ const screenAt = (ratio: number): Changes => ({
   },
 });
 
+/** With two engines, each with half the thrust, at these multiples of the stall speed. */
+const twinAt = (rotation: number, screen: number): Changes => ({
+  aeroplane: { engines: 2 },
+  configuration: {
+    speeds: {
+      rotation: { kind: 'stall-ratio', ratio: rotation },
+      liftOff: { kind: 'stall-ratio', ratio: 1.15 },
+      screen: { kind: 'stall-ratio', ratio: screen },
+    },
+  },
+});
+
 const { propulsion } = plainQuestion.aeroplane;
 const atPower = (fullPowerRatio: number): Changes => ({
   aeroplane: { propulsion: { ...propulsion, powerSettings: { reduced: { fullPowerRatio } } } },
@@ -588,6 +600,20 @@ const pairs: readonly Pair[] = [
     raised: { runway: { onFile: { ...filed, changed: ['declared/tora 1400 m in place of 1500 m'] } } },
     silent: { runway: { onFile: filed } },
     says: /^Runway 07 is that of some-field, revision 2, with changes of the question: declared\/tora 1400 m/,
+  },
+  {
+    code: 'takeoff-speeds-raised',
+    severity: 'caution',
+    raised: twinAt(1.09, 1.2),
+    silent: twinAt(1.1, 1.2),
+    says: /^The rotation speed of the schedule is 50\.6 kt calibrated at this mass; cs-23-amendment-4 asks for at least 1\.05 times the minimum control speed and 1\.10 times the stall speed\. 51\.1 kt is taken instead\.$/,
+  },
+  {
+    code: 'takeoff-speeds-raised',
+    severity: 'note',
+    raised: both(twinAt(1.15, 1.25), { aeroplane: { engines: 2, engineOut: { vmc: 54 * kt } } }),
+    silent: both(twinAt(1.15, 1.25), { aeroplane: { engines: 2, engineOut: { vmc: 50 * kt } } }),
+    says: /asks for at least 1\.05 times.*56\.7 kt is taken instead\. The speed at the screen .* 59\.4 kt is taken instead\.$/,
   },
   {
     code: 'assumption-matters',
