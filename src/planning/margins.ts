@@ -109,13 +109,18 @@ function readings(
     return { taken: byPhysics, others: [beside(byFactors, runwayDecides), ...uncredited] };
   }
   if (byPhysics.required > byFactors.required) {
-    const less = beside(byFactors, 'the factors on a paved, dry, level runway ask for less');
-    return { taken: byPhysics, others: [less, ...uncredited] };
+    return { taken: byPhysics, others: [beside(byFactors, asksForLess[startsFrom]), ...uncredited] };
   }
   return asItIs.required === byFactors.required
     ? { taken: byFactors, others: [] }
     : { taken: byFactors, others: [beside(asItIs, 'physics on the runway as it is asks for less')] };
 }
+
+/** Why a reading by factors is not taken, by what they multiply. */
+const asksForLess = {
+  reference: 'the factors on a paved, dry, level runway ask for less',
+  'flight-manual': "the factors on the flight manual's figure ask for less",
+} as const;
 
 function listed(factor: Factor | undefined): readonly Factor[] {
   return factor === undefined ? [] : [factor];

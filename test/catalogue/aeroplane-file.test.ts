@@ -7,6 +7,7 @@ import { builtInFolder } from '../support/catalogue-folder.ts';
 
 const name = 'pellibrin-trainer.json';
 const good = readFileSync(join(builtInFolder, name), 'utf8');
+const revision = '"revision": "2",';
 
 function faults(text: string, file = name) {
   const read = aeroplaneFile(file, Buffer.from(text));
@@ -28,13 +29,13 @@ describe('aeroplaneFile', () => {
     ['no JSON', good.slice(0, -3), name, ['unreadable ']],
     [
       'a member twice',
-      good.replace('"revision": "1",', '"revision": "1", "revision": "2",'),
+      good.replace(revision, '"revision": "1", "revision": "2",'),
       name,
       ['duplicate-member /revision'],
     ],
     [
       'an unknown member',
-      good.replace('"revision": "1",', '"revision": "1", "colour": "red",'),
+      good.replace(revision, '"revision": "1", "colour": "red",'),
       name,
       ['unknown-member /colour'],
     ],
@@ -58,7 +59,7 @@ describe('aeroplaneFile', () => {
   });
 
   it('names every fault of a file, not the first alone', () => {
-    const text = good.replace('"revision": "1",', '"colour": "red",').replace('"unit": "m2"', '"unit": "ha"');
+    const text = good.replace(revision, '"colour": "red",').replace('"unit": "m2"', '"unit": "ha"');
     expect(faults(text).sort()).toEqual([
       'missing /revision',
       'unknown-member /colour',

@@ -63,7 +63,9 @@ describe('sealFolder', () => {
       const path = join(folder, 'duvassel-twin.json');
       writeFileSync(
         path,
-        readFileSync(path, 'utf8').replace('"revision": "1",', '').replace('"unit": "m2"', '"unit": "ha"'),
+        readFileSync(path, 'utf8')
+          .replace(/"revision": "\d+",/, '')
+          .replace('"unit": "m2"', '"unit": "ha"'),
       );
       const sealing = sealFolder(folder);
       const faults = 'faults' in sealing ? sealing.faults : [];

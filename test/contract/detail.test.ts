@@ -127,8 +127,8 @@ describe('the sensitivities of a takeoff', () => {
     }
   });
 
-  test.prop([anyTakeoff], { numRuns: 40 })('have the signs they must have, and add up', (request) => {
-    const answer = answered({ ...request, rounding: 'none', detail: ['sensitivities'] });
+  test.prop([anyTakeoff], { numRuns: 40 })('have the signs they must have by physics, and add up', (request) => {
+    const answer = answered({ ...request, method: 'stated', rounding: 'none', detail: ['sensitivities'] });
     fc.pre(answer?.distances !== undefined);
     const signs: Record<string, number> = { mass: 1, slope: 1, headwind: -1, 'rolling-friction': 1 };
     for (const { of, change } of (answer as TakeoffResponse).sensitivities ?? []) {
@@ -140,6 +140,20 @@ describe('the sensitivities of a takeoff', () => {
       if (sign !== undefined) expect(groundRoll.value * sign, of).toBeGreaterThan(0);
     }
   });
+
+  test.prop([anyTakeoff], { numRuns: 40 })(
+    'by a flight manual never have the other sign: they are 0 at an edge and of what its figure holds',
+    (request) => {
+      const answer = answered({ ...request, rounding: 'none', detail: ['sensitivities'] });
+      fc.pre(answer?.basis.flightManual !== undefined && answer.distances !== undefined);
+      const signs: Record<string, number> = { mass: 1, slope: 1, headwind: -1, 'rolling-friction': 1 };
+      for (const { of, change } of (answer as TakeoffResponse).sensitivities ?? []) {
+        const sign = signs[of];
+        if (sign !== undefined && change !== undefined)
+          expect(change.takeoffDistance.value * sign, of).toBeGreaterThan(-1e-6);
+      }
+    },
+  );
 
   it.each(unitFamilies)('are told for amounts of the units of %s', (units) => {
     const { sensitivities = [] } = asked({ detail: ['sensitivities'], units });

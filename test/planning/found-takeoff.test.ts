@@ -138,6 +138,17 @@ describe('a takeoff by its flight manual', () => {
     expect(named.cautions.find(({ code }) => code === 'flight-manual-not-used')?.severity).toBe('strong');
   });
 
+  it('says whose wind it is that leaves the manual: 8 kt on the tail lies in a note up to 10 kt, the 12 kt that class B counts do not', () => {
+    const note = { ...tailwindNote, windAllowance: false } as ManualNote;
+    const tail = { weather: { wind: { kind: 'components', headwind: -8 * kt } } } as const;
+    expect(distances(byManual([note], tail)).takeoffDistance.method).toBe('flight-manual');
+    const counted = answered(byManual([note], tail, underClassB, toraAlone));
+    expect(counted.outcome).toBe('outside-flight-manual');
+    expect(counted.sentence).toContain('takeoff-table ends at a tailwind of 10 kt, and the rule set counts 12 kt.');
+    const asked = answered(byManual([note], { weather: { wind: { kind: 'components', headwind: -11 * kt } } }));
+    expect(asked.sentence).toContain('takeoff-table ends at a tailwind of 10 kt, and 11 kt is asked.');
+  });
+
   it('holds the edge on the side where the table shows it to be the longer, names it, and ends there when asked to', () => {
     const cold = byManual([], { weather: { temperature: 263.15 } });
     expectRatio(distances(cold).takeoffDistance.value, 1760 * ft, 1e-12);

@@ -33,6 +33,8 @@ export interface ManualBound {
   readonly given: number;
   readonly bound: number;
   readonly side: 'above' | 'below';
+  /** what lies outside is the wind as the rule set counts it; as it is given it lies inside */
+  readonly isCredited?: true;
 }
 
 /** A note as it was applied. */

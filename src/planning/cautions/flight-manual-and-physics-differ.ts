@@ -1,3 +1,4 @@
+import { isPhysicsByName } from '../method.ts';
 import { percentText } from '../sentences/measure-text.ts';
 import { type AnswerContext, textIn } from './answer-context.ts';
 import type { CautionTest } from './caution-test.ts';
@@ -10,19 +11,21 @@ export const flightManualAndPhysicsDiffer: CautionTest<AnswerContext> = {
   code: 'flight-manual-and-physics-differ',
   severity: 'caution',
   meaning:
-    "The flight manual and the aeroplane's physics differ by more than twice what the physics is usually off; a table, a unit or the definition may be wrong.",
+    "The flight manual and the aeroplane's physics differ by more than twice what the physics is usually off; a table, a unit or the definition may be wrong. Not where the manual is the longer because the edge of its table stands for what lies beyond.",
   source: 'HouseManual',
   test: (context) => {
-    const { found, wholeDistance, phase } = context;
-    const { other, method } = found;
+    const { found, wholeDistance, phase, question } = context;
+    const { other, method, flightManual } = found;
     if (other === undefined || wholeDistance === undefined) return undefined;
     const physics = [method, other.method].includes('fitted') ? 'fitted' : 'stated';
     const threshold = spread[physics];
     if (Math.abs(Math.log(other.ratio)) <= threshold) return undefined;
-    const [names, otherName] =
-      other.method === 'stated' || other.method === 'fitted'
-        ? ['The flight manual', 'physics']
-        : ['Physics', 'the flight manual'];
+    const isByPhysics = isPhysicsByName(question);
+    const isManualLonger = other.ratio > 1 === isByPhysics;
+    const isHeldAtEdge = (flightManual?.figures.edges.length ?? 0) > 0;
+    // the edge of a table is used because it is the longer
+    if (isHeldAtEdge && isManualLonger) return undefined;
+    const [names, otherName] = isByPhysics ? ['Physics', 'the flight manual'] : ['The flight manual', 'physics'];
     const off = other.ratio - 1;
     return {
       message: `${names} gives a ${phase} distance of ${textIn(context, 'distance', wholeDistance.value)}, ${otherName} ${textIn(context, 'distance', other.distance)}: ${percentText(Math.abs(off))} ${off < 0 ? 'less' : 'more'}.`,

@@ -1,28 +1,27 @@
 import { takeoffTrajectory } from '../../performance/takeoff/takeoff-trajectory.ts';
 import type { TakeoffAnswer } from '../answer.ts';
 import { isRefused } from '../fault.ts';
+import { sharesOf } from '../manual/shares.ts';
 import { askedAsFitted } from '../method.ts';
 import { planTakeoff } from '../plan-takeoff.ts';
-import { prepareTakeoff } from '../prepare-takeoff.ts';
+import { type PreparedTakeoff, prepareTakeoff } from '../prepare-takeoff.ts';
 import type { TakeoffQuestion } from '../question.ts';
-import { resolveFriction } from '../resolve-friction.ts';
+import { reached, scaledTakeoff, takeoffOf } from '../takeoff-runs.ts';
 import { takeoffWorking } from '../working/takeoff-working.ts';
 import type { Changes, Detail, DetailName } from './detail.ts';
 import { evenTrajectory, trajectorySteps } from './even-trajectory.ts';
-import { type MainInput, sharedInputs } from './main-inputs.ts';
-import { sensitivities } from './sensitivities.ts';
+import { type Amount, sharedInputs } from './main-inputs.ts';
+import { type Beside, sensitivities, sensitivity } from './sensitivities.ts';
 
-/** What the distances of a takeoff hang on beside what they share with those of a landing. */
-const inputs: readonly MainInput<TakeoffQuestion>[] = [
-  ...sharedInputs<TakeoffQuestion>(),
-  {
-    of: 'rolling-friction',
-    at: () => '/runway/surface/rollingFrictionCoefficient',
-    per: () => 0.01,
-    step: 1e-5,
-    moved: withFriction,
-  },
-];
+const inputs = sharedInputs<TakeoffQuestion>();
+
+/** A coefficient stated in the question is none that a flight manual speaks of: a little more of it is asked of the run alone. */
+const rollingFriction: Amount<TakeoffQuestion> = {
+  of: 'rolling-friction',
+  at: () => '/runway/surface/rollingFrictionCoefficient',
+  per: () => 0.01,
+  step: 1e-5,
+};
 
 /** An answer to a takeoff with the parts that were asked for. */
 export function takeoffDetail(given: TakeoffQuestion, answer: TakeoffAnswer, asked: readonly DetailName[]): Detail {
@@ -37,7 +36,12 @@ export function takeoffDetail(given: TakeoffQuestion, answer: TakeoffAnswer, ask
       ? takeoffTrajectory(run, flown.rollingStartAllowance, trajectorySteps)
       : undefined;
   const moved =
-    base !== undefined && asked.includes('sensitivities') ? sensitivities(given, inputs, base, distancesOf) : undefined;
+    base !== undefined && asked.includes('sensitivities')
+      ? [
+          ...sensitivities(given, inputs, base, distancesOf),
+          sensitivity(given, rollingFriction, base, withRolling(prepared, base)),
+        ]
+      : undefined;
   return {
     ...(working === undefined ? {} : { working }),
     ...(points === undefined || answer.distances === undefined
@@ -62,10 +66,16 @@ function changesOf({ distances }: TakeoffAnswer): Changes | undefined {
   };
 }
 
-function withFriction(question: TakeoffQuestion, by: number): TakeoffQuestion | undefined {
-  const { surface } = question.runway;
-  const { actual } = resolveFriction(question, surface);
-  if (actual === undefined || actual + by < 0) return undefined;
-  const moved = { ...surface, rollingFrictionCoefficient: actual + by };
-  return { ...question, runway: { ...question.runway, surface: moved } };
+/** The takeoff as stated with so much more rolling friction. */
+function withRolling({ run, runConditions, flown }: PreparedTakeoff, base: Changes): Beside {
+  if (runConditions.actualFriction === undefined) return () => undefined;
+  const takenOff = (by: number) =>
+    reached(takeoffOf({ ...run, rollingFriction: run.rollingFriction + by }, flown.rollingStartAllowance));
+  const shares = sharesOf(base, takenOff(0));
+  return (by) => {
+    const found = run.rollingFriction + by < 0 ? undefined : takenOff(by);
+    if (found === undefined) return undefined;
+    const { groundRoll, airDistance, takeoffDistance: wholeDistance } = scaledTakeoff(found, shares);
+    return { groundRoll, airDistance, wholeDistance };
+  };
 }

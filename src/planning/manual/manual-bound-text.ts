@@ -31,9 +31,17 @@ export const manualMeasures: Readonly<Record<ManualBound['axis'], Measured>> = {
   surface: { kind: 'distance', name: 'surface', at: '/runway/surface' },
 };
 
-/** Where a sheet ends and what was asked of it: 'takeoff-short-field ends at a temperature of 40 °C, and 43 °C is asked'. */
-export function manualBoundText({ sheet, axis, given, bound, side }: ManualBound, units: UnitFamily): string {
+/**
+ * Where a sheet ends and what was asked of it: 'takeoff-short-field ends at a temperature of 40 °C, and 43 °C is asked'. Of a wind
+ * that the rule set makes more of than is given, it is the rule set that asks.
+ */
+export function manualBoundText(
+  { sheet, axis, given, bound, side, isCredited }: ManualBound,
+  units: UnitFamily,
+): string {
   const { kind, name } = manualMeasures[axis];
   const verb = side === 'above' ? 'ends' : 'begins';
-  return `${sheet} ${verb} at a ${name} of ${measureText(units, kind, bound)}, and ${measureText(units, kind, given)} is asked`;
+  const asked = measureText(units, kind, given);
+  const ends = `${sheet} ${verb} at a ${name} of ${measureText(units, kind, bound)}`;
+  return isCredited ? `${ends}, and the rule set counts ${asked}` : `${ends}, and ${asked} is asked`;
 }

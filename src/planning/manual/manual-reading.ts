@@ -63,6 +63,6 @@ export function manualReading(
   const credited = manualDistances(manual, { ...asked, creditedHeadwind });
   if (credited === undefined) throw new Error(`${manual.document} has a sheet in one wind and none in another`);
   return credited.outcome === 'outside-flight-manual'
-    ? credited
+    ? { ...credited, bounds: credited.bounds.map((bound) => ({ ...bound, isCredited: true })) }
     : { outcome: 'read', manual, stated, credited, silences };
 }

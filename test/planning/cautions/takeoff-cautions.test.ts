@@ -651,6 +651,36 @@ describe('the cautions of a takeoff', () => {
   it('has a pair for every caution there is', () => {
     expect([...new Set(pairs.map(({ code }) => code))].sort()).toEqual(takeoffCautions.map(({ code }) => code).sort());
   });
+  it.each([
+    [
+      'the manual',
+      undefined,
+      /^The flight manual gives a takeoff distance of [\d ]+ m, physics [\d ]+ m: [\d.]+ % more\.$/,
+    ],
+    [
+      'physics',
+      'stated',
+      /^Physics gives a takeoff distance of [\d ]+ m, the flight manual [\d ]+ m: [\d.]+ % less\.$/,
+    ],
+  ] as const)('says of which of the two the distance is where they differ, carried uphill: %s', (_, method, says) => {
+    const manual = manualOf({ contains: { factor: 2.5, windAllowance: false } });
+    const uphill = changed(plainQuestion, { ...withManual(manual), runway: { ...withManual().runway, slope: 0.01 } });
+    const found = answered(method === undefined ? uphill : { ...uphill, method });
+    expect(found.cautions.find(({ code }) => code === 'flight-manual-and-physics-differ')?.message).toMatch(says);
+  });
+  it('expects the edge of a table to be longer than physics, and never to be shorter', () => {
+    const light = (factor: number) =>
+      answered(
+        changed(plainQuestion, {
+          ...withManual(manualOf({ contains: { factor, windAllowance: false } })),
+          question: { mass: 760 },
+        }),
+      );
+    const [longer, shorter] = [light(1), light(4)];
+    expect(longer.basis.other?.ratio).toBeLessThan(Math.exp(-0.3));
+    expect(longer.cautions.map(({ code }) => code)).not.toContain('flight-manual-and-physics-differ');
+    expect(shorter.cautions.map(({ code }) => code)).toContain('flight-manual-and-physics-differ');
+  });
   it('is quiet about a plain question but for the method', () => {
     expect(answered(plainQuestion).cautions.map(({ code }) => code)).toEqual(['method-is-estimate']);
   });
