@@ -1,11 +1,10 @@
 import type { AirspeedCalibration } from '../../performance/aeroplane.ts';
 import { calibratedFromIndicated } from '../../performance/airspeed-calibration.ts';
 import type { Fault } from '../../planning/fault.ts';
-import { fromSi, toSi } from '../../units/units.ts';
-import { fittingUnit } from '../fitting-unit.ts';
-import { columnKinds, type Heading } from '../flight-manual/manual-columns.ts';
+import { toSi } from '../../units/units.ts';
+import type { Heading } from '../flight-manual/manual-columns.ts';
 import { isSpeed } from '../flight-manual/to-manual-table.ts';
-import { figure } from '../written.ts';
+import { checkRange } from './check-range.ts';
 
 /** Columns with their rows, as tables and speed tables have them. */
 export interface Columns {
@@ -41,27 +40,13 @@ export function checkColumns({ columns, rows }: Columns, at: string): Fault[] {
     }
   }
   if (faults.length > 0) return faults;
-  return columns.flatMap((column, i) => checkRange(column, i, rows, at));
-}
-
-function checkRange({ name, unit }: Heading, index: number, rows: Columns['rows'], at: string): Fault[] {
-  const { quantity, units, lowest, highest } = columnKinds[name];
-  const fits = (value: number) => value >= lowest * (1 - 1e-9) - 1e-9 && value <= highest * (1 + 1e-9) + 1e-9;
-  const row = rows.findIndex((cells) => !fits(toSi(quantity, cells[index] as number, unit as never)));
-  if (row < 0) return [];
-  const value = rows[row]?.[index] as number;
-  const meant = fittingUnit(quantity, { value, unit }, units, fits);
-  const bound = (limit: number) => figure(fromSi(quantity, limit, unit as never));
-  return [
-    {
-      pointer: `${at}/rows/${row}/${index}`,
-      code: 'out-of-range',
-      message: `${name} is ${value} ${unit}.`,
-      received: value,
-      allowed: `${bound(lowest)} to ${bound(highest)} ${unit}`,
-      ...(meant === undefined ? {} : { hint: `In ${meant} it would fit; check the unit of the column.` }),
-    },
-  ];
+  return columns.flatMap((column, c) =>
+    checkRange(
+      column,
+      rows.map((row) => row[c] as number),
+      (row) => `${at}/rows/${row}/${c}`,
+    ),
+  );
 }
 
 /**

@@ -50,7 +50,8 @@ export function checkManualConfigurations(
   function checkFlap({ columns, rows, ...table }: ManualTableOnWire, tableAt: string): Fault[] {
     const column = columns.findIndex(({ name }) => name === 'flap');
     if (column < 0) return [];
-    const flaps = [...new Set(rows.map((row) => row[column] as number))];
+    // a row of another length is told of its own
+    const flaps = [...new Set(rows.flatMap((row) => row[column] ?? []))];
     return table.configurations.flatMap((id, i) => {
       const known = Object.hasOwn(configurations, id) ? configurations[id] : undefined;
       if (known === undefined) return [];

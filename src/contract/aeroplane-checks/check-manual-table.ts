@@ -25,7 +25,7 @@ export function checkManualTable(
     ...checkColumns(table, at),
     ...checkEntries(names.filter(isAxis), conditions, `${at}/columns`, `${at}/conditions`),
     ...checkOutputs(names.filter(isOutput), table.for, `${at}/columns`),
-    ...checkAirspeeds(table, calibration, at, calibrationAt),
   ];
-  return faults.length > 0 ? faults : checkManualRows(table, at);
+  if (faults.length > 0) return faults;
+  return [...checkAirspeeds(table, calibration, at, calibrationAt), ...checkManualRows(table, at)];
 }

@@ -1,6 +1,7 @@
 import type { ManualAxis, ManualOutput, ManualTable } from '../../performance/flight-manual/flight-manual.ts';
 import type { Fault } from '../../planning/fault.ts';
 import type { ManualTableOnWire } from '../flight-manual/manual-table.ts';
+import { mostFaults } from '../reading/collect-faults.ts';
 
 /** The way an output goes as an axis rises: up, down, or as it likes. */
 type Way = 1 | -1 | 0;
@@ -31,6 +32,7 @@ export function checkMonotone(given: ManualTableOnWire, table: ManualTable, at: 
   }
   const faults = new Map<string, Fault>();
   for (const slip of slips) {
+    if (faults.size >= mostFaults) break;
     const { output, before, after } = slip;
     const [first, second] = [before, after].map((row) => counts.get(`${row},${output}`) as number) as [number, number];
     const row = first > second ? before : after;

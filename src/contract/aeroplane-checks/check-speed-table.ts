@@ -22,12 +22,13 @@ export function checkSpeedTable(
   at: string,
   calibrationAt: string,
 ): Fault[] {
-  const faults = [
-    ...checkColumns(table, at),
-    ...checkMass(table, at),
+  const form = [...checkColumns(table, at), ...checkMass(table, at)];
+  if (form.length > 0) return form;
+  return [
     ...checkAirspeeds(table, calibration, at, calibrationAt),
+    ...checkRising(table, at),
+    ...checkOrder(table, at),
   ];
-  return faults.length > 0 ? faults : [...checkRising(table, at), ...checkOrder(table, at)];
 }
 
 function checkMass({ columns }: SpeedTableOnWire, at: string): Fault[] {

@@ -1,5 +1,6 @@
 import { manualAxes, manualOutputs } from '../../performance/flight-manual/flight-manual.ts';
 import type { Fault } from '../../planning/fault.ts';
+import { mostFaults } from '../reading/collect-faults.ts';
 import { nearestNames } from '../reading/nearest-name.ts';
 import { shortened } from '../reading/scalar-faults.ts';
 import { unitMeant } from '../reading/unit-meant.ts';
@@ -18,7 +19,6 @@ type ColumnName = (typeof names)[number];
 const names = [...manualAxes, 'standardTemperature', ...manualOutputs] as const;
 const heading = /^([^[\]]*?) \[([^[\]]*)\]$/;
 const number = /^-?(?:0|[1-9]\d{0,9})(?:\.\d{1,9})?$/;
-const mostFaults = 100;
 const mostColumns = 12;
 
 /**

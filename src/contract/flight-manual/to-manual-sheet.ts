@@ -51,7 +51,8 @@ const measures = {
   belowMass: 'mass',
 } as const;
 
-function toNote(given: ManualNoteOnWire): ManualNote {
+/** One note in SI. */
+export function toNote(given: ManualNoteOnWire): ManualNote {
   if (given.about === 'surface') {
     const { about, multiplies, text } = given;
     const change = given.changePercent / 100;

@@ -279,6 +279,18 @@ const slips: [title: string, slip: Slip, fault: string, says: RegExp][] = [
     /No sheet for these configurations gives the ground roll/,
   ],
   [
+    'grass that lengthens the roll alone',
+    (m) => (m.tables[0].notes[2].multiplies = 'groundRoll'),
+    `implausible ${table}/notes/2/multiplies`,
+    /no note says what it makes of the wholeDistance/,
+  ],
+  [
+    'a tailwind that lengthens the whole distance alone',
+    (m) => (m.tables[0].notes[1].multiplies = 'wholeDistance'),
+    `implausible ${table}/notes/1/multiplies`,
+    /what it makes of the groundRoll/,
+  ],
+  [
     'speeds that fall with mass',
     (m) => (m.speedTables[0].rows[1][1] = 49),
     `contradiction ${speeds}/rows/1/1`,
@@ -334,12 +346,29 @@ const slips: [title: string, slip: Slip, fault: string, says: RegExp][] = [
   ],
   [
     'a second panel that forgets the first',
-    (m) =>
-      (m.graphs[0].panels[1] = {
-        ...m.graphs[0].panels[0],
+    (m) => {
+      m.graphs[0].panels[1] = {
+        kind: 'curves',
         across: { name: 'mass', unit: 'kg' },
         parameter: { name: 'headwind', unit: 'kt' },
-      }),
+        curves: [
+          {
+            parameter: 0,
+            points: [
+              [800, 700],
+              [1030, 900],
+            ],
+          },
+          {
+            parameter: 10,
+            points: [
+              [800, 600],
+              [1030, 800],
+            ],
+          },
+        ],
+      };
+    },
     `contradiction ${graph}/panels/1`,
     /enters 0 times/,
   ],
@@ -348,6 +377,18 @@ const slips: [title: string, slip: Slip, fault: string, says: RegExp][] = [
     (m) => m.graphs[0].panels[0].curves[0].points.reverse(),
     `contradiction ${graph}/panels/0/curves/0/points/1/0`,
     /run across/,
+  ],
+  [
+    'an axis of a graph in another unit',
+    (m) => (m.graphs[0].panels[0].across.unit = 'K'),
+    `out-of-range ${graph}/panels/0/curves/0/points/0/0`,
+    /In degC it would fit/,
+  ],
+  [
+    'heights that no distance has',
+    (m) => (m.graphs[0].panels[1].curves[0].points[0][1] = 7),
+    `out-of-range ${graph}/panels/1/curves/0/points/0/1`,
+    /landingDistance is 7 ft/,
   ],
   [
     'curves that cross',
