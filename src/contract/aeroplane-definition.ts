@@ -1,6 +1,7 @@
 import { z } from 'zod';
 import { antiSkids, categories, certificationBases, wheelArrangements } from '../performance/aeroplane.ts';
 import { configuration } from './configuration.ts';
+import { fit } from './fit/fit-member.ts';
 import { flightManual } from './flight-manual/flight-manual.ts';
 import { propulsion } from './propulsion.ts';
 import {
@@ -183,6 +184,7 @@ export const aeroplaneDefinition = z
     limitations: limitations.exactOptional(),
     airspeedCalibration: airspeedCalibration.exactOptional(),
     flightManual: flightManual.exactOptional(),
+    fit: fit.exactOptional(),
   })
   .meta({ id: 'AeroplaneDefinition', description: 'A whole aeroplane.' });
 

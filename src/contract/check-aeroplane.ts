@@ -1,6 +1,7 @@
 import type { Fault } from '../planning/fault.ts';
 import { checkConfiguration } from './aeroplane-checks/check-configuration.ts';
 import { checkCounts, mostConfigurations } from './aeroplane-checks/check-counts.ts';
+import { checkFit } from './aeroplane-checks/check-fit.ts';
 import { checkFlightManual } from './aeroplane-checks/check-flight-manual.ts';
 import { checkMasses } from './aeroplane-checks/check-masses.ts';
 import { checkPowerplant } from './aeroplane-checks/check-powerplant.ts';
@@ -34,5 +35,6 @@ export function checkAeroplane(definition: AeroplaneDefinition, at: string): Fau
     ...tables,
     ...ids.slice(0, mostConfigurations).flatMap((id) => checkConfiguration(id, definition, wingArea, calibration, at)),
     ...checkFlightManual(definition, calibration, at),
+    ...checkFit(definition, at),
   ];
 }

@@ -1,6 +1,7 @@
 import type { Aeroplane, AirspeedCalibration, Configuration } from '../performance/aeroplane.ts';
 import { toSi } from '../units/units.ts';
 import type { AeroplaneDefinition } from './aeroplane-definition.ts';
+import { toFit } from './fit/to-fit.ts';
 import { toFlightManual } from './flight-manual/to-flight-manual.ts';
 import { perhaps, present } from './present.ts';
 import { type Q, si } from './quantity.ts';
@@ -44,7 +45,7 @@ export function toAeroplane(definition: AeroplaneDefinition): Aeroplane {
     limitations: perhaps(toLimitations, definition.limitations),
     airspeedCalibration: calibration,
     flightManual: perhaps((manual) => toFlightManual(manual, calibration), definition.flightManual),
-    fit: undefined,
+    fit: perhaps(toFit, definition.fit),
   });
 }
 
