@@ -18,4 +18,6 @@ export interface AeroplaneLookup {
   readonly ids: readonly string[];
   /** SHA-256 in hex of a definition that came with the question */
   readonly digestOf: (definition: AeroplaneDefinition) => string;
+  /** SHA-256 in hex of the JSON of anything that a reader returned */
+  readonly digestOfJson: (value: unknown) => string;
 }

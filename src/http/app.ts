@@ -13,10 +13,12 @@ import { parameters } from './plugins/parameters.ts';
 import { requestId, requestIdOf } from './plugins/request-id.ts';
 import { requestLog } from './plugins/request-log.ts';
 import { aerodromes } from './routes/aerodromes.ts';
+import { aeroplaneFit } from './routes/aeroplane-fit.ts';
 import { aeroplanes } from './routes/aeroplanes.ts';
 import { air } from './routes/air.ts';
 import { airspeed } from './routes/airspeed.ts';
 import { landingChoices, takeoffChoices } from './routes/choices.ts';
+
 import { landing } from './routes/landing.ts';
 import { ruleSets } from './routes/rule-sets.ts';
 import { service } from './routes/service.ts';
@@ -83,6 +85,7 @@ export async function buildApp({ catalogue, logger = false, settings }: House): 
     takeoffChoices(app, lookup, ours),
     landingChoices(app, lookup, ours),
     speeds(app, lookup, ours),
+    aeroplaneFit(app, lookup, ours),
     airspeed(app, lookup, ours),
     tables(app, lookup),
     air(app, ours),

@@ -1,11 +1,13 @@
-import type { FastifyInstance } from 'fastify';
+import type { FastifyInstance, FastifyReply, FastifyRequest } from 'fastify';
 import * as z from 'zod';
 import { type Problem, toProblem } from '../contract/problem.ts';
 import { reader } from '../contract/reading/reader.ts';
 import { readStrictJson } from '../contract/reading/strict-json.ts';
+import { completed, type Work } from '../numerics/work.ts';
 import { type Fault, isRefused, type Refused } from '../planning/fault.ts';
 import { answerHeaders } from './answer-headers.ts';
 import { operationSchema } from './document/operation-schema.ts';
+import { inSlices } from './in-slices.ts';
 import { jsonOnly } from './plugins/json-body.ts';
 import { sendProblem } from './problems.ts';
 
@@ -16,8 +18,8 @@ declare module 'fastify' {
   }
 }
 
-/** One POST of the service: what it reads, what it answers, and the function between. */
-export interface Operation<Request extends z.ZodType, Response extends z.ZodType> {
+/** One POST of the service: what it reads and what it answers. */
+interface OperationShape<Request extends z.ZodType, Response extends z.ZodType> {
   readonly url: string;
   readonly operationId: string;
   readonly summary: string;
@@ -31,11 +33,22 @@ export interface Operation<Request extends z.ZodType, Response extends z.ZodType
   readonly ownText?: readonly string[];
   /** the questions that must be answered before the service says ready */
   readonly warmUp: readonly z.input<Request>[];
-  readonly answer: (question: z.output<Request>) => z.output<Response> | Refused;
   /** what the document says of the answer; absent: its schema */
   readonly documented?: z.ZodType;
   /** what the question wants to see of a lawful answer; absent: all of it */
   readonly shown?: (answer: z.output<Response>, question: z.output<Request>) => unknown;
+}
+
+/** An operation that is answered at once. */
+export interface Operation<Request extends z.ZodType, Response extends z.ZodType>
+  extends OperationShape<Request, Response> {
+  readonly answer: (question: z.output<Request>) => z.output<Response> | Refused;
+}
+
+/** An operation whose answer is long work: other requests are answered between its steps. */
+export interface LongOperation<Request extends z.ZodType, Response extends z.ZodType>
+  extends OperationShape<Request, Response> {
+  readonly work: (question: z.output<Request>) => Work<z.output<Response> | Refused>;
 }
 
 /** Answers the bytes of one body: the text of the answer, or a problem. */
@@ -54,20 +67,44 @@ export class AnswerFault extends Error {}
 export function exchange<Request extends z.ZodType, Response extends z.ZodType>(
   operation: Operation<Request, Response>,
 ): Exchange {
-  const { shown, ownText = [] } = operation;
-  const read = reader(operation.request);
-  const lawful = z.compile(operation.response, { strict: true });
+  const { read, write } = gates(operation);
   return (body) => {
-    const json = readStrictJson(body);
-    if (isRefused(json)) return toProblem(json);
-    const question = read(json.value);
-    const slips = json.slips.filter(({ pointer }) => !ownText.includes(pointer));
-    if (isRefused(question)) return toProblem({ refused: together(slips, question.refused) });
-    if (slips.length > 0) return toProblem({ refused: slips });
-    const answer = operation.answer(question.value);
-    if (isRefused(answer as object)) return toProblem(answer as Refused);
-    if (!lawful.validate(answer)) throw new AnswerFault(faultsOf(operation.response, answer));
-    return JSON.stringify(shown === undefined ? answer : shown(answer as z.output<Response>, question.value));
+    const question = read(body);
+    return 'problem' in question ? question.problem : write(operation.answer(question.value), question.value);
+  };
+}
+
+/** The same of a long operation, as work. */
+function longExchange<Request extends z.ZodType, Response extends z.ZodType>(
+  operation: LongOperation<Request, Response>,
+): (body: Uint8Array) => Work<string | Problem> {
+  const { read, write } = gates(operation);
+  return function* (body) {
+    const question = read(body);
+    return 'problem' in question ? question.problem : write(yield* operation.work(question.value), question.value);
+  };
+}
+
+/** From bytes to question, and from answer to text. */
+function gates<Request extends z.ZodType, Response extends z.ZodType>(operation: OperationShape<Request, Response>) {
+  const { shown, ownText = [] } = operation;
+  const readJson = reader(operation.request);
+  const lawful = z.compile(operation.response, { strict: true });
+  const refused = (by: readonly Fault[]) => ({ problem: toProblem({ refused: by }) });
+  return {
+    read(body: Uint8Array): { readonly value: z.output<Request> } | { readonly problem: Problem } {
+      const json = readStrictJson(body);
+      if (isRefused(json)) return { problem: toProblem(json) };
+      const question = readJson(json.value);
+      const slips = json.slips.filter(({ pointer }) => !ownText.includes(pointer));
+      if (isRefused(question)) return refused(together(slips, question.refused));
+      return slips.length > 0 ? refused(slips) : question;
+    },
+    write(answer: z.output<Response> | Refused, question: z.output<Request>): string | Problem {
+      if (isRefused(answer as object)) return toProblem(answer as Refused);
+      if (!lawful.validate(answer)) throw new AnswerFault(faultsOf(operation.response, answer));
+      return JSON.stringify(shown === undefined ? answer : shown(answer as z.output<Response>, question));
+    },
   };
 }
 
@@ -91,22 +128,56 @@ export function addOperation<Request extends z.ZodType, Response extends z.ZodTy
 ): WarmUp {
   const answerTo = exchange(operation);
   app.route({
+    ...routeOf(operation),
+    handler: (request, reply) => send(reply, answerTo(bodyOf(request))),
+  });
+  return warmUp(operation, answerTo);
+}
+
+/** Puts a long operation on the wire; one whose caller has gone is not finished. */
+export function addLongOperation<Request extends z.ZodType, Response extends z.ZodType>(
+  app: FastifyInstance,
+  operation: LongOperation<Request, Response>,
+): WarmUp {
+  const workOn = longExchange(operation);
+  app.route({
+    ...routeOf(operation),
+    async handler(request, reply) {
+      const answered = await inSlices(workOn(bodyOf(request)), () => !reply.raw.destroyed);
+      return answered === undefined ? reply.hijack() : send(reply, answered);
+    },
+  });
+  return warmUp(operation, (body) => completed(workOn(body)));
+}
+
+function routeOf<Request extends z.ZodType, Response extends z.ZodType>(operation: OperationShape<Request, Response>) {
+  return {
     method: 'POST',
     url: operation.url,
     schema: operationSchema({ ...operation, response: operation.documented ?? operation.response }),
-    config: { example: operation.example },
+    config: { example: operation.example as unknown },
     onRequest: jsonOnly,
-    handler(request, reply) {
-      const answered = answerTo((request.body as Uint8Array | undefined) ?? nothing);
-      if (typeof answered !== 'string') return sendProblem(reply, answered);
-      return reply.headers(answerHeaders).type(answerMediaType).send(answered);
-    },
-  });
-  const questions = operation.warmUp.map((question) => new TextEncoder().encode(JSON.stringify(question)));
+  } as const;
+}
+
+function bodyOf({ body }: FastifyRequest): Uint8Array {
+  return (body as Uint8Array | undefined) ?? nothing;
+}
+
+function send(reply: FastifyReply, answered: string | Problem): FastifyReply {
+  if (typeof answered !== 'string') return sendProblem(reply, answered);
+  return reply.headers(answerHeaders).type(answerMediaType).send(answered);
+}
+
+function warmUp<Request extends z.ZodType, Response extends z.ZodType>(
+  { url, warmUp: questions }: OperationShape<Request, Response>,
+  answerTo: Exchange,
+): WarmUp {
+  const bodies = questions.map((question) => new TextEncoder().encode(JSON.stringify(question)));
   return () => {
-    for (const question of questions) {
-      const answered = answerTo(question);
-      if (typeof answered !== 'string') throw new AnswerFault(`${operation.url} refused: ${answered.detail}`);
+    for (const body of bodies) {
+      const answered = answerTo(body);
+      if (typeof answered !== 'string') throw new AnswerFault(`${url} refused: ${answered.detail}`);
     }
   };
 }

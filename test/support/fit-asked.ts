@@ -57,7 +57,7 @@ export function takeoffAsked({ aeroplane: a, rows, stallSpeed }: MadeTable): Tak
           : { kind: power.kind, power: power.power, propellerDiameter: power.diameter },
     },
     configuration: { flap: 10 * (Math.PI / 180), maximumLift },
-    figures: {
+    figures: () => ({
       rotation: ratio(a.speedRatios[0]),
       liftOff: ratio(a.speedRatios[0]),
       screen: ratio(a.speedRatios[1]),
@@ -66,7 +66,7 @@ export function takeoffAsked({ aeroplane: a, rows, stallSpeed }: MadeTable): Tak
       groundLiftCoefficient: a.groundLift,
       groundDragIncrement: 0,
       airDragIncrement: a.airDrag - a.groundDrag,
-    },
+    }),
     points: pointsOf(rows, a.friction),
     declared: {
       groundRoll: 'm',
@@ -97,7 +97,7 @@ export function landingAsked({ aeroplane: a, rows }: MadeTable): LandingFitAsked
       flap: 30 * (Math.PI / 180),
       maximumLift: { kind: 'coefficient', coefficient: a.maximumLift },
     },
-    figures: {
+    figures: () => ({
       landingReference: ratio(a.speedRatios[0]),
       touchdown: ratio(a.speedRatios[1]),
       flareLoadFactor: a.flareLoadFactor ?? 1.2,
@@ -106,7 +106,7 @@ export function landingAsked({ aeroplane: a, rows }: MadeTable): LandingFitAsked
       screenHeight: 15.24,
       groundLiftCoefficient: a.groundLift,
       groundDragIncrement: 0,
-    },
+    }),
     points: pointsOf(rows, a.friction),
   };
 }

@@ -183,6 +183,7 @@ export function sampleLookup(...definitions: readonly AeroplaneDefinition[]): Ca
     get: (id) => known.get(id),
     ids: [...known.keys()],
     digestOf: (definition) => `digest of ${definition.id}`,
+    digestOfJson: () => 'digest',
     aerodromes: { get: () => undefined, ids: [] },
   };
 }

@@ -54,7 +54,7 @@ export function toFitQuestion(request: FitRequest, lookup: AeroplaneLookup): Ask
   const { runs = [], stalls = [], free } = request;
   return {
     known,
-    fittedTo: lookup.digestOf({ tables: tables.map(({ table }) => table), runs, stalls }),
+    fittedTo: lookup.digestOfJson({ tables: tables.map(({ table }) => table), runs, stalls }),
     question: {
       aeroplane: known.aeroplane,
       aeroplaneAt: aeroplaneAt(request.aeroplane),

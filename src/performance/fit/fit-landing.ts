@@ -13,7 +13,8 @@ import type { FitAeroplane } from './takeoff-model.ts';
 export interface LandingFitAsked {
   readonly aeroplane: FitAeroplane;
   readonly configuration: Pick<Configuration, 'flap' | 'maximumLift'>;
-  readonly figures: LandingFigures;
+  /** the procedure at a mass [kg] */
+  readonly figures: (mass: number) => LandingFigures;
   readonly points: readonly FitPoint[];
   readonly free?: readonly LandingParameter[] | undefined;
   readonly declared?: FitAsked['declared'];
@@ -49,10 +50,13 @@ export function fitLanding({
       landingModel(
         aeroplane,
         maximumLift,
-        {
-          ...figures,
-          landingReference: scaledSpeed(figures.landingReference, speedFactor),
-          touchdown: scaledSpeed(figures.touchdown, speedFactor),
+        (mass) => {
+          const { landingReference, touchdown, ...rest } = figures(mass);
+          return {
+            ...rest,
+            landingReference: scaledSpeed(landingReference, speedFactor),
+            touchdown: scaledSpeed(touchdown, speedFactor),
+          };
         },
         at,
       ),

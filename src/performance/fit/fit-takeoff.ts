@@ -12,7 +12,8 @@ import { type FitAeroplane, type TakeoffParameter, takeoffModel } from './takeof
 export interface TakeoffFitAsked {
   readonly aeroplane: FitAeroplane;
   readonly configuration: Pick<Configuration, 'flap' | 'maximumLift'>;
-  readonly figures: TakeoffFigures;
+  /** the procedure at a mass [kg] */
+  readonly figures: (mass: number) => TakeoffFigures;
   readonly points: readonly FitPoint[];
   /** parameters to free; absent: all that the points show */
   readonly free?: readonly TakeoffParameter[] | undefined;
@@ -52,11 +53,14 @@ export function fitTakeoff({
       takeoffModel(
         aeroplane,
         maximumLift,
-        {
-          ...figures,
-          rotation: scaledSpeed(figures.rotation, speedFactor),
-          liftOff: scaledSpeed(figures.liftOff, speedFactor),
-          screen: scaledSpeed(figures.screen, speedFactor),
+        (mass) => {
+          const { rotation, liftOff, screen, ...rest } = figures(mass);
+          return {
+            ...rest,
+            rotation: scaledSpeed(rotation, speedFactor),
+            liftOff: scaledSpeed(liftOff, speedFactor),
+            screen: scaledSpeed(screen, speedFactor),
+          };
         },
         at,
       ),

@@ -40,13 +40,14 @@ export const landingParametersOfFit: readonly ModelParameter<LandingParameter>[]
 /**
  * Landing distances against effective braking friction and approach angle; the air distance is the arc alone.
  *
+ * @param figuresAt - the procedure at a mass
  * @param points - with ground roll, whole distance or both
  * @returns undefined where a point lies outside the standard atmosphere or a speed is not subsonic
  */
 export function landingModel(
   { wing, drag }: FitAeroplane,
   maximumLift: MaximumLift,
-  figures: LandingFigures,
+  figuresAt: (mass: number) => LandingFigures,
   points: readonly FitPoint[],
 ): FitModel<LandingParameter> | undefined {
   const ready: {
@@ -57,6 +58,7 @@ export function landingModel(
     const found = airOf({ temperature, pressure: { kind: 'pressureAltitude', value: pressureAltitude } });
     if (found.outcome !== 'air') return undefined;
     const { air } = found;
+    const figures = figuresAt(mass);
     const stallEas = configuredStallSpeed(maximumLift, wing.area, mass);
     const speed = (schedule: ScheduledSpeed): number => {
       const eas = scheduledSpeed(schedule, mass, stallEas, air.pressure);

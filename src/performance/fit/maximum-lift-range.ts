@@ -3,8 +3,9 @@ import type { Category } from '../aeroplane.ts';
 const degree = Math.PI / 180;
 /** How well a maximum lift coefficient is known, over itself. @see references.Judgement */
 const known = 0.03;
-/** Flap beyond which a takeoff setting is a landing's as well [rad]. @see references.Judgement */
+/** Flap beyond which a takeoff setting is a landing's as well, and beyond which a landing's is full [rad]. @see references.Judgement */
 const landingFlap = 20 * degree;
+const fullFlap = 30 * degree;
 
 /**
  * Usual maximum lift coefficients of the whole aeroplane, trimmed and power off.
@@ -33,5 +34,5 @@ function usual(category: Category, phase: 'takeoff' | 'landing', flap: number): 
   const landingHigh = isJet ? 3.2 : isTurboprop ? 2.8 : category.startsWith('twin') ? 2.4 : 2.2;
   if (flap <= 0) return [1.3, isJet ? 1.8 : 1.6];
   if (phase === 'takeoff') return [1.3, flap > landingFlap ? landingHigh : isJet ? 2.4 : isTurboprop ? 2.2 : 1.8];
-  return [flap > landingFlap ? 1.8 : 1.5, landingHigh];
+  return [flap > fullFlap ? 1.8 : 1.5, landingHigh];
 }

@@ -105,21 +105,21 @@ interface Ready {
  *
  * @param aeroplane - its propulsion's own figures for these are not used
  * @param maximumLift - of the configuration
- * @param figures - the procedure; its load factor of the pull-up is not used
+ * @param figuresAt - the procedure at a mass; its load factor of the pull-up is not used
  * @param points - mass [kg], pressure altitude [m], temperature [K], headwind [m/s]; heights at or below the screen
  * @returns undefined where a point lies outside the standard atmosphere or a speed is not subsonic
  */
 export function takeoffModel(
   aeroplane: FitAeroplane,
   maximumLift: MaximumLift,
-  figures: TakeoffFigures,
+  figuresAt: (mass: number) => TakeoffFigures,
   points: readonly FitPoint[],
 ): FitModel<TakeoffParameter> | undefined {
   const { propulsion, engines } = aeroplane;
   const parameters = takeoffParametersOf(propulsion);
   const ready: Ready[] = [];
   for (const point of points) {
-    const one = readyPoint(aeroplane, maximumLift, figures, point);
+    const one = readyPoint(aeroplane, maximumLift, figuresAt(point.mass), point);
     if (one === undefined) return undefined;
     ready.push(one);
   }

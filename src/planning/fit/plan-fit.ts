@@ -7,6 +7,7 @@ import type { LandingParameter } from '../../performance/fit/landing-model.ts';
 import type { TakeoffParameter } from '../../performance/fit/takeoff-model.ts';
 import type { Assumption, Caution } from '../answer.ts';
 import type { Fault, Refused } from '../fault.ts';
+import { atManualSpeeds } from '../manual/at-manual-speeds.ts';
 import { resolveTakeoff } from '../resolve-takeoff.ts';
 import { percentText } from '../sentences/measure-text.ts';
 import { saidFinding } from './finding-sentence.ts';
@@ -33,15 +34,19 @@ export function* planFit(question: FitQuestion): Work<FitAnswer | Refused> {
   const flown = lift === undefined ? configuration : { ...configuration, maximumLift: lift.maximumLift };
   const { free, declared } = question;
   const asked = { aeroplane, configuration: flown, points, declared };
+  const ofMass = points[0]?.mass ?? aeroplane.masses.maximumTakeoff;
   let result: FitResult;
   let assumed: readonly Assumption[];
   if (phase === 'takeoff') {
-    const { assumed: filledIn, ...figures } = resolveTakeoff(question, flown);
-    assumed = filledIn.map(({ assumption }) => assumption).filter(({ at }) => !at.endsWith('/pullUpLoadFactor'));
+    const figures = (mass: number) => resolveTakeoff(question, atManualSpeeds(flown, { ...question, mass }));
+    assumed = figures(ofMass)
+      .assumed.map(({ assumption }) => assumption)
+      .filter(({ at }) => !at.endsWith('/pullUpLoadFactor'));
     result = yield* fitTakeoff({ ...asked, figures, free: free as readonly TakeoffParameter[] | undefined });
   } else {
-    const { figures, assumed: filledIn } = landingFitFigures(question, flown);
-    assumed = filledIn;
+    const at = (mass: number) => landingFitFigures(question, atManualSpeeds(flown, { ...question, mass }));
+    assumed = at(ofMass).assumed;
+    const figures = (mass: number) => at(mass).figures;
     result = yield* fitLanding({ ...asked, figures, free: free as readonly LandingParameter[] | undefined });
   }
 

@@ -10,7 +10,12 @@ const scheduled = ['rotation', 'liftOff', 'screen', 'landingReference', 'touchdo
  */
 export function atManualSpeeds(
   configuration: Configuration,
-  { aeroplane, configuration: id, mass, edges = 'use' }: Question,
+  {
+    aeroplane,
+    configuration: id,
+    mass,
+    edges = 'use',
+  }: Pick<Question, 'aeroplane' | 'configuration' | 'mass' | 'edges'>,
 ): Configuration {
   const manual = aeroplane.flightManual;
   const found = manual && manualSpeeds(manual, id, mass, edges);

@@ -148,7 +148,7 @@ describe('fitTakeoff on a published table', () => {
       wing: { area: wingArea, span, heightAboveGround: 0.2 * span },
     },
     configuration: { ...base.configuration, maximumLift: { kind: 'coefficient', coefficient: 1.6 } },
-    figures: { ...base.figures, rotation: liftOff, liftOff, screen, groundLiftCoefficient: 0.5 },
+    figures: (mass) => ({ ...base.figures(mass), rotation: liftOff, liftOff, screen, groundLiftCoefficient: 0.5 }),
   };
   const isFittedTo = ({ pressureAltitude, temperature }: FitPoint) =>
     [0, 4000, 7000].some((feet) => Math.abs(pressureAltitude - feet * 0.3048) < 1) && temperature < 304;
