@@ -3,12 +3,14 @@ import * as z from 'zod';
 import { aeroplaneDefinition } from '../../src/contract/aeroplane-definition.ts';
 import { airRequest, airResponse } from '../../src/contract/air.ts';
 import { airspeedRequest, airspeedResponse } from '../../src/contract/airspeed.ts';
+import { fitRequest } from '../../src/contract/fit/fit-request.ts';
+import { fitResponse } from '../../src/contract/fit/fit-response.ts';
 import { speedsRequest, speedsResponse } from '../../src/contract/speeds.ts';
 import { takeoffRequest } from '../../src/contract/takeoff-request.ts';
 import { takeoffResponse } from '../../src/contract/takeoff-response.ts';
 
-const requests = { aeroplaneDefinition, airRequest, airspeedRequest, speedsRequest, takeoffRequest };
-const responses = { airResponse, airspeedResponse, speedsResponse, takeoffResponse };
+const requests = { aeroplaneDefinition, airRequest, airspeedRequest, fitRequest, speedsRequest, takeoffRequest };
+const responses = { airResponse, airspeedResponse, fitResponse, speedsResponse, takeoffResponse };
 
 type Node = Record<string, unknown>;
 
@@ -72,6 +74,13 @@ describe('schemas of the contract', () => {
     }
     const ofColumns = ['items', 'parameter', 'reference'];
     const counts = ['0', '1', '2', 'engines', 'mach', 'passengerSeats', 'tyres'];
-    expect([...bare].sort()).toEqual([...counts, ...ofColumns, 'changePercent', 'factor'].sort());
+    const percents = [
+      'changePercent',
+      'greatestPercent',
+      'rmsPercent',
+      'speedUncertaintyPercent',
+      'uncertaintyPercent',
+    ];
+    expect([...bare].sort()).toEqual([...counts, ...ofColumns, ...percents, 'factor'].sort());
   });
 });

@@ -15,6 +15,7 @@ const correlation = z
 const heldTo = {
   fittedTo: z
     .string()
+    .max(64)
     .regex(/^[0-9a-f]{64}$/)
     .meta({ description: 'SHA-256, hex, of the tables, runs and stall speeds it was fitted to.' }),
   modelVersion: shortText.meta({ description: 'The model it was fitted with.' }),

@@ -101,7 +101,7 @@ export const fitResponse = z
     }),
     advisory,
     findings: z.array(finding),
-    fit: fit.meta({ description: "As a member of the aeroplane's definition." }).exactOptional(),
+    fit: fit.meta({ description: "Where it is accepted: as a member of the aeroplane's definition." }).exactOptional(),
     maximumLift: z
       .strictObject({ coefficient: z.number(), deviationPercent: z.number() })
       .meta({ id: 'MeasuredLift', description: 'From the measured stall speeds; the fit holds with it alone.' })

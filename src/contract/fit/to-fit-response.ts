@@ -25,10 +25,11 @@ export function toFitResponse(
   const { result, origins, maximumLift } = answer;
   const whole = request.for === 'takeoff' ? 'takeoffDistance' : 'landingDistance';
   const cautions = [...changedCautions(known), ...answer.cautions];
-  const made = result && {
-    ...toFit(result, fittedTo, stamp.modelVersion),
-    ...(request.dryAir === undefined ? {} : { dryAir: true }),
-  };
+  const made = answer.outcome === 'accepted' &&
+    result && {
+      ...toFit(result, fittedTo, stamp.modelVersion),
+      ...(request.dryAir === undefined ? {} : { dryAir: true }),
+    };
   return present<FitResponse>({
     outcome: answer.outcome,
     advisory: toAdvisory(how, answer.sentence, cautions),
@@ -42,7 +43,7 @@ export function toFitResponse(
         parameter: 'parameter' in finding ? parameterName(finding.parameter) : undefined,
       }),
     ),
-    fit: made && toFitMember(request.for, request.configuration, made),
+    fit: made === false || made === undefined ? undefined : toFitMember(request.for, request.configuration, made),
     maximumLift: maximumLift && {
       coefficient: shownRatio(how, maximumLift.coefficient),
       deviationPercent: percent(how, maximumLift.relativeSd),

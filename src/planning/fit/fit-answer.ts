@@ -19,7 +19,7 @@ export interface FitAnswer {
 }
 
 export const fitOutcomes = ['accepted', 'not-accepted', 'not-fitted'] as const;
-/** accepted: nothing speaks against it, and it is within the bounds of a fit; not-accepted: figures, but do not use them */
+/** accepted: nothing speaks against it, and it is within the bounds of a fit; not-accepted: figures, but not to be used */
 export type FitOutcome = (typeof fitOutcomes)[number];
 
 /** A finding in words, with where it points to. */
