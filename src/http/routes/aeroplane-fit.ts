@@ -52,7 +52,7 @@ export function aeroplaneFit(app: FastifyInstance, lookup: AeroplaneLookup, stam
     request: fitRequest,
     response: fitResponse,
     example: exampleFit,
-    warmUp: [exampleFit],
+    warmUp: [],
     work: (request) => answerFit(request, lookup, stamp),
   });
 }
