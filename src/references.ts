@@ -145,6 +145,7 @@ export const references = entries({
   },
   Cfr25s105: { title: '14 CFR 25.105(d)(1), wind in takeoff data', status: 'read' },
   Cfr25s107: { title: '14 CFR 25.107, takeoff speeds', status: 'read' },
+  Cfr25s111: { title: '14 CFR 25.111, takeoff path', status: 'read' },
   Cfr25s113: { title: '14 CFR 25.113, takeoff distance and takeoff run', status: 'read' },
   Cfr25s119: { title: '14 CFR 25.119, landing climb, all engines operating', status: 'memory' },
   Cfr25s121: { title: '14 CFR 25.121, climb with one engine inoperative', status: 'read' },

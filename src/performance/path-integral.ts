@@ -8,6 +8,8 @@ export interface PathIntegral {
   least: number;
   leastAt: number;
   most: number;
+  /** work of the wheel brakes over the mass [m2/s2]; 0 where nothing brakes */
+  brakeWork: number;
 }
 
 /** Adds the piece from one end to the other to a sum. */
@@ -15,7 +17,14 @@ export type AddPiece = (from: number, to: number, sum: PathIntegral) => void;
 
 /** A sum of nothing. */
 export function newPathIntegral(): PathIntegral {
-  return { distance: 0, time: 0, least: Number.POSITIVE_INFINITY, leastAt: 0, most: Number.NEGATIVE_INFINITY };
+  return {
+    distance: 0,
+    time: 0,
+    least: Number.POSITIVE_INFINITY,
+    leastAt: 0,
+    most: Number.NEGATIVE_INFINITY,
+    brakeWork: 0,
+  };
 }
 
 /** Change on halving, as a share of the sum, at which a piece is taken: ten times the rounding of the least acceleration used. */
@@ -82,4 +91,5 @@ export function gather(sum: PathIntegral, part: PathIntegral): void {
     sum.leastAt = part.leastAt;
   }
   sum.most = Math.max(sum.most, part.most);
+  sum.brakeWork += part.brakeWork;
 }

@@ -7,7 +7,8 @@ import { expectNear } from '../support/near.ts';
 function steady(acceleration: number, from: number, to: number): SpeedChange {
   const distance = (to * to - from * from) / (2 * acceleration);
   const least = Math.sign(to - from) * acceleration;
-  const sum = { distance, time: (to - from) / acceleration, least, leastAt: Math.min(from, to), most: least };
+  const time = (to - from) / acceleration;
+  const sum = { distance, time, least, leastAt: Math.min(from, to), most: least, brakeWork: 0 };
   return { reaches: least > 0, sum };
 }
 

@@ -8,7 +8,7 @@ export interface EngineFailureRun {
   readonly allEngines: TakeoffRun;
   /** of the engines that still run */
   readonly remainingThrust: Thrust;
-  /** drag coefficient that the dead engine and the rudder add, from the failure to the stop or the screen */
+  /** drag coefficient that the dead engine and the rudder add, from the failure to the stop or the screen; in no other figure here */
   readonly dragIncrementCoefficient: number;
   /** true airspeeds of the continued takeoff [m/s], rotation at or below lift-off */
   readonly rotationSpeed: number;
@@ -16,10 +16,14 @@ export interface EngineFailureRun {
   readonly screenSpeed: number;
   /** of the continued takeoff [m]: 35 ft, 15 ft on a wet runway, 50 ft for light twins */
   readonly screenHeight: number;
-  /** the wheels braked, spoilers out: what slows the aeroplane down, with the idle thrust of the engines that still run */
+  /**
+   * the wheels braked, spoilers out: what slows the aeroplane down, with the idle and reverse thrust of the engines that still run;
+   * its profile and stretches are measured from brake release
+   */
   readonly stop: BrakedRun;
-  /** idle thrust of all engines, for the stop without a failure [N] */
+  /** of all engines, for the stop without a failure [N]: idle thrust, and reverse thrust where the stop has it, absent: the stop's own */
   readonly idleThrustAllEngines: number;
+  readonly reverseThrustAllEngines?: number | undefined;
   readonly timeline: StopTimeline;
 }
 
@@ -29,7 +33,7 @@ export interface StopTimeline {
   readonly recognitionTime: number;
   /** as a distance at constant V1: 2 s of the current rule, 0 of the older one and of the advisory for light aeroplanes */
   readonly timeAtDecisionSpeed: number;
-  /** of going on accelerating with one engine out after V1: 2 s of the rule before 1998, else 0 */
+  /** of going on accelerating after V1, with one engine out or with all: 2 s of the rule before 1998, else 0 */
   readonly continuedAccelerationTime: number;
   /** at the speed then reached, until brakes, idle and spoilers are all effective: 1 s light, 2 s transport */
   readonly transitionTime: number;
@@ -48,7 +52,7 @@ export type AccelerateStop =
       readonly longer: 'engine-failure' | 'all-engines';
       readonly engineFailureDistance: number;
       readonly allEnginesDistance: number;
-      /** heat of the brakes: work of the friction in the longer stop [J] */
+      /** heat of the brakes: work of the wheels' friction in the stop of the two that heats them more [J] */
       readonly brakeEnergy: number;
     }
   | {
@@ -59,7 +63,7 @@ export type AccelerateStop =
   | { readonly outcome: 'never-stops'; readonly atGroundSpeed: number; readonly leastDecelerationRatio: number }
   | { readonly outcome: 'outside-stated-data'; readonly airspeed: number; readonly bound: number };
 
-/** The continued takeoff [m], [s]. */
+/** The continued takeoff [m], [s]; least of the acceleration over g on the roll, or of the climb gradient. */
 export type AccelerateGo =
   | {
       readonly outcome: 'reaches-screen';

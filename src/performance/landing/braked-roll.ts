@@ -4,7 +4,7 @@ import { stretchedPath } from '../stretched-path.ts';
 import { brakedStretches } from './braked-stretches.ts';
 import type { BrakedRun } from './landing-run.ts';
 import { noDeceleration, stopBetween } from './stop-between.ts';
-import { type StopForces, stopForces } from './stop-forces.ts';
+import { deceleration, type StopForces, stopForces } from './stop-forces.ts';
 
 /** The stop, or the name of why there is none. */
 export type BrakedRoll =
@@ -13,6 +13,8 @@ export type BrakedRoll =
       /** [m], [s] */
       readonly distance: number;
       readonly time: number;
+      /** heat of the brakes: all the friction of the wheels, rolling friction included [J] */
+      readonly brakeEnergy: number;
       /** least deceleration over g */
       readonly leastDecelerationRatio: number;
     }
@@ -21,7 +23,7 @@ export type BrakedRoll =
 /**
  * Distance on the wheels from an airspeed to a standstill, brakes full on.
  *
- * s = integral of (V - w)/d(V) dV from V = w to the airspeed; t = integral of dV/d;
+ * s = integral of (V - w)/d(V) dV from V = w to the airspeed; t = integral of dV/d; brake energy = integral of the friction over s;
  * m d = mu_B(V - w) max(0, W - q S C_Lg) + q S C_Dg - T_idle + W slope + k (V - w)^2, q = rho V|V|/2,
  * with the reverse thrust added in place of T_idle taken off, at and above its cut-off speed, and the contaminant's k below its
  * speed. On a runway in stretches each has its own braking, slope and contaminant.
@@ -29,7 +31,7 @@ export type BrakedRoll =
  * @param run - configuration, wind and braking of the stop
  * @param airspeed - true, at which braking begins [m/s], above w
  * @param begin - where braking begins, on the scale of the stretches [m]
- * @returns distance [m] and time [s]; 'never-stops' where d is not above 1e-6 g throughout, with the highest ground speed at which
+ * @returns distance [m], time [s] and brake energy [J]; 'never-stops' where d is not above 1e-6 g throughout, with the highest ground speed at which
  * it is gone
  * @remarks Small slopes; wheels, not skis or floats; the friction acts from the first moment.
  * @see references.McCormick1995, sec. 7.7; references.Raymer, ch. 17
@@ -41,7 +43,7 @@ export function brakedRoll(run: BrakedRun, airspeed: number, begin = 0): BrakedR
   if (stretches === undefined) {
     const forces = stopForces(run, run);
     const { reaches, sum } = stopBetween(forces, airspeed, headwind);
-    return reaches ? stops(sum) : neverStops(forces, airspeed, sum.leastAt);
+    return reaches ? stops(run, sum) : neverStops(forces, airspeed, sum.leastAt);
   }
   const forces = stretches.map((stretch) => stopForces(run, stretch));
   const path = stretchedPath(
@@ -52,20 +54,21 @@ export function brakedRoll(run: BrakedRun, airspeed: number, begin = 0): BrakedR
     (stretch, from, to) => stopBetween(forces[stretch] as StopForces, from, to),
   );
   return path.reaches
-    ? stops(path.sum)
+    ? stops(run, path.sum)
     : neverStops(forces[path.stretch] as StopForces, path.entered, path.sum.leastAt);
 }
 
-function stops({ distance, time, least }: PathIntegral): BrakedRoll {
-  return { outcome: 'stops', distance, time, leastDecelerationRatio: least / g0 };
+function stops({ mass }: BrakedRun, { distance, time, brakeWork, least }: PathIntegral): BrakedRoll {
+  return { outcome: 'stops', distance, time, brakeEnergy: mass * brakeWork, leastDecelerationRatio: least / g0 };
 }
 
 /** The named outcome, with the first ground speed on slowing down at which the deceleration is gone, to a thousandth. */
-function neverStops({ deceleration, headwind }: StopForces, from: number, leastAt: number): BrakedRoll {
-  const leastDecelerationRatio = deceleration(leastAt) / g0;
+function neverStops(forces: StopForces, from: number, leastAt: number): BrakedRoll {
+  const { headwind } = forces;
+  const leastDecelerationRatio = deceleration(forces, leastAt) / g0;
   for (let i = 0; i <= 1000; i++) {
     const at = from + ((headwind - from) * i) / 1000;
-    if (deceleration(at) <= noDeceleration * g0)
+    if (deceleration(forces, at) <= noDeceleration * g0)
       return { outcome: 'never-stops', atGroundSpeed: at - headwind, leastDecelerationRatio };
   }
   return { outcome: 'never-stops', atGroundSpeed: leastAt - headwind, leastDecelerationRatio };

@@ -3,7 +3,7 @@ import { splitPoints } from '../../numerics/split-points.ts';
 import { g0 } from '../../physics/constants.ts';
 import { addSettled, newPathIntegral, type PathIntegral } from '../path-integral.ts';
 import type { SpeedChange } from '../stretched-path.ts';
-import type { StopForces } from './stop-forces.ts';
+import { otherDeceleration, type StopForces, wheelDeceleration } from './stop-forces.ts';
 
 /** A deceleration over g that counts as none. */
 export const noDeceleration = 1e-6;
@@ -40,12 +40,13 @@ export function stopBetween(forces: StopForces, from: number, to: number): Speed
   return { reaches: fine.least > noDeceleration * g0, sum: fine };
 }
 
-function addStopPiece({ deceleration, headwind }: StopForces, from: number, to: number, sum: PathIntegral): void {
+function addStopPiece(forces: StopForces, from: number, to: number, sum: PathIntegral): void {
   const half = (to - from) / 2;
   const middle = from + half;
   for (let i = 0; i < nodes.length; i++) {
     const airspeed = middle + half * (nodes[i] as number);
-    const value = deceleration(airspeed);
+    const braked = wheelDeceleration(forces, airspeed);
+    const value = braked + otherDeceleration(forces, airspeed);
     if (value < sum.least) {
       sum.least = value;
       sum.leastAt = airspeed;
@@ -53,6 +54,8 @@ function addStopPiece({ deceleration, headwind }: StopForces, from: number, to: 
     if (value > sum.most) sum.most = value;
     const share = (half * (weights[i] as number)) / value;
     sum.time += share;
-    sum.distance += share * (airspeed - headwind);
+    const way = share * (airspeed - forces.headwind);
+    sum.distance += way;
+    sum.brakeWork += way * braked;
   }
 }

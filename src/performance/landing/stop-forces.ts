@@ -1,14 +1,25 @@
+import type { BrakingFriction } from '../../physics/braking-friction.ts';
 import { g0 } from '../../physics/constants.ts';
 import { dragCoefficient } from '../../physics/drag.ts';
 import { groundEffect } from '../../physics/ground-effect.ts';
 import type { BrakedRun, BrakedStretch } from './landing-run.ts';
 
-/** What slows an aeroplane down on its wheels, as constants of one stretch of one run. */
+/** What slows an aeroplane down on its wheels, by unit of mass, as constants of one stretch of one run. */
 export interface StopForces {
   readonly headwind: number;
-  /** deceleration [m/s2] against true airspeed [m/s] */
-  readonly deceleration: (airspeed: number) => number;
-  /** airspeeds [m/s] at which it or its slope jumps */
+  /** against ground speed, on the whole weight */
+  readonly braking: BrakingFriction;
+  /** drag and lift over V|V| and mass [1/m] */
+  readonly drag: number;
+  readonly lift: number;
+  /** gravity along the runway less idle thrust [m/s2], and with reverse thrust, at and above its cut-off ground speed [m/s] */
+  readonly steady: number;
+  readonly reversed: number;
+  readonly cutOffSpeed: number;
+  /** drag of a contaminant over the square of the ground speed and mass [1/m], below a ground speed [m/s] */
+  readonly displaced: number;
+  readonly displacedBelow: number;
+  /** airspeeds [m/s] at which the deceleration or its slope jumps */
   readonly jumps: readonly number[];
 }
 
@@ -37,15 +48,23 @@ export function stopForces(run: BrakedRun, ground: Omit<BrakedStretch, 'end'>): 
   if (run.reverseThrust !== undefined) jumps.push(cutOffSpeed + headwind);
   if (contaminantDrag !== undefined) jumps.push(displacedBelow + headwind);
   if (lift > 0) jumps.push(Math.sqrt(g0 / lift));
-  return {
-    headwind,
-    jumps,
-    deceleration: (airspeed) => {
-      const square = airspeed * Math.abs(airspeed);
-      const groundSpeed = airspeed - headwind;
-      const rest = groundSpeed < cutOffSpeed ? steady : reversed;
-      const pushed = groundSpeed < displacedBelow ? displaced * groundSpeed * groundSpeed : 0;
-      return braking.at(groundSpeed) * Math.max(0, g0 - lift * square) + drag * square + pushed + rest;
-    },
-  };
+  return { headwind, braking, drag, lift, steady, reversed, cutOffSpeed, displaced, displacedBelow, jumps };
+}
+
+/** Deceleration by the wheels [m/s2] at a true airspeed [m/s]. */
+export function wheelDeceleration({ braking, headwind, lift }: StopForces, airspeed: number): number {
+  return braking.at(airspeed - headwind) * Math.max(0, g0 - lift * airspeed * Math.abs(airspeed));
+}
+
+/** Deceleration by all but the wheels [m/s2] at a true airspeed [m/s]: air, contaminant, slope, engines. */
+export function otherDeceleration(forces: StopForces, airspeed: number): number {
+  const groundSpeed = airspeed - forces.headwind;
+  const pushed = groundSpeed < forces.displacedBelow ? forces.displaced * groundSpeed * groundSpeed : 0;
+  const held = groundSpeed < forces.cutOffSpeed ? forces.steady : forces.reversed;
+  return forces.drag * airspeed * Math.abs(airspeed) + pushed + held;
+}
+
+/** Deceleration [m/s2] at a true airspeed [m/s]. */
+export function deceleration(forces: StopForces, airspeed: number): number {
+  return wheelDeceleration(forces, airspeed) + otherDeceleration(forces, airspeed);
 }

@@ -45,7 +45,7 @@ export function groundRoll(run: TakeoffRun): GroundRoll {
     const { reaches, sum } = rollBetween(forces, headwind, headwind, liftOffSpeed);
     return reaches ? liftsOff(run, sum) : neverReaches(forces, headwind, liftOffSpeed, sum.leastAt);
   }
-  const path = profiledRoll(forces, run.profile, headwind, liftOffSpeed);
+  const path = profiledRoll(forces, run.profile, headwind, headwind, liftOffSpeed);
   return path.reaches
     ? liftsOff(run, path.sum)
     : neverReaches(path.forces, path.entered, liftOffSpeed, path.sum.leastAt);

@@ -1,6 +1,7 @@
 import { steepestFrom } from '../slope-profile.ts';
 import { airDistance, neededWithAllEngines } from './air-distance.ts';
 import { groundRoll } from './ground-roll.ts';
+import { outsideStatedData } from './outside-stated-data.ts';
 import type { TakeoffResult, TakeoffRun } from './takeoff-run.ts';
 
 /**
@@ -13,8 +14,10 @@ import type { TakeoffResult, TakeoffRun } from './takeoff-run.ts';
  * @see references.McCormick1995, ch. 7; references.HouseEnergyPath
  */
 export function takeoff(run: TakeoffRun, neededClimbGradient = neededWithAllEngines): TakeoffResult {
-  const roll = run.headwind >= run.liftOffSpeed ? undefined : outsideData(run);
-  if (roll !== undefined) return roll;
+  if (run.headwind < run.liftOffSpeed) {
+    const outside = outsideStatedData(run.thrust, run.headwind, Math.max(run.liftOffSpeed, run.screenSpeed));
+    if (outside !== undefined) return outside;
+  }
   const ground = groundRoll(run);
   if (ground.outcome !== 'lifts-off') return ground;
   const air = airDistance(underPath(run, ground.distance), neededClimbGradient);
@@ -44,15 +47,4 @@ export function takeoff(run: TakeoffRun, neededClimbGradient = neededWithAllEngi
 /** The run as its air path sees the ground: on a profile the steepest stretch from lift-off on. */
 export function underPath(run: TakeoffRun, groundRoll: number): TakeoffRun {
   return run.profile === undefined ? run : { ...run, slope: steepestFrom(run.profile, groundRoll) };
-}
-
-function outsideData(run: TakeoffRun): TakeoffResult | undefined {
-  const { domain } = run.thrust;
-  if (domain === undefined) return undefined;
-  const [lowest, highest] = domain;
-  const first = Math.max(0, run.headwind);
-  const last = Math.max(run.liftOffSpeed, run.screenSpeed);
-  if (first < lowest) return { outcome: 'outside-stated-data', airspeed: first, bound: lowest };
-  if (last > highest) return { outcome: 'outside-stated-data', airspeed: last, bound: highest };
-  return undefined;
 }

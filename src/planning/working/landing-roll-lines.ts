@@ -1,6 +1,6 @@
 import { estimateSpeed, landingEstimate } from '../../performance/landing/landing-estimate.ts';
 import type { LandingRun } from '../../performance/landing/landing-run.ts';
-import { stopForces } from '../../performance/landing/stop-forces.ts';
+import { deceleration, stopForces } from '../../performance/landing/stop-forces.ts';
 import { dragCoefficient } from '../../physics/drag.ts';
 import { groundEffect } from '../../physics/ground-effect.ts';
 import { aeroplanePointer, configurationPointer } from '../aeroplane-pointer.ts';
@@ -87,7 +87,7 @@ export function landingRollLines(sheet: Worksheet, question: LandingQuestion, { 
     symbol: 'd_m',
     name: 'deceleration there',
     formula: `(mu_B*max(0, m*g0 - L_m) + D_m${displaced} ${push})/m + g0*slope`,
-    value: stopForces(run, run).deceleration(mean),
+    value: deceleration(stopForces(run, run), mean),
     unit: 'm/s2',
     source: 'McCormick1995',
   });
