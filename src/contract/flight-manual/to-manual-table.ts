@@ -50,8 +50,12 @@ export function toSpeedTable(given: SpeedTableOnWire, calibration?: AirspeedCali
   };
 }
 
-/** A number of a column in SI; NaN only where an indicated speed has no calibration, which a check refuses before. */
-export function columnReader(
+/**
+ * Reads a number of a column in SI, an indicated speed as the calibrated one.
+ *
+ * @throws RangeError from what it returns, where an indicated speed has no calibration: a check refuses it before
+ */
+function columnReader(
   { columns, airspeed }: Pick<ManualTableOnWire | SpeedTableOnWire, 'columns' | 'airspeed'>,
   calibration?: AirspeedCalibration,
 ): (row: readonly number[], column: Heading) => number {
