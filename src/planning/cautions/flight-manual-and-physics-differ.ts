@@ -1,10 +1,8 @@
 import { isPhysicsByName } from '../method.ts';
+import { physicsSpread } from '../rules/physics-spread.ts';
 import { percentText } from '../sentences/measure-text.ts';
 import { type AnswerContext, textIn } from './answer-context.ts';
 import type { CautionTest } from './caution-test.ts';
-
-/** Beyond these ratios one of the two is suspected, as a difference of ln: twice the model form of the physics. @see references.HouseManual */
-const spread = { fitted: 0.1, stated: 0.3 } as const;
 
 /** The flight manual and the aeroplane's physics give different distances. */
 export const flightManualAndPhysicsDiffer: CautionTest<AnswerContext> = {
@@ -18,7 +16,7 @@ export const flightManualAndPhysicsDiffer: CautionTest<AnswerContext> = {
     const { other, method, flightManual } = found;
     if (other === undefined || wholeDistance === undefined) return undefined;
     const physics = [method, other.method].includes('fitted') ? 'fitted' : 'stated';
-    const threshold = spread[physics];
+    const threshold = physicsSpread[physics];
     if (Math.abs(Math.log(other.ratio)) <= threshold) return undefined;
     const isByPhysics = isPhysicsByName(question);
     const isManualLonger = other.ratio > 1 === isByPhysics;
