@@ -20,12 +20,17 @@ const changed = {
   because: reason.meta({ description: 'Why the aeroplane is changed; repeated in a caution.' }),
 };
 
-export const aeroplaneChoice = z
-  .union([z.strictObject({ id, revision }), inlineInOrder, z.strictObject(changed)])
-  .meta({
-    id: 'Aeroplane',
-    description: 'The aeroplane: an id of the catalogue, a whole definition, or one of the catalogue with changes.',
-  });
+const onFile = z.strictObject({ id, revision });
+
+/** An aeroplane without changes: what is asked is of its own flight manual. */
+export const aeroplaneAsItStands = z
+  .union([onFile, inlineInOrder])
+  .meta({ id: 'AeroplaneAsItStands', description: 'The aeroplane: an id of the catalogue, or a whole definition.' });
+
+export const aeroplaneChoice = z.union([onFile, inlineInOrder, z.strictObject(changed)]).meta({
+  id: 'Aeroplane',
+  description: 'The aeroplane: an id of the catalogue, a whole definition, or one of the catalogue with changes.',
+});
 
 /** The aeroplane as an answer echoes it: one of the catalogue always with its revision. */
 export const aeroplaneUnderstood = z

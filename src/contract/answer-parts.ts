@@ -52,13 +52,15 @@ export const quantity = z
 
 export const measure = z.union([quantity, z.number()]);
 
+export const severity = z.enum(severities).meta({
+  description:
+    'note: worth knowing; caution: may change the decision; strong: do not rely on this answer as it stands.',
+});
+
 export const caution = z
   .strictObject({
     code: z.string().meta({ description: 'Stable name of the caution.' }),
-    severity: z.enum(severities).meta({
-      description:
-        'note: worth knowing; caution: may change the decision; strong: do not rely on this answer as it stands.',
-    }),
+    severity,
     message: z.string().meta({ description: 'A fact and its effect, with numbers and units.' }),
     at: z.string().meta({ description: 'JSON pointer into the question.' }).exactOptional(),
     value: measure.meta({ description: 'The number the caution is about.' }).exactOptional(),

@@ -9,6 +9,9 @@ export interface JsonLimits {
 /** A batched question with an inline definition needs 11 levels; our choice of bounds for both. */
 export const questionLimits: JsonLimits = { depth: 12, tokens: 20_000 };
 
+/** A definition with every sheet of its flight manual: 24 tables of 1 000 rows and 12 columns are 312 000 values. */
+export const definitionLimits: JsonLimits = { depth: 12, tokens: 400_000 };
+
 export interface JsonCount {
   readonly depth: number;
   readonly tokens: number;
