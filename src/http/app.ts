@@ -20,6 +20,8 @@ import { airspeed } from './routes/airspeed.ts';
 import { landingChoices, takeoffChoices } from './routes/choices.ts';
 
 import { landing } from './routes/landing.ts';
+import { proof } from './routes/proof.ts';
+import { proofread } from './routes/proofread.ts';
 import { ruleSets } from './routes/rule-sets.ts';
 import { service } from './routes/service.ts';
 import { sources } from './routes/sources.ts';
@@ -89,6 +91,8 @@ export async function buildApp({ catalogue, logger = false, settings }: House): 
     airspeed(app, lookup, ours),
     tables(app, lookup),
     air(app, ours),
+    proofread(app, lookup, ours),
+    proof(app, lookup, ours),
   ];
   await documentPages(app);
 

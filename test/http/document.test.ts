@@ -53,6 +53,8 @@ describe('the OpenAPI document', () => {
       'get /v1/surfaces',
       'get /version',
       'post /v1/aeroplanes/fit',
+      'post /v1/aeroplanes/proof',
+      'post /v1/aeroplanes/proofread',
       'post /v1/aeroplanes/tables',
       'post /v1/air',
       'post /v1/airspeed',
@@ -98,7 +100,8 @@ describe('the OpenAPI document', () => {
     const statuses = new Set(Object.values(problemForms).map(({ status }) => String(status)));
     for (const { path, method, operation } of operations) {
       const { 200: answer, ...problems } = operation.responses;
-      expect(Object.keys(answer?.content ?? {}), path).toEqual(['application/json']);
+      const forms = path === '/v1/aeroplanes/proof' ? ['text/csv', 'text/html'] : [];
+      expect(Object.keys(answer?.content ?? {}), path).toEqual(['application/json', ...forms]);
       expect(Object.keys(problems), path).toEqual(expect.arrayContaining(['400', '500', '503']));
       if (method === 'post') expect(Object.keys(problems), path).toEqual(expect.arrayContaining(['413', '415', '422']));
       for (const [status, { content }] of Object.entries(problems)) {
@@ -129,7 +132,7 @@ describe('the OpenAPI document', () => {
 
   it('shows an example for each question, and the service answers it', async () => {
     const questions = operations.filter(({ method }) => method === 'post');
-    expect(questions).toHaveLength(9);
+    expect(questions).toHaveLength(11);
     for (const { path, operation } of questions) {
       const example = operation.requestBody?.content['application/json']?.example;
       const answered = await post(app, path, example);

@@ -1,3 +1,4 @@
+import type { Work } from '../../numerics/work.ts';
 import type { Refused } from '../../planning/fault.ts';
 import { proofOfTable, type TableProof } from '../../planning/proof/proof-of-table.ts';
 import { asChosen } from '../aeroplane-choice.ts';
@@ -21,7 +22,7 @@ export function* answerProof(
   request: ProofRequest,
   lookup: AeroplaneLookup,
   stamp: Stamp,
-): Generator<undefined, ProofResponse | Refused, undefined> {
+): Work<ProofResponse | Refused> {
   const known = toKnownAeroplane(request.aeroplane, lookup);
   if (Array.isArray(known)) return { refused: known };
   const { definition, aeroplane, digest } = known;

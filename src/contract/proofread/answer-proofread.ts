@@ -1,3 +1,4 @@
+import type { Work } from '../../numerics/work.ts';
 import type { Fault } from '../../planning/fault.ts';
 import type { Finding } from '../../planning/review/finding-test.ts';
 import { type ConfigurationMethods, possibleMethods } from '../../planning/review/possible-methods.ts';
@@ -22,7 +23,7 @@ export function* answerProofread(
   request: ProofreadRequest,
   lookup: CatalogueLookup,
   stamp: Stamp,
-): Generator<undefined, ProofreadResponse, undefined> {
+): Work<ProofreadResponse> {
   const { reference, asOf, units } = request;
   const how = presentationOf({ ...(units === undefined ? {} : { units }), rounding: 'safe' });
   const part = readablePart(request.definition);

@@ -12,6 +12,8 @@ interface Described {
   readonly response: z.ZodType;
   readonly request?: z.ZodType;
   readonly params?: z.ZodObject;
+  /** media types beside JSON, with what they are */
+  readonly forms?: Readonly<Record<string, { readonly description: string }>>;
 }
 
 const ofEveryPath: readonly ProblemCode[] = ['unreadable', 'not-acceptable', 'headers-too-large', 'our-fault', 'busy'];
@@ -20,7 +22,7 @@ const ofIds: readonly ProblemCode[] = ['not-found'];
 
 /** What the document says of a route: texts, bodies, and each status a caller must be ready for. */
 export function operationSchema(described: Described): FastifySchema {
-  const { operationId, summary, description, tag, request, response, params } = described;
+  const { operationId, summary, description, tag, request, response, params, forms = {} } = described;
   const problems = [...ofEveryPath, ...(request ? ofBodies : []), ...(params ? ofIds : [])];
   const statuses = problems
     .map((code) => problemForms[code].status)
@@ -36,11 +38,21 @@ export function operationSchema(described: Described): FastifySchema {
       : { body: { required: true, content: { 'application/json': { schema: request } } } }),
     ...(params === undefined ? {} : { params }),
     response: {
-      200: { description: 'The answer.', content: { 'application/json': { schema: response } } },
+      200: {
+        description: 'The answer.',
+        content: {
+          'application/json': { schema: response },
+          ...Object.fromEntries(Object.entries(forms).map(([type, form]) => [type, { schema: asText(form) }])),
+        },
+      },
       ...Object.fromEntries(statuses),
     },
   };
   return schema as FastifySchema;
+}
+
+function asText({ description }: { readonly description: string }) {
+  return { type: 'string', description };
 }
 
 function problemResponse(status: number) {

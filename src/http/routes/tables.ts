@@ -2,6 +2,7 @@ import type { FastifyInstance } from 'fastify';
 import type { AeroplaneLookup } from '../../contract/aeroplane-lookup.ts';
 import { answerTable } from '../../contract/flight-manual/answer-table.ts';
 import { type TableRequest, tableRequest, tableResponse } from '../../contract/flight-manual/table-request.ts';
+import { definitionBody } from '../body-limits.ts';
 import { addOperation, type WarmUp } from '../operation.ts';
 
 /** Invented, for the document. */
@@ -53,6 +54,7 @@ export function tables(app: FastifyInstance, lookup: AeroplaneLookup): WarmUp {
     response: tableResponse,
     example,
     ownText: ['/csv'],
+    limits: definitionBody,
     warmUp: [example],
     answer: (request) => answerTable(request, lookup),
   });

@@ -1,3 +1,4 @@
+import type { Work } from '../../numerics/work.ts';
 import type { Aeroplane } from '../../performance/aeroplane.ts';
 import type { ManualOutput, ManualTable } from '../../performance/flight-manual/flight-manual.ts';
 import { sheetFigures } from '../../performance/flight-manual/sheet-figures.ts';
@@ -40,7 +41,7 @@ const sameFigure = 1e-9;
  *
  * @returns work that yields between rows
  */
-export function* proofOfTable(aeroplane: Aeroplane, table: ManualTable): Generator<undefined, TableProof, undefined> {
+export function* proofOfTable(aeroplane: Aeroplane, table: ManualTable): Work<TableProof> {
   const configurations = table.configurations.flatMap((id) => {
     const physics = tablePhysics(aeroplane, table, id);
     const flap = aeroplane.configurations[id]?.flap;

@@ -11,7 +11,7 @@ export const cellApart: FindingTest = {
   source: 'HouseFit',
   test: (context) =>
     context.compared.flatMap((one) =>
-      (one.fit?.findings ?? []).flatMap((finding) => {
+      one.slips.flatMap((finding) => {
         if (finding.code !== 'outlier' || (finding.kind !== 'groundRoll' && finding.kind !== 'wholeDistance'))
           return [];
         const { factor } = one.table.contains;

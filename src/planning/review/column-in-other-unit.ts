@@ -11,7 +11,7 @@ export const columnInOtherUnit: FindingTest = {
   source: 'HouseFit',
   test: ({ compared }) =>
     compared.flatMap((one) =>
-      (one.fit?.findings ?? []).flatMap((finding) => {
+      one.slips.flatMap((finding) => {
         if (finding.code !== 'unit-error') return [];
         const { column, printed, declared, rmsIfSo } = finding;
         const name = columnName(column, one);

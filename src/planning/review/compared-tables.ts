@@ -1,16 +1,12 @@
-import type { Aeroplane } from '../../performance/aeroplane.ts';
-import { fitLanding } from '../../performance/fit/fit-landing.ts';
-import type { FitResult } from '../../performance/fit/fit-result.ts';
-import { fitTakeoff } from '../../performance/fit/fit-takeoff.ts';
-import { isFault } from '../chosen.ts';
+import type { Work } from '../../numerics/work.ts';
+import type { Aeroplane, Configuration, MaximumLift } from '../../performance/aeroplane.ts';
+import type { FitColumn, FitFinding } from '../../performance/fit/fit-finding.ts';
 import { isRefused } from '../fault.ts';
-import { prepareLanding } from '../prepare-landing.ts';
-import { prepareTakeoff } from '../prepare-takeoff.ts';
+import { planFit } from '../fit/plan-fit.ts';
 import { tablePhysics } from '../proof/physics-at-node.ts';
-import { questionAtNode } from '../proof/question-at.ts';
+import { askedAeroplaneAt } from '../proof/question-at.ts';
 import { type TableNode, tableNode } from '../proof/table-node.ts';
-import type { ComparedTable, Reviewed, ReviewedTable } from './review-context.ts';
-import { declaredUnits, tablePoints } from './table-points.ts';
+import { type ComparedTable, columnName, type Reviewed, type ReviewedTable } from './review-context.ts';
 
 /** What a review may cost, our choice: pairs of a table and a configuration, rows of one table, rows of all, rows that a fit needs. */
 const mostPairs = 12;
@@ -26,10 +22,7 @@ const sameFlap = 1e-3;
  * @param faulty - ids of configurations, or 'all', whose physics has nothing to go by
  * @returns work that yields between its parts
  */
-export function* comparedTables(
-  reviewed: Reviewed,
-  faulty: ReadonlySet<string>,
-): Generator<undefined, ComparedTable[], undefined> {
+export function* comparedTables(reviewed: Reviewed, faulty: ReadonlySet<string>): Work<ComparedTable[]> {
   const { aeroplane, tables } = reviewed;
   if (faulty.has('all')) return [];
   const pairs = tables.flatMap((one) =>
@@ -51,13 +44,13 @@ export function* comparedTables(
     });
     yield;
     if (rows.length === 0) continue;
-    const fit = yield* fitOf(
+    const slips = yield* fitFindings(
       reviewed,
       one,
       id,
       rows.map(({ node }) => node),
     );
-    compared.push({ ...one, configuration: id, physics, rows, rowsOfTable: all.length, fit });
+    compared.push({ ...one, configuration: id, physics, rows, rowsOfTable: all.length, slips });
   }
   return compared;
 }
@@ -76,48 +69,57 @@ function spread(nodes: readonly TableNode[], most: number): readonly TableNode[]
   return Array.from({ length: most }, (_, i) => nodes[Math.round((i * (nodes.length - 1)) / (most - 1))] as TableNode);
 }
 
-function* fitOf(
-  { aeroplane, stallSpeedUnits }: Reviewed,
-  one: ReviewedTable,
+/** What a fit of physics to these rows finds, rows numbered as in the table; nothing where it is refused. */
+function* fitFindings(
+  { aeroplane, stallSpeedUnits, units }: Reviewed,
+  { table, ...one }: ReviewedTable,
   id: string,
   nodes: readonly TableNode[],
-): Generator<undefined, FitResult | undefined, undefined> {
-  const configuration = aeroplane.configurations[id];
-  const [first] = nodes;
-  if (configuration === undefined || first === undefined) return undefined;
-  const asked = questionAtNode(aeroplane, one.table, id, first);
-  const declared = declaredUnits(one, configuration, stallSpeedUnits[id]);
-  const { screenHeight } = one.table.conditions;
-  if (one.table.phase === 'takeoff') {
-    const prepared = prepareTakeoff(asked);
-    if (isRefused(prepared) || prepared.friction.actual === undefined) return undefined;
-    const { certification } = aeroplane;
-    return yield* fitTakeoff({
-      aeroplane: {
-        ...aeroplane,
-        certification: { ...certification, screenHeight: screenHeight ?? certification.screenHeight },
-      },
-      configuration,
-      figures: prepared.resolved,
-      points: tablePoints(one, nodes, prepared.friction.actual),
-      declared,
-    });
-  }
-  const prepared = prepareLanding(asked);
-  if (isRefused(prepared) || isFault(prepared.landingSpeeds) || prepared.braking.actual === undefined) return undefined;
-  const { resolved, run, landingSpeeds } = prepared;
-  return yield* fitLanding({
+): Work<readonly FitFinding[]> {
+  const { maximumLift } = aeroplane.configurations[id] as Configuration;
+  const standard = table.standardTemperatures;
+  const answer = yield* planFit({
     aeroplane,
-    configuration,
-    figures: {
-      ...resolved,
-      landingReference: resolved.landingReference ?? {
-        kind: 'stall-ratio',
-        ratio: landingSpeeds.reference.stallRatio,
+    aeroplaneAt: askedAeroplaneAt,
+    configuration: id,
+    phase: table.phase === 'landing' ? 'landing' : 'takeoff',
+    tables: [
+      {
+        table: {
+          ...table,
+          nodes: nodes.map(({ row }) => table.nodes[row] as readonly number[]),
+          cells: nodes.map(({ row }) => table.cells[row] as readonly number[]),
+          ...(standard === undefined ? {} : { standardTemperatures: nodes.map(({ row }) => standard[row] as number) }),
+        },
+        at: () => one.at,
       },
-      screenHeight: screenHeight ?? run.screenHeight,
-    },
-    points: tablePoints(one, nodes, 0),
-    declared,
+    ],
+    runs: [],
+    stalls: [],
+    declared: declaredUnits({ table, ...one }, maximumLift, stallSpeedUnits[id]),
+    units,
   });
+  if (isRefused(answer)) return [];
+  return answer.findings.map(({ finding }) =>
+    'row' in finding ? { ...finding, row: nodes[finding.row]?.row ?? finding.row } : finding,
+  );
+}
+
+/** The units that the figures of a table were typed in with; one that no slip is known of where there is none. */
+function declaredUnits(
+  reviewed: ReviewedTable,
+  { kind }: MaximumLift,
+  stallSpeedUnit = 'none',
+): Readonly<Partial<Record<FitColumn, string>>> {
+  const unitOf = (column: FitColumn) =>
+    reviewed.columns.find(({ name }) => name === columnName(column, reviewed))?.unit ?? 'none';
+  return {
+    groundRoll: unitOf('groundRoll'),
+    wholeDistance: unitOf('wholeDistance'),
+    distances: unitOf('distances'),
+    mass: reviewed.massUnit ?? unitOf('mass'),
+    pressureAltitude: unitOf('pressureAltitude'),
+    temperature: unitOf('temperature'),
+    speeds: kind === 'stall-speed' ? stallSpeedUnit : 'none',
+  };
 }

@@ -18,8 +18,8 @@ export const fitUnusual: FindingTest = {
     "The aeroplane's physics follows a table only with thrust, drag, lapse, braking or approach outside what such aeroplanes have: another page, unit or aeroplane, or a note left out.",
   source: 'HouseFit',
   test: ({ compared }) =>
-    compared.flatMap(({ fit, table, configuration, at }) =>
-      (fit?.findings ?? []).flatMap((finding) => {
+    compared.flatMap(({ slips, table, configuration, at }) =>
+      slips.flatMap((finding) => {
         if (finding.code !== 'parameter-at-bound' && finding.code !== 'parameter-implausible') return [];
         const { parameter, value, range } = finding;
         const [low, high] = range.map((bound) => Number(bound.toPrecision(3)));

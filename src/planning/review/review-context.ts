@@ -1,6 +1,5 @@
 import type { Aeroplane, Configuration } from '../../performance/aeroplane.ts';
-import type { FitColumn } from '../../performance/fit/fit-finding.ts';
-import type { FitResult } from '../../performance/fit/fit-result.ts';
+import type { FitColumn, FitFinding } from '../../performance/fit/fit-finding.ts';
 import type { ManualGraph, ManualTable, SpeedTable } from '../../performance/flight-manual/flight-manual.ts';
 import type { Kind, UnitFamily } from '../../units/presentation.ts';
 import type { PhysicsFigures, TablePhysics } from '../proof/physics-at-node.ts';
@@ -45,8 +44,8 @@ export interface ComparedTable extends ReviewedTable {
   readonly rows: readonly { readonly node: TableNode; readonly figures: PhysicsFigures }[];
   /** how many it has for the configuration */
   readonly rowsOfTable: number;
-  /** what came of fitting physics to those rows; undefined where they cannot be told apart enough */
-  readonly fit: FitResult | undefined;
+  /** what fitting physics to those rows finds wrong or odd */
+  readonly slips: readonly FitFinding[];
 }
 
 /** What the tests of a review may look at. */

@@ -1,3 +1,4 @@
+import type { Work } from '../../numerics/work.ts';
 import { comparedTables } from './compared-tables.ts';
 import { type Finding, findingsOf } from './finding-test.ts';
 import { findingTests } from './findings.ts';
@@ -15,10 +16,7 @@ export interface Review {
  * @param faulty - ids of configurations, or 'all', where a fault leaves physics nothing to go by
  * @returns work that yields between its parts
  */
-export function* review(
-  reviewed: Reviewed,
-  faulty: ReadonlySet<string> = new Set(),
-): Generator<undefined, Review, undefined> {
+export function* review(reviewed: Reviewed, faulty: ReadonlySet<string> = new Set()): Work<Review> {
   const compared = yield* comparedTables(reviewed, faulty);
   return { findings: findingsOf(findingTests, { ...reviewed, compared }), compared };
 }

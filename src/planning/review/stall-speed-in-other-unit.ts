@@ -8,8 +8,8 @@ export const stallSpeedInOtherUnit: FindingTest = {
     'The distances of a table go with the stall speed and the other calibrated speeds of the configuration only if these are in another unit.',
   source: 'HouseFit',
   test: ({ compared }) =>
-    compared.flatMap(({ fit, configuration, table }) =>
-      (fit?.findings ?? []).flatMap((finding) => {
+    compared.flatMap(({ slips, configuration, table }) =>
+      slips.flatMap((finding) => {
         if (finding.code !== 'stall-speed-unit' || finding.printed === undefined) return [];
         const { printed, declared, coefficient } = finding;
         return [
