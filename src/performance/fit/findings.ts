@@ -1,5 +1,5 @@
 import type { MaximumLift } from '../aeroplane.ts';
-import { coldestNode, type FitAsked, hottestNode, liftOf } from './fit-asked.ts';
+import { coldestNode, type FitAsked, hottestNode, liftOf, massRounding } from './fit-asked.ts';
 import type { DistanceFit } from './fit-distances.ts';
 import type { FitFinding } from './fit-finding.ts';
 import type { ModelParameter } from './fit-model.ts';
@@ -13,9 +13,9 @@ const noWing = 3.5;
 /** What is wrong with the conditions of a table at sight: rows beyond where tables are made. */
 export function findingsBefore({ points, maximumMass }: FitAsked): FitFinding[] {
   return [
-    ...outside(points, 'mass', maximumMass * (1 + 1e-9), 1),
-    ...outside(points, 'temperature', hottestNode + 1e-9, 1),
-    ...outside(points, 'temperature', coldestNode - 1e-9, -1),
+    ...outside(points, 'mass', maximumMass, massRounding * maximumMass, 1),
+    ...outside(points, 'temperature', hottestNode, 1e-9, 1),
+    ...outside(points, 'temperature', coldestNode, 1e-9, -1),
   ];
 }
 
@@ -24,9 +24,10 @@ function outside(
   points: readonly FitPoint[],
   column: 'mass' | 'temperature',
   bound: number,
+  slack: number,
   side: 1 | -1,
 ): FitFinding[] {
-  const beyond = points.filter((point) => side * (point[column] - bound) > 0);
+  const beyond = points.filter((point) => side * (point[column] - bound) > slack);
   const [first, ...rest] = beyond;
   if (first === undefined) return [];
   const worst = rest.reduce((most, point) => (side * (point[column] - most[column]) > 0 ? point : most), first);

@@ -29,11 +29,16 @@ export interface FitAsked {
 export const coldestNode = 273.15 - 45;
 export const hottestNode = 273.15 + 50;
 
+/** Share of the maximum mass by which a row may exceed it: the one is often printed in lb and the other in kg, each rounded. */
+export const massRounding = 0.005;
+
 /** Whether no row lies beyond where tables are made. */
 export function nodesInside({ points, maximumMass }: FitAsked): boolean {
   return points.every(
     ({ mass, temperature }) =>
-      mass <= maximumMass * (1 + 1e-9) && temperature >= coldestNode - 1e-9 && temperature <= hottestNode + 1e-9,
+      mass <= maximumMass * (1 + massRounding) &&
+      temperature >= coldestNode - 1e-9 &&
+      temperature <= hottestNode + 1e-9,
   );
 }
 

@@ -6,7 +6,8 @@ import type { FitAsked } from './fit-asked.ts';
 import type { FitPoint, StallMeasurement } from './fit-point.ts';
 import type { FitResult } from './fit-result.ts';
 import { fitStory } from './fit-story.ts';
-import { type FitAeroplane, type TakeoffParameter, takeoffModel } from './takeoff-model.ts';
+import { type FitAeroplane, takeoffModel } from './takeoff-model.ts';
+import type { TakeoffParameter } from './takeoff-parameters.ts';
 
 /** A fit to distances of a takeoff. */
 export interface TakeoffFitAsked {

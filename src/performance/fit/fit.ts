@@ -1,5 +1,5 @@
 import type { LandingParameter } from './landing-model.ts';
-import type { TakeoffParameter } from './takeoff-model.ts';
+import type { TakeoffParameter } from './takeoff-parameters.ts';
 
 /** What an aeroplane was fitted to, by the id of the configuration. */
 export interface Fit {

@@ -1,7 +1,7 @@
 import type { Aeroplane, Configuration } from '../aeroplane.ts';
 import { propulsionDefault } from '../propulsion-defaults.ts';
 import type { LandingFit, TakeoffFit } from './fit.ts';
-import { fittedPropulsion, fittedPullUpLoadFactor } from './takeoff-model.ts';
+import { fittedPropulsion, fittedPullUpLoadFactor } from './takeoff-parameters.ts';
 
 /** The aeroplane as its fit of a takeoff configuration makes it; undefined where it has none. */
 export function fittedForTakeoff(aeroplane: Aeroplane, configurationId: string): Aeroplane | undefined {

@@ -4,7 +4,7 @@ import { fitLanding } from '../../performance/fit/fit-landing.ts';
 import { acceptedGreatest, acceptedRms, type FitResult } from '../../performance/fit/fit-result.ts';
 import { fitTakeoff, measuredLift } from '../../performance/fit/fit-takeoff.ts';
 import type { LandingParameter } from '../../performance/fit/landing-model.ts';
-import type { TakeoffParameter } from '../../performance/fit/takeoff-model.ts';
+import type { TakeoffParameter } from '../../performance/fit/takeoff-parameters.ts';
 import type { Assumption, Caution } from '../answer.ts';
 import type { Fault, Refused } from '../fault.ts';
 import { atManualSpeeds } from '../manual/at-manual-speeds.ts';
