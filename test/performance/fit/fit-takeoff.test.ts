@@ -261,6 +261,16 @@ describe('fitTakeoff on slips', () => {
     expect(tried).toBeGreaterThan(15);
   });
 
+  it('names a figure that is 13 % off, whatever its digits', () => {
+    for (const row of [0, 17, 35]) {
+      const off = table.map((cells, k): Row => {
+        const [m, h, t, roll, whole] = cells;
+        return k === row ? [m, h, t, roll, Math.round((whole * 1.13) / 5) * 5] : cells;
+      });
+      expect(reported(askedOf(trainer, off))).toEqual([`outlier:total@${row}`]);
+    }
+  });
+
   it('finds nothing wrong with 30 tables of 1.5 % scatter', () => {
     for (let seed = 0; seed < 30; seed++) {
       expect(
