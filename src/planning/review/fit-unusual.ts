@@ -25,7 +25,7 @@ export const fitUnusual: FindingTest = {
         const [low, high] = range.map((bound) => Number(bound.toPrecision(3)));
         return [
           {
-            message: `Physics of ${configuration} follows ${table.id} only with ${names[parameter] ?? parameter} of ${Number(value.toPrecision(3))}; such aeroplanes have ${low} to ${high}.`,
+            message: `Physics of ${configuration} follows ${table.id} only with ${names[parameter] ?? parameter} of ${Number(value.toPrecision(3))}${finding.code === 'parameter-at-bound' ? ', the end of what is tried' : ''}; such aeroplanes have ${low} to ${high}.`,
             at,
             value,
             threshold: value <= range[0] ? range[0] : range[1],
