@@ -5,6 +5,7 @@ import { answerFit } from '../../contract/fit/answer-fit.ts';
 import { fitRequest } from '../../contract/fit/fit-request.ts';
 import { fitResponse } from '../../contract/fit/fit-response.ts';
 import type { Stamp } from '../../contract/to-basis.ts';
+import { definitionBody } from '../body-limits.ts';
 import { addLongOperation, type WarmUp } from '../operation.ts';
 
 /** An invented table of a two-seat trainer. */
@@ -52,6 +53,7 @@ export function aeroplaneFit(app: FastifyInstance, lookup: AeroplaneLookup, stam
     request: fitRequest,
     response: fitResponse,
     example: exampleFit,
+    limits: definitionBody,
     warmUp: [],
     work: (request) => answerFit(request, lookup, stamp),
   });
