@@ -2,6 +2,12 @@ import { readFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { root } from './sources.ts';
 
+/** The curl requests of the README and the blocks with their answers. */
+export const readmeRequests = [
+  ['first-request', 'first-reply'],
+  ['manual-page', 'manual-page-reply'],
+] as const;
+
 /** The text of the README's fenced block with this language and name. */
 export function readmeBlock(language: string, name: string): string {
   const readme = readFileSync(join(root, 'README.md'), 'utf8');
