@@ -157,6 +157,10 @@ export const references = entries({
       'AMC5 SPA.EFB.100(b)(3), performance applications: critical assumptions, unachievable results (ED Decision 2019/008/R)',
     status: 'read',
   },
+  HouseEngineOutDrag: {
+    title: 'Drag of a dead engine and of the rudder that holds it, class figures after Raymer',
+    status: 'memory',
+  },
   Judgement: { title: 'A choice made for this service where no public source decides', status: 'judgement' },
   AbramowitzStegun: { title: 'Abramowitz & Stegun, Handbook of Mathematical Functions, 1964', status: 'memory' },
   GolubVanLoan: { title: 'Golub & Van Loan, Matrix Computations, 3rd edition', status: 'memory' },
@@ -199,6 +203,10 @@ export const references = entries({
   Raymer: { title: 'Raymer, Aircraft Design: A Conceptual Approach, ch. 17', status: 'secondary' },
   AndersonPerformance: { title: 'Anderson, Aircraft Performance and Design, 1999, ch. 6', status: 'read' },
   Cfr25s109a: { title: '14 CFR 25.109(a) and (b), accelerate-stop distance', status: 'read' },
+  Cfr25s109Before1998: {
+    title: '14 CFR 25.109 before amendment 25-92, accelerate-stop distance',
+    status: 'memory',
+  },
   Cfr25s109: {
     title: '14 CFR 25.109(c), wet runway braking coefficient and anti-skid efficiency',
     status: 'secondary',

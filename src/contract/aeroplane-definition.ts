@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import { antiSkids, categories, certificationBases, wheelArrangements } from '../performance/aeroplane.ts';
+import { antiSkids, categories, certificationBases, stopRules, wheelArrangements } from '../performance/aeroplane.ts';
 import { configuration } from './configuration.ts';
 import { fit } from './fit/fit-member.ts';
 import { flightManual } from './flight-manual/flight-manual.ts';
@@ -83,6 +83,16 @@ const reverseThrust = z
   })
   .meta({ id: 'ReverseThrust', description: 'Reverse thrust in the landing roll.' });
 
+const spoilers = z
+  .strictObject({
+    dragIncrementCoefficient: z
+      .number()
+      .min(0)
+      .max(0.3)
+      .meta({ description: 'Drag coefficient that they add on the ground.' }),
+  })
+  .meta({ id: 'Spoilers', description: 'Ground spoilers, out with the brakes in a rejected takeoff.' });
+
 const engineOut = z
   .strictObject({
     vmc: airspeed.meta({ description: 'Minimum control speed in the air, calibrated.' }).exactOptional(),
@@ -129,6 +139,13 @@ export const aeroplaneDefinition = z
       .strictObject({
         basis: z.enum(certificationBases).meta({ description: 'Certification specification of the aeroplane.' }),
         screenHeight,
+        stopRule: z
+          .enum(stopRules)
+          .meta({
+            description:
+              'By which rule its accelerate-stop distances were found: since amendment 25-92 of 1998, or before. Transport category alone; absent: current.',
+          })
+          .exactOptional(),
       })
       .meta({ id: 'Certification', description: 'What the aeroplane was certified to.' }),
     masses: z
@@ -179,6 +196,7 @@ export const aeroplaneDefinition = z
       .meta({ id: 'Wheels', description: 'Wheels and tyres.' })
       .exactOptional(),
     brakes: brakes.exactOptional(),
+    spoilers: spoilers.exactOptional(),
     reverseThrust: reverseThrust.exactOptional(),
     engineOut: engineOut.exactOptional(),
     limitations: limitations.exactOptional(),

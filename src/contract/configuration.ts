@@ -32,10 +32,16 @@ export const configuration = z
         rotation: scheduledSpeed.exactOptional(),
         liftOff: scheduledSpeed.exactOptional(),
         screen: scheduledSpeed.exactOptional(),
+        engineOutLiftOff: scheduledSpeed.exactOptional(),
+        engineOutScreen: scheduledSpeed.exactOptional(),
         landingReference: scheduledSpeed.exactOptional(),
         touchdown: scheduledSpeed.exactOptional(),
       })
-      .meta({ id: 'ScheduledSpeeds', description: 'The speeds of the procedure in this configuration.' })
+      .meta({
+        id: 'ScheduledSpeeds',
+        description:
+          'The speeds of the procedure in this configuration; engineOut: of a takeoff continued after an engine failure.',
+      })
       .exactOptional(),
     climbOut: z
       .array(

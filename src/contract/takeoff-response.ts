@@ -5,6 +5,7 @@ import { answerBegin, answerEnd } from './answer-shape.ts';
 import { basisOf, takeoffContribution } from './basis.ts';
 import { sensitivitiesOf } from './detail.ts';
 import { bandedDistance, distancesShape, method, timesShape } from './distances.ts';
+import { decisionSpeed, engineOut } from './engine-out.ts';
 import { obstaclePath } from './obstacle-path.ts';
 import { rounding, units } from './question-frame.ts';
 import { runway } from './runway.ts';
@@ -28,7 +29,13 @@ export const takeoffResponse = z
   .strictObject({
     ...answerBegin,
     speeds: z
-      .strictObject({ stall: speedSet, rotation: speedSet, liftOff: speedSet, screen: speedSet })
+      .strictObject({
+        stall: speedSet,
+        decision: decisionSpeed.exactOptional(),
+        rotation: speedSet,
+        liftOff: speedSet,
+        screen: speedSet,
+      })
       .meta({ id: 'TakeoffSpeeds', description: 'The speeds in the order of time.' }),
     distances: z
       .strictObject({ ...distancesShape, takeoffDistance: bandedDistance, ...timesShape })
@@ -46,6 +53,7 @@ export const takeoffResponse = z
           'All engines, flap and gear as at the screen, at the screen speed, out of ground effect; not a certified gradient.',
       })
       .exactOptional(),
+    engineOut: engineOut.exactOptional(),
     obstaclePath: obstaclePath.exactOptional(),
     ...answerEnd,
     sensitivities: sensitivitiesOf('takeoffDistance', 'TakeoffSensitivity').exactOptional(),

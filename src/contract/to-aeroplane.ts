@@ -29,10 +29,11 @@ export function toAeroplane(definition: AeroplaneDefinition): Aeroplane {
     category: definition.category,
     engines: definition.engines,
     passengerSeats: definition.passengerSeats,
-    certification: {
+    certification: present<Made<'certification'>>({
       basis: definition.certification.basis,
       screenHeight: metres(definition.certification.screenHeight),
-    },
+      stopRule: definition.certification.stopRule,
+    }),
     masses: toMasses(definition.masses),
     wing: toWing(definition.wing),
     drag: definition.drag,
@@ -40,6 +41,7 @@ export function toAeroplane(definition: AeroplaneDefinition): Aeroplane {
     propulsion: toPropulsion(definition.propulsion),
     wheels: perhaps(toWheels, definition.wheels),
     brakes: perhaps(toBrakes, definition.brakes),
+    spoilers: definition.spoilers,
     reverseThrust: perhaps(toReverseThrust, definition.reverseThrust),
     engineOut: perhaps(toEngineOut, definition.engineOut),
     limitations: perhaps(toLimitations, definition.limitations),

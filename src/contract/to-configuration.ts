@@ -37,6 +37,8 @@ function toSpeeds(given: NonNullable<ConfigurationOnWire['speeds']>): NonNullabl
     rotation: perhaps(toScheduledSpeed, given.rotation),
     liftOff: perhaps(toScheduledSpeed, given.liftOff),
     screen: perhaps(toScheduledSpeed, given.screen),
+    engineOutLiftOff: perhaps(toScheduledSpeed, given.engineOutLiftOff),
+    engineOutScreen: perhaps(toScheduledSpeed, given.engineOutScreen),
     landingReference: perhaps(toScheduledSpeed, given.landingReference),
     touchdown: perhaps(toScheduledSpeed, given.touchdown),
   });

@@ -2,6 +2,7 @@ import type { Refused } from '../planning/fault.ts';
 import { takeoffProcedureFaults } from '../planning/procedure/takeoff-procedure-faults.ts';
 import type { TakeoffQuestion } from '../planning/question.ts';
 import type { CatalogueLookup } from './catalogue-lookup.ts';
+import { si } from './quantity.ts';
 import type { TakeoffRequest } from './takeoff-request.ts';
 import { asked, commonFaults, toCommonQuestion } from './to-common-question.ts';
 import { toKnownAeroplane } from './to-known-aeroplane.ts';
@@ -18,12 +19,16 @@ export function toQuestion(request: TakeoffRequest, lookup: CatalogueLookup): Ta
   const runway = toKnownRunway(request.runway, lookup.aerodromes, 'takeoff');
   const faults = commonFaults(request, runway, known, 'takeoff');
   if (Array.isArray(runway) || !('aeroplane' in known)) return { refused: faults };
-  const { procedure } = request;
+  const { procedure, decisionSpeed } = request;
   if (procedure !== undefined) faults.push(...takeoffProcedureFaults({ ...asked(request, known), procedure }));
   if (faults.length > 0) return { refused: faults };
   const common = toCommonQuestion({ ...request, runway }, known, 'takeoff');
   const question = { ...common, defaulted: [...common.defaulted, ...defaultedProcedure(procedure)] };
-  return procedure === undefined ? question : { ...question, procedure };
+  return {
+    ...question,
+    ...(procedure === undefined ? {} : { procedure }),
+    ...(decisionSpeed === undefined ? {} : { decisionSpeed: si('speed', decisionSpeed) }),
+  };
 }
 
 /** Pointers of what a takeoff takes where its procedure does not say. */

@@ -12,6 +12,7 @@ import { toAssessment } from './to-assessment.ts';
 import { toBandedDistance } from './to-banded-distance.ts';
 import { type Stamp, toBasis, toContribution } from './to-basis.ts';
 import { toSensitivities, toTrajectory, toWorking } from './to-detail.ts';
+import { toDecisionSpeed, toEngineOut } from './to-engine-out.ts';
 import { toObstaclePath } from './to-obstacle-path.ts';
 import { toShortfall } from './to-shortfall.ts';
 import { toSpeedSet } from './to-speed-set.ts';
@@ -42,6 +43,7 @@ export function toResponse(
       method: answer.climb.method,
     };
   }
+  if (answer.engineOut !== undefined) response.engineOut = toEngineOut(how, answer.engineOut);
   if (answer.obstaclePath !== undefined) response.obstaclePath = toObstaclePath(how, answer.obstaclePath);
   if (answer.assessment !== undefined) response.assessment = toAssessment(how, answer.assessment);
   if (answer.shortfall !== undefined) response.shortfall = answer.shortfall.map((one) => toShortfall(how, one));
@@ -58,9 +60,10 @@ export function toResponse(
   return response;
 }
 
-function toSpeeds(how: Presentation, { stall, rotation, liftOff, screen }: TakeoffAnswer['speeds']) {
+function toSpeeds(how: Presentation, { stall, decision, rotation, liftOff, screen }: TakeoffAnswer['speeds']) {
   return {
     stall: toSpeedSet(how, stall),
+    ...(decision === undefined ? {} : { decision: toDecisionSpeed(how, decision) }),
     rotation: toSpeedSet(how, rotation),
     liftOff: toSpeedSet(how, liftOff),
     screen: toSpeedSet(how, screen),

@@ -22,6 +22,10 @@ export type Category = (typeof categories)[number];
 export const certificationBases = ['cs-23-amendment-4', 'cs-23-commuter', 'cs-25', 'none'] as const;
 export type CertificationBasis = (typeof certificationBases)[number];
 
+/** Of the rules for a rejected takeoff of the transport category: that in force since amendment 25-92 of 1998, or the one before it. */
+export const stopRules = ['current', 'before-1998'] as const;
+export type StopRule = (typeof stopRules)[number];
+
 export interface Aeroplane {
   readonly id: string;
   readonly revision: string;
@@ -30,7 +34,12 @@ export interface Aeroplane {
   readonly engines: number;
   /** the most passengers it is operated with; rules decide by it */
   readonly passengerSeats?: number;
-  readonly certification: { readonly basis: CertificationBasis; readonly screenHeight: number };
+  readonly certification: {
+    readonly basis: CertificationBasis;
+    readonly screenHeight: number;
+    /** by which rule its accelerate-stop distances were found; transport category alone */
+    readonly stopRule?: StopRule;
+  };
   readonly masses: { readonly empty?: number; readonly maximumTakeoff: number; readonly maximumLanding?: number };
   readonly wing: Wing;
   readonly drag: { readonly zeroLiftCoefficient: number; readonly oswaldFactor: number };
@@ -53,6 +62,8 @@ export interface Aeroplane {
     readonly antiSkid?: AntiSkid;
     readonly energyLimit?: number;
   };
+  /** ground spoilers, out with the brakes in a rejected takeoff */
+  readonly spoilers?: { readonly dragIncrementCoefficient: number };
   /** of the whole aeroplane, backwards [N], above a ground speed [m/s] */
   readonly reverseThrust?: { readonly thrust: number; readonly cutOffSpeed: number };
   readonly engineOut?: {
@@ -123,6 +134,9 @@ export interface Configuration {
     readonly rotation?: ScheduledSpeed;
     readonly liftOff?: ScheduledSpeed;
     readonly screen?: ScheduledSpeed;
+    /** of a takeoff continued after an engine failure */
+    readonly engineOutLiftOff?: ScheduledSpeed;
+    readonly engineOutScreen?: ScheduledSpeed;
     readonly landingReference?: ScheduledSpeed;
     readonly touchdown?: ScheduledSpeed;
   };

@@ -2,6 +2,7 @@ import type { ManualFigures } from '../performance/flight-manual/manual-figures.
 import type { ReferenceKey } from '../references.ts';
 import type { Direction, Kind } from '../units/presentation.ts';
 import type { Detail } from './detail/detail.ts';
+import type { DecisionSpeed, EngineOut } from './engine-failure/engine-failure-answer.ts';
 import type { Silence } from './manual/silence.ts';
 
 /**
@@ -274,10 +275,14 @@ export interface TakeoffAnswer extends Answer {
     readonly rotation: SpeedSet;
     readonly liftOff: SpeedSet;
     readonly screen: SpeedSet;
+    /** with more than one engine, where there is one */
+    readonly decision?: DecisionSpeed | undefined;
   };
   readonly distances?: (Distances & { readonly takeoffDistance: BandedDistance }) | undefined;
   /** absent where the airspeed lies outside measured thrust */
   readonly climb?: TakeoffClimb | undefined;
+  /** with more than one engine, where there are distances by physics */
+  readonly engineOut?: EngineOut | undefined;
   /** absent where no obstacle was given or there are no distances */
   readonly obstaclePath?: ObstaclePath | undefined;
 }

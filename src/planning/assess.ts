@@ -1,6 +1,7 @@
 import type { Check, Factor, Outcome } from './answer.ts';
 import { type Band, highOverOf } from './band.ts';
 import type { Conditions } from './conditions.ts';
+import { type CheckedFailure, engineFailureCheck, isOfFailure } from './engine-failure/engine-failure-check.ts';
 import { checkOf, governingCheck } from './margins.ts';
 import { outcomeOf, type ThinBecause, thinBecause } from './outcome.ts';
 import { requirements } from './rules/requirements.ts';
@@ -27,10 +28,20 @@ export interface Assessing {
   readonly distances: Runs<Checked>;
   /** of the distances as stated */
   readonly band: Band | undefined;
+  /** what comes of an engine failure; undefined where none is computed */
+  readonly engineFailure?: AssessedFailure | undefined;
   /** checks that follow from those of the runway, such as the clearance over obstacles */
   readonly further?: (checks: readonly Check[]) => readonly Check[];
   /** the length that the ground roll has [m] */
   readonly rollAvailable: number | undefined;
+}
+
+/** What is assessed of an engine failure. */
+export interface AssessedFailure {
+  readonly outcome: string;
+  readonly checked: CheckedFailure;
+  /** the high end of the band over the value, for what a check is of */
+  readonly highOver: (of: string) => number | undefined;
 }
 
 /** The checks and what they come to. */
@@ -52,11 +63,12 @@ export function assess(assessing: Assessing): Assessed {
   const ofRunway = isAssessed ? checksOf(assessing) : undefined;
   const checks = ofRunway && assessing.further ? [...ofRunway, ...assessing.further(ofRunway)] : ofRunway;
   const thinRatio = ruleSet.thinMargin.ratio;
-  const highOver = (of: string) => highOverOf(band, of);
+  const highOver = (of: string) => assessing.engineFailure?.highOver(of) ?? highOverOf(band, of);
   const outcome = outcomeOf({
     notReached,
     doesNotApply,
     noSurface,
+    failureOutcome: isAssessed ? failureOutcome(assessing) : undefined,
     checks: checks ?? [],
     roll: stated?.groundRoll,
     rollAvailable,
@@ -71,11 +83,37 @@ export function assess(assessing: Assessing): Assessed {
   };
 }
 
-function checksOf({ conditions, runwayFactors, startsFrom, distances }: Assessing): readonly Check[] {
+/** The outcomes that an engine failure has where the rule set asks for a distance with one. */
+const unable = ['single-engine-cannot-continue', 'no-decision-speed', 'never-stops'] as const;
+
+function failureOutcome({
+  conditions: { rules, asked },
+  engineFailure,
+}: Assessing): (typeof unable)[number] | undefined {
+  const isAsked = requirements(rules, asked).some(
+    ({ of, notAssessed }) => notAssessed === undefined && isOfFailure(of),
+  );
+  return isAsked ? unable.find((outcome) => outcome === engineFailure?.outcome) : undefined;
+}
+
+const notComputed: CheckedFailure = {
+  onRunway: {
+    accelerateStopDistance: undefined,
+    accelerateStopAllEngines: undefined,
+    accelerateStopEngineOut: undefined,
+    accelerateGoDistance: undefined,
+    engineOutTakeoffRun: undefined,
+  },
+  why: 'the takeoff with an engine failure is not computed',
+};
+
+function checksOf({ conditions, runwayFactors, startsFrom, distances, engineFailure }: Assessing): readonly Check[] {
   const { rules, asked, declared } = conditions;
   const { credited, level, reference } = distances;
   return requirements(rules, asked).map((requirement) => {
     const { of } = requirement;
+    if (isOfFailure(of) && requirement.notAssessed === undefined)
+      return engineFailureCheck(requirement, of, engineFailure?.checked ?? notComputed, declared);
     const from = {
       reference: distanceOf(of, reference),
       credited: distanceOf(of, credited),

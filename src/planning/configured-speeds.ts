@@ -41,6 +41,11 @@ export class ConfiguredSpeeds {
     return this.inKinds(eas, this.at(`speeds/${member}`));
   }
 
+  /** A true airspeed [m/s] in all its kinds. */
+  ofTrue(tas: number): SpeedSet | Fault {
+    return this.inKinds(tas * Math.sqrt(this.#air.densityRatio), this.at('speeds'));
+  }
+
   /**
    * An equivalent airspeed [m/s] in all its kinds.
    *

@@ -1,10 +1,8 @@
-import type { Air } from '../performance/air.ts';
-import { airOf } from '../performance/air.ts';
 import { type ClimbPath, type ClimbStage, climbOut, pathHeight } from '../performance/climb-out.ts';
 import { groundRise } from '../performance/ground-rise.ts';
 import { tasFromEas } from '../physics/airspeed.ts';
-import { lapseRate } from '../physics/constants.ts';
 import { inducedDragFactor } from '../physics/drag.ts';
+import { airAloft } from './air-aloft.ts';
 import type { Check, ObstaclePath } from './answer.ts';
 import type { PreparedTakeoff } from './prepare-takeoff.ts';
 import type { TakeoffQuestion } from './question.ts';
@@ -101,18 +99,6 @@ function pathFrom(
     },
   });
   return outside ?? path;
-}
-
-/** The air above the runway: standard lapse of temperature, pressure by altitude, moisture kept below saturation. */
-function airAloft({ temperature, dewPoint, pressureAltitude }: Air, height: number): Air {
-  const aloft = temperature - lapseRate * height;
-  const found = airOf({
-    temperature: aloft,
-    ...(dewPoint === undefined ? {} : { dewPoint: Math.min(dewPoint, aloft) }),
-    pressure: { kind: 'pressureAltitude', value: pressureAltitude + height },
-  });
-  if (found.outcome !== 'air') throw new RangeError(`there is no air ${height} m above the runway`);
-  return found.air;
 }
 
 function stagesOf(

@@ -18,6 +18,8 @@ export interface Deciding {
   readonly doesNotApply: string | undefined;
   /** whether neither factor nor physics speaks of the surface */
   readonly noSurface: boolean;
+  /** where the rule set asks for a distance with an engine failure: why there can be none */
+  readonly failureOutcome?: 'single-engine-cannot-continue' | 'no-decision-speed' | 'never-stops' | undefined;
   readonly checks: readonly Check[];
   /** the roll as stated, without factors, and the length it has [m] */
   readonly roll: number | undefined;
@@ -29,8 +31,8 @@ export interface Deciding {
 }
 
 /**
- * The outcome, in the order in which one hides the next: no distance, rules that do not apply, a surface nothing speaks of, a
- * roll longer than the runway, not enough, nothing to compare, thin, enough.
+ * The outcome, in the order in which one hides the next: no distance, rules that do not apply, a surface nothing speaks of, an
+ * engine failure that leaves no way, a roll longer than the runway, not enough, nothing to compare, thin, enough.
  *
  * A check that is not assessed keeps the outcome from enough.
  */
@@ -39,6 +41,7 @@ export function outcomeOf(deciding: Deciding): Outcome {
   if (notReached !== undefined) return notReached.outcome;
   if (doesNotApply !== undefined) return 'rule-set-does-not-apply';
   if (noSurface) return 'no-data-for-this-surface';
+  if (deciding.failureOutcome !== undefined) return deciding.failureOutcome;
   if (roll !== undefined && rollAvailable !== undefined && roll - rollAvailable > arithmeticSlack) {
     return 'roll-longer-than-runway';
   }

@@ -7,7 +7,7 @@ import { assess } from './assess.ts';
 import { balkedLandingClimb } from './balked-landing.ts';
 import { raisedCautions } from './cautions/caution-test.ts';
 import { landingCautions } from './cautions/landing-cautions.ts';
-import { climbChecks } from './climb-checks.ts';
+import { climbChecks, climbedWithAll } from './climb-checks.ts';
 import { isRefused, type Refused } from './fault.ts';
 import { checkedRuns } from './found.ts';
 import { foundLanding } from './found-landing.ts';
@@ -71,8 +71,11 @@ export function planLanding(asked: LandingQuestion): LandingAnswer | Refused {
     band,
     rollAvailable,
     further: () => {
-      const gradient = balkedLanding.outcome === 'computed' ? balkedLanding.gradient : undefined;
-      return climbChecks(rules.demands, question.aeroplane, gradient);
+      const balked = balkedLanding.outcome === 'computed' ? balkedLanding : undefined;
+      return climbChecks(rules.demands, question.aeroplane, ({ engines, of }) => {
+        if (of === 'approach') return { why: 'no configuration of the approach with one engine out is known' };
+        return engines === 'all' ? climbedWithAll(balked) : { why: 'the climb with one engine out is not computed' };
+      });
     },
   });
 

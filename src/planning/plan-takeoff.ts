@@ -5,9 +5,14 @@ import { airBeside } from './air-beside.ts';
 import type { ObstaclePath, TakeoffAnswer } from './answer.ts';
 import { answerBasis } from './answer-basis.ts';
 import { assess } from './assess.ts';
+import type { AnyAssumed, Assumed } from './assumed.ts';
 import { raisedCautions } from './cautions/caution-test.ts';
 import { takeoffCautions } from './cautions/takeoff-cautions.ts';
-import { climbChecks } from './climb-checks.ts';
+import { isFault } from './chosen.ts';
+import { climbChecks, climbedWithAll } from './climb-checks.ts';
+import { decisionOfSingle } from './engine-failure/decision-fault.ts';
+import { engineFailureOf } from './engine-failure/engine-failure.ts';
+import { engineOutClimbs } from './engine-failure/engine-out-climbs.ts';
 import { isRefused, type Refused } from './fault.ts';
 import { checkedRuns } from './found.ts';
 import { foundTakeoff } from './found-takeoff.ts';
@@ -39,6 +44,8 @@ import { windAnswer } from './wind-along.ts';
 export function planTakeoff(asked: TakeoffQuestion): TakeoffAnswer | Refused {
   const question = askedAsFitted(asked, 'takeoff');
   const { aeroplane, aeroplaneAt, runway, units } = question;
+  const single = decisionOfSingle(question);
+  if (single !== undefined) return { refused: [single] };
   const prepared = prepareTakeoff(question);
   if (isRefused(prepared)) return prepared;
   const { conditions, resolved, speeds, raised, power, thrustIn, friction, run } = prepared;
@@ -63,6 +70,11 @@ export function planTakeoff(asked: TakeoffQuestion): TakeoffAnswer | Refused {
     band &&
     takeoffDistances(stated, band, aeroplane.certification.screenHeight, { method, edge }, asAnswered);
 
+  const engineFailure =
+    physics.stated === undefined || byPhysics !== undefined ? engineFailureOf(question, prepared) : undefined;
+  if (engineFailure !== undefined && isFault(engineFailure)) return { refused: [engineFailure] };
+  const oneOut = engineFailure && engineOutClimbs(question, prepared, engineFailure.out, rules.demands);
+
   const rollAvailable = declared.credited.tora;
   const climb = stated && climbAfterTakeoff(question, prepared);
   const checked = checkedRuns(runs);
@@ -75,12 +87,15 @@ export function planTakeoff(asked: TakeoffQuestion): TakeoffAnswer | Refused {
     distances: checked,
     band,
     rollAvailable,
+    engineFailure: engineFailure && { ...engineFailure, outcome: engineFailure.engineOut.outcome },
     further: (ofRunway) => {
       const obstacles = ruleSet.takeoff.obstacles;
       const demand = obstacles?.appliesTo(aeroplane) === true ? obstacles : undefined;
       const start = pathStart(demand, ofRunway, (checked.credited ?? checked.stated)?.wholeDistance);
       obstaclePath = start && obstaclePathOf(question, prepared, start);
-      const climbs = climbChecks(rules.demands, aeroplane, climb?.gradient);
+      const climbs = climbChecks(rules.demands, aeroplane, (asked) =>
+        asked.engines === 'all' ? climbedWithAll(climb) : (oneOut?.of(asked) ?? { why: notComputed }),
+      );
       return demand === undefined || obstaclePath === undefined
         ? climbs
         : [...climbs, obstacleCheck(demand, obstaclePath)];
@@ -88,7 +103,12 @@ export function planTakeoff(asked: TakeoffQuestion): TakeoffAnswer | Refused {
   });
 
   const assumed = takeoffEffects(
-    [...resolved.assumed, ...power.assumed, ...friction.assumed],
+    [
+      ...resolved.assumed,
+      ...power.assumed,
+      ...friction.assumed,
+      ...furtherAssumed(engineFailure?.assumed, friction.assumed),
+    ],
     found.startsFrom === 'reference' && stated ? run : undefined,
     (propulsion, factor) => thrustIn(air, propulsion, factor),
   );
@@ -140,9 +160,10 @@ export function planTakeoff(asked: TakeoffQuestion): TakeoffAnswer | Refused {
     cautions: raisedCautions(takeoffCautions, context),
     air,
     wind: windAnswer(wind, creditedHeadwind),
-    speeds,
+    speeds: { ...speeds, decision: engineFailure?.decision },
     distances,
     climb,
+    engineOut: engineFailure && oneOut && { ...engineFailure.engineOut, climb: oneOut.shown },
     obstaclePath,
     assessment: checks && { ruleSet: ruleSet.id, basedOn: conditions.basedOn, checks, governing: governing?.code },
     shortfall: isOutside
@@ -152,4 +173,14 @@ export function planTakeoff(asked: TakeoffQuestion): TakeoffAnswer | Refused {
         : condition.refusal?.shortfall,
     basis: answerBasis(question, 'takeoff', conditions, found, assumed, band),
   };
+}
+
+const notComputed = 'the climb with one engine out is not computed';
+
+/** What an engine failure assumes beside what the takeoff has assumed already of the same places. */
+function furtherAssumed(further: readonly AnyAssumed[] = [], said: readonly AnyAssumed[]): readonly Assumed[] {
+  const places = new Set(said.map(({ assumption }) => assumption.at));
+  return further
+    .filter(({ assumption }) => !places.has(assumption.at))
+    .map(({ name, assumption }) => ({ name, assumption }));
 }

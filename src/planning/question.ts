@@ -78,6 +78,8 @@ export interface TakeoffProcedure {
 
 export interface TakeoffQuestion extends Question {
   readonly procedure?: TakeoffProcedure;
+  /** V1, CAS [m/s]; absent: chosen */
+  readonly decisionSpeed?: number;
 }
 
 /** How a landing is flown; a member that is absent takes the configuration's own figure, and no reverse thrust. */

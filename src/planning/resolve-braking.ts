@@ -2,7 +2,7 @@ import type { AntiSkid } from '../performance/aeroplane.ts';
 import type { BrakedStretch } from '../performance/landing/landing-run.ts';
 import { type BrakingFriction, brakingFriction, constantBraking, scaledBraking } from '../physics/braking-friction.ts';
 import type { CodeBrakes } from '../physics/code-braking.ts';
-import { hydroplaningSpeed } from '../physics/hydroplaning-speed.ts';
+import { hydroplaningSpeed, type RollPhase } from '../physics/hydroplaning-speed.ts';
 import { limitedBraking } from '../physics/limited-braking.ts';
 import type { RunwayConditionCode } from '../physics/runway-condition-code.ts';
 import { type StoppingDrag, stoppingDrag } from '../physics/stopping-drag.ts';
@@ -46,15 +46,17 @@ const dryPavement: Surface = { kind: 'paved', state: 'dry' };
  *
  * A coefficient in the question is the effective one and stands as it is. The aeroplane's own, found on dry pavement, stands
  * there and is the most anywhere else; with the anti-skid system inoperative it is not above what a pilot does without. Each third
- * of the runway has the code it is given; where no length is declared the poorest holds throughout.
+ * of the runway has the code it is given; where no length is declared, and in a rejected takeoff, the poorest holds throughout.
  *
  * @param runway - its surface, and the lengths whose thirds the codes are of
  * @param condition - codes as they count
+ * @param phase - of a landing, or of a rejected takeoff
  */
 export function resolveBraking(
   question: Asked,
   runway: Pick<Runway, 'surface' | 'declared' | 'start'>,
   condition: RunwayCondition,
+  phase: RollPhase = 'landing',
 ): ResolvedBraking {
   const { aeroplane, aeroplaneAt, procedure } = question;
   const { surface } = runway;
@@ -79,8 +81,8 @@ export function resolveBraking(
 
   const found = brakingFriction(surface, antiSkid, pressure);
   const words = found === 'no-data' ? groundText(surface) : found.because;
-  const ground = unstatedGround(surface, 'landing');
-  const helped = stoppingHelp(contaminantRoll(question, surface, 'landing'), wheels?.tyrePressure);
+  const ground = unstatedGround(surface, phase);
+  const helped = stoppingHelp(contaminantRoll(question, surface, phase), wheels?.tyrePressure, phase);
   const given = surface.brakingFrictionCoefficient;
   if (given !== undefined) {
     return {
@@ -92,7 +94,7 @@ export function resolveBraking(
     };
   }
 
-  const vp = wheels?.tyrePressure === undefined ? undefined : hydroplaningSpeed(wheels.tyrePressure, 'landing');
+  const vp = wheels?.tyrePressure === undefined ? undefined : hydroplaningSpeed(wheels.tyrePressure, phase);
   const codeBrakes: CodeBrakes = { dry: ownBest, antiSkid, tyrePressure: pressure, hydroplaningSpeed: vp };
   const grips = new Map<RunwayConditionCode | undefined, BrakingFriction | 'no-data'>();
   const codes = condition.codes ?? [undefined];
@@ -108,7 +110,7 @@ export function resolveBraking(
     const at = isDryPavement ? aeroplanePointer(aeroplaneAt, '/brakes/brakingFrictionCoefficient') : surfaceAt;
     assumed.push({
       name: 'braking friction',
-      assumption: { at, ...saidOf(found, grip, poorest) },
+      assumption: { at, ...saidOf(found, grip, poorest, phase) },
       otherEnd: lessOf(less),
     });
   }
@@ -136,7 +138,7 @@ export function resolveBraking(
     return scaledBraking(limited, share);
   };
   const resolved = { actual: effective(grip), ...helped.drag, reference, surface: words, assumed };
-  if (codes.every((code) => code === poorest)) return resolved;
+  if (phase === 'takeoff' || codes.every((code) => code === poorest)) return resolved;
   const ends = runwayThirds(runway);
   if (ends === undefined) {
     const because = 'no length is declared whose thirds the codes are of; the poorest holds throughout';
@@ -154,9 +156,10 @@ export function resolveBraking(
 function stoppingHelp(
   roll: ContaminantRoll,
   tyrePressure: number | undefined,
+  phase: RollPhase,
 ): { readonly drag: { readonly contaminantDrag?: StoppingDrag }; readonly assumed: readonly LandingAssumed[] } {
   if (roll.outcome !== 'held-back') return { drag: {}, assumed: [] };
-  const speed = hydroplaningSpeed(tyrePressure ?? assumedHydroplaningPressure, 'landing');
+  const speed = hydroplaningSpeed(tyrePressure ?? assumedHydroplaningPressure, phase);
   return { drag: { contaminantDrag: stoppingDrag(roll.perSquare, speed) }, assumed: roll.assumed };
 }
 
@@ -164,10 +167,11 @@ function saidOf(
   found: ReturnType<typeof brakingFriction>,
   grip: BrakingFriction,
   code: RunwayConditionCode | undefined,
+  phase: RollPhase,
 ): Omit<Assumption, 'at'> {
   const value = frictionValue(grip);
   if (found !== 'no-data' && (code === undefined || code >= 5 || frictionValue(found) === value)) {
-    const because = `${found.because}: the end of the published range that gives the longer landing`;
+    const because = `${found.because}: the end of the published range that gives the longer ${phase === 'landing' ? 'landing' : 'stop'}`;
     return { value, because, source: found.source };
   }
   const because = `condition code ${code}: the poorer of its figure and the surface's own`;

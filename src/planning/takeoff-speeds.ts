@@ -104,7 +104,7 @@ function raisedSpeeds(
     rotates === scheduled.rotation
       ? scheduled.liftOff
       : configured.inKinds(
-          rotates.eas + scheduled.liftOff.eas - scheduled.rotation.eas,
+          rotates.eas + (scheduled.liftOff.eas - scheduled.rotation.eas),
           configured.at('speeds/liftOff'),
         );
   if (isFault(liftsOff)) return liftsOff;

@@ -87,7 +87,6 @@ const table: readonly Row[] = [
     phase: 'takeoff',
     refuses: onlyMultiTurbine('jets and turboprops'),
     checks: certified,
-    outcome: 'nothing-to-compare',
   },
   {
     set: 'eu-class-a',
@@ -106,7 +105,6 @@ const table: readonly Row[] = [
     phase: 'takeoff',
     refuses: onlyMultiTurbine('only the rules for turbine engines are held'),
     checks: certified,
-    outcome: 'nothing-to-compare',
   },
   {
     set: 'us-part-121',

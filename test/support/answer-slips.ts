@@ -98,6 +98,12 @@ function checkSlips({ assessment, question }: SeenAnswer): string[] {
       if (why === undefined || margin !== undefined) slips.push(`${code} is not assessed and does not say why`);
       continue;
     }
+    // any climb at all is asked for: there is no share of nothing
+    const isOfNothing = code.startsWith('climb-') && required?.value === 0;
+    if (required && available && margin && isOfNothing) {
+      if (margin.value > 0 !== (result === 'passes')) slips.push(`${code} ${result} by ${margin.value}`);
+      continue;
+    }
     if (!(required && available && margin && marginPercent !== undefined)) {
       slips.push(`${code} lacks a number`);
       continue;

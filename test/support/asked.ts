@@ -1,5 +1,11 @@
 import type { Check } from '../../src/planning/answer.ts';
 import type { DeclaredDistances, Lengths } from '../../src/planning/declared-distances.ts';
+import {
+  type CheckedFailure,
+  engineFailureCheck,
+  type FailureDistances,
+  isOfFailure,
+} from '../../src/planning/engine-failure/engine-failure-check.ts';
 import { checkOf, type StartingDistances } from '../../src/planning/margins.ts';
 import type { Surface } from '../../src/planning/question.ts';
 import { doesNotApply } from '../../src/planning/rules/applies.ts';
@@ -65,8 +71,28 @@ export function refusal(set: RuleSet, aeroplane: RuledAeroplane, phase: 'takeoff
   return doesNotApply(set, set[phase], aeroplane);
 }
 
-/** The checks of one side of a rule set, from distances that are given. */
-export function checksFrom(rules: PhaseRules, given: Asked, from: StartingDistances): Check[] {
+/** The checks of one side of a rule set, from distances that are given, with an engine failure and without. */
+export function checksFrom(
+  rules: PhaseRules,
+  given: Asked,
+  from: StartingDistances,
+  failure: Partial<CheckedFailure> = {},
+): Check[] {
   const factors = runwayFactors(rules, given);
-  return requirements(rules, given).map((one) => checkOf(one, from, factors, declaredAs(given.published)));
+  const declared = declaredAs(given.published);
+  const checked = { onRunway: noFailure, why: 'nothing is computed', ...failure };
+  return requirements(rules, given).map((one) =>
+    isOfFailure(one.of) && one.notAssessed === undefined
+      ? engineFailureCheck(one, one.of, checked, declared)
+      : checkOf(one, from, factors, declared),
+  );
 }
+
+/** No distance with an engine failure. */
+export const noFailure: FailureDistances = {
+  accelerateStopDistance: undefined,
+  accelerateStopAllEngines: undefined,
+  accelerateStopEngineOut: undefined,
+  accelerateGoDistance: undefined,
+  engineOutTakeoffRun: undefined,
+};

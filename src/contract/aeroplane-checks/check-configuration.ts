@@ -12,6 +12,8 @@ import { checkLift } from './check-lift.ts';
 const orders = [
   ['rotation', 'liftOff'],
   ['liftOff', 'screen'],
+  ['rotation', 'engineOutLiftOff'],
+  ['engineOutLiftOff', 'engineOutScreen'],
   ['touchdown', 'landingReference'],
 ] as const;
 

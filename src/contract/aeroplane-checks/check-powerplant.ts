@@ -52,6 +52,15 @@ export function checkPowerplant(definition: AeroplaneDefinition, at: string): Fa
       allowed: 'cs-23-amendment-4, none',
     });
   }
+  if (certification.stopRule !== undefined && certification.basis !== 'cs-25') {
+    faults.push({
+      pointer: `${at}/certification/stopRule`,
+      code: 'contradiction',
+      message: `A rule of the transport category for the rejected takeoff is stated; the basis is ${certification.basis}.`,
+      received: certification.stopRule,
+      hint: 'Leave stopRule away.',
+    });
+  }
   if (number !== 'twin' && engineOut !== undefined) {
     faults.push({
       pointer: `${at}/engineOut`,

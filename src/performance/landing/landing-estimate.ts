@@ -2,7 +2,7 @@ import { g0 } from '../../physics/constants.ts';
 import { dragCoefficient } from '../../physics/drag.ts';
 import { groundEffect } from '../../physics/ground-effect.ts';
 import { landingAirDistance } from './landing-air-distance.ts';
-import type { LandingRun } from './landing-run.ts';
+import type { BrakedRun, LandingRun } from './landing-run.ts';
 
 /** Ground roll by mean deceleration and air distance [m]; Infinity where the mean is not positive. */
 export interface LandingEstimate {
@@ -26,10 +26,28 @@ export function estimateSpeed({ headwind, touchdownSpeed }: Pick<LandingRun, 'he
  * @see references.AndersonPerformance, ch. 6 for 0.7 of the touchdown speed
  */
 export function landingEstimate(run: LandingRun): LandingEstimate {
-  const { headwind, touchdownSpeed, groundLiftCoefficient: liftCoefficient, reverseThrust } = run;
-  const groundSpeed = touchdownSpeed - headwind;
-  if (!(groundSpeed > 0)) return { groundRoll: Number.NaN, airDistance: Number.NaN };
-  const mean = estimateSpeed(run);
+  if (!(run.touchdownSpeed > run.headwind)) return { groundRoll: Number.NaN, airDistance: Number.NaN };
+  return {
+    groundRoll: stopEstimate(run, run.touchdownSpeed, run.freeRollTime),
+    airDistance: landingAirDistance(run).distance,
+  };
+}
+
+/**
+ * The cheap, smooth estimate of a stop on the wheels.
+ *
+ * s = (V - w) t + (V - w)^2/(2 d(V_m)), V_m = w + 0.707 (V - w).
+ *
+ * @param run - as for brakedRoll
+ * @param airspeed - true, at which it begins [m/s], above the headwind
+ * @param freeRollTime - before the brakes hold [s]
+ * @returns [m]; Infinity where the mean is not positive
+ * @see references.AndersonPerformance, ch. 6
+ */
+export function stopEstimate(run: BrakedRun, airspeed: number, freeRollTime: number): number {
+  const { headwind, groundLiftCoefficient: liftCoefficient, reverseThrust } = run;
+  const groundSpeed = airspeed - headwind;
+  const mean = estimateSpeed({ headwind, touchdownSpeed: airspeed });
   const phi = groundEffect(run.wingHeight / run.span);
   const q = (0.5 * run.density * run.wingArea * mean * Math.abs(mean)) / run.mass;
   const drag = q * dragCoefficient(run.groundDragCoefficient, run.inducedDragFactor, liftCoefficient, phi);
@@ -40,9 +58,7 @@ export function landingEstimate(run: LandingRun): LandingEstimate {
   const isPushing = contaminantDrag !== undefined && mean - headwind < contaminantDrag.below;
   const pushed = isPushing ? (contaminantDrag.perSquare * (mean - headwind) ** 2) / run.mass : 0;
   const deceleration = held + drag + pushed - thrust / run.mass + g0 * run.slope;
-  const groundRoll =
-    deceleration > 0
-      ? groundSpeed * run.freeRollTime + groundSpeed ** 2 / (2 * deceleration)
-      : Number.POSITIVE_INFINITY;
-  return { groundRoll, airDistance: landingAirDistance(run).distance };
+  return deceleration > 0
+    ? groundSpeed * freeRollTime + groundSpeed ** 2 / (2 * deceleration)
+    : Number.POSITIVE_INFINITY;
 }

@@ -8,6 +8,8 @@ const usual: Readonly<Record<keyof NonNullable<Configuration['speeds']>, readonl
   rotation: [1, 1.25],
   liftOff: [1.05, 1.3],
   screen: [1.13, 1.5],
+  engineOutLiftOff: [1.05, 1.4],
+  engineOutScreen: [1.1, 1.5],
   landingReference: [1.2, 1.55],
   touchdown: [1.03, 1.35],
 };
@@ -17,7 +19,7 @@ export const speedUnusual: FindingTest = {
   code: 'speed-unusual',
   severity: 'caution',
   meaning:
-    'A speed of the procedure over the stall speed is outside what is usual: lift-off 1.05 to 1.30, screen 1.13 to 1.50, landing reference 1.20 to 1.55, touchdown 1.03 to 1.35, rotation up to 1.25.',
+    'A speed of the procedure over the stall speed is outside what is usual: lift-off 1.05 to 1.30, screen 1.13 to 1.50, with one engine out 1.05 to 1.40 and 1.10 to 1.50, landing reference 1.20 to 1.55, touchdown 1.03 to 1.35, rotation up to 1.25.',
   source: 'Raymer',
   test: (context) =>
     configurationsOf(context).flatMap(({ id, configuration, at }) =>

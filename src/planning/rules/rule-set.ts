@@ -74,13 +74,16 @@ export interface SlopeRule {
 /** One comparison a rule asks for: a distance times its overall factor against one declared distance. */
 export interface Requirement {
   readonly code: string;
-  /** 'takeoffRun' ends in the middle between lift-off and the screen */
+  /** 'takeoffRun' and 'engineOutTakeoffRun' end in the middle between lift-off and the screen */
   readonly of:
     | 'groundRoll'
     | 'takeoffRun'
     | 'takeoffDistance'
     | 'accelerateStopDistance'
+    | 'accelerateStopAllEngines'
+    | 'accelerateStopEngineOut'
     | 'accelerateGoDistance'
+    | 'engineOutTakeoffRun'
     | 'landingDistance';
   readonly against: 'tora' | 'toda' | 'asda' | 'lda';
   /** the overall factor, applied once; absent: 1 without a word */

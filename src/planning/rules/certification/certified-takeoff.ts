@@ -3,8 +3,6 @@ import type { Factor } from '../../answer.ts';
 import { isTransport } from '../named-aeroplanes.ts';
 import type { Asked, Reading, Requirement } from '../rule-set.ts';
 
-const needsEngineOut = 'the rules ask for the distance with an engine failure, which is not computed';
-
 const transport: Factor = {
   code: 'overall',
   value: 1.15,
@@ -18,28 +16,34 @@ const commuter: Factor = { ...transport, source: 'Cfr23s59', status: 'memory' };
 function both(
   code: string,
   against: Requirement['against'],
-  allEngines: Requirement['of'],
+  [allEngines, engineOut]: readonly [Requirement['of'], Requirement['of']],
   factor: Factor,
   source: ReferenceKey,
 ): readonly Requirement[] {
   return [
     { code: `${code}-all-engines`, of: allEngines, against, factor, source },
-    { code: `${code}-engine-out`, of: 'accelerateGoDistance', against, notAssessed: needsEngineOut, source },
+    { code: `${code}-engine-out`, of: engineOut, against, source },
   ];
 }
 
-function stop(code: string, source: ReferenceKey): Requirement {
-  return { code, of: 'accelerateStopDistance', against: 'asda', notAssessed: needsEngineOut, source };
+const wholes = ['takeoffDistance', 'accelerateGoDistance'] as const;
+const runs = ['takeoffRun', 'engineOutTakeoffRun'] as const;
+
+function stops(isTransportRule: boolean, source: ReferenceKey): readonly Requirement[] {
+  const shared = { against: 'asda', source } as const;
+  if (!isTransportRule) return [{ ...shared, code: 'accelerate-stop', of: 'accelerateStopDistance' }];
+  return [
+    { ...shared, code: 'accelerate-stop-all-engines', of: 'accelerateStopAllEngines' },
+    { ...shared, code: 'accelerate-stop-engine-out', of: 'accelerateStopEngineOut' },
+  ];
 }
 
 /** What a certified takeoff asks of TORA, TODA and ASDA; with a clearway the run ends in the middle between lift-off and screen. */
 function checks(factor: Factor, hasClearway: boolean, source: ReferenceKey): readonly Requirement[] {
   return [
-    ...both('takeoff-run', 'tora', hasClearway ? 'takeoffRun' : 'takeoffDistance', factor, source),
-    ...both('takeoff-distance', 'toda', 'takeoffDistance', factor, source),
-    ...(factor.source === 'Cfr25s113'
-      ? [stop('accelerate-stop-all-engines', source), stop('accelerate-stop-engine-out', source)]
-      : [stop('accelerate-stop', source)]),
+    ...both('takeoff-run', 'tora', hasClearway ? runs : wholes, factor, source),
+    ...both('takeoff-distance', 'toda', wholes, factor, source),
+    ...stops(factor === transport, source),
   ];
 }
 
@@ -83,8 +87,8 @@ export function commuterTakeoff(source: ReferenceKey): readonly Reading[] {
  * The comparisons of a takeoff whose certified distances hold an engine failure: run, distance and accelerate-stop distance, each
  * the greater of that with all engines (times 1.15 where it is to the screen) and that with a failure.
  *
- * What holds a failure is not computed and stands there as not assessed. An aeroplane outside the transport category is asked as
- * one of the commuter category.
+ * What a wet runway asks for besides is composed where the distances are computed. An aeroplane outside the transport category is
+ * asked as one of the commuter category.
  *
  * @param source - the operating rule that compares them with the declared distances
  * @see references.Cfr25s113; references.Cfr25s109a; references.Cfr23s59; references.Cfr23s55

@@ -5,6 +5,7 @@ import type { ClimbDemand } from '../rule-set.ts';
 /** Gradients with one engine out for two, three and four engines. */
 type ByEngines = readonly [number, number, number];
 
+const ft = 0.3048;
 const numbers = ['two', 'three', 'four'];
 
 function climb(
@@ -13,6 +14,7 @@ function climb(
   gradients: ByEngines,
   configuration: string,
   source: ReferenceKey,
+  atHeight?: number,
 ): readonly ClimbDemand[] {
   return gradients.map((gradient, index) => ({
     code,
@@ -20,6 +22,7 @@ function climb(
     engines: 'one-out',
     gradient,
     ...(gradient === 0 ? { positive: true } : {}),
+    ...(atHeight === undefined ? {} : { atHeight }),
     configuration,
     appliesTo: (aeroplane) => isTransport(aeroplane) && aeroplane.engines === index + 2,
     when: `transport category, ${numbers[index]} engines`,
@@ -35,8 +38,15 @@ function climb(
  */
 export const transportTakeoffClimbs: readonly ClimbDemand[] = [
   ...climb('climb-gear-down-engine-out', 'takeoff', [0, 0.003, 0.005], 'takeoff flap, gear down, (a)', 'Cfr25s121'),
-  ...climb('climb-gear-up-engine-out', 'takeoff', [0.024, 0.027, 0.03], 'takeoff flap, gear up, (b)', 'Cfr25s121'),
-  ...climb('climb-final-engine-out', 'takeoff', [0.012, 0.015, 0.017], 'flap and gear up, (c)', 'Cfr25s121'),
+  ...climb(
+    'climb-gear-up-engine-out',
+    'takeoff',
+    [0.024, 0.027, 0.03],
+    'takeoff flap, gear up, (b)',
+    'Cfr25s121',
+    400 * ft,
+  ),
+  ...climb('climb-final-engine-out', 'takeoff', [0.012, 0.015, 0.017], 'flap and gear up, (c)', 'Cfr25s121', 1500 * ft),
 ];
 
 /**

@@ -87,7 +87,7 @@ describe('class A, landing in flight', () => {
 });
 
 describe('class A, takeoff', () => {
-  it('compares what it can and leaves what holds an engine failure not assessed', () => {
+  it('compares each distance with and without an engine failure, and says why where there is none', () => {
     const published = { tora: 2000, toda: 2400, asda: 2200, lda: 2000 };
     const checks = checksFrom(takeoff, asked({ aeroplane: jet, published }), { reference: undefined, credited: 1000 });
     expect(checks.map(({ code, result }) => [code, result])).toEqual([
@@ -99,9 +99,37 @@ describe('class A, takeoff', () => {
       ['accelerate-stop-engine-out', 'not-assessed'],
     ]);
     for (const { result, why, required } of checks) {
-      if (result === 'not-assessed')
-        expect([why, required]).toEqual([expect.stringMatching(/engine failure/), undefined]);
+      if (result === 'not-assessed') expect([why, required]).toEqual(['nothing is computed', undefined]);
     }
+    const computed = {
+      accelerateStopDistance: 2300,
+      accelerateStopAllEngines: 2199,
+      accelerateStopEngineOut: 2300,
+      accelerateGoDistance: 2390,
+      engineOutTakeoffRun: 1999,
+    };
+    const all = checksFrom(
+      takeoff,
+      asked({ aeroplane: jet, published }),
+      { reference: undefined, credited: 1000 },
+      { onRunway: computed },
+    );
+    expect(all.map(({ of, margin }) => [of, margin])).toEqual([
+      ['takeoffRun', 850],
+      ['engineOutTakeoffRun', 1],
+      ['takeoffDistance', 1250],
+      ['accelerateGoDistance', 10],
+      ['accelerateStopAllEngines', 1],
+      ['accelerateStopEngineOut', -100],
+    ]);
+    const missing = { onRunway: computed, notAssessed: 'the aeroplane does not state /brakes' };
+    const without = checksFrom(
+      takeoff,
+      asked({ aeroplane: jet, published }),
+      { reference: undefined, credited: 1 },
+      missing,
+    );
+    expect(without.filter(({ why }) => why === missing.notAssessed)).toHaveLength(4);
   });
 });
 
