@@ -6,7 +6,7 @@ import { promisify } from 'node:util';
 import type { FastifyInstance } from 'fastify';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { testHouse } from '../support/house.ts';
-import { readmeBlock } from '../support/readme.ts';
+import { readmeBlock, readmeRequests, readmeScript } from '../support/readme.ts';
 import { root } from '../support/sources.ts';
 
 const run = promisify(execFile);
@@ -23,9 +23,14 @@ describe('README.md', () => {
 
   const here = (text: string) => text.replaceAll('127.0.0.1:3000', `127.0.0.1:${port}`);
 
-  it('shows the real answer to its curl request', async () => {
-    const { stdout } = await run('sh', ['-c', here(readmeBlock('sh', 'first-request'))]);
-    expect(stdout).toBe(JSON.stringify(JSON.parse(readmeBlock('json', 'first-reply'))));
+  it.each(readmeRequests)('shows the real answer to its curl request $request', async (one) => {
+    const { stdout } = await run('sh', ['-c', here(readmeScript(one))]);
+    expect(stdout).toBe(JSON.stringify(JSON.parse(readmeBlock('json', one.reply))));
+  });
+
+  it('has no curl request that is not tried', () => {
+    const requests = readFileSync(join(root, 'README.md'), 'utf8').match(/^curl .*127\.0\.0\.1:3000/gm) ?? [];
+    expect(requests).toHaveLength(readmeRequests.length);
   });
 
   it('shows what its Python script prints', async () => {

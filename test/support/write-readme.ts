@@ -5,7 +5,7 @@ import type { AddressInfo } from 'node:net';
 import { join } from 'node:path';
 import { promisify } from 'node:util';
 import { testHouse } from './house.ts';
-import { readmeBlock } from './readme.ts';
+import { readmeBlock, readmeRequests, readmeScript } from './readme.ts';
 import { root } from './sources.ts';
 
 const run = promisify(execFile);
@@ -14,8 +14,10 @@ await app.listen({ port: 0, host: '127.0.0.1' });
 const { port } = app.server.address() as AddressInfo;
 const here = (text: string) => text.replaceAll('127.0.0.1:3000', `127.0.0.1:${port}`);
 
-const curl = await run('sh', ['-c', here(readmeBlock('sh', 'first-request'))]);
-replace('json', 'first-reply', JSON.stringify(JSON.parse(curl.stdout), null, 2));
+for (const one of readmeRequests) {
+  const curl = await run('sh', ['-c', here(readmeScript(one))]);
+  replace('json', one.reply, JSON.stringify(JSON.parse(curl.stdout), null, 2));
+}
 const python = await run('python3', ['-c', here(readmeBlock('python', 'first-request'))]);
 replace('text', 'first-reply', python.stdout.trimEnd());
 await app.close();
