@@ -21,6 +21,26 @@ export interface Leg {
 }
 
 /**
+ * The point a distance along legs that follow one another; the end between two legs is the beginning of the later one.
+ *
+ * @param distance - [m], 0 or more
+ * @returns undefined beyond the last leg
+ */
+export function pointAlong(legs: readonly Leg[], distance: number): TrajectoryPoint | undefined {
+  let before = 0;
+  let earlier = 0;
+  for (const leg of legs) {
+    if (distance < before + leg.distance) {
+      const point = leg.at(distance - before);
+      return { ...point, distance, time: earlier + point.time };
+    }
+    before += leg.distance;
+    earlier += leg.time;
+  }
+  return undefined;
+}
+
+/**
  * Points at even steps of distance over legs that follow one another, both ends included.
  *
  * @param legs - in their order; one without length only takes its time

@@ -24,3 +24,19 @@ export function odex(
   const { y } = solver.solve(f, from, [0, 0], to);
   return [y[0] as number, y[1] as number];
 }
+
+/** The state of a system y' = f(x, y) at the end, by the same method. */
+export function odexState(
+  f: (x: number, y: readonly number[]) => number[],
+  state: readonly number[],
+  from: number,
+  to: number,
+  tolerance: number,
+): number[] {
+  if (from === to) return [...state];
+  const solver = new Solver(state.length);
+  solver.absoluteTolerance = tolerance;
+  solver.relativeTolerance = tolerance;
+  solver.maxSteps = 20_000;
+  return solver.solve(f, from, [...state], to).y;
+}

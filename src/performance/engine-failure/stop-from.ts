@@ -27,7 +27,7 @@ export type StopFrom =
   | OutsideStatedData;
 
 /** More than an aeroplane gains in a second [m/s2]: the search for the speed after some seconds ends there. */
-const fastest = 3 * g0;
+export const fastest = 3 * g0;
 const standing = { outcome: 'stops', distance: 0, time: 0, brakeEnergy: 0 } as const;
 
 /**

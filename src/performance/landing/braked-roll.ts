@@ -1,10 +1,9 @@
 import { g0 } from '../../physics/constants.ts';
 import type { PathIntegral } from '../path-integral.ts';
-import { stretchedPath } from '../stretched-path.ts';
-import { brakedStretches } from './braked-stretches.ts';
 import type { BrakedRun } from './landing-run.ts';
-import { noDeceleration, stopBetween } from './stop-between.ts';
-import { deceleration, type StopForces, stopForces } from './stop-forces.ts';
+import { stopAlong } from './stop-along.ts';
+import { noDeceleration } from './stop-between.ts';
+import { deceleration, type StopForces } from './stop-forces.ts';
 
 /** The stop, or the name of why there is none. */
 export type BrakedRoll =
@@ -38,24 +37,9 @@ export type BrakedRoll =
  */
 export function brakedRoll(run: BrakedRun, airspeed: number, begin = 0): BrakedRoll {
   const { headwind } = run;
-  const stretches = brakedStretches(run);
   if (!(airspeed > headwind)) throw new RangeError(`airspeed must be above the headwind ${headwind}: ${airspeed}`);
-  if (stretches === undefined) {
-    const forces = stopForces(run, run);
-    const { reaches, sum } = stopBetween(forces, airspeed, headwind);
-    return reaches ? stops(run, sum) : neverStops(forces, airspeed, sum.leastAt);
-  }
-  const forces = stretches.map((stretch) => stopForces(run, stretch));
-  const path = stretchedPath(
-    stretches.map(({ end }) => end),
-    begin,
-    airspeed,
-    headwind,
-    (stretch, from, to) => stopBetween(forces[stretch] as StopForces, from, to),
-  );
-  return path.reaches
-    ? stops(run, path.sum)
-    : neverStops(forces[path.stretch] as StopForces, path.entered, path.sum.leastAt);
+  const { reaches, sum, forces, entered } = stopAlong(run)(airspeed, headwind, begin);
+  return reaches ? stops(run, sum) : neverStops(forces, entered, sum.leastAt);
 }
 
 function stops({ mass }: BrakedRun, { distance, time, brakeWork, least }: PathIntegral): BrakedRoll {

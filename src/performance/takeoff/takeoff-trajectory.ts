@@ -1,14 +1,11 @@
 import { splitPoints } from '../../numerics/split-points.ts';
 import { type AddPiece, addSettled, newPathIntegral } from '../path-integral.ts';
 import { pathLeg } from '../path-leg.ts';
-import { speedLegs, steadyLeg } from '../speed-legs.ts';
-import { type ChangeOn, type PathPart, stretchedPath } from '../stretched-path.ts';
 import { evenSteps, type Leg, type TrajectoryPoint } from '../trajectory.ts';
 import { climbForces, climbGradient, energySine } from './climb-forces.ts';
 import { addClimbPiece, climbJumps } from './climb-piece.ts';
 import { pullUpArcDistance, pullUpArcTime, pullUpArcTop, pullUpRadius } from './pull-up-arc.ts';
-import { rollBetween } from './roll-between.ts';
-import { type RollForces, rollForces, sloped } from './roll-forces.ts';
+import { rollLegs } from './roll-legs.ts';
 import { underPath } from './takeoff.ts';
 import type { TakeoffRun } from './takeoff-run.ts';
 
@@ -42,37 +39,6 @@ export function takeoffTrajectory(
   const atRest = { time: 0, groundSpeed: 0, trueAirspeed: run.headwind, height: 0 };
   const start = { distance: rollingStartAllowance, time: 0, at: (distance: number) => ({ ...atRest, distance }) };
   return evenSteps([start, ...roll, ...air], steps);
-}
-
-/** The roll, stretch by stretch of the ground line, with the rotation where V_R is reached. */
-function rollLegs(run: TakeoffRun): Leg[] | undefined {
-  const { headwind, liftOffSpeed, rotationTime } = run;
-  if (headwind >= liftOffSpeed) return undefined;
-  const forces = rollForces(run);
-  const slopes = run.profile?.slopes ?? [run.slope];
-  const here = slopes.map((slope) => sloped(forces, slope));
-  const changeOn: ChangeOn = (stretch, from, to) => rollBetween(here[stretch] as RollForces, headwind, from, to);
-  const { reaches, parts } = stretchedPath(
-    run.profile?.ends ?? [Number.POSITIVE_INFINITY],
-    0,
-    headwind,
-    liftOffSpeed,
-    changeOn,
-  );
-  const rotationSpeed = Math.min(liftOffSpeed, Math.max(headwind, run.rotationSpeed));
-  const slower = parts.filter(({ from }) => from < rotationSpeed).map((part) => upTo(part, rotationSpeed));
-  const faster = parts.filter(({ to }) => to > rotationSpeed).map((part) => onFrom(part, rotationSpeed));
-  const before = speedLegs({ reaches, parts: slower }, changeOn, headwind);
-  const after = speedLegs({ reaches, parts: faster }, changeOn, headwind);
-  return before && after && [...before, steadyLeg(rotationSpeed, headwind, rotationTime), ...after];
-}
-
-function upTo(part: PathPart, airspeed: number): PathPart {
-  return { ...part, to: Math.min(part.to, airspeed) };
-}
-
-function onFrom(part: PathPart, airspeed: number): PathPart {
-  return { ...part, from: Math.max(part.from, airspeed) };
 }
 
 /** The arc after lift-off, then the climb that energy allows. */

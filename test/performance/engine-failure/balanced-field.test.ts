@@ -1,12 +1,14 @@
 import { describe, expect, it } from 'vitest';
+import { brent } from '../../../src/numerics/brent.ts';
 import { accelerateGo } from '../../../src/performance/engine-failure/accelerate-go.ts';
 import { accelerateStop } from '../../../src/performance/engine-failure/accelerate-stop.ts';
 import { balancedField } from '../../../src/performance/engine-failure/balanced-field.ts';
 import type { DecisionBounds, EngineFailureRun } from '../../../src/performance/engine-failure/engine-failure-run.ts';
 import { constantBraking } from '../../../src/physics/braking-friction.ts';
 import { balancedFieldLength } from '../../published/balanced-field.ts';
-import { balancedFieldRun, noDelay, withFailure } from '../../support/engine-failure-runs.ts';
+import { balancedFieldRun, balancedFieldSpeeds, noDelay, withFailure } from '../../support/engine-failure-runs.ts';
 import { expectNear, expectRatio } from '../../support/near.ts';
+import { shortestFromRotation } from '../../support/optimised-rotation.ts';
 import { plainRun, quadraticThrust } from '../../support/plain-run.ts';
 
 const g = 9.80665;
@@ -34,6 +36,21 @@ describe('balancedField', () => {
     if (found.outcome !== 'balanced') throw new Error(found.outcome);
     expectRatio(found.length, published?.expected ?? 0, 0.05);
     expectNear(found.stop, found.go, 1e-3);
+  });
+
+  it(`${published?.title}; our stop and our roll to V_R, a rotation and a climb optimised here: within 1 %`, () => {
+    const run = balancedFieldRun(balancedFieldSpeeds.rotation, 'own');
+    const onward = shortestFromRotation();
+    const difference = (speed: number) => {
+      const stop = accelerateStop(run, speed);
+      const go = accelerateGo(run, speed);
+      if (stop.outcome !== 'stops' || go.outcome !== 'reaches-screen')
+        throw new Error(`${stop.outcome}, ${go.outcome}`);
+      return { stop: stop.distance, less: stop.distance - go.groundRoll - onward };
+    };
+    const found = brent((speed) => difference(speed).less, 60, run.rotationSpeed, 1e-6);
+    if (found.outcome !== 'root') throw new Error(found.outcome);
+    expectNear(difference(found.root).stop, published?.expected ?? 0, published?.tolerance ?? 0);
   });
 
   it('is the closed form where nothing delays: V1^2 (1/(2 a_2) + 1/(2 d)) = V1^2/(2 a_2) + (V_LOF^2 - V1^2)/(2 a_1) + air', () => {
