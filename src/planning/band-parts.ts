@@ -1,6 +1,5 @@
-import type { BandContribution, Method } from './answer.ts';
+import type { BandContribution } from './answer.ts';
 import { type Band, widest } from './band.ts';
-import { modelForm } from './rules/input-uncertainties.ts';
 
 /** The two parts of a takeoff or landing distance [m]; one that is not finite does not exist. */
 export interface Parts {
@@ -34,13 +33,13 @@ export class BandParts {
   /**
    * @param movable - the run as stated
    * @param result - its distances, which weigh roll against air distance
-   * @param method - whose model form is the first part
+   * @param form - what the method itself may be off, as a share of each distance: the first part
    */
-  constructor(movable: Movable, { groundRoll, airDistance }: Parts, method: Method) {
+  constructor(movable: Movable, { groundRoll, airDistance }: Parts, form: number) {
     this.#movable = movable;
     this.#base = movable.estimate();
     this.#rollShare = groundRoll / (groundRoll + airDistance);
-    this.#form = modelForm[method];
+    this.#form = form;
     this.add('model form', this.#form, this.#form);
   }
 

@@ -1,4 +1,4 @@
-import type { OutsideManual } from '../performance/flight-manual/manual-figures.ts';
+import type { ManualFigures, OutsideManual } from '../performance/flight-manual/manual-figures.ts';
 import type { Factor, ManualUse, Method, OtherMethod } from './answer.ts';
 import type { Checked } from './assess.ts';
 import type { Parts } from './band-parts.ts';
@@ -8,6 +8,7 @@ import type { ManualRuns } from './manual/manual-runs.ts';
 import type { Silence } from './manual/silence.ts';
 import type { ChosenMethod } from './method.ts';
 import type { Question } from './question.ts';
+import { modelForm } from './rules/input-uncertainties.ts';
 import { factorsBesideManual } from './rules/runway-factors.ts';
 import type { Runs } from './runs.ts';
 
@@ -17,7 +18,12 @@ import type { Runs } from './runs.ts';
  * @typeParam NotReached - why physics has none
  */
 export interface Found<NotReached> {
+  /** of the whole distance */
   readonly method: Method;
+  /** of each distance: what the manual does not print is shared out by physics */
+  readonly methods: DistanceMethods;
+  /** what the method itself may be off, as a share of the distance */
+  readonly modelForm: number;
   /** the sheet of the flight manual whose edge stands for what lies beyond it */
   readonly edge?: string | undefined;
   /** why there are none; undefined where each that was asked for is there */
@@ -35,6 +41,13 @@ export interface Found<NotReached> {
   /** the manual has sheets for the configuration, and none for this surface or a dry paved one to carry from */
   readonly noSheet?: boolean;
   readonly other?: OtherMethod | undefined;
+}
+
+/** The method of each distance of an answer. */
+export interface DistanceMethods {
+  readonly groundRoll: Method;
+  readonly airDistance: Method;
+  readonly wholeDistance: Method;
 }
 
 /** What there is to find distances from. */
@@ -84,8 +97,11 @@ function byPhysics<Result extends object, NotReached extends Result>({
   notReachedOf,
   conditions,
 }: Finding<Result, NotReached>): Found<NotReached> {
+  const method = chosen.physics;
   return {
-    method: chosen.physics,
+    method,
+    methods: { groundRoll: method, airDistance: method, wholeDistance: method },
+    modelForm: modelForm[method],
     notReached: notReachedOf(physics),
     runs: {
       stated: partsOf(stated),
@@ -112,15 +128,42 @@ function byManual<Result extends object, NotReached extends Result>(
   if (carried === undefined) return undefined;
   const { document, revision } = reading.manual;
   const none = { stated: undefined, credited: undefined, level: undefined, reference: undefined };
+  const runs = carried.outcome === 'found' ? carried.runs : none;
+  const { stated: figures } = reading;
+  const methods = methodsOf(figures, silences.length === 0 ? 'flight-manual' : chosen.physics, chosen.physics);
   return {
-    method: silences.length === 0 ? 'flight-manual' : chosen.physics,
+    method: methods.wholeDistance,
+    methods,
+    modelForm: carriedForm(figures, runs.stated, chosen.physics),
     notReached: carried.outcome === 'found' ? undefined : notReachedOf({ ...none, stated: carried.result }),
-    runs: carried.outcome === 'found' ? carried.runs : none,
-    edge: reading.stated.edges[0]?.sheet,
+    runs,
+    edge: figures.edges[0]?.sheet,
     startsFrom: 'flight-manual',
     runwayFactors,
-    flightManual: { document, revision, figures: reading.stated, silences },
+    flightManual: { document, revision, figures, silences },
   };
+}
+
+/** What the manual prints is by the method that carries it, the rest by physics. */
+function methodsOf({ groundRoll, wholeDistance }: ManualFigures, method: Method, physics: Method): DistanceMethods {
+  return {
+    groundRoll: groundRoll === undefined ? physics : method,
+    airDistance: groundRoll === undefined || wholeDistance === undefined ? physics : method,
+    wholeDistance: wholeDistance === undefined ? physics : method,
+  };
+}
+
+/**
+ * What a manual's figure may be off once physics has carried it: the manual's own share, and that of physics on as much as it was
+ * carried, so that the band does not jump where what the manual is silent on goes to nothing.
+ *
+ * @see references.HouseManual
+ */
+function carriedForm(figures: ManualFigures, stated: Parts | undefined, physics: Method): number {
+  const printed = figures.wholeDistance ?? figures.groundRoll;
+  if (stated === undefined || printed === undefined) return modelForm[physics];
+  const carried = figures.wholeDistance === undefined ? stated.groundRoll : stated.groundRoll + stated.airDistance;
+  return Math.hypot(modelForm['flight-manual'], modelForm[physics] * Math.log(carried / printed));
 }
 
 function otherMethod(taken: Found<unknown>, beside: Found<unknown>): OtherMethod | undefined {

@@ -1,7 +1,6 @@
 import { landingEstimate } from '../performance/landing/landing-estimate.ts';
 import type { LandingRun } from '../performance/landing/landing-run.ts';
 import { scaledBraking } from '../physics/braking-friction.ts';
-import type { Method } from './answer.ts';
 import type { Band } from './band.ts';
 import { BandParts, type Parts } from './band-parts.ts';
 import type { Surface } from './question.ts';
@@ -14,6 +13,7 @@ type Changing = { -readonly [K in keyof LandingRun]: LandingRun[K] };
  *
  * @param stated - the run as stated
  * @param result - its distances
+ * @param form - what the method itself may be off, as a share of each distance
  * @param surface - for the uncertainty of its braking friction
  * @param densityAt - at a temperature off by the first argument [K] and a pressure off by the second [Pa]
  * @see references.Judgement for the uncertainties
@@ -22,12 +22,12 @@ export function landingBand(
   stated: LandingRun,
   result: Parts,
   surface: Surface,
-  method: Method,
+  form: number,
   densityAt: (temperatureOff: number, pressureOff: number) => number | undefined,
 ): Band {
   const run: Changing = { ...stated };
   const movable = { estimate: () => landingEstimate(run), restore: () => restore(run, stated) };
-  const parts = new BandParts(movable, result, method);
+  const parts = new BandParts(movable, result, form);
   const u = inputUncertainties;
   const braking = brakingUncertainty(surface);
   const inAir = (density: number | undefined): void => {

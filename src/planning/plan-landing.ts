@@ -44,7 +44,7 @@ export function planLanding(asked: LandingQuestion): LandingAnswer | Refused {
 
   const physics = landingRuns(run, prepared.runConditions);
   const found = foundLanding(question, prepared, physics);
-  const { method, edge, runs, notReached, runwayFactors } = found;
+  const { methods, edge, runs, notReached, runwayFactors } = found;
   const stated = notReached === undefined ? runs.stated : undefined;
   const band =
     stated &&
@@ -52,13 +52,13 @@ export function planLanding(asked: LandingQuestion): LandingAnswer | Refused {
       run,
       stated,
       runway.surface,
-      method,
+      found.modelForm,
       (temperatureOff, pressureOff) => airBeside(question, temperatureOff, pressureOff)?.density,
     );
   const byPhysics = stopped(physics.stated);
   const shares = sharesOf(stated, byPhysics);
   const asAnswered = byPhysics && scaledLanding(byPhysics, shares);
-  const distances = stated && band && landingDistances(stated, band, run.screenHeight, { method, edge }, asAnswered);
+  const distances = stated && band && landingDistances(stated, band, run.screenHeight, { methods, edge }, asAnswered);
   const balkedLanding = balkedLandingClimb(question, prepared);
 
   const rollAvailable = declared.credited.lda;

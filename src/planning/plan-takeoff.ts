@@ -54,11 +54,11 @@ export function planTakeoff(asked: TakeoffQuestion): TakeoffAnswer | Refused {
 
   const physics = takeoffRuns(run, prepared.runConditions);
   const found = foundTakeoff(question, prepared, physics);
-  const { method, edge, runs, notReached, runwayFactors } = found;
+  const { methods, edge, runs, notReached, runwayFactors } = found;
   const stated = notReached === undefined ? runs.stated : undefined;
   const band =
     stated &&
-    takeoffBand(run, stated, runway.surface, method, (temperatureOff, pressureOff) => {
+    takeoffBand(run, stated, runway.surface, found.modelForm, (temperatureOff, pressureOff) => {
       const beside = airBeside(question, temperatureOff, pressureOff);
       return beside && { density: beside.density, thrust: thrustIn(beside, aeroplane.propulsion, power.thrustFactor) };
     });
@@ -68,7 +68,7 @@ export function planTakeoff(asked: TakeoffQuestion): TakeoffAnswer | Refused {
   const distances =
     stated &&
     band &&
-    takeoffDistances(stated, band, aeroplane.certification.screenHeight, { method, edge }, asAnswered);
+    takeoffDistances(stated, band, aeroplane.certification.screenHeight, { methods, edge }, asAnswered);
 
   const engineFailure =
     physics.stated === undefined || byPhysics !== undefined ? engineFailureOf(question, prepared) : undefined;

@@ -1,7 +1,6 @@
 import { takeoffEstimate } from '../performance/takeoff/takeoff-estimate.ts';
 import type { TakeoffRun } from '../performance/takeoff/takeoff-run.ts';
 import type { Thrust } from '../physics/thrust/thrust.ts';
-import type { Method } from './answer.ts';
 import type { Band } from './band.ts';
 import { BandParts, type Parts } from './band-parts.ts';
 import { heldThrust } from './held-thrust.ts';
@@ -21,6 +20,7 @@ type Changing = { -readonly [K in keyof TakeoffRun]: TakeoffRun[K] };
  *
  * @param stated - the run as stated
  * @param result - its distances
+ * @param form - what the method itself may be off, as a share of each distance
  * @param surface - for the uncertainty of its friction
  * @param airAt - air and thrust at a temperature off by the first argument [K] and a pressure off by the second [Pa]
  * @see references.Judgement for the uncertainties
@@ -29,13 +29,13 @@ export function takeoffBand(
   stated: TakeoffRun,
   result: Parts,
   surface: Surface,
-  method: Method,
+  form: number,
   airAt: (temperatureOff: number, pressureOff: number) => OtherAir | undefined,
 ): Band {
   const thrust = heldThrust(stated.thrust);
   const run: Changing = { ...stated, thrust };
   const movable = { estimate: () => takeoffEstimate(run), restore: () => restore(run, stated, thrust) };
-  const parts = new BandParts(movable, result, method);
+  const parts = new BandParts(movable, result, form);
   const u = inputUncertainties;
   const friction = frictionUncertainty(surface);
   const inAir = (other: OtherAir | undefined): void => {

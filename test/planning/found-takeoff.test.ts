@@ -273,3 +273,34 @@ describe('physics fitted to the flight manual', () => {
     expect(answered(uphill).cautions.find(({ code }) => code === 'flight-manual-silent')?.severity).toBe('note');
   });
 });
+
+describe('how sure a figure of the flight manual is', () => {
+  const form = (question: TakeoffQuestion) =>
+    answered(question).basis.band?.find(({ of }) => of === 'model form')?.wholeDistance ?? Number.NaN;
+
+  it('is 5 % as printed [published model form of a manual], and does not jump where physics begins to carry it', () => {
+    expectRatio(form(byManual()), 0.05, 1e-9);
+    expectRatio(form(byManual([], slope(1e-6))), 0.05, 1e-3);
+  });
+
+  it('grows with what physics carries: 15 % of ln of the ratio, as squares [published model form of stated figures]', () => {
+    const question = byManual([], slope(2));
+    const carried = Math.log(distances(question).takeoffDistance.value / (2010 * ft));
+    expectRatio(form(question), Math.hypot(0.05, 0.15 * carried), 1e-9);
+    expect(form(question)).toBeLessThan(0.15);
+  });
+
+  it('is of the part that is printed: without a ground roll in the table, roll and air distance are marked physics', () => {
+    const cells = takeoffTable.cells.map(([, total]) => [total as number]);
+    const alone = manualOf({ outputs: ['takeoffDistance'], cells });
+    const { groundRoll, airDistance, takeoffDistance } = distances(
+      changed(byManual(), { aeroplane: { flightManual: alone } }),
+    );
+    expectRatio(takeoffDistance.value, 2010 * ft, 1e-12);
+    expect([groundRoll.method, airDistance.method, takeoffDistance.method]).toEqual([
+      'stated',
+      'stated',
+      'flight-manual',
+    ]);
+  });
+});
