@@ -126,6 +126,7 @@ export function planTakeoff(asked: TakeoffQuestion): TakeoffAnswer | Refused {
     wind,
     speeds,
     raised,
+    engineFailure: engineFailure && oneOut && { ...engineFailure, climb: oneOut.shown },
     surface: friction.surface,
     noData: friction.noData,
     condition,

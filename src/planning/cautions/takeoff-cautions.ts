@@ -7,7 +7,15 @@ import { climbGradientMarginal } from './climb-gradient-marginal.ts';
 import { conditionCodeTooGood } from './condition-code-too-good.ts';
 import { contaminantHoldsBack } from './contaminant-holds-back.ts';
 import { crosswindBeyondDemonstrated } from './crosswind-beyond-demonstrated.ts';
+import { decisionLimitedByControl } from './decision-limited-by-control.ts';
+import { decisionRangeEmpty } from './decision-range-empty.ts';
+import { decisionSpeedOutOfRange } from './decision-speed-out-of-range.ts';
+import { decisionSpeedUnbalanced } from './decision-speed-unbalanced.ts';
 import { densityAltitudeHigh } from './density-altitude-high.ts';
+import { engineOutByPhysics } from './engine-out-by-physics.ts';
+import { engineOutCannotContinue } from './engine-out-cannot-continue.ts';
+import { engineOutClimbNotPositive } from './engine-out-climb-not-positive.ts';
+import { engineOutDataMissing } from './engine-out-data-missing.ts';
 import { filmCountsAsWet } from './film-counts-as-wet.ts';
 import { fitOutsideRange } from './fit-outside-range.ts';
 import { flightManualAndPhysicsDiffer } from './flight-manual-and-physics-differ.ts';
@@ -20,6 +28,7 @@ import { marginNegative } from './margin-negative.ts';
 import { marginThin } from './margin-thin.ts';
 import { massAboveMaximum } from './mass-above-maximum.ts';
 import { methodIsEstimate } from './method-is-estimate.ts';
+import { noDecisionSpeed } from './no-decision-speed.ts';
 import { pointAtFullLength } from './point-at-full-length.ts';
 import { pressureAltitudeAboveLimit } from './pressure-altitude-above-limit.ts';
 import { pressureExtreme } from './pressure-extreme.ts';
@@ -71,6 +80,15 @@ export const takeoffCautions: readonly CautionTest<TakeoffContext>[] = [
   runwayChanged,
   clearwayCapped,
   takeoffSpeedsRaised,
+  engineOutCannotContinue,
+  noDecisionSpeed,
+  decisionRangeEmpty,
+  decisionSpeedOutOfRange,
+  engineOutClimbNotPositive,
+  engineOutDataMissing,
+  decisionLimitedByControl,
+  decisionSpeedUnbalanced,
+  engineOutByPhysics,
   screenSpeedBelowLiftOff,
   reducedPower,
   rollingStart,
