@@ -15,11 +15,11 @@ export const engineOutDataMissing: CautionTest<TakeoffContext> = {
       ...(control === undefined
         ? []
         : [
-            `No minimum control speed is stated (${control}), so 1 engine may leave no control at any decision speed shown.`,
+            `No minimum control speed is stated (${control}): with 1 engine out control may be lost at any of the decision speeds shown.`,
           ]),
       ...(brakes === undefined
         ? []
-        : [`No braking friction is stated (${brakes}), so the stop with 1 engine out rests on a usual one.`]),
+        : [`No braking friction is stated (${brakes}): the stop with 1 engine out rests on a usual one.`]),
     ];
     return { message: parts.join(' '), at: control ?? brakes };
   },

@@ -29,6 +29,9 @@ export type Decided =
       readonly field: Exclude<BalancedField, Field>;
     };
 
+/** The ends of the range are roots found to a millionth [m/s]: so far inside them the distance fits, and not only about so. */
+const rootTolerance = 4e-6;
+
 /**
  * The decision speed: the one asked for, else that of the balanced field, moved into the range of those from which the aeroplane
  * both stops and goes on in the lengths that there are.
@@ -61,10 +64,12 @@ export function decidedSpeed(
   }
   if (range.outcome !== 'decision-speeds') return { ...found, speed: field.speed, because: field.outcome };
   if (field.speed < range.lowest.speed) {
-    return { ...found, speed: range.lowest.speed, because: 'takeoff-distance-available' };
+    const speed = Math.min(range.lowest.speed + rootTolerance, range.highest.speed);
+    return { ...found, speed, because: 'takeoff-distance-available' };
   }
   if (field.speed > range.highest.speed) {
-    return { ...found, speed: range.highest.speed, because: 'accelerate-stop-distance-available' };
+    const speed = Math.max(range.highest.speed - rootTolerance, range.lowest.speed);
+    return { ...found, speed, because: 'accelerate-stop-distance-available' };
   }
   return { ...found, speed: field.speed, because: field.outcome };
 }

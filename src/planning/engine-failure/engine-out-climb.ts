@@ -1,8 +1,8 @@
 import type { Configuration } from '../../performance/aeroplane.ts';
 import type { Air } from '../../performance/air.ts';
+import { oneEngineClimb } from '../../performance/engine-failure/one-engine-climb.ts';
 import { propulsionAtSetting } from '../../performance/power-setting.ts';
 import { propulsionThrust } from '../../performance/propulsion.ts';
-import { steadyClimb } from '../../performance/steady-climb.ts';
 import { tasFromEas } from '../../physics/airspeed.ts';
 import { inducedDragFactor } from '../../physics/drag.ts';
 import { airAloft } from '../air-aloft.ts';
@@ -45,22 +45,22 @@ export function engineOutClimb(
   const airspeed = tasFromEas(climb.eas, air.density);
   const atSetting = propulsionAtSetting(propulsion, climb.powerRatio);
   const thrust = propulsionThrust(atSetting, engines - 1, air, climb.thrustFactor);
-  const [lowest, highest] = thrust.domain ?? [0, airspeed];
-  if (airspeed < lowest || airspeed > highest) return { why: 'thrust is not known at the airspeed of the climb' };
   const { climbOut = [] } = configuration;
   const stage = climbOut.findLast(({ from }) => from <= height);
   const increment = stage?.airDragIncrementCoefficient ?? climb.airDragIncrement;
-  const found = steadyClimb({
+  const found = oneEngineClimb({
     mass,
     wingArea: wing.area,
-    zeroLiftDragCoefficient: drag.zeroLiftCoefficient + increment + climb.dragIncrementCoefficient,
+    zeroLiftDragCoefficient: drag.zeroLiftCoefficient + increment,
+    dragIncrementCoefficient: climb.dragIncrementCoefficient,
     inducedDragFactor: inducedDragFactor(wing.span, wing.area, drag.oswaldFactor),
     density: air.density,
     airspeed,
-    thrust: thrust.at(airspeed),
+    remainingThrust: thrust,
   });
+  if (found.outcome !== 'climb') return { why: 'thrust is not known at the airspeed of the climb' };
+  const { gradient, rate } = found;
   const isLeast = height > 0 && climbOut.length === 0;
-  return isLeast
-    ? { ...found, atLeastBecause: 'nothing is stated of how gear and flap come up after the screen' }
-    : found;
+  if (!isLeast) return { gradient, rate };
+  return { gradient, rate, atLeastBecause: 'nothing is stated of how gear and flap come up after the screen' };
 }

@@ -1,4 +1,5 @@
 import { describe, expect, it } from 'vitest';
+import type { FixedPitch } from '../../../src/performance/aeroplane.ts';
 import { takeoffCautions } from '../../../src/planning/cautions/takeoff-cautions.ts';
 import type { contaminantKinds } from '../../../src/planning/question.ts';
 import { references } from '../../../src/references.ts';
@@ -59,6 +60,22 @@ const twinAt = (rotation: number, screen: number): Changes => ({
 });
 
 const { propulsion } = plainQuestion.aeroplane;
+/** With two engines of this static thrust each, and all that an engine failure needs [N], minimum control speed on the ground [kt]. */
+const twinOf = (staticThrust: number, vmcg = 44, more: Changes = {}): Changes =>
+  both(
+    {
+      aeroplane: {
+        engines: 2,
+        category: 'twin-piston',
+        propulsion: { ...(propulsion as FixedPitch), staticThrust },
+        brakes: { brakingFrictionCoefficient: 0.4, loadFactor: 0.85, antiSkid: 'none' },
+        engineOut: { vmc: 45 * kt, vmcg: vmcg * kt, dragIncrementCoefficient: 0.01, propeller: 'feathered' },
+      },
+    },
+    more,
+  );
+const decided = (knots: number): Changes => ({ question: { decisionSpeed: knots * kt } });
+
 const atPower = (fullPowerRatio: number): Changes => ({
   aeroplane: { propulsion: { ...propulsion, powerSettings: { reduced: { fullPowerRatio } } } },
   question: { procedure: { power: 'reduced' } },
@@ -614,6 +631,76 @@ const pairs: readonly Pair[] = [
     raised: both(twinAt(1.15, 1.25), { aeroplane: { engines: 2, engineOut: { vmc: 54 * kt } } }),
     silent: both(twinAt(1.15, 1.25), { aeroplane: { engines: 2, engineOut: { vmc: 50 * kt } } }),
     says: /asks for at least 1\.05 times.*56\.7 kt is taken instead\. The speed at the screen .* 59\.4 kt is taken instead\.$/,
+  },
+  {
+    code: 'engine-out-cannot-continue',
+    severity: 'strong',
+    raised: twinOf(1183),
+    silent: twinOf(2366),
+    says: /^With one engine out the aeroplane does not climb to the screen: the least gradient is -1\.81 %\. Rejected at 53\.4 kt calibrated the takeoff ends after \d+ m; later there is no distance\.$/,
+  },
+  {
+    code: 'engine-out-climb-not-positive',
+    severity: 'strong',
+    raised: twinOf(1183),
+    silent: twinOf(2366),
+    says: /^With one engine out the climb gradient is -1\.88 % at lift-off, .* at 1 500 ft above the runway: no height is gained there\.$/,
+  },
+  {
+    code: 'no-decision-speed',
+    severity: 'strong',
+    raised: twinOf(2366, 54),
+    silent: twinOf(2366, 53),
+    says: /^No decision speed: it is at least 54\.\d kt true airspeed by the minimum control speed on the ground, and at most 53\.8 kt by the rotation speed\.$/,
+  },
+  {
+    code: 'decision-range-empty',
+    severity: 'strong',
+    raised: both(twinOf(2366), declared(350)),
+    silent: both(twinOf(2366), declared(360)),
+    says: /^With one engine out the aeroplane does not go on within TODA: that takes 357 m, 350 m available, and stops within ASDA from up to 53\.8 kt true airspeed\.$/,
+  },
+  {
+    code: 'decision-range-empty',
+    severity: 'strong',
+    raised: both(twinOf(4000), { runway: { declared: { tora: 240, toda: 245, asda: 240 } } }),
+    silent: both(twinOf(4000), declared(250)),
+    says: /goes on within TODA from 53 kt true airspeed on, and stops within ASDA from up to 52\.1 kt true airspeed\. After an engine failure between 52\.1 kt and 53 kt it does neither\.$/,
+  },
+  {
+    code: 'decision-speed-out-of-range',
+    severity: 'strong',
+    raised: both(both(twinOf(4000), declared(250)), decided(46)),
+    silent: both(both(twinOf(4000), declared(260)), decided(46)),
+    says: /^The decision speed of 46 kt calibrated is below the speed from which the continued takeoff fits, \d+\.\d kt: after a failure then the aeroplane does not pass the screen within TODA\.$/,
+  },
+  {
+    code: 'decision-speed-unbalanced',
+    severity: 'note',
+    raised: both(twinOf(4000, 30), decided(40)),
+    silent: both(twinOf(4000, 30), decided(52)),
+    says: /^At the decision speed of 40 kt calibrated the longer of stop and continued takeoff is 2\d\d m, [\d.]+ % more than the 24\d m at 52\.\d kt true airspeed\.$/,
+  },
+  {
+    code: 'decision-limited-by-control',
+    severity: 'caution',
+    raised: twinOf(4000, 53),
+    silent: twinOf(4000, 52),
+    says: /^The decision speed of 53 kt calibrated is the minimum control speed on the ground\. The stop from it takes 2\d\d m, the continued takeoff 2\d\d m\.$/,
+  },
+  {
+    code: 'engine-out-data-missing',
+    severity: 'strong',
+    raised: both(twinOf(2366), { aeroplane: { engineOut: {}, brakes: {} } }),
+    silent: twinOf(2366),
+    says: /^No minimum control speed is stated \(\/aeroplane\/definition\/engineOut\/vmcg\): .* No braking friction is stated \(\/aeroplane\/definition\/brakes\/brakingFrictionCoefficient\)/,
+  },
+  {
+    code: 'engine-out-by-physics',
+    severity: 'note',
+    raised: twinOf(2366, 44, withManual()),
+    silent: twinOf(2366),
+    says: /^The distances with 1 engine out are computed, not read in the flight manual\. With all engines physics has \d+ m, [\d.]+ % (less|more) than the manual\.$/,
   },
   {
     code: 'assumption-matters',
