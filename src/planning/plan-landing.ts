@@ -8,6 +8,7 @@ import { balkedLandingClimb } from './balked-landing.ts';
 import { raisedCautions } from './cautions/caution-test.ts';
 import { landingCautions } from './cautions/landing-cautions.ts';
 import { climbChecks, climbedWithAll } from './climb-checks.ts';
+import { balkedWithOneOut } from './engine-failure/balked-with-one-out.ts';
 import { isRefused, type Refused } from './fault.ts';
 import { checkedRuns } from './found.ts';
 import { foundLanding } from './found-landing.ts';
@@ -72,9 +73,9 @@ export function planLanding(asked: LandingQuestion): LandingAnswer | Refused {
     rollAvailable,
     further: () => {
       const balked = balkedLanding.outcome === 'computed' ? balkedLanding : undefined;
-      return climbChecks(rules.demands, question.aeroplane, ({ engines, of }) => {
+      return climbChecks(rules.demands, question.aeroplane, ({ engines, of, atHeight = 0 }) => {
         if (of === 'approach') return { why: 'no configuration of the approach with one engine out is known' };
-        return engines === 'all' ? climbedWithAll(balked) : { why: 'the climb with one engine out is not computed' };
+        return engines === 'all' ? climbedWithAll(balked) : balkedWithOneOut(question, prepared, atHeight);
       });
     },
   });

@@ -192,7 +192,7 @@ describe('a runway end on file', () => {
       const [whole, later] = [await taken('threshold'), await taken({ offset: metres(600) })];
       for (const [i, clearance] of clearances(later).entries())
         expect(clearance).toBeLessThan(clearances(whole)[i] ?? 0);
-      const high = { from: 'end-of-toda', list: [{ distance: metres(900), height: metres(240) }] };
+      const high = { from: 'end-of-toda', list: [{ distance: metres(900), height: metres(300) }] };
       const blocked = await taken('threshold', { obstacles: high });
       expect([blocked.outcome, blocked.assessment.governing]).toEqual(['not-enough', 'obstacle-all-engines']);
     });

@@ -153,18 +153,19 @@ describe('the climbs that rules ask for', () => {
   const climbs = ({ assessment }: { assessment: { checks: { code: string }[] } }) =>
     assessment.checks.filter(({ code }) => code.startsWith('climb')) as Record<string, unknown>[];
 
-  it('are 4 % after takeoff with all engines, and with one out not assessed [CAT.POL.A.340; read]', async () => {
+  it('are 4 % after takeoff with all engines, and with one out any at 400 ft and 0.75 % at 1 500 ft [CAT.POL.A.340; read]', async () => {
     const answer = await answered('takeoff', {}, twin('takeoff'));
     const [all, low, high] = climbs(answer);
     expect(all).toMatchObject({ code: 'climb-all-engines', required: { value: 4, unit: 'percent' }, result: 'passes' });
     expect(all?.['available']).toEqual(answer.climb.gradient);
-    expect(low).toMatchObject({ code: 'climb-engine-out-400-ft', result: 'not-assessed', required: { value: 0 } });
-    expect(high).toMatchObject({ code: 'climb-engine-out-1500-ft', result: 'not-assessed', required: { value: 0.75 } });
-    expect(answer.outcome).not.toMatch(/^enough/);
+    expect(low).toMatchObject({ code: 'climb-engine-out-400-ft', result: 'passes', required: { value: 0 } });
+    expect(high).toMatchObject({ code: 'climb-engine-out-1500-ft', result: 'passes', required: { value: 0.75 } });
+    const shown = answer.engineOut.climb.slice(1).map(({ gradient }: { gradient: unknown }) => gradient);
+    expect([low?.['available'], high?.['available']]).toEqual(shown);
   });
-  it('are 2.5 % after a balked landing with all engines, and with one out not assessed [CAT.POL.A.340; memory]', async () => {
+  it('are 2.5 % after a balked landing with all engines, and 0.75 % with one out at 1 500 ft [CAT.POL.A.340; memory]', async () => {
     const [all, out] = climbs(await answered('landing', {}, twin('landing')));
     expect(all).toMatchObject({ code: 'climb-balked-landing-all-engines', required: { value: 2.5, unit: 'percent' } });
-    expect(out).toMatchObject({ result: 'not-assessed', required: { value: 0.75 } });
+    expect(out).toMatchObject({ result: 'passes', required: { value: 0.75 } });
   });
 });

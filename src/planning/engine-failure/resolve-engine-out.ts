@@ -87,7 +87,7 @@ export function resolveEngineOut(
       },
     });
   }
-  const drag = dragOf(aeroplane, at);
+  const drag = engineOutDragOf(aeroplane, aeroplaneAt);
   assumed.push(...drag.assumed);
   return {
     dragIncrementCoefficient: drag.coefficient,
@@ -105,11 +105,13 @@ function controlSpeed({ engineOut }: Aeroplane): { readonly member: 'vmcg' | 'vm
   return engineOut?.vmc === undefined ? undefined : { member: 'vmc', cas: engineOut.vmc };
 }
 
-function dragOf(
+/** Drag coefficient of the dead engine and the rudder, as stated or assumed and said. */
+export function engineOutDragOf(
   aeroplane: Aeroplane,
-  at: (member: string) => string,
+  aeroplaneAt: string,
 ): { readonly coefficient: number; readonly assumed: readonly AnyAssumed[] } {
   const { engineOut } = aeroplane;
+  const at = (member: string) => aeroplanePointer(aeroplaneAt, `/engineOut/${member}`);
   const stated = engineOut?.dragIncrementCoefficient;
   if (stated !== undefined) return { coefficient: stated, assumed: [] };
   const dead = deadEngine(aeroplane);
