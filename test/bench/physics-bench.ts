@@ -1,4 +1,7 @@
 import type { Propulsion } from '../../src/performance/aeroplane.ts';
+import { balancedField } from '../../src/performance/engine-failure/balanced-field.ts';
+import { decisionBounds } from '../../src/performance/engine-failure/decision-bounds.ts';
+import type { DecisionBounds, EngineFailureRun } from '../../src/performance/engine-failure/engine-failure-run.ts';
 import { landing } from '../../src/performance/landing/landing.ts';
 import { propulsionThrust } from '../../src/performance/propulsion.ts';
 import { airDistance } from '../../src/performance/takeoff/air-distance.ts';
@@ -9,6 +12,7 @@ import { takeoffEstimate } from '../../src/performance/takeoff/takeoff-estimate.
 import type { TakeoffRun } from '../../src/performance/takeoff/takeoff-run.ts';
 import { landingVectors } from '../published/landing-vectors.ts';
 import { takeoffVectors } from '../published/takeoff-vectors.ts';
+import { shareOfThrust, withFailure } from '../support/engine-failure-runs.ts';
 import { landingVectorRun } from '../support/landing-runs.ts';
 import { odex } from '../support/odex.ts';
 import { standardAir } from '../support/standard-air.ts';
@@ -65,6 +69,14 @@ function runs(): Record<string, TakeoffRun> {
 /** Slightly different runs, so that nothing is learnt by heart. */
 const around = (run: TakeoffRun): TakeoffRun[] =>
   Array.from({ length: 8 }, (_, i) => ({ ...run, mass: run.mass * (1 + i * 1e-3) }));
+
+/** 25.109 as it stands, a failure seen in a second and two of transition. */
+const currentRule = { recognitionTime: 1, timeAtDecisionSpeed: 2, continuedAccelerationTime: 0, transitionTime: 2 };
+
+/** The same aeroplane with thrust enough to climb on half of it. */
+function strongTwin(run: TakeoffRun): TakeoffRun {
+  return { ...run, thrust: shareOfThrust(run.thrust, 1.5) };
+}
 
 function libraryRoll(run: TakeoffRun, tolerance: number): number {
   const forces = rollForces(run);
@@ -124,6 +136,19 @@ export function physicsBench(print: Print): void {
     const { stallSpeed: _, ...run } = landingVectorRun(vector);
     const runs = Array.from({ length: 8 }, (__, i) => ({ ...run, mass: run.mass * (1 + i * 1e-3) }));
     print(`  ${vector.id.padEnd(15)} ${microseconds(landing, runs, 400).toFixed(2).padStart(6)}`);
+  }
+  print('');
+  print('one balanced field of a twin, V1 and both distances [us]; aim: below 300');
+  for (const kind of ['constant-speed', 'jet'] as const) {
+    const twins = around(published(kind).run).map((run) => withFailure(strongTwin(run), { timeline: currentRule }));
+    const bounds = twins.map((run) => decisionBounds(run, {}) as DecisionBounds);
+    const outcomes = new Set(twins.map((run, i) => balancedField(run, bounds[i] as DecisionBounds).outcome));
+    const cost = microseconds(
+      (i: number) => balancedField(twins[i] as EngineFailureRun, bounds[i] as DecisionBounds),
+      [0, 1, 2, 3, 4, 5, 6, 7],
+      80,
+    );
+    print(`  ${kind.padEnd(15)} ${cost.toFixed(0).padStart(6)}   ${[...outcomes].join(', ')}`);
   }
   for (const kind of ['fixed-pitch', 'constant-speed'] as const) {
     const { run, truth } = published(kind);

@@ -27,7 +27,7 @@ export function stopAfter(rolls: FailureRolls, failure: Failure, decisionSpeed: 
   if (failure.outcome !== 'fails') return failure;
   const { run, allEngines } = rolls;
   const { reaches, sum } = allEngines(run.allEngines.headwind, decisionSpeed, 0);
-  if (!reaches) return neverReaches(run.allEngines, decisionSpeed);
+  if (!reaches) return neverReaches(run.allEngines, decisionSpeed, sum);
   const action = firstAction(rolls, failure, decisionSpeed);
   const failed = stopFrom(rolls.oneOutRun, rolls.oneOut, action, run.timeline, failedStop(run));
   if (failed.outcome !== 'stops') return failed;

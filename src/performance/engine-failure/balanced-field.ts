@@ -10,8 +10,8 @@ import type {
 } from './engine-failure-run.ts';
 import { failureOf, failureRolls } from './failure-speed.ts';
 
-/** On V1 [m/s]: a tenth of a millimetre of runway. */
-const tolerance = 1e-6;
+/** On V1 [m/s]: micrometres of runway, a millimetre where the go hardly gains speed. */
+const tolerance = 1e-8;
 /** Stands for a distance that there is not [m]: longer than any that there is. */
 const without = 1e12;
 

@@ -1,3 +1,5 @@
+import { g0 } from '../../physics/constants.ts';
+import type { PathIntegral } from '../path-integral.ts';
 import { groundRoll } from '../takeoff/ground-roll.ts';
 import { type OutsideStatedData, outsideStatedData } from '../takeoff/outside-stated-data.ts';
 import { type RollAlong, rollAlong } from '../takeoff/roll-along.ts';
@@ -71,13 +73,17 @@ export function failureOf({ run, allEngines, oneOut }: FailureRolls, decisionSpe
   const { reaches, sum } = allEngines(headwind, speed, 0);
   return reaches
     ? { outcome: 'fails', speed, distance: sum.distance, time: sum.time }
-    : neverReaches(run.allEngines, decisionSpeed);
+    : neverReaches(run.allEngines, decisionSpeed, sum);
 }
 
 /** The named outcome, with the airspeed at which the acceleration of all engines is gone. */
-export function neverReaches(run: TakeoffRun, decisionSpeed: number): NeverReaches {
+export function neverReaches(run: TakeoffRun, decisionSpeed: number, { least, leastAt }: PathIntegral): NeverReaches {
+  const outcome = 'never-reaches-decision-speed';
   const roll = groundRoll({ ...run, liftOffSpeed: decisionSpeed });
-  if (roll.outcome !== 'never-reaches-lift-off-speed') throw new Error(`all engines reach ${decisionSpeed} m/s`);
+  // of a roll without length there is only the one acceleration
+  if (roll.outcome !== 'never-reaches-lift-off-speed') {
+    return { outcome, atAirspeed: leastAt, leastAccelerationRatio: least / g0 };
+  }
   const { atAirspeed, leastAccelerationRatio } = roll;
-  return { outcome: 'never-reaches-decision-speed', atAirspeed, leastAccelerationRatio };
+  return { outcome, atAirspeed, leastAccelerationRatio };
 }

@@ -51,6 +51,8 @@ type RejectAt = (airspeed: number) => Rejected | undefined;
 const tolerance = 1e-6;
 /** By how much a stop within the length may miss it at the root [m]. */
 const settled = 0.01;
+/** No runway is longer, and no stop that ends [m]. */
+const longest = 1e9;
 /** Stands for a stop without end [m]. */
 const endless = 1e12;
 
@@ -96,6 +98,7 @@ function withoutPower(
 }
 
 function cueAt(roll: RollAlong, headwind: number, airspeed: number): FirstAction | undefined {
+  if (airspeed === headwind) return { speed: airspeed, distance: 0, time: 0 };
   const { reaches, sum } = roll(headwind, airspeed, 0);
   return reaches ? { speed: airspeed, distance: sum.distance, time: sum.time } : undefined;
 }
@@ -112,11 +115,12 @@ function lastPoint(run: TakeoffRun, available: number, rejectAt: RejectAt): Last
   const first = rejectAt(headwind);
   if (first !== undefined && first.stop.outcome !== 'stops') return first.stop;
   if (needed(first) > available) return { outcome: 'does-not-stop-within', shortest: needed(first) };
-  const found = brent((airspeed) => needed(rejectAt(airspeed)) - available, headwind, rotationSpeed, tolerance);
+  const length = Math.min(available, longest);
+  const found = brent((airspeed) => needed(rejectAt(airspeed)) - length, headwind, rotationSpeed, tolerance);
   const last = found.outcome === 'root' ? rejectAt(found.root) : undefined;
   if (last?.stop.outcome !== 'stops') throw new Error(`no last point between ${headwind} and ${rotationSpeed} m/s`);
   // short of the length where the stop from a little more is not known: what lies beyond is not known either
-  const unknown = latest?.stop.outcome === 'outside-stated-data' && last.stop.distance < available - settled;
+  const unknown = latest?.stop.outcome === 'outside-stated-data' && last.stop.distance < length - settled;
   return unknown ? latest.stop : pointOf('last-point', last.cue, last.stop, headwind);
 }
 

@@ -1,4 +1,5 @@
 import { brent } from '../../numerics/brent.ts';
+import { newPathIntegral } from '../path-integral.ts';
 import type { SpeedChange } from '../stretched-path.ts';
 
 /** On the airspeed [m/s]: micrometres of runway. */
@@ -28,7 +29,7 @@ export function speedAtTime(
   seconds: number,
 ): SpeedAtTime {
   if (!(seconds >= 0)) throw new RangeError(`seconds must be 0 or more: ${seconds}`);
-  if (seconds === 0 || from === furthest) return { airspeed: from, change: changeTo(from) };
+  if (seconds === 0 || from === furthest) return { airspeed: from, change: unchanged() };
   const over = (airspeed: number) => {
     if (airspeed === from) return -seconds;
     const { reaches, sum } = changeTo(airspeed);
@@ -41,5 +42,9 @@ export function speedAtTime(
   // the root is where the change stops, and lies on its far side
   const near = found.root + Math.sign(from - found.root) * Math.min(Math.abs(from - found.root), 2 * tolerance);
   const nearer = changeTo(near);
-  return nearer.reaches ? { airspeed: near, change: nearer } : { airspeed: from, change: changeTo(from) };
+  return nearer.reaches ? { airspeed: near, change: nearer } : { airspeed: from, change: unchanged() };
+}
+
+function unchanged(): SpeedChange {
+  return { reaches: true, sum: newPathIntegral() };
 }

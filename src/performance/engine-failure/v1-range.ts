@@ -32,6 +32,8 @@ export type V1Range =
 
 /** On V1 [m/s]: a tenth of a millimetre of runway. */
 const tolerance = 1e-6;
+/** No runway is longer, and nothing that ends [m]. */
+const longest = 1e9;
 /** Stands for what a length is short of where there is no end to it [m]. */
 const endless = 1e12;
 
@@ -57,13 +59,15 @@ export function v1Range(run: EngineFailureRun, bounds: DecisionBounds, lengths: 
   if (go.outcome !== 'reaches-screen') return go;
   const stop = accelerateStop(run, lowest.speed);
   if (stop.outcome !== 'stops') return stop;
+  const toGo = Math.min(longest, lengths.takeoffDistanceAvailable);
+  const toStop = Math.min(longest, lengths.accelerateStopDistanceAvailable);
   const spareToGo = (speed: number) => {
     const found = accelerateGo(run, speed);
-    return found.outcome === 'reaches-screen' ? lengths.takeoffDistanceAvailable - found.distance : -endless;
+    return found.outcome === 'reaches-screen' ? toGo - found.distance : -endless;
   };
   const spareToStop = (speed: number) => {
     const found = accelerateStop(run, speed);
-    return found.outcome === 'stops' ? lengths.accelerateStopDistanceAvailable - found.distance : -endless;
+    return found.outcome === 'stops' ? toStop - found.distance : -endless;
   };
   const from = within(spareToGo, lowest, { speed: highest.speed, because: 'takeoff-distance-available' });
   const upTo = within(spareToStop, highest, { speed: lowest.speed, because: 'accelerate-stop-distance-available' });

@@ -48,6 +48,8 @@ describe('accelerateGo', () => {
     const roll = accelerateGo(dragged, 20);
     expect(roll).toMatchObject({ outcome: 'single-engine-cannot-continue', because: 'roll' });
     expectNear((roll as { least: number }).least, -0.7 / 9.80665, 1e-9);
+    // no more at the lift-off speed itself, where nothing is left to roll
+    expect(accelerateGo(dragged, 30)).toEqual(roll);
     const run = { ...block, allEngines: { ...block.allEngines, airDragCoefficient: 2 * 0.003 } };
     const climb = accelerateGo(run, 20);
     expect(climb).toMatchObject({ outcome: 'single-engine-cannot-continue', because: 'climb' });

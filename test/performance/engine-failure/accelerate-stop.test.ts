@@ -1,25 +1,18 @@
 import { describe, expect, it } from 'vitest';
 import { accelerateStop } from '../../../src/performance/engine-failure/accelerate-stop.ts';
-import type { EngineFailureRun, StopTimeline } from '../../../src/performance/engine-failure/engine-failure-run.ts';
+import type { EngineFailureRun } from '../../../src/performance/engine-failure/engine-failure-run.ts';
 import { constantBraking } from '../../../src/physics/braking-friction.ts';
 import { balancedFieldLegs } from '../../published/balanced-field.ts';
-import { balancedFieldRun, noDelay, withFailure } from '../../support/engine-failure-runs.ts';
+import { block, inWind } from '../../support/engine-failure-block.ts';
+import { balancedFieldRun, noDelay } from '../../support/engine-failure-runs.ts';
 import { expectNear, expectRatio } from '../../support/near.ts';
-import { plainRun, quadraticThrust } from '../../support/plain-run.ts';
-
-const g = 9.80665;
+import { quadraticThrust } from '../../support/plain-run.ts';
 
 function stopOf(run: EngineFailureRun, decisionSpeed: number) {
   const result = accelerateStop(run, decisionSpeed);
   if (result.outcome !== 'stops') throw new Error(result.outcome);
   return result;
 }
-
-/** 1 kg that gains 4 m/s2 with both engines, 2 with one, and brakes at 5 m/s2: every leg is schoolroom arithmetic. */
-const block = (timeline: Partial<StopTimeline> = {}, changes: Partial<EngineFailureRun> = {}) => {
-  const run = withFailure(plainRun({ thrust: quadraticThrust(4) }), { timeline: { ...noDelay, ...timeline } });
-  return { ...run, stop: { ...run.stop, braking: constantBraking(5 / g) }, ...changes };
-};
 
 describe('accelerateStop', () => {
   const [both, stop] = balancedFieldLegs;
@@ -31,7 +24,7 @@ describe('accelerateStop', () => {
 
   it('adds up the timeline of an even acceleration by hand', () => {
     // V1 20: 1 s at 2 m/s2 before it, so V_EF 18; 18^2/8 + 19 + 2 s at 20 + 1 s at 20 + 20^2/10
-    const found = stopOf(block({ recognitionTime: 1, timeAtDecisionSpeed: 2, transitionTime: 1 }), 20);
+    const found = stopOf(block(5, { recognitionTime: 1, timeAtDecisionSpeed: 2, transitionTime: 1 }), 20);
     expectNear(found.failureSpeed, 18, 1e-8);
     expectNear(found.engineFailureDistance, 40.5 + 19 + 40 + 20 + 40, 1e-7);
     expectNear(found.allEnginesDistance, 50 + 40 + 20 + 40, 1e-7);
@@ -42,7 +35,7 @@ describe('accelerateStop', () => {
 
   it('goes on accelerating for the seconds of the older rule, then holds the speed reached', () => {
     // with one engine 2 s at 2 m/s2: 20 to 24 over 44 m; with both at 4 m/s2: to 28 over 48 m
-    const found = stopOf(block({ continuedAccelerationTime: 2, transitionTime: 1 }), 20);
+    const found = stopOf(block(5, { continuedAccelerationTime: 2, transitionTime: 1 }), 20);
     expectNear(found.engineFailureDistance, 50 + 44 + 24 + 57.6, 1e-6);
     expectNear(found.allEnginesDistance, 50 + 48 + 28 + 78.4, 1e-6);
     expect(found.longer).toBe('all-engines');
@@ -52,18 +45,13 @@ describe('accelerateStop', () => {
   });
 
   it('counts the wind out of every leg: ground speed is what runs', () => {
-    const wind = -6;
-    const run = block({ recognitionTime: 1, timeAtDecisionSpeed: 2, transitionTime: 1 });
-    const windy = {
-      ...run,
-      allEngines: { ...run.allEngines, headwind: wind },
-      stop: { ...run.stop, headwind: wind },
-    };
+    const run = block(5, { recognitionTime: 1, timeAtDecisionSpeed: 2, transitionTime: 1 });
+    const windy = inWind(run, -6);
     expectNear(stopOf(windy, 14).distance, stopOf(run, 20).distance, 1e-7);
   });
 
   it('takes the idle thrust of the engines that run, and of all where none failed', () => {
-    const run = block();
+    const run = block(5);
     const idle = { ...run, stop: { ...run.stop, idleThrust: 1 }, idleThrustAllEngines: 2 };
     const found = stopOf(idle, 20);
     expectNear(found.engineFailureDistance, 50 + 50, 1e-8);
@@ -73,7 +61,7 @@ describe('accelerateStop', () => {
   });
 
   it('reverses all engines where none failed, and those that run where one did', () => {
-    const run = block();
+    const run = block(5);
     const reversed = {
       ...run,
       stop: { ...run.stop, reverseThrust: { thrust: 1, cutOffSpeed: 0 } },
@@ -85,7 +73,7 @@ describe('accelerateStop', () => {
   });
 
   it('lets the drag of the dead engine act from the failure to the stop, not on the all-engines stop', () => {
-    const run = block({ recognitionTime: 1 }, { dragIncrementCoefficient: 0.004 });
+    const run = { ...block(5, { recognitionTime: 1 }), dragIncrementCoefficient: 0.004 };
     const found = stopOf(run, 20);
     // V' = 2 - k V^2 before V1 and -(5 + k V^2) after it, k = 0.5 rho S dC_D
     const k = 0.002;
@@ -98,7 +86,7 @@ describe('accelerateStop', () => {
   });
 
   it('holds V1 through the recognition where the engines that remain do not accelerate', () => {
-    const run = block({ recognitionTime: 3 }, { remainingThrust: quadraticThrust(0) });
+    const run = { ...block(5, { recognitionTime: 3 }), remainingThrust: quadraticThrust(0) };
     const found = stopOf(run, 20);
     expect(found.failureSpeed).toBe(20);
     expectNear(found.engineFailureDistance, 50 + 60 + 40, 1e-8);
@@ -106,7 +94,7 @@ describe('accelerateStop', () => {
   });
 
   it('names a speed that all engines do not reach, brakes that do not hold, and thrust that is not known', () => {
-    const run = block();
+    const run = block(5);
     const dragged = { ...run, allEngines: { ...run.allEngines, groundDragCoefficient: 0.02 } };
     const named = accelerateStop(dragged, 25);
     // 4 = 0.01 V^2
@@ -122,7 +110,7 @@ describe('accelerateStop', () => {
   });
 
   it('stands where V1 is the headwind, and asks for no speed below it', () => {
-    expect(stopOf(block(), 0)).toMatchObject({ distance: 0, brakeEnergy: 0 });
-    expect(() => accelerateStop(block(), -1)).toThrow(/decisionSpeed/);
+    expect(stopOf(block(5), 0)).toMatchObject({ distance: 0, brakeEnergy: 0 });
+    expect(() => accelerateStop(block(5), -1)).toThrow(/decisionSpeed/);
   });
 });

@@ -110,6 +110,25 @@ describe('brakedRoll', () => {
     }
   });
 
+  it('heats the brakes by what the rest does not take, by hand', () => {
+    // without air all of the motion; with idle thrust its work besides; uphill the slope takes its share
+    expect(stop(plain, 30).brakeEnergy).toBeCloseTo((1043 * 900) / 2, 4);
+    const thrust = 0.05 * 1043 * g;
+    expect(stop({ ...plain, idleThrust: thrust }, 30).brakeEnergy / ((1043 * 450 * 0.3) / 0.25)).toBeCloseTo(1, 9);
+    expect(stop({ ...plain, slope: 0.1 }, 30).brakeEnergy / (1043 * 450 * 0.75)).toBeCloseTo(1, 9);
+    // with drag alone beside them: m a/(2 k) ln(1 + k V^2/a) of an even friction
+    const k = (0.5 * 1.225 * 16.2 * 0.037) / 1043;
+    const dragged = stop({ ...trainer, groundLiftCoefficient: 0 }, 30);
+    expect(dragged.brakeEnergy / (((1043 * 0.3 * g) / (2 * k)) * Math.log1p((k * 900) / (0.3 * g)))).toBeCloseTo(1, 9);
+    // over stretches as over one
+    const braking = constantBraking(0.3);
+    const stretches = [
+      { end: 40, braking },
+      { end: 80, braking },
+    ];
+    expect(stop({ ...trainer, stretches }, 30).brakeEnergy / stop(trainer, 30).brakeEnergy).toBeCloseTo(1, 9);
+  });
+
   it('asks for a speed to stop from', () => {
     expect(() => brakedRoll({ ...plain, headwind: 30 }, 30)).toThrow(/airspeed/);
   });
