@@ -38,6 +38,7 @@ const standing = { outcome: 'stops', distance: 0, time: 0, brakeEnergy: 0 } as c
  * @param action - V1 and where it is reached
  * @param timeline - its times after V1
  * @param stop - its ground measured from brake release
+ * @remarks An aeroplane that would not gain speed while it should is taken to hold it: the longer way.
  * @see references.Cfr25s109a
  */
 export function stopFrom(

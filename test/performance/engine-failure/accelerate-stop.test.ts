@@ -85,6 +85,20 @@ describe('accelerateStop', () => {
     expectNear(found.allEnginesDistance, 90, 1e-8);
   });
 
+  it('follows a rise of 1 m/s2 from where the wheels meet it, by hand', () => {
+    const rising = (from: number, run: EngineFailureRun) => {
+      const profile = { ends: [from, 1000], slopes: [0, 1 / 9.80665] };
+      return { ...run, allEngines: { ...run.allEngines, profile }, stop: { ...run.stop, profile } };
+    };
+    // from 30 m on: V_EF 18.5, reached at 30 + (18.5^2 - 240)/6; on one engine at 1 m/s2 to 20; brakes and rise 6 m/s2
+    const failed = stopOf(rising(30, block(5, { recognitionTime: 1.5 })), 20);
+    expectNear(failed.engineFailureDistance, 30 + (18.5 ** 2 - 240) / 6 + (400 - 18.5 ** 2) / 2 + 400 / 12, 1e-5);
+    // from 80 m on: V1 at 50 m, 40 m at V1, then 2 s at 1 m/s2 from 90 m on
+    const later = stopOf(rising(80, block(5, { timeAtDecisionSpeed: 2, continuedAccelerationTime: 2 })), 20);
+    expectNear(later.engineFailureDistance, 90 + 42 + 22 ** 2 / 12, 1e-5);
+    expectNear(later.allEnginesDistance, 90 + 46 + 26 ** 2 / 12, 1e-5);
+  });
+
   it('holds V1 through the recognition where the engines that remain do not accelerate', () => {
     const run = { ...block(5, { recognitionTime: 3 }), remainingThrust: quadraticThrust(0) };
     const found = stopOf(run, 20);

@@ -28,6 +28,14 @@ describe('coastFor', () => {
     expectNear(coastFor(3, { ...at, speed: 26 }, windy.takeoff, windy.stop).distance, 105.5, 1e-7);
   });
 
+  it('meets a rise where it is: 2 m/s2 from 40 m on', () => {
+    const { takeoff, stop } = rolling();
+    const profile = { ends: [40, 1000], slopes: [0, 1 / g] };
+    const after = coastFor(3, at, { ...takeoff, profile }, { ...stop, profile });
+    expectNear(after.speed, 14, 1e-8);
+    expectNear(after.distance, 101, 1e-7);
+  });
+
   it('gains speed downhill, and holds it where nothing pulls either way', () => {
     const down = rolling(-2);
     const after = coastFor(3, at, down.takeoff, down.stop);
@@ -56,6 +64,8 @@ describe('coastFor', () => {
       { end: 2, braking: constantBraking(0.1) },
     ];
     expectNear(coastFor(3, at, takeoff, { ...stop, stretches }).speed, 17, 1e-8);
+    const reversed = { ...stop, reverseThrust: { thrust: 3, cutOffSpeed: 0 } };
+    expectNear(coastFor(3, at, takeoff, reversed).speed, 17, 1e-8);
     const dragged = coastFor(3, at, { ...takeoff, groundDragCoefficient: 0.01, rollingFriction: 0 }, stop);
     expectNear(dragged.speed, 20 / (1 + 0.005 * 20 * 3), 1e-7);
   });
