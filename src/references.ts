@@ -130,9 +130,16 @@ export const references = entries({
   },
   OperatorsOwn: { title: "The operator's own figure, as given in the question", status: 'judgement' },
   Wmo306: {
-    title: 'WMO-No. 306, Manual on Codes, FM 15 METAR, regulations 15.5 (wind) and 15.11 (temperature)',
+    title:
+      'WMO-No. 306, Manual on Codes, FM 15 METAR, regulations 15.5 (wind), 15.11 (temperature) and 15.12 (pressure)',
     status: 'read',
   },
+  Afman15s111: { title: 'AFMAN 15-111, Surface Weather Observations, 2019, 3.10 (altimeter setting)', status: 'read' },
+  FaaJo7900: {
+    title: 'FAA Order JO 7900.5, Surface Weather Observing, remarks of temperature in tenths',
+    status: 'memory',
+  },
+  Rfc3339: { title: 'RFC 3339, Date and Time on the Internet: Timestamps, 2002', status: 'memory' },
   Cfr25s1501: { title: '14 CFR 25.1501 and 23.1501, operating limitations', status: 'memory' },
   Cfr23s51: { title: '14 CFR 23.51 at amendments 23-50 to 23-62, takeoff speeds', status: 'read' },
   Cfr23s73: { title: '14 CFR 23.73 at amendments 23-50 to 23-62, reference landing approach speed', status: 'read' },

@@ -183,5 +183,7 @@ export type Wind =
       readonly gust?: number;
       readonly variable?: { readonly from: number; readonly to: number };
     }
+  /** from any direction, as a report's VRB */
+  | { readonly kind: 'variable'; readonly speed: number; readonly gust?: number }
   | { readonly kind: 'components'; readonly headwind: number; readonly crosswind?: number }
   | { readonly kind: 'calm' };

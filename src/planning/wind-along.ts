@@ -23,7 +23,7 @@ type Components = WindResolved & { readonly variable?: boolean };
  * Components of the reported wind along and across the direction of movement.
  *
  * Directions are brought to one north first: magnetic = true - variation, east positive. Of a variable direction the least
- * headwind and the greatest crosswind in the sector are taken.
+ * headwind and the greatest crosswind in the sector are taken; of a wind from any direction the full speed as either.
  *
  * @param runway - direction [rad] and its reference
  * @param wind - as reported
@@ -38,6 +38,7 @@ export function windAlong(
   if (wind.kind === 'components') {
     return { headwind: wind.headwind, ...(wind.crosswind === undefined ? {} : { crosswind: wind.crosswind }) };
   }
+  if (wind.kind === 'variable') return allRound(wind);
   const turn = turnTo(runway, wind.fromReference);
   if (turn === undefined) {
     return {
@@ -51,6 +52,12 @@ export function windAlong(
   if (wind.gust === undefined) return components;
   const { headwind, crosswind } = resolved(wind, turn, wind.gust, runway.direction);
   return { ...components, gust: { speed: wind.gust, mean: wind.speed, headwind, crosswind } };
+}
+
+function allRound({ speed, gust }: Extract<Wind, { kind: 'variable' }>): WindAlong {
+  const components = { headwind: 0 - speed, crosswind: speed, variable: true };
+  if (gust === undefined) return components;
+  return { ...components, gust: { speed: gust, mean: speed, headwind: 0 - gust, crosswind: gust } };
 }
 
 function resolved(wind: ReportedWind, turn: number, speed: number, direction: number): Components {

@@ -10,6 +10,7 @@ const table: Record<string, readonly string[]> = {
   http: ['catalogue', 'contract', 'planning', 'numerics'],
   catalogue: ['contract', 'planning', 'performance'],
   contract: ['planning', 'performance', 'physics', 'numerics', 'units', 'references'],
+  weather: ['planning', 'performance', 'units'],
   planning: ['performance', 'physics', 'numerics', 'units', 'references'],
   performance: ['physics', 'numerics', 'references'],
   physics: ['numerics', 'units', 'references'],

@@ -55,6 +55,15 @@ export function windLines(sheet: Worksheet, { weather: { wind }, runway }: Quest
         shownAs: speed,
       });
     } else sheet.formula({ ...along, formula: `W*cos(${angle})`, source: 'Phak', shownAs: speed });
+  } else if (wind.kind === 'variable') {
+    sheet.stated({ symbol: 'W', name: 'wind speed', value: wind.speed, unit: 'm/s', at: '/weather/wind/speed' });
+    sheet.formula({
+      ...along,
+      name: `${along.name}: a wind from any direction is counted as a tailwind`,
+      formula: '-W',
+      source: 'Judgement',
+      shownAs: speed,
+    });
   } else {
     sheet.stated({ ...along, at: wind.kind === 'calm' ? '/weather/wind' : '/weather/wind/headwind' });
   }
