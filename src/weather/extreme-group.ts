@@ -3,10 +3,10 @@ import { checkedDayTime } from './day-time.ts';
 import type { ForecastExtreme } from './forecast.ts';
 import { groupFault, isReportFault, type ReportFault } from './report-fault.ts';
 import type { Token } from './report-text.ts';
+import { temperatureFault } from './temperature-group.ts';
 
 const form = /^T([XN])(M?)(\d{2})\/(\d{2})(\d{2})Z$/;
 const meant = /^T[XN]?M?\d+\/\d+Z?$/;
-const [coldest, warmest] = [-60, 60];
 
 /** A highest or lowest temperature such as TX25/0114Z or TNM02/0205Z; undefined where the group is not one. */
 export function readExtreme(token: Token): ForecastExtreme | ReportFault | undefined {
@@ -24,9 +24,8 @@ export function readExtreme(token: Token): ForecastExtreme | ReportFault | undef
   const at = checkedDayTime(token, Number(found[4]), Number(found[5]), 0);
   if (isReportFault(at)) return at;
   const [minus, degrees] = [found[2] === 'M', Number(found[3])];
-  if ((minus && -degrees < coldest) || (!minus && degrees > warmest)) {
-    return groupFault(token, 'out-of-range', `has ${minus ? '-' : ''}${degrees} degC`, `${coldest} to ${warmest} degC`);
-  }
+  const fault = temperatureFault(token, minus ? -degrees : degrees);
+  if (fault !== undefined) return fault;
   const kind = found[1] === 'X' ? 'highest' : 'lowest';
   return { kind, temperature: codedTemperature(degrees, minus), at };
 }

@@ -55,6 +55,8 @@ export function readBody(tokens: readonly Token[], first: number): Body {
       told.set('wind', token.text);
       return 'wind';
     }
+    const kept = keptAs(token.text, tokens[next + 1]?.text);
+    if (kept !== undefined) return inTurn(skyward.has(kept) ? 'sky' : 'supplement') ? kept : 'not-understood';
     const sector = readSector(token);
     if (sector !== undefined) {
       if (isReportFault(sector)) return sector;
@@ -90,9 +92,7 @@ export function readBody(tokens: readonly Token[], first: number): Body {
       runwayStates.push(state);
       return 'runway-state';
     }
-    const kept = keptAs(token.text, tokens[next + 1]?.text);
-    if (kept === undefined) return timeForm.test(token.text) ? several(token) : 'not-understood';
-    return inTurn(skyward.has(kept) ? 'sky' : 'supplement') ? kept : 'not-understood';
+    return timeForm.test(token.text) ? several(token) : 'not-understood';
   };
 
   while (next < tokens.length) {

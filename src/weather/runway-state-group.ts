@@ -39,12 +39,13 @@ const extents: Readonly<Record<string, number>> = { 1: 0.1, 2: 0.25, 5: 0.5, 9: 
 
 const stateForm = /^R(\d{2}[LCR]?)\/(?:([\d/])([\d/])(\d\d|\/\/)(\d\d|\/\/)|(CLRD)(?:\d\d|\/\/))$/;
 const oldForm = /^(\d{2})([\d/])([\d/])(\d\d|\/\/)(\d\d|\/\/)$/;
-const snowForm = /^(?:R\/)?SNOCLO$/;
+const snowForm = /^(?:R(\d{2}[LCR]?)?\/)?SNOCLO$/;
 const codesForm = /^R(\d{2}[LCR]?)\/([0-6])\/([0-6])\/([0-6])$/;
 
 /** The state of a runway; undefined where the group does not tell one. */
 export function readRunwayState(token: Token): RunwayState | ReportFault | undefined {
-  if (snowForm.test(token.text)) return { runway: 'all', closedBySnow: true };
+  const snow = snowForm.exec(token.text);
+  if (snow !== null) return designated(token, snow[1] ?? '88', { closedBySnow: true });
   const codes = codesForm.exec(token.text);
   if (codes !== null) {
     const [, runway, first, middle, last] = codes as unknown as [string, string, string, string, string];

@@ -11,6 +11,7 @@ export interface ReportedTemperatures {
 const form = /^(M?\d{2}|\/\/|XX)\/(M?\d{2}|\/\/|XX)?$/;
 const meant = /^[M+-]?[\dO]{1,3}(?:[.,]\d)?\/[M+-]?[\dO.,/]{0,4}$/;
 const tenthsForm = /^T([01])(\d{3})(?:([01])(\d{3}))?$/;
+/** Temperatures that are read [degC]; beyond them is a slip. @see references.Judgement */
 const [coldest, warmest] = [-60, 60];
 
 /**
@@ -40,6 +41,12 @@ export function readTenths(token: Token): ReportedTemperatures | ReportFault | u
   return checked(token, tenth(found[1], found[2]), tenth(found[3], found[4]));
 }
 
+/** The fault of a temperature [degC] beyond those that are read; undefined where there is none. */
+export function temperatureFault(token: Token, degrees: number): ReportFault | undefined {
+  if (degrees >= coldest && degrees <= warmest) return undefined;
+  return groupFault(token, 'out-of-range', `has ${degrees} degC`, `${coldest} to ${warmest} degC`);
+}
+
 interface Reading {
   readonly degrees: number;
   readonly coded: Coded;
@@ -51,9 +58,8 @@ function checked(
   dewPoint: Reading | undefined,
 ): ReportedTemperatures | ReportFault {
   for (const reading of [temperature, dewPoint]) {
-    if (reading !== undefined && (reading.degrees < coldest || reading.degrees > warmest)) {
-      return groupFault(token, 'out-of-range', `has ${reading.degrees} degC`, `${coldest} to ${warmest} degC`);
-    }
+    const fault = reading === undefined ? undefined : temperatureFault(token, reading.degrees);
+    if (fault !== undefined) return fault;
   }
   if (temperature !== undefined && dewPoint !== undefined && dewPoint.degrees > temperature.degrees) {
     return groupFault(

@@ -20,6 +20,16 @@ describe('the wind along the runway', () => {
     expect(found(runway, { kind: 'components', headwind: -3 })).toEqual({ headwind: -3 });
     expect(found(runway, { kind: 'components', headwind: 3, crosswind: 2 })).toEqual({ headwind: 3, crosswind: 2 });
   });
+  it('counts a wind from any direction as a tailwind and a crosswind of the full speed, whatever the norths', () => {
+    const magnetic = { direction: rad(70), directionReference: 'magnetic' } as const;
+    expect(found(magnetic, { kind: 'variable', speed: 3 })).toEqual({ headwind: -3, crosswind: 3, variable: true });
+    expect(found(magnetic, { kind: 'variable', speed: 8, gust: 14 }).gust).toEqual({
+      speed: 14,
+      mean: 8,
+      headwind: -14,
+      crosswind: 14,
+    });
+  });
   it('turns a true wind to a magnetic runway by the variation, east positive', () => {
     const magnetic = { direction: rad(70), directionReference: 'magnetic', magneticVariation: rad(10) } as const;
     expectNear(found(magnetic, from(80, 10)).headwind, 10, 1e-12);

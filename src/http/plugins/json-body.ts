@@ -2,7 +2,7 @@ import type { FastifyInstance, FastifyReply, FastifyRequest } from 'fastify';
 import { problemOf } from '../../contract/problem.ts';
 import { sendProblem } from '../problems.ts';
 
-const jsonMediaType = /^application\/json[ \t]*(?:;[ \t]*charset[ \t]*=[ \t]*(?:utf-8|"utf-8")[ \t]*)?;?[ \t]*$/i;
+const jsonMediaType = /^application\/json(?:[ \t]*;[ \t]*charset[ \t]*=[ \t]*(?:utf-8|"utf-8"))?(?:[ \t]*;)?[ \t]*$/i;
 
 /** The one parser of the house: it hands the bytes on as they came. */
 export function jsonBody(app: FastifyInstance): void {

@@ -59,7 +59,7 @@ export function windLines(sheet: Worksheet, { weather: { wind }, runway }: Quest
     sheet.stated({ symbol: 'W', name: 'wind speed', value: wind.speed, unit: 'm/s', at: '/weather/wind/speed' });
     sheet.formula({
       ...along,
-      name: `${along.name}: a wind from any direction is counted as a tailwind`,
+      name: `${along.name}: from any direction counts as a tailwind`,
       formula: '-W',
       source: 'Judgement',
       shownAs: speed,
