@@ -3,7 +3,7 @@ import type { ReadAs, ReadGroup } from './observation.ts';
 import { narrowed, readQnh } from './pressure-group.ts';
 import type { BodyFigures } from './read-remarks.ts';
 import { groupFault, isReportFault, type ReportFault } from './report-fault.ts';
-import { several, type Token } from './report-text.ts';
+import { issueTime, several, type Token } from './report-text.ts';
 import { type RunwayState, readRunwayState } from './runway-state-group.ts';
 import { readTemperatures } from './temperature-group.ts';
 import { type ReportedWind, readSector, readWind, type WindSector } from './wind-group.ts';
@@ -24,7 +24,6 @@ const turns = ['wind', 'sector', 'sky', 'temperature', 'pressure', 'supplement']
 type Turn = (typeof turns)[number];
 
 const bodyEnd = /^(?:RMK|NOSIG|BECMG|TEMPO|INTER|PROB\d{2})$/;
-const timeForm = /^\d{6}Z$/;
 
 /** The groups from the heading to the trend or the remarks, each in its turn. */
 export function readBody(tokens: readonly Token[], first: number): Body {
@@ -92,7 +91,7 @@ export function readBody(tokens: readonly Token[], first: number): Body {
       runwayStates.push(state);
       return 'runway-state';
     }
-    return timeForm.test(token.text) ? several(token) : 'not-understood';
+    return issueTime.test(token.text) ? several(token) : 'not-understood';
   };
 
   while (next < tokens.length) {

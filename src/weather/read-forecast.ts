@@ -5,7 +5,7 @@ import { keptAs } from './kept-group.ts';
 import type { ReadAs, ReadGroup } from './observation.ts';
 import { endOf, type Heading, readHeading } from './read-heading.ts';
 import { groupFault, isReportFault, missingGroup, type ReportFault, type ReportRefused } from './report-fault.ts';
-import { several, type Token, tokensOf } from './report-text.ts';
+import { issueTime, several, type Token, tokensOf } from './report-text.ts';
 import { type ReportedWind, readSector, readWind } from './wind-group.ts';
 
 /**
@@ -90,7 +90,7 @@ function readMember(token: Token, following: Token | undefined, parts: Parts): R
     parts.cancelled = true;
     return 'cancelled';
   }
-  if (/^\d{6}Z$/.test(token.text)) return several(token);
+  if (issueTime.test(token.text)) return several(token);
   const kept = keptAs(token.text, following?.text);
   if (kept !== undefined) return kept;
   const extreme = readExtreme(token);

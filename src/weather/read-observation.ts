@@ -3,7 +3,7 @@ import { readBody } from './read-body.ts';
 import { readHeading } from './read-heading.ts';
 import { narrowedByRemarks } from './read-remarks.ts';
 import { groupFault, type ReportRefused } from './report-fault.ts';
-import { type Token, tokensOf } from './report-text.ts';
+import { issueTime, several, type Token, tokensOf } from './report-text.ts';
 
 /**
  * A METAR or SPECI as an observation.
@@ -30,7 +30,8 @@ export function readObservation(report: string): Observation | ReportRefused {
   const body = readBody(tokens, heading.next);
   const { trend, remarks } = trendAndRemarks(tokens.slice(body.next));
   const { figures, faults } = narrowedByRemarks(body.figures, remarks);
-  const refused = [...body.faults, ...faults];
+  const second = trend.filter(({ text }) => issueTime.test(text)).map(several);
+  const refused = [...body.faults, ...second, ...faults];
   if (refused.length > 0) return { refused };
   return {
     kind,

@@ -31,6 +31,9 @@ export function tokensOf(report: string): readonly Token[] | ReportRefused {
   return again === undefined ? tokens : { refused: [several(again)] };
 }
 
+/** A day and time: outside remarks a second one is that of a second report. */
+export const issueTime = /^\d{6}Z$/;
+
 /** The fault of a second report in the same text. */
 export function several(token: Token): ReportFault {
   return groupFault(

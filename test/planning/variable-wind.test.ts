@@ -15,7 +15,7 @@ describe('a takeoff in a wind from any direction', () => {
   });
 
   it('says the tailwind, that it varies, and the gusts', () => {
-    const codes = answer.advisory.cautions.map(({ code }) => code);
+    const codes = answer.cautions.map(({ code }) => code);
     expect(codes).toEqual(expect.arrayContaining(['tailwind', 'wind-variable', 'gust-not-credited']));
   });
 

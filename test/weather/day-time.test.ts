@@ -15,6 +15,7 @@ describe('a day without a month', () => {
     [29, 12, 0, '2027-02-27T12:00:00Z', '2027-01-29T12:00:00Z'],
     [29, 12, 0, '2027-02-28T12:00:00Z', '2027-03-29T12:00:00Z'],
     [29, 12, 0, '2028-03-01T00:00:00Z', '2028-02-29T12:00:00Z'],
+    [1, 0, 0, '2026-11-16T00:00:00Z', '2026-11-01T00:00:00Z'],
     [31, 24, 0, '2027-01-01T00:00:00Z', '2027-01-01T00:00:00Z'],
   ])('day %d, %d:%d near %s is %s', (day, hour, minute, near, expected) => {
     expect(instantText(instantNear({ day, hour, minute }, at(near)))).toBe(expected);

@@ -100,6 +100,7 @@ export const malformed: readonly Malformed[] = [
   { report: `${body} METAR ZZAB 011250Z 09005KT 9999 20/10 Q1011`, faults: [['exactly-one-of', 44, 'METAR']] },
   { report: `${body}= ZZAB 011250Z 09005KT 9999 20/10 Q1011=`, faults: [['exactly-one-of', 45, 'ZZAB']] },
   { report: `${body} ZZAB 011320Z`, faults: [['exactly-one-of', 49, '011320Z']] },
+  { report: `${body} NOSIG ZZAB 011320Z 09005KT 20/10 Q1011`, faults: [['exactly-one-of', 55, '011320Z']] },
   { report: `${body} TAF ZZAA 011100Z 0112/0212 27010KT`, faults: [['exactly-one-of', 44, 'TAF']] },
   { report: 'TAF ZZAA 011100Z 0112/0212 27010KT CAVOK', faults: [['unreadable', 0, 'TAF']] },
   { report: `${body}\nNOSIG`, faults: [['unreadable', 43, '']] },
