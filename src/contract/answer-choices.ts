@@ -16,7 +16,7 @@ import { toLandingQuestion } from './to-landing-question.ts';
 import { toLandingResponse } from './to-landing-response.ts';
 import { toQuestion } from './to-question.ts';
 import { toResponse } from './to-response.ts';
-import { withKnownRunway } from './with-known-runway.ts';
+import { wholeRequest } from './whole-request.ts';
 
 /** The ways to take off, each asked as a takeoff of its own, best first. */
 export function answerTakeoffChoices(
@@ -30,7 +30,7 @@ export function answerTakeoffChoices(
     const answer = planTakeoff(question);
     return isRefused(answer)
       ? answer
-      : { answer, response: toResponse(answer, withKnownRunway(one, lookup.aerodromes, 'takeoff'), question, stamp) };
+      : { answer, response: toResponse(answer, wholeRequest(one, lookup.aerodromes, 'takeoff'), question, stamp) };
   });
   return isRefused(answered) ? answered : together(request, answered);
 }
@@ -49,7 +49,7 @@ export function answerLandingChoices(
       ? answer
       : {
           answer,
-          response: toLandingResponse(answer, withKnownRunway(one, lookup.aerodromes, 'landing'), question, stamp),
+          response: toLandingResponse(answer, wholeRequest(one, lookup.aerodromes, 'landing'), question, stamp),
         };
   });
   return isRefused(answered) ? answered : together(request, answered);

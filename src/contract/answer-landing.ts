@@ -7,7 +7,7 @@ import type { LandingResponse } from './landing-response.ts';
 import type { Stamp } from './to-basis.ts';
 import { toLandingQuestion } from './to-landing-question.ts';
 import { toLandingResponse } from './to-landing-response.ts';
-import { withKnownRunway } from './with-known-runway.ts';
+import { wholeRequest } from './whole-request.ts';
 
 /** A landing from gate to gate: the request as a question, the plan, the answer as a response. */
 export function answerLanding(
@@ -21,5 +21,5 @@ export function answerLanding(
   if (isRefused(answer)) return answer;
   const { detail } = request;
   const whole = detail === undefined ? answer : { ...answer, detail: landingDetail(question, answer, detail) };
-  return toLandingResponse(whole, withKnownRunway(request, lookup.aerodromes, 'landing'), question, stamp);
+  return toLandingResponse(whole, wholeRequest(request, lookup.aerodromes, 'landing'), question, stamp);
 }

@@ -7,7 +7,7 @@ import type { TakeoffResponse } from './takeoff-response.ts';
 import type { Stamp } from './to-basis.ts';
 import { toQuestion } from './to-question.ts';
 import { toResponse } from './to-response.ts';
-import { withKnownRunway } from './with-known-runway.ts';
+import { wholeRequest } from './whole-request.ts';
 
 /** A takeoff from gate to gate: the request as a question, the plan, the answer as a response. */
 export function answerTakeoff(
@@ -21,5 +21,5 @@ export function answerTakeoff(
   if (isRefused(answer)) return answer;
   const { detail } = request;
   const whole = detail === undefined ? answer : { ...answer, detail: takeoffDetail(question, answer, detail) };
-  return toResponse(whole, withKnownRunway(request, lookup.aerodromes, 'takeoff'), question, stamp);
+  return toResponse(whole, wholeRequest(request, lookup.aerodromes, 'takeoff'), question, stamp);
 }

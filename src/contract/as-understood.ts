@@ -5,13 +5,13 @@ import type { Draft } from './present.ts';
 import { defaultRounding, defaultUnits } from './question-frame.ts';
 import type { TakeoffRequest } from './takeoff-request.ts';
 import type { TakeoffQuestion } from './takeoff-response.ts';
-import type { WithKnownRunway } from './with-known-runway.ts';
+import type { Whole } from './whole-request.ts';
 
 /** The request with what was filled in, in the order of its schema; it can be sent again as it stands. */
-export function asUnderstood(request: WithKnownRunway<TakeoffRequest>, known: Chosen): TakeoffQuestion;
-export function asUnderstood(request: WithKnownRunway<LandingRequest>, known: Chosen): LandingQuestion;
+export function asUnderstood(request: Whole<TakeoffRequest>, known: Chosen): TakeoffQuestion;
+export function asUnderstood(request: Whole<LandingRequest>, known: Chosen): LandingQuestion;
 export function asUnderstood(
-  request: WithKnownRunway<TakeoffRequest> | WithKnownRunway<LandingRequest>,
+  request: Whole<TakeoffRequest> | Whole<LandingRequest>,
   known: Chosen,
 ): TakeoffQuestion | LandingQuestion {
   const {
@@ -19,6 +19,8 @@ export function asUnderstood(
     asOf,
     procedure,
     stage,
+    method,
+    edges,
     detail,
     select,
     units = defaultUnits,
@@ -31,10 +33,13 @@ export function asUnderstood(
   question.mass = request.mass;
   question.configuration = request.configuration;
   question.runway = request.runway;
-  question.weather = request.weather;
+  const { weather } = request.known;
+  question.weather = 'report' in request.weather ? { report: request.weather.report, ...weather } : weather;
   if (procedure !== undefined) question.procedure = procedure;
   question.ruleSet = request.ruleSet;
   if (stage !== undefined) question.stage = stage;
+  if (method !== undefined) question.method = method;
+  if (edges !== undefined) question.edges = edges;
   question.units = units;
   question.rounding = rounding;
   if (detail !== undefined) question.detail = detail;

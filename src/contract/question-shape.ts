@@ -6,7 +6,7 @@ import { asOf, edges, method, reference, rounding, select, units } from './quest
 import { ruleSetChoice } from './rule-set-choice.ts';
 import { runwayChoice } from './runway-choice.ts';
 import { id } from './text.ts';
-import { weather } from './weather.ts';
+import { weatherChoice } from './weather.ts';
 
 /** The members of a question of a field length, in the order in which it is read. */
 export function questionShape<Procedure extends z.ZodType>(phase: 'takeoff' | 'landing', procedure: Procedure) {
@@ -17,7 +17,7 @@ export function questionShape<Procedure extends z.ZodType>(phase: 'takeoff' | 'l
     mass: mass.meta({ description: `${phase === 'takeoff' ? 'Takeoff' : 'Landing'} mass.` }),
     configuration: id.meta({ description: `One of the aeroplane's ${phase} configurations.` }),
     runway: runwayChoice,
-    weather,
+    weather: weatherChoice,
     procedure: z.exactOptional(procedure),
     ruleSet: ruleSetChoice,
     stage: z

@@ -19,9 +19,10 @@ import { selectFaults } from './selection/select-faults.ts';
 import type { TakeoffRequest } from './takeoff-request.ts';
 import { takeoffResponse } from './takeoff-response.ts';
 import { aeroplaneAt } from './to-known-aeroplane.ts';
+import type { KnownWeather } from './to-known-weather.ts';
 import { toRunway } from './to-runway.ts';
 import { toWeather } from './to-weather.ts';
-import type { WithKnownRunway } from './with-known-runway.ts';
+import type { Whole } from './whole-request.ts';
 
 /** What a takeoff and a landing are asked alike. */
 export type CommonRequest = Omit<TakeoffRequest, 'procedure'> & Omit<LandingRequest, 'procedure'>;
@@ -30,12 +31,14 @@ export type CommonRequest = Omit<TakeoffRequest, 'procedure'> & Omit<LandingRequ
  * Faults of meaning in what a takeoff and a landing are asked alike.
  *
  * @param runway - whole, or what was not found of it
+ * @param weather - whole, or the faults of its report
  * @param known - the aeroplane, or its own faults
  * @param phase - what the configuration must be for, and which declared distances count
  */
 export function commonFaults(
   request: CommonRequest,
   runway: RunwayOnWire | Fault[],
+  weather: KnownWeather | Fault[],
   known: KnownAeroplane | Fault[],
   phase: 'takeoff' | 'landing',
 ): Fault[] {
@@ -46,16 +49,17 @@ export function commonFaults(
           ...checkConfigurationId(request.configuration, known.aeroplane, phase),
         ]
       : known),
-    ...(Array.isArray(runway)
-      ? [...runway, ...checkAir(request.weather, undefined)]
-      : [
-          ...checkRunway(runway, phase),
-          ...checkAir(request.weather, runway.elevation),
-          ...checkWind(request.weather.wind, runway),
-        ]),
+    ...(Array.isArray(runway) ? runway : checkRunway(runway, phase)),
+    ...weatherFaults(weather, Array.isArray(runway) ? undefined : runway),
     ...checkRuleSet(request.ruleSet),
     ...selectFaults(request.select ?? [], phase === 'takeoff' ? takeoffResponse : landingResponse, request.detail),
   ];
+}
+
+function weatherFaults(weather: KnownWeather | Fault[], runway: RunwayOnWire | undefined): Fault[] {
+  if (Array.isArray(weather)) return weather;
+  const air = checkAir(weather.weather, runway?.elevation);
+  return runway === undefined ? air : [...air, ...checkWind(weather.weather.wind, runway)];
 }
 
 /** What a procedure is checked against. */
@@ -65,7 +69,7 @@ export function asked({ aeroplane, configuration }: CommonRequest, known: KnownA
 
 /** What a takeoff and a landing share, in SI. */
 export function toCommonQuestion(
-  request: WithKnownRunway<CommonRequest>,
+  request: Whole<CommonRequest>,
   known: KnownAeroplane,
   phase: 'takeoff' | 'landing',
 ): Question {
@@ -77,7 +81,8 @@ export function toCommonQuestion(
     mass: si('mass', request.mass),
     configuration: request.configuration,
     runway: toRunway(request.runway, phase),
-    weather: toWeather(request.weather),
+    weather: toWeather(request.known.weather),
+    ...(request.known.report === undefined ? {} : { report: request.known.report }),
     ...toRuleSet(request.ruleSet),
     ...(request.stage === undefined ? {} : { stage: request.stage }),
     ...(request.method === undefined ? {} : { method: request.method }),

@@ -10,6 +10,7 @@ import { si } from './quantity.ts';
 import { asked, commonFaults, toCommonQuestion } from './to-common-question.ts';
 import { toKnownAeroplane } from './to-known-aeroplane.ts';
 import { toKnownRunway } from './to-known-runway.ts';
+import { toKnownWeather } from './to-known-weather.ts';
 
 /**
  * The gate in: a landing request as planning's question, in SI.
@@ -20,12 +21,13 @@ import { toKnownRunway } from './to-known-runway.ts';
 export function toLandingQuestion(request: LandingRequest, lookup: CatalogueLookup): LandingQuestion | Refused {
   const known = toKnownAeroplane(request.aeroplane, lookup);
   const runway = toKnownRunway(request.runway, lookup.aerodromes, 'landing');
-  const faults = commonFaults(request, runway, known, 'landing');
-  if (Array.isArray(runway) || !('aeroplane' in known)) return { refused: faults };
+  const weather = toKnownWeather(request.weather, request.asOf);
+  const faults = commonFaults(request, runway, weather, known, 'landing');
+  if (Array.isArray(runway) || Array.isArray(weather) || !('aeroplane' in known)) return { refused: faults };
   const procedure = request.procedure && toLandingProcedure(request.procedure);
   if (procedure !== undefined) faults.push(...landingProcedureFaults({ ...asked(request, known), procedure }));
   if (faults.length > 0) return { refused: faults };
-  const common = toCommonQuestion({ ...request, runway }, known, 'landing');
+  const common = toCommonQuestion({ ...request, runway, known: weather }, known, 'landing');
   const question = { ...common, defaulted: [...common.defaulted, ...defaultedProcedure(known.aeroplane, procedure)] };
   return procedure === undefined ? question : { ...question, procedure };
 }

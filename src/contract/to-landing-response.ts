@@ -14,7 +14,7 @@ import { type Stamp, toBasis, toContribution } from './to-basis.ts';
 import { toSensitivities, toTrajectory, toWorking } from './to-detail.ts';
 import { toShortfall } from './to-shortfall.ts';
 import { toSpeedSet } from './to-speed-set.ts';
-import type { WithKnownRunway } from './with-known-runway.ts';
+import type { Whole } from './whole-request.ts';
 
 /**
  * The gate out: planning's answer to a landing in the units asked for, rounded the safe way, in the order of the contract.
@@ -26,7 +26,7 @@ import type { WithKnownRunway } from './with-known-runway.ts';
  */
 export function toLandingResponse(
   answer: LandingAnswer,
-  request: WithKnownRunway<LandingRequest>,
+  request: Whole<LandingRequest>,
   question: Question,
   stamp: Stamp,
 ): LandingResponse {

@@ -7,6 +7,7 @@ import type { TakeoffRequest } from './takeoff-request.ts';
 import { asked, commonFaults, toCommonQuestion } from './to-common-question.ts';
 import { toKnownAeroplane } from './to-known-aeroplane.ts';
 import { toKnownRunway } from './to-known-runway.ts';
+import { toKnownWeather } from './to-known-weather.ts';
 
 /**
  * The gate in: a takeoff request as planning's question, in SI.
@@ -17,12 +18,13 @@ import { toKnownRunway } from './to-known-runway.ts';
 export function toQuestion(request: TakeoffRequest, lookup: CatalogueLookup): TakeoffQuestion | Refused {
   const known = toKnownAeroplane(request.aeroplane, lookup);
   const runway = toKnownRunway(request.runway, lookup.aerodromes, 'takeoff');
-  const faults = commonFaults(request, runway, known, 'takeoff');
-  if (Array.isArray(runway) || !('aeroplane' in known)) return { refused: faults };
+  const weather = toKnownWeather(request.weather, request.asOf);
+  const faults = commonFaults(request, runway, weather, known, 'takeoff');
+  if (Array.isArray(runway) || Array.isArray(weather) || !('aeroplane' in known)) return { refused: faults };
   const { procedure, decisionSpeed } = request;
   if (procedure !== undefined) faults.push(...takeoffProcedureFaults({ ...asked(request, known), procedure }));
   if (faults.length > 0) return { refused: faults };
-  const common = toCommonQuestion({ ...request, runway }, known, 'takeoff');
+  const common = toCommonQuestion({ ...request, runway, known: weather }, known, 'takeoff');
   const question = { ...common, defaulted: [...common.defaulted, ...defaultedProcedure(procedure)] };
   return {
     ...question,

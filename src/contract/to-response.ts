@@ -16,19 +16,19 @@ import { toDecisionSpeed, toEngineOut } from './to-engine-out.ts';
 import { toObstaclePath } from './to-obstacle-path.ts';
 import { toShortfall } from './to-shortfall.ts';
 import { toSpeedSet } from './to-speed-set.ts';
-import type { WithKnownRunway } from './with-known-runway.ts';
+import type { Whole } from './whole-request.ts';
 
 /**
  * The gate out: planning's answer to a takeoff in the units asked for, rounded the safe way, in the order of the contract.
  *
  * Distances go up, the lower end of a band down, what is available and spare down, all else to the nearest step.
  *
- * @param request - as read, its runway whole
+ * @param request - as read, its runway and its weather whole
  * @param question - what the gate in made of it
  */
 export function toResponse(
   answer: TakeoffAnswer,
-  request: WithKnownRunway<TakeoffRequest>,
+  request: Whole<TakeoffRequest>,
   question: Question,
   stamp: Stamp,
 ): TakeoffResponse {

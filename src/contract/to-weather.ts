@@ -15,6 +15,16 @@ export function toWeather(given: WeatherOnWire): Weather {
   return weather;
 }
 
+/** What of the weather is given beside a report, in SI. */
+export function toGivenWeather(given: Partial<WeatherOnWire>): Partial<Weather> {
+  const beside: Draft<Partial<Weather>> = {};
+  if (given.temperature !== undefined) beside.temperature = si('temperature', given.temperature);
+  if (given.dewPoint !== undefined) beside.dewPoint = si('temperature', given.dewPoint);
+  if (given.pressure !== undefined) beside.pressure = toPressure(given.pressure);
+  if (given.wind !== undefined) beside.wind = toWind(given.wind);
+  return beside;
+}
+
 /** The air in SI. */
 export function toAirReport({ temperature, dewPoint, pressure }: StillWeatherOnWire): AirReport {
   const report: Draft<AirReport> = { temperature: si('temperature', temperature), pressure: toPressure(pressure) };
@@ -47,7 +57,13 @@ function toWind(given: WindOnWire): Wind {
     if (given.crosswind !== undefined) wind.crosswind = si('speed', given.crosswind);
     return wind;
   }
-  const { gust, variable } = given;
+  const { gust } = given;
+  if (given.from === 'variable') {
+    const wind: Draft<Extract<Wind, { kind: 'variable' }>> = { kind: 'variable', speed: si('speed', given.speed) };
+    if (gust !== undefined) wind.gust = si('speed', gust);
+    return wind;
+  }
+  const { variable } = given;
   const wind: Draft<Extract<Wind, { kind: 'from' }>> = {
     kind: 'from',
     from: si('angle', given.from),

@@ -29,15 +29,22 @@ const windFrom = z.strictObject({
     .exactOptional(),
 });
 
+const windAllRound = z.strictObject({
+  from: z.literal('variable').meta({ description: 'The direction varies all round.' }),
+  speed: windSpeed.meta({ description: 'Mean speed, which may come from any side.' }),
+  gust: windSpeed.meta({ description: 'Highest speed in gusts, at least the mean.' }).exactOptional(),
+});
+
 const windComponents = z.strictObject({
   headwind,
   crosswind: windSpeed.meta({ description: 'Size of the wind across the runway, from either side.' }).exactOptional(),
 });
 
-/** Exactly one of three forms. */
-export const wind = z.union([windFrom, windComponents, z.literal('calm')]).meta({
+/** Exactly one of four forms. */
+export const wind = z.union([windFrom, windAllRound, windComponents, z.literal('calm')]).meta({
   id: 'Wind',
-  description: 'The wind in exactly one form: direction and speed, components along and across the runway, or calm.',
+  description:
+    'The wind in exactly one form: direction and speed, a speed from all round, components along and across the runway, or calm.',
 });
 
 const air = {
@@ -52,11 +59,43 @@ export const weather = z
   .strictObject({ ...air, wind })
   .meta({ id: 'Weather', description: 'The air and the wind at the aerodrome.' });
 
+/** The most characters that may be sent as a report; the report itself may be shorter, and says so. */
+const longestReport = 2048;
+
+export const reportText = z
+  .string()
+  .min(1)
+  .max(longestReport)
+  .meta({ description: 'A METAR or SPECI as received, of at most 512 characters.' });
+
+/** A report, with what stands in its place. */
+export const weatherByReport = z
+  .strictObject({
+    report: reportText,
+    temperature: air.temperature.exactOptional(),
+    dewPoint: air.dewPoint,
+    pressure: pressure.exactOptional(),
+    wind: wind.exactOptional(),
+  })
+  .meta({
+    id: 'WeatherByReport',
+    description:
+      'A report of the weather. What is given beside it takes the place of what the report says, and is said.',
+  });
+
+/** The weather member by member, or by a report. */
+export const weatherChoice = z.union([weather, weatherByReport]).meta({
+  id: 'WeatherChoice',
+  description: 'The weather in exactly one of two forms: member by member, or a report.',
+});
+
 export const stillWeather = z
   .strictObject(air)
   .meta({ id: 'StillWeather', description: 'The air at the aerodrome, without its wind.' });
 
 export type WeatherOnWire = z.infer<typeof weather>;
+export type WeatherByReport = z.infer<typeof weatherByReport>;
+export type WeatherChoice = z.infer<typeof weatherChoice>;
 export type StillWeatherOnWire = z.infer<typeof stillWeather>;
 export type WindOnWire = z.infer<typeof wind>;
 export type PressureOnWire = z.infer<typeof pressure>;

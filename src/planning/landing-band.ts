@@ -14,6 +14,7 @@ type Changing = { -readonly [K in keyof LandingRun]: LandingRun[K] };
  * @param stated - the run as stated
  * @param result - its distances
  * @param form - what the method itself may be off, as a share of each distance
+ * @param windCoding - standard deviation of the wind along the runway from what a report rounds [m/s]; 0 without one
  * @param surface - for the uncertainty of its braking friction
  * @param densityAt - at a temperature off by the first argument [K] and a pressure off by the second [Pa]
  * @see references.Judgement for the uncertainties
@@ -23,6 +24,7 @@ export function landingBand(
   result: Parts,
   surface: Surface,
   form: number,
+  windCoding: number,
   densityAt: (temperatureOff: number, pressureOff: number) => number | undefined,
 ): Band {
   const run: Changing = { ...stated };
@@ -40,6 +42,11 @@ export function landingBand(
   parts.move('wind', (by) => {
     run.headwind -= by * u.wind;
   });
+  if (windCoding > 0) {
+    parts.move('rounding of the reported wind', (by) => {
+      run.headwind -= by * windCoding;
+    });
+  }
   parts.move('mass', (by) => {
     run.mass *= 1 + by * u.mass;
     faster(run, Math.sqrt(1 + by * u.mass));

@@ -23,6 +23,7 @@ import { sharesOf } from './manual/shares.ts';
 import { askedAsFitted } from './method.ts';
 import { prepareLanding } from './prepare-landing.ts';
 import type { LandingQuestion } from './question.ts';
+import { reportWindCoding } from './report-wind-coding.ts';
 import { resolveBraking } from './resolve-braking.ts';
 import { answerSentence } from './sentences/answer-sentence.ts';
 import { notStoppedSentence } from './sentences/not-stopped-sentence.ts';
@@ -47,6 +48,7 @@ export function planLanding(asked: LandingQuestion): LandingAnswer | Refused {
   const found = foundLanding(question, prepared, physics);
   const { methods, edge, runs, notReached, runwayFactors } = found;
   const stated = notReached === undefined ? runs.stated : undefined;
+  const windCoding = reportWindCoding(question.report, wind);
   const band =
     stated &&
     landingBand(
@@ -54,6 +56,7 @@ export function planLanding(asked: LandingQuestion): LandingAnswer | Refused {
       stated,
       runway.surface,
       found.modelForm,
+      windCoding,
       (temperatureOff, pressureOff) => airBeside(question, temperatureOff, pressureOff)?.density,
     );
   const byPhysics = stopped(physics.stated);

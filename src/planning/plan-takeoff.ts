@@ -24,6 +24,7 @@ import { obstacleCheck, obstaclePathOf } from './obstacle-path.ts';
 import { pathStart } from './path-start.ts';
 import { prepareTakeoff } from './prepare-takeoff.ts';
 import type { TakeoffQuestion } from './question.ts';
+import { reportWindCoding } from './report-wind-coding.ts';
 import { answerSentence } from './sentences/answer-sentence.ts';
 import { notReachedSentence } from './sentences/not-reached-sentence.ts';
 import { shortfalls } from './shortfalls.ts';
@@ -56,9 +57,10 @@ export function planTakeoff(asked: TakeoffQuestion): TakeoffAnswer | Refused {
   const found = foundTakeoff(question, prepared, physics);
   const { methods, edge, runs, notReached, runwayFactors } = found;
   const stated = notReached === undefined ? runs.stated : undefined;
+  const windCoding = reportWindCoding(question.report, wind);
   const band =
     stated &&
-    takeoffBand(run, stated, runway.surface, found.modelForm, (temperatureOff, pressureOff) => {
+    takeoffBand(run, stated, runway.surface, found.modelForm, windCoding, (temperatureOff, pressureOff) => {
       const beside = airBeside(question, temperatureOff, pressureOff);
       return beside && { density: beside.density, thrust: thrustIn(beside, aeroplane.propulsion, power.thrustFactor) };
     });

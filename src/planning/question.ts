@@ -19,6 +19,8 @@ export interface Question {
   readonly configuration: string;
   readonly runway: Runway;
   readonly weather: Weather;
+  /** where the weather was read from a report */
+  readonly report?: ReportRead;
   /** id of a rule set; with operator's rules the one they are based on */
   readonly ruleSet: string;
   readonly operatorRules?: OperatorRules;
@@ -165,6 +167,26 @@ export interface RunwayOnFile {
   readonly changed: readonly string[];
   /** with a named point: what is declared for the whole runway [m] */
   readonly full?: Declared;
+}
+
+/** What was read of a report of the weather. */
+export interface ReportRead {
+  readonly station: string;
+  /** [s], below 0 where it is of a later time than the question; absent where the question has no time */
+  readonly age?: number;
+  /** what the question put in place of what the report says, in words */
+  readonly replaced: readonly string[];
+  /** groups from which nothing was taken */
+  readonly notUnderstood: readonly string[];
+  /** of the runways, as the report has it */
+  readonly runwayState?: string;
+  /** how far the true values may lie from what is written: to either side, the pressure above only [K, Pa, rad, m/s] */
+  readonly rounding: {
+    readonly temperature?: number;
+    readonly pressure?: number;
+    readonly direction?: number;
+    readonly speed?: number;
+  };
 }
 
 export interface Weather {

@@ -21,6 +21,7 @@ type Changing = { -readonly [K in keyof TakeoffRun]: TakeoffRun[K] };
  * @param stated - the run as stated
  * @param result - its distances
  * @param form - what the method itself may be off, as a share of each distance
+ * @param windCoding - standard deviation of the wind along the runway from what a report rounds [m/s]; 0 without one
  * @param surface - for the uncertainty of its friction
  * @param airAt - air and thrust at a temperature off by the first argument [K] and a pressure off by the second [Pa]
  * @see references.Judgement for the uncertainties
@@ -30,6 +31,7 @@ export function takeoffBand(
   result: Parts,
   surface: Surface,
   form: number,
+  windCoding: number,
   airAt: (temperatureOff: number, pressureOff: number) => OtherAir | undefined,
 ): Band {
   const thrust = heldThrust(stated.thrust);
@@ -53,6 +55,11 @@ export function takeoffBand(
   parts.move('wind', (by) => {
     run.headwind -= by * u.wind;
   });
+  if (windCoding > 0) {
+    parts.move('rounding of the reported wind', (by) => {
+      run.headwind -= by * windCoding;
+    });
+  }
   parts.move('mass', (by) => {
     run.mass *= 1 + by * u.mass;
     faster(run, Math.sqrt(1 + by * u.mass));

@@ -6,10 +6,10 @@ import type { LandingRequest } from '../../src/contract/landing-request.ts';
 import { type LandingResponse, landingResponse } from '../../src/contract/landing-response.ts';
 import type { TakeoffRequest } from '../../src/contract/takeoff-request.ts';
 import { type TakeoffResponse, takeoffResponse } from '../../src/contract/takeoff-response.ts';
-import type { WithKnownRunway } from '../../src/contract/with-known-runway.ts';
 import { isRefused } from '../../src/planning/fault.ts';
 import { unitFamilies } from '../../src/units/presentation.ts';
 import { anyLanding, anyTakeoff, builtIn } from '../support/any-question.ts';
+import type { StatedRequest } from '../support/stated-request.ts';
 
 const stamp = { modelVersion: '1', rulesDigest: 'r' };
 const all = ['working', 'trajectory', 'sensitivities'] as const;
@@ -18,7 +18,7 @@ function answered(request: TakeoffRequest): TakeoffResponse | undefined {
   return isRefused(answer) ? undefined : answer;
 }
 
-const plain: WithKnownRunway<TakeoffRequest> = {
+const plain: StatedRequest<TakeoffRequest> = {
   aeroplane: { id: 'pellibrin-trainer' },
   mass: { value: 700, unit: 'kg' },
   configuration: 'takeoff-12',

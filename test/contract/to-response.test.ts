@@ -5,7 +5,7 @@ import { takeoffRequest } from '../../src/contract/takeoff-request.ts';
 import { type TakeoffResponse, takeoffResponse } from '../../src/contract/takeoff-response.ts';
 import { toQuestion } from '../../src/contract/to-question.ts';
 import { toResponse } from '../../src/contract/to-response.ts';
-import { withKnownRunway } from '../../src/contract/with-known-runway.ts';
+import { wholeRequest } from '../../src/contract/whole-request.ts';
 import type { TakeoffAnswer } from '../../src/planning/answer.ts';
 import { isRefused } from '../../src/planning/fault.ts';
 import { unitFamilies } from '../../src/units/presentation.ts';
@@ -23,7 +23,7 @@ function shownAs(
   const lookup = sampleLookup(sampleDefinition());
   const question = toQuestion(request, lookup);
   if (isRefused(question)) throw new Error(JSON.stringify(question));
-  return toResponse(answer, withKnownRunway(request, lookup.aerodromes, 'takeoff'), question, stamp);
+  return toResponse(answer, wholeRequest(request, lookup.aerodromes, 'takeoff'), question, stamp);
 }
 
 /** Members of the document's blocks in its order, as the contract prints them. */

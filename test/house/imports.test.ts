@@ -9,7 +9,7 @@ const table: Record<string, readonly string[]> = {
   'health-check': ['http'],
   http: ['catalogue', 'contract', 'planning', 'numerics'],
   catalogue: ['contract', 'planning', 'performance'],
-  contract: ['planning', 'performance', 'physics', 'numerics', 'units', 'references'],
+  contract: ['weather', 'planning', 'performance', 'physics', 'numerics', 'units', 'references'],
   weather: ['planning', 'performance', 'units'],
   planning: ['performance', 'physics', 'numerics', 'units', 'references'],
   performance: ['physics', 'numerics', 'references'],

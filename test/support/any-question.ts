@@ -4,9 +4,10 @@ import type { AeroplaneDefinition } from '../../src/contract/aeroplane-definitio
 import type { CatalogueLookup } from '../../src/contract/catalogue-lookup.ts';
 import type { LandingRequest } from '../../src/contract/landing-request.ts';
 import type { TakeoffRequest } from '../../src/contract/takeoff-request.ts';
-import type { WithKnownRunway } from '../../src/contract/with-known-runway.ts';
+import type { WindOnWire } from '../../src/contract/weather.ts';
 import { catalogueLookup } from '../../src/http/catalogue-lookup.ts';
 import { warmUpStates } from '../../src/http/warm-up-states.ts';
+import type { StatedRequest } from './stated-request.ts';
 
 const catalogue = readCatalogue({ builtIn: true });
 export const builtIn: CatalogueLookup = catalogueLookup(catalogue);
@@ -70,7 +71,7 @@ function calibrated(definition: AeroplaneDefinition): AeroplaneDefinition {
   };
 }
 
-const wind: fc.Arbitrary<TakeoffRequest['weather']['wind']> = fc.oneof(
+const wind: fc.Arbitrary<WindOnWire> = fc.oneof(
   fc.constant('calm' as const),
   fc.record({ headwind: q('kt', -10, 25) }),
   fc.record({ headwind: q('kt', -10, 25), crosswind: q('kt', 0, 20) }),
@@ -87,7 +88,7 @@ const wind: fc.Arbitrary<TakeoffRequest['weather']['wind']> = fc.oneof(
   }),
 );
 
-type Question = Omit<WithKnownRunway<TakeoffRequest>, 'aeroplane' | 'mass' | 'configuration' | 'procedure'>;
+type Question = Omit<StatedRequest<TakeoffRequest>, 'aeroplane' | 'mass' | 'configuration' | 'procedure'>;
 
 /** Weather, runway and rules with every choice of form. */
 const anySurroundings = (phase: 'takeoff' | 'landing'): fc.Arbitrary<Question> =>
@@ -184,7 +185,7 @@ const anyState = (phase: 'takeoff' | 'landing') =>
   });
 
 /** Takeoffs with every choice of form, of which most but not all have distances. */
-export const anyTakeoff: fc.Arbitrary<WithKnownRunway<TakeoffRequest>> = fc
+export const anyTakeoff: fc.Arbitrary<StatedRequest<TakeoffRequest>> = fc
   .tuple(anyState('takeoff'), anySurroundings('takeoff'), fc.boolean(), fc.boolean())
   .map(([{ definition, stated, asked }, surroundings, rolling, reduced]) => ({
     ...asked,
@@ -196,7 +197,7 @@ export const anyTakeoff: fc.Arbitrary<WithKnownRunway<TakeoffRequest>> = fc
   }));
 
 /** Landings with every choice of form, of which most but not all have distances. */
-export const anyLanding: fc.Arbitrary<WithKnownRunway<LandingRequest>> = fc
+export const anyLanding: fc.Arbitrary<StatedRequest<LandingRequest>> = fc
   .tuple(anyState('landing'), anySurroundings('landing'), fc.boolean(), fc.boolean())
   .map(([{ definition, stated, asked }, surroundings, flown, reverse]) => {
     const { speeds, approachAngle, freeRollTime } = stated;

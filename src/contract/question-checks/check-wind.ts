@@ -11,7 +11,7 @@ const directionStep = 10;
 export function checkWind(wind: WindOnWire, runway: RunwayOnWire): Fault[] {
   if (wind === 'calm' || 'headwind' in wind) return [];
   const faults: Fault[] = [];
-  const { gust, speed, from, variable } = wind;
+  const { gust, speed } = wind;
   if (gust !== undefined && si('speed', gust) < si('speed', speed) * (1 - 1e-9)) {
     faults.push({
       pointer: '/weather/wind/gust',
@@ -22,6 +22,8 @@ export function checkWind(wind: WindOnWire, runway: RunwayOnWire): Fault[] {
       hint: 'gust is the highest speed, not what comes on top of the mean.',
     });
   }
+  if (wind.from === 'variable') return faults;
+  const { from, variable } = wind;
   if (variable !== undefined) {
     const sector = turn(variable.from.value, variable.to.value);
     const inside = turn(variable.from.value, from.value);

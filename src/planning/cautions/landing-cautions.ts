@@ -29,6 +29,10 @@ import { pointAtFullLength } from './point-at-full-length.ts';
 import { pressureAltitudeAboveLimit } from './pressure-altitude-above-limit.ts';
 import { pressureExtreme } from './pressure-extreme.ts';
 import { referenceSpeedRaised } from './reference-speed-raised.ts';
+import { reportNotUnderstood } from './report-not-understood.ts';
+import { reportOld } from './report-old.ts';
+import { reportReplaced } from './report-replaced.ts';
+import { reportRunwayState } from './report-runway-state.ts';
 import { reverseCounted } from './reverse-counted.ts';
 import { runwayChanged } from './runway-changed.ts';
 import { slopeSteep } from './slope-steep.ts';
@@ -57,6 +61,10 @@ export const landingCautions: readonly CautionTest<LandingContext>[] = [
   tailwind,
   crosswindBeyondDemonstrated,
   windVariable,
+  reportReplaced,
+  reportOld,
+  reportNotUnderstood,
+  reportRunwayState,
   gustNotCredited,
   conditionCodeTooGood,
   hydroplaning,

@@ -33,6 +33,10 @@ import { pointAtFullLength } from './point-at-full-length.ts';
 import { pressureAltitudeAboveLimit } from './pressure-altitude-above-limit.ts';
 import { pressureExtreme } from './pressure-extreme.ts';
 import { reducedPower } from './reduced-power.ts';
+import { reportNotUnderstood } from './report-not-understood.ts';
+import { reportOld } from './report-old.ts';
+import { reportReplaced } from './report-replaced.ts';
+import { reportRunwayState } from './report-runway-state.ts';
 import { rollingStart } from './rolling-start.ts';
 import { runwayChanged } from './runway-changed.ts';
 import { screenSpeedBelowLiftOff } from './screen-speed-below-lift-off.ts';
@@ -64,6 +68,10 @@ export const takeoffCautions: readonly CautionTest<TakeoffContext>[] = [
   tailwind,
   crosswindBeyondDemonstrated,
   windVariable,
+  reportReplaced,
+  reportOld,
+  reportNotUnderstood,
+  reportRunwayState,
   gustNotCredited,
   stopNotComputed,
   conditionCodeTooGood,

@@ -97,6 +97,9 @@ const wetAt = (kind: 'paved' | 'gravel', pressure: number | undefined): LandingC
   runway: { surface: { kind, state: 'wet' } },
 });
 
+/** A report of which everything was taken. */
+const report = { station: 'ZZAB', replaced: [], notUnderstood: [], rounding: {} };
+
 interface Pair {
   readonly code: string;
   readonly severity: string;
@@ -107,6 +110,41 @@ interface Pair {
 }
 
 const pairs: readonly Pair[] = [
+  {
+    code: 'report-replaced',
+    severity: 'caution',
+    raised: { question: { report: { ...report, replaced: ['temperature 22 degC in place of 18 degC'] } } },
+    silent: { question: { report } },
+    says: /^The report of ZZAB is not taken as it stands: temperature 22 degC in place of 18 degC\. That is 1 of its figures\.$/,
+  },
+  {
+    code: 'report-old',
+    severity: 'caution',
+    raised: { question: { report: { ...report, age: 3660 } } },
+    silent: { question: { report: { ...report, age: 3600 } } },
+    says: /^The report of ZZAB is 61 min older than the time of the question\.$/,
+  },
+  {
+    code: 'report-old',
+    severity: 'caution',
+    raised: { question: { report: { ...report, age: -600 } } },
+    silent: { question: { report: { ...report, age: 0 } } },
+    says: /^The report of ZZAB is 10 min later than the time of the question\.$/,
+  },
+  {
+    code: 'report-not-understood',
+    severity: 'note',
+    raised: { question: { report: { ...report, notUnderstood: ['XYZ1'] } } },
+    silent: { question: { report } },
+    says: /^Nothing was taken from 1 group of the report of ZZAB, not understood: XYZ1\.$/,
+  },
+  {
+    code: 'report-runway-state',
+    severity: 'caution',
+    raised: { question: { report: { ...report, runwayState: 'R07/290150' } } },
+    silent: { question: { report } },
+    says: /^The report of ZZAB tells of the runways: R07\/290150\. The surface of the question is taken: paved, dry\.$/,
+  },
   {
     code: 'fit-outside-range',
     severity: 'caution',
