@@ -35,6 +35,7 @@ export function asUnderstood(
   question.runway = request.runway;
   const { weather } = request.known;
   question.weather = 'report' in request.weather ? { report: request.weather.report, ...weather } : weather;
+  if (request.hours !== undefined) question.hours = request.hours;
   if (procedure !== undefined) question.procedure = procedure;
   question.ruleSet = request.ruleSet;
   if (stage !== undefined) question.stage = stage;

@@ -24,13 +24,13 @@ const landingChoice = z
 
 /** What all choices share; the answer to a choice is short, so that there is nothing to detail or to select from. */
 function common<Shape extends TakeoffShape | LandingShape>(shape: Shape): Omit<Shape, OfOne> {
-  const { configuration: _, runway: _r, detail: _d, select: _s, ...shared } = shape;
+  const { configuration: _, runway: _r, hours: _h, detail: _d, select: _s, ...shared } = shape;
   return shared;
 }
 
 type TakeoffShape = typeof takeoffRequest.shape;
 type LandingShape = typeof landingRequest.shape;
-type OfOne = 'configuration' | 'runway' | 'detail' | 'select';
+type OfOne = 'configuration' | 'runway' | 'hours' | 'detail' | 'select';
 
 export const takeoffChoicesRequest = z
   .strictObject({ ...common(takeoffRequest.shape), choices: z.array(takeoffChoice).min(1).max(most) })

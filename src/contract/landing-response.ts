@@ -5,6 +5,7 @@ import { answerBegin, answerEnd } from './answer-shape.ts';
 import { basisOf, landingContribution } from './basis.ts';
 import { sensitivitiesOf } from './detail.ts';
 import { bandedDistance, distancesShape, method, timesShape } from './distances.ts';
+import { hourAnswer } from './hours.ts';
 import { landingRequest } from './landing-request.ts';
 import { rounding, units } from './question-frame.ts';
 import { runway } from './runway.ts';
@@ -54,6 +55,10 @@ export const landingResponse = z
       .exactOptional(),
     balkedLanding,
     ...answerEnd,
+    hours: z
+      .array(hourAnswer)
+      .meta({ description: 'The same question for each of the hours asked for.' })
+      .exactOptional(),
     sensitivities: sensitivitiesOf('landingDistance', 'LandingSensitivity').exactOptional(),
     basis: basisOf(landingContribution, 'LandingBasis'),
     question: landingQuestion,

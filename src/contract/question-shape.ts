@@ -1,6 +1,7 @@
 import { z } from 'zod';
 import { aeroplaneChoice } from './aeroplane-choice.ts';
 import { detail } from './detail.ts';
+import { hours } from './hours.ts';
 import { mass } from './quantities.ts';
 import { asOf, edges, method, reference, rounding, select, units } from './question-frame.ts';
 import { ruleSetChoice } from './rule-set-choice.ts';
@@ -18,6 +19,7 @@ export function questionShape<Procedure extends z.ZodType>(phase: 'takeoff' | 'l
     configuration: id.meta({ description: `One of the aeroplane's ${phase} configurations.` }),
     runway: runwayChoice,
     weather: weatherChoice,
+    hours: hours.exactOptional(),
     procedure: z.exactOptional(procedure),
     ruleSet: ruleSetChoice,
     stage: z

@@ -6,6 +6,7 @@ import { basisOf, takeoffContribution } from './basis.ts';
 import { sensitivitiesOf } from './detail.ts';
 import { bandedDistance, distancesShape, method, timesShape } from './distances.ts';
 import { decisionSpeed, engineOut } from './engine-out.ts';
+import { hourAnswer } from './hours.ts';
 import { obstaclePath } from './obstacle-path.ts';
 import { rounding, units } from './question-frame.ts';
 import { runway } from './runway.ts';
@@ -56,6 +57,10 @@ export const takeoffResponse = z
     engineOut: engineOut.exactOptional(),
     obstaclePath: obstaclePath.exactOptional(),
     ...answerEnd,
+    hours: z
+      .array(hourAnswer)
+      .meta({ description: 'The same question for each of the hours asked for.' })
+      .exactOptional(),
     sensitivities: sensitivitiesOf('takeoffDistance', 'TakeoffSensitivity').exactOptional(),
     basis: basisOf(takeoffContribution, 'Basis'),
     question: takeoffQuestion,

@@ -57,7 +57,8 @@ function toPressureOnWire({ value }: Weather['pressure']): PressureOnWire {
   return { qnh: inUnit('pressure', value, 'hPa') };
 }
 
-function toWindOnWire(wind: Wind): WindOnWire {
+/** A wind as a question has it, in the units of reports. */
+export function toWindOnWire(wind: Wind): WindOnWire {
   if (wind.kind === 'calm') return 'calm';
   if (wind.kind === 'components') throw new RangeError('wind of a report has no components');
   const gust = wind.gust === undefined ? {} : { gust: inUnit('speed', wind.gust, 'kt') };

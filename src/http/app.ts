@@ -19,6 +19,7 @@ import { air } from './routes/air.ts';
 import { airspeed } from './routes/airspeed.ts';
 import { landingChoices, takeoffChoices } from './routes/choices.ts';
 
+import { decode } from './routes/decode.ts';
 import { landing } from './routes/landing.ts';
 import { proof } from './routes/proof.ts';
 import { proofread } from './routes/proofread.ts';
@@ -91,6 +92,7 @@ export async function buildApp({ catalogue, logger = false, settings }: House): 
     airspeed(app, lookup, ours),
     tables(app, lookup),
     air(app, ours),
+    decode(app, ours),
     proofread(app, lookup, ours),
     proof(app, lookup, ours),
   ];
