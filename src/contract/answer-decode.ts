@@ -9,6 +9,7 @@ import { readObservation } from '../weather/read-observation.ts';
 import { isReportRefused } from '../weather/report-fault.ts';
 import { windOf } from '../weather/reported-weather.ts';
 import { presentationOf } from './assumed-presentation.ts';
+import { atText } from './at-text.ts';
 import type { DecodeRequest, DecodeResponse } from './decode.ts';
 import { type Presentation, shownQuantity } from './shown-quantity.ts';
 import { toAdvisory } from './to-advisory.ts';
@@ -21,7 +22,7 @@ export function answerDecode(request: DecodeRequest, stamp: Stamp): DecodeRespon
   const isForecast = /^TAF\b/.test(report);
   const read = isForecast ? readForecast(report) : readObservation(report);
   if (isReportRefused(read)) {
-    return { refused: read.refused.map(({ at: _, token: __, ...fault }) => ({ ...fault, pointer: '/report' })) };
+    return { refused: read.refused.map((fault) => atText(fault, '/report')) };
   }
   const how = presentationOf(request);
   const near = asOf === undefined ? undefined : readInstant(asOf);

@@ -4,7 +4,8 @@ import { forecastHours, type ListedFigure } from '../weather/forecast-hours.ts';
 import { givenHours, type Hour } from '../weather/hours.ts';
 import { type Instant, readInstant } from '../weather/instant.ts';
 import { readForecast } from '../weather/read-forecast.ts';
-import { isReportRefused, type ReportFault } from '../weather/report-fault.ts';
+import { isReportRefused } from '../weather/report-fault.ts';
+import { atText } from './at-text.ts';
 import { type HoursOnWire, mostHours } from './hours.ts';
 import { si } from './quantity.ts';
 import { checkAir } from './question-checks/check-air.ts';
@@ -30,7 +31,8 @@ export function toHours(given: HoursOnWire, weather: WeatherOnWire, runway: Runw
   const [first, last] = [momentOf(from), momentOf(to)];
   const faults = spanFaults(first, last, to);
   const forecast = readForecast(text);
-  if (isReportRefused(forecast)) return [...faults, ...forecast.refused.map(atForecast)];
+  if (isReportRefused(forecast))
+    return [...faults, ...forecast.refused.map((fault) => atText(fault, '/hours/forecast'))];
   if (faults.length > 0) return faults;
   const hours = forecastHours(forecast, {
     asOf: first,
@@ -48,7 +50,7 @@ export function toHours(given: HoursOnWire, weather: WeatherOnWire, runway: Runw
     ),
     pressure: toWeather(weather).pressure,
   });
-  return isReportRefused(hours) ? hours.refused.map(atForecast) : hours;
+  return isReportRefused(hours) ? hours.refused.map((fault) => atText(fault, '/hours/forecast')) : hours;
 }
 
 function listedFaults(listed: WeatherOnWire, runway: RunwayOnWire, index: number): Fault[] {
@@ -82,8 +84,4 @@ function momentOf(text: string): Instant {
   const moment = readInstant(text);
   if (moment === undefined) throw new RangeError(`${text} is no moment`);
   return moment;
-}
-
-function atForecast({ at: _, token: __, ...fault }: ReportFault): Fault {
-  return { ...fault, pointer: '/hours/forecast' };
 }

@@ -6,7 +6,9 @@ import { type Instant, readInstant } from '../weather/instant.ts';
 import { notUnderstood, type Observation, textOf } from '../weather/observation.ts';
 import { readObservation } from '../weather/read-observation.ts';
 import { isReportRefused, type ReportFault } from '../weather/report-fault.ts';
-import { type GivenBeside, reportedWeather } from '../weather/reported-weather.ts';
+import { type GivenBeside, reportedWeather, windOf } from '../weather/reported-weather.ts';
+import type { ReportedWind } from '../weather/wind-group.ts';
+import { atText } from './at-text.ts';
 import type { Draft } from './present.ts';
 import type { Q } from './quantity.ts';
 import { toGivenWeather } from './to-weather.ts';
@@ -43,10 +45,7 @@ export function toKnownWeather(given: WeatherChoice, asOf: string | undefined): 
   };
 }
 
-/** A fault of a report where the question has the report; its message tells the place in it. */
-export function atReport({ at: _, token: __, ...fault }: ReportFault): Fault {
-  return { ...fault, pointer: '/weather/report' };
-}
+const atReport = (fault: ReportFault) => atText(fault, '/weather/report');
 
 function dewPointOf({ dewPoint }: WeatherByReport, read: Weather): Pick<WeatherOnWire, 'dewPoint'> {
   if (dewPoint !== undefined) return { dewPoint };
@@ -87,60 +86,60 @@ function toReportRead(
   beside: GivenBeside,
   asOf: Instant | undefined,
 ): ReportRead {
-  const { temperature, dewPoint, qnh, wind, runwayStates, groups } = observation;
+  const { station, time, temperature, dewPoint, qnh, wind, runwayStates, groups } = observation;
+  const as = sameAs(observation, beside);
+  const replaced: string[] = [];
+  if (given.temperature !== undefined && temperature !== undefined && !as.temperature) {
+    replaced.push(`temperature ${written(given.temperature)} in place of ${degrees(temperature.value)}`);
+  }
+  if (given.dewPoint !== undefined && dewPoint !== undefined && !as.dewPoint) {
+    replaced.push(`dew point ${written(given.dewPoint)} in place of ${degrees(dewPoint.value)}`);
+  }
+  if (given.pressure !== undefined && qnh !== undefined && !as.pressure) {
+    replaced.push(`another pressure in place of QNH ${written(inUnit('pressure', qnh.value, 'hPa'))}`);
+  }
+  if (given.wind !== undefined && wind !== undefined && !as.wind) {
+    replaced.push(`another wind in place of ${textOf(groups, 'wind')}`);
+  }
   const read: Draft<ReportRead> = {
-    station: observation.station,
-    replaced: replacedBy(observation, given, beside),
+    station,
+    replaced,
     notUnderstood: notUnderstood(groups).map(({ token }) => token),
-    rounding: {
-      ...(beside.temperature !== undefined || temperature === undefined
-        ? {}
-        : { temperature: (temperature.high - temperature.low) / 2 }),
-      ...(beside.pressure !== undefined || qnh === undefined ? {} : { pressure: qnh.high - qnh.low }),
-      ...(beside.wind !== undefined || wind?.kind !== 'from'
-        ? {}
-        : { direction: (wind.from.high - wind.from.low) / 2, speed: (wind.speed.high - wind.speed.low) / 2 }),
-    },
+    rounding: as.wind && wind?.kind === 'from' ? windRounding(wind) : {},
   };
-  if (asOf !== undefined) read.age = reportAge(observation.time, asOf);
+  if (asOf !== undefined) read.age = reportAge(time, asOf);
   const states = textOf(groups, 'runway-state');
   if (states !== undefined && runwayStates.length > 0) read.runwayState = states;
   return read;
+}
 
-  function replacedBy({ wind: reported }: Observation, by: WeatherByReport, si: GivenBeside): string[] {
-    const alone = reportedWeather(observation);
-    const has = isReportRefused(alone) ? undefined : alone;
-    const texts: string[] = [];
-    if (by.temperature !== undefined && temperature !== undefined && !same(si.temperature, temperature.value)) {
-      texts.push(`temperature ${written(by.temperature)} in place of ${degrees(temperature.value)}`);
-    }
-    if (by.dewPoint !== undefined && dewPoint !== undefined && !same(si.dewPoint, dewPoint.value)) {
-      texts.push(`dew point ${written(by.dewPoint)} in place of ${degrees(dewPoint.value)}`);
-    }
-    if (by.pressure !== undefined && qnh !== undefined && !samePressure(si.pressure, qnh.value)) {
-      texts.push(`another pressure in place of QNH ${written(inUnit('pressure', qnh.value, 'hPa'))}`);
-    }
-    if (by.wind !== undefined && reported !== undefined && !sameWind(si.wind, has?.wind)) {
-      texts.push(`another wind in place of ${textOf(groups, 'wind')}`);
-    }
-    return texts;
-  }
+/** Which members given beside a report say the same as it, or are not given. */
+function sameAs(observation: Observation, { temperature, dewPoint, pressure, wind }: GivenBeside) {
+  const reported = windOf(observation.wind);
+  const { qnh } = observation;
+  return {
+    temperature: temperature === undefined || same(temperature, observation.temperature?.value),
+    dewPoint: dewPoint === undefined || same(dewPoint, observation.dewPoint?.value),
+    pressure: pressure === undefined || (pressure.kind === 'qnh' && same(pressure.value, qnh?.value)),
+    wind: wind === undefined || (typeof reported !== 'string' && sameWind(wind, reported)),
+  };
+}
+
+function windRounding({ from, speed }: Extract<ReportedWind, { kind: 'from' }>): ReportRead['rounding'] {
+  return { direction: (from.high - from.low) / 2, speed: (speed.high - speed.low) / 2 };
 }
 
 function degrees(kelvin: number): string {
   return written(inUnit('temperature', kelvin, 'degC'));
 }
 
-function same(one: number | undefined, other: number): boolean {
-  return one !== undefined && Math.abs(one - other) <= 1e-6;
+/** Whether two figures are one but for the last bits that a change of unit leaves. */
+function same(one: number, other: number | undefined): boolean {
+  return other !== undefined && Math.abs(one - other) <= 1e-9 * Math.abs(other) + 1e-9;
 }
 
-function samePressure(one: Weather['pressure'] | undefined, qnh: number): boolean {
-  return one?.kind === 'qnh' && Math.abs(one.value - qnh) <= 1e-3;
-}
-
-function sameWind(one: Wind | undefined, other: Wind | undefined): boolean {
-  return one !== undefined && other !== undefined && JSON.stringify(onScale(one)) === JSON.stringify(onScale(other));
+function sameWind(one: Wind, other: Wind): boolean {
+  return JSON.stringify(onScale(one)) === JSON.stringify(onScale(other));
 }
 
 /** A wind without the last bits of its figures. */

@@ -180,13 +180,8 @@ export interface ReportRead {
   readonly notUnderstood: readonly string[];
   /** of the runways, as the report has it */
   readonly runwayState?: string;
-  /** how far the true values may lie from what is written: to either side, the pressure above only [K, Pa, rad, m/s] */
-  readonly rounding: {
-    readonly temperature?: number;
-    readonly pressure?: number;
-    readonly direction?: number;
-    readonly speed?: number;
-  };
+  /** how far the true wind may lie from what is written, to either side [rad], [m/s]; what temperature and pressure round is in their own uncertainties */
+  readonly rounding: { readonly direction?: number; readonly speed?: number };
 }
 
 export interface Weather {
