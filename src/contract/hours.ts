@@ -3,7 +3,7 @@ import { outcomes } from '../planning/answer.ts';
 import { quantity, temperature as shownTemperature } from './answer-parts.ts';
 import { bandedDistance } from './distances.ts';
 import { temperature } from './quantities.ts';
-import { pressure, wind } from './weather.ts';
+import { longestReport, pressure, wind } from './weather.ts';
 import { windComponents } from './wind-components.ts';
 
 /** The most hours that one question is answered for: a forecast of three days. */
@@ -23,7 +23,7 @@ const ofForecast = z.strictObject({
   forecast: z
     .string()
     .min(1)
-    .max(2048)
+    .max(longestReport)
     .meta({ description: 'A TAF as received, on one line, of at most 512 characters.' }),
   from: moment.meta({ description: 'Where the first hour begins; the days of the forecast are those nearest to it.' }),
   to: moment.meta({ description: 'The last hour begins here or before.' }),

@@ -59,8 +59,8 @@ export const weather = z
   .strictObject({ ...air, wind })
   .meta({ id: 'Weather', description: 'The air and the wind at the aerodrome.' });
 
-/** The most characters that may be sent as a report; the report itself may be shorter, and says so. */
-const longestReport = 2048;
+/** The most characters of a report. */
+export const longestReport = 512;
 
 export const reportText = z
   .string()

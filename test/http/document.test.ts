@@ -63,6 +63,7 @@ describe('the OpenAPI document', () => {
       'post /v1/speeds',
       'post /v1/takeoff',
       'post /v1/takeoff/choices',
+      'post /v1/weather/decode',
     ]);
   });
 
@@ -132,7 +133,7 @@ describe('the OpenAPI document', () => {
 
   it('shows an example for each question, and the service answers it', async () => {
     const questions = operations.filter(({ method }) => method === 'post');
-    expect(questions).toHaveLength(11);
+    expect(questions).toHaveLength(12);
     for (const { path, operation } of questions) {
       const example = operation.requestBody?.content['application/json']?.example;
       const answered = await post(app, path, example);

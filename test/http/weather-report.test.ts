@@ -108,7 +108,7 @@ describe('a question whose weather is a report', () => {
 
 describe('a report that cannot be taken', () => {
   it.each([
-    ['x'.repeat(513), 'out-of-range', /longer than 512 bytes/],
+    ['x'.repeat(513), 'out-of-range', /has 513 characters/],
     [report.replace('ZZKV', 'ZZKV\u0007'), 'wrong-type', /control character/],
     [`${report} METAR ZZAA 111150Z 20005KT 9999 18/09 Q1009`, 'exactly-one-of', /./],
     [report.replace('23009G21KT', '37009KT'), 'out-of-range', /37009KT at character 19 has a direction of 370 degrees/],
