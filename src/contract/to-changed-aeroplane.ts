@@ -37,6 +37,8 @@ export function toChangedAeroplane(
   const faults = [...idle, ...checkAeroplane(read.value, '').map((fault) => atChange(fault, changes))];
   if (faults.length > 0) return faults;
   const really = members.filter(differs);
+  const ambiguous = sheetsOfUnknownAeroplane(really);
+  if (ambiguous.length > 0) return ambiguous;
   const isRefitted = really.some(standsForFit);
   return {
     definition: read.value,
@@ -96,9 +98,27 @@ function movesDistances({ at }: ChangedMember): boolean {
   return !named.includes(at.split('/')[1] as string);
 }
 
+/**
+ * New sheets of the flight manual beside a change that moves distances: physics would carry their figures by the change once more
+ * where they are of the changed aeroplane already.
+ */
+function sheetsOfUnknownAeroplane(really: readonly ChangedMember[]): Fault[] {
+  const moving = really.find(movesDistances);
+  if (moving === undefined) return [];
+  return really
+    .filter(({ at, after }) => after !== undefined && /^\/flightManual(\/(tables|graphs))?$/.test(at))
+    .map(({ at }) => ({
+      pointer: `${changesAt}${at}`,
+      code: 'contradiction',
+      message: `The changes bring sheets of the flight manual and change ${moving.at.slice(1)}: they do not tell which aeroplane the sheets are of.`,
+      allowed: 'one of the two',
+      hint: 'Figures of the changed aeroplane go into a whole definition.',
+    }));
+}
+
 /** Members whose figures a fit puts its own in place of: changed, they would be lost in it. */
 const fittedMembers =
-  /^\/(propulsion\/(thrustFactor|altitudeLapseCoefficient|temperatureExponent|humidityFactor|kind)|brakes\/(brakingFrictionCoefficient|loadFactor)|configurations\/[^/]+\/(airDragIncrementCoefficient|pullUpLoadFactor|approachAngle|flareLoadFactor))$|^\/(propulsion|brakes)$/;
+  /^\/(propulsion\/(thrustFactor|altitudeLapseCoefficient|temperatureExponent|humidityFactor|kind)|brakes\/(brakingFrictionCoefficient|loadFactor)|configurations\/[^/]+\/(airDragIncrementCoefficient|pullUpLoadFactor|approachAngle|flareLoadFactor|floatDecelerationRatio))$|^\/(propulsion|brakes)$/;
 
 function standsForFit({ at }: ChangedMember): boolean {
   return fittedMembers.test(at);

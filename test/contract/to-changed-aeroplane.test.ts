@@ -5,6 +5,7 @@ import { type TakeoffRequest, takeoffRequest } from '../../src/contract/takeoff-
 import { takeoffResponse } from '../../src/contract/takeoff-response.ts';
 import { toKnownAeroplane } from '../../src/contract/to-known-aeroplane.ts';
 import { isRefused } from '../../src/planning/fault.ts';
+import { fullManual } from '../support/printed-manuals.ts';
 import { named, sampleDefinition, sampleLookup, sampleTakeoff } from '../support/sample-questions.ts';
 
 const stamp = { modelVersion: '1', rulesDigest: 'r' };
@@ -54,6 +55,41 @@ describe('an aeroplane on file with changes', () => {
     });
     const renamed = known({ name: 'Sample Tourer II (invented)' });
     expect(Array.isArray(renamed) ? renamed : renamed.changes).not.toHaveProperty('flewAs');
+  });
+
+  it('does not bring sheets of the flight manual and a change that moves distances: neither says which aeroplane they are of', () => {
+    const flightManual = fullManual();
+    const both = faultsOf({ ...changes, flightManual });
+    expect(both).toMatchObject([{ pointer: '/aeroplane/changes/flightManual', code: 'contradiction' }]);
+    expect(Array.isArray(known({ flightManual }))).toBe(false);
+  });
+
+  it.each([
+    ['flareLoadFactor', 1.15, false],
+    ['floatDecelerationRatio', 0.09, false],
+    ['groundLiftCoefficient', 0.3, true],
+  ])('leaves the fit away where it stands for what is changed: %s', (member, value, stays) => {
+    const range = (value: number, unit: string) => ({ from: { value, unit }, to: { value, unit } });
+    const fit = {
+      fittedTo: 'a'.repeat(64),
+      modelVersion: '1.0.0',
+      brakingFrictionCoefficient: 0.3,
+      approachAngle: { value: 3, unit: 'deg' },
+      standardDeviations: { brakingFrictionCoefficient: 0.01 },
+      correlation: [[1]],
+      errors: { rmsPercent: 1, greatestPercent: 2 },
+      conditions: { mass: range(1000, 'kg'), pressureAltitude: range(0, 'm'), temperature: range(15, 'degC') },
+    };
+    const read = readDefinition(
+      JSON.parse(JSON.stringify({ ...sampleDefinition(), fit: { landing: { 'landing-full': fit } } })),
+    );
+    if (isRefused(read)) throw new Error(JSON.stringify(read.refused));
+    const found = toKnownAeroplane(
+      changed({ configurations: { 'landing-full': { [member]: value } } }),
+      sampleLookup(read.value),
+    );
+    if (Array.isArray(found)) throw new Error(JSON.stringify(found));
+    expect([found.aeroplane.fit !== undefined, found.changes?.flewAs?.fit !== undefined]).toEqual([stays, stays]);
   });
 
   it('leaves the aeroplane on file as it is', () => {

@@ -6,6 +6,7 @@ import { checkManualConfigurations } from './check-manual-configurations.ts';
 import { checkManualGraph } from './check-manual-graph.ts';
 import { checkManualNotes } from './check-manual-notes.ts';
 import { checkManualTable } from './check-manual-table.ts';
+import { checkScreenHeights } from './check-screen-heights.ts';
 import { checkSpeedTable } from './check-speed-table.ts';
 import { checkExampleForms, checkWorkedExamples } from './check-worked-examples.ts';
 import { enteredSheets, examplesOf } from './entered-sheet.ts';
@@ -25,6 +26,7 @@ export function checkFlightManual(
   const here = `${at}/flightManual`;
   return [
     ...checkManualConfigurations(definition, flightManual, here),
+    ...checkScreenHeights(definition.certification, flightManual, here),
     ...checkManualSheets(flightManual, calibration, here, `${at}/airspeedCalibration`),
   ];
 }

@@ -2,7 +2,7 @@ import type { ManualAxis, ManualNote } from '../../performance/flight-manual/fli
 import type { Fault } from '../../planning/fault.ts';
 import type { ManualNoteOnWire } from '../flight-manual/manual-note.ts';
 import { checkGround } from '../question-checks/check-surface.ts';
-import { checkNoteChange, lengthens, type StepsOnWire } from './check-note-change.ts';
+import { checkNoteChange, lengthens, type StepsOnWire, shortens } from './check-note-change.ts';
 import type { EnteredSheet } from './entered-sheet.ts';
 
 /** The notes of one sheet: each against the sheet, and in its own size and sign. */
@@ -56,20 +56,25 @@ function checkTarget({ sheet, outputs, hasRoll }: EnteredSheet, note: ManualNote
   return [{ ...contradiction(pointer, message), received: multiplies }];
 }
 
-/** What lengthens one of two distances lengthens the other: a note on one alone leaves the other too short. */
+/**
+ * What lengthens one of two distances lengthens the other: a note on one alone leaves the other too short. What shortens the whole
+ * distance alone leaves it too short beside the ground roll.
+ */
 function checkOther({ sheet, outputs }: EnteredSheet, note: ManualNoteOnWire, pointer: string): Fault[] {
   const { multiplies } = note;
-  if ((multiplies !== 'groundRoll' && multiplies !== 'wholeDistance') || !lengthens(sheet, note)) return [];
+  if (multiplies !== 'groundRoll' && multiplies !== 'wholeDistance') return [];
+  const isLonger = lengthens(sheet, note);
+  if (!isLonger && (multiplies === 'groundRoll' || !shortens(note))) return [];
   const other = multiplies === 'groundRoll' ? 'wholeDistance' : 'groundRoll';
   const isGiven =
     outputs.includes('groundRoll') && (outputs.includes('takeoffDistance') || outputs.includes('landingDistance'));
-  const isLengthened = (sheet.notes ?? []).some((one) => one.multiplies !== multiplies && isAboutSame(one, note));
-  if (!isGiven || isLengthened) return [];
+  const isOnOther = (sheet.notes ?? []).some((one) => one.multiplies !== multiplies && isAboutSame(one, note));
+  if (!isGiven || isOnOther) return [];
   return [
     {
       pointer,
       code: 'implausible',
-      message: `${note.about} lengthens the ${multiplies} alone: no note says what it makes of the ${other}.`,
+      message: `${note.about} ${isLonger ? 'lengthens' : 'shortens'} the ${multiplies} alone: no note says what it makes of the ${other}.`,
       received: multiplies,
       allowed: `both, groundRollAddedToBoth, or a note on the ${other} too`,
     },

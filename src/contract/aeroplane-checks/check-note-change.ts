@@ -83,6 +83,14 @@ function wayOf(phase: ManualPhase, about: ProportionalNote['about']): 1 | -1 {
 export function lengthens(sheet: SheetOnWire, note: ManualNoteOnWire): boolean {
   if (sheet.for === 'climb') return false;
   if (note.about === 'surface') return note.changePercent > 0;
-  const changes = [note.changePercent ?? 0, ...(note.byPressureAltitude ?? []).map((band) => band.changePercent)];
-  return wayOf(sheet.for, note.about) > 0 && changes.some((change) => change > 0);
+  return wayOf(sheet.for, note.about) > 0 && changesOf(note).some((change) => change > 0);
+}
+
+/** Whether a note makes what it multiplies smaller. */
+export function shortens(note: ManualNoteOnWire): boolean {
+  return (note.about === 'surface' ? [note.changePercent] : changesOf(note)).some((change) => change < 0);
+}
+
+function changesOf({ changePercent = 0, byPressureAltitude = [] }: StepsOnWire): number[] {
+  return [changePercent, ...byPressureAltitude.map((band) => band.changePercent)];
 }

@@ -9,7 +9,7 @@ import { isPavedDry, speaksOfSurface } from './speaks-of-surface.ts';
  *
  * A sheet for the very surface comes first, then one with a note on it, then those for a dry paved runway, silent on the surface.
  * Both distances come from one sheet where one gives both, else from two; where these two are silent on different things the whole
- * distance alone is given, for one correction would not fit both.
+ * distance alone is given, for one correction would not fit both; likewise where the roll, on its edge or by its notes, is not below it.
  *
  * @returns undefined where the manual has no sheet for this phase and configuration on this surface or a dry paved one
  */
@@ -17,7 +17,7 @@ export function manualDistances(manual: FlightManual, asked: ManualAsked): Manua
   const whole = asked.phase === 'takeoff' ? 'takeoffDistance' : 'landingDistance';
   const sheets = sheetsFor(manual, asked.phase, asked.configuration);
   const distance = bestSheet(onSurface(sheets, whole, asked), whole, asked, sheets);
-  const roll = besideIt(bestSheet(onSurface(sheets, 'groundRoll', asked), 'groundRoll', asked), distance);
+  const roll = besideIt(bestSheet(onSurface(sheets, 'groundRoll', asked), 'groundRoll', asked), distance, whole);
   const used = together(roll, distance);
   if (used === undefined || 'outcome' in used) return used;
   return {
@@ -43,12 +43,17 @@ function some<T>(list: readonly T[]): readonly T[] | undefined {
   return list.length > 0 ? list : undefined;
 }
 
-/** The ground roll, unless it is silent on other things than the whole distance. */
-function besideIt(roll: SheetFound | undefined, distance: SheetFound | undefined): SheetFound | undefined {
-  if (roll === undefined || distance === undefined || distance.figures.outside.length > 0) return roll;
-  return roll.figures.outside.length > 0 || roll.figures.silent.join() === distance.figures.silent.join()
-    ? roll
-    : undefined;
+/** The ground roll, unless it is of another sheet and silent on other things than the whole distance, or not below it. */
+function besideIt(
+  roll: SheetFound | undefined,
+  distance: SheetFound | undefined,
+  whole: ManualOutput,
+): SheetFound | undefined {
+  if (roll === undefined || distance === undefined || roll.sheet === distance.sheet) return roll;
+  if (roll.figures.outside.length > 0 || distance.figures.outside.length > 0) return roll;
+  const isSilentAlike = roll.figures.silent.join() === distance.figures.silent.join();
+  const isBelow = (roll.figures.outputs.groundRoll as number) < (distance.figures.outputs[whole] as number);
+  return isSilentAlike && isBelow ? roll : undefined;
 }
 
 function speedsOf(found: SheetFound | undefined): ManualFigures['speeds'] {

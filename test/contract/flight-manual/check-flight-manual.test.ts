@@ -51,6 +51,12 @@ const slips: [title: string, slip: Slip, fault: string, says: RegExp][] = [
     /not a configuration for takeoff/,
   ],
   [
+    'a takeoff distance to a lower screen than the certification\u2019s',
+    (m) => (m.tables[0].conditions.screenHeight = { value: 35, unit: 'ft' }),
+    `contradiction ${table}/conditions/screenHeight`,
+    /over a screen of 35 ft; that of this aeroplane is 50 ft/,
+  ],
+  [
     'a configuration at a flap that the table does not have',
     (m) => (m.tables[2].configurations = ['landing-full']),
     `contradiction ${climb}/configurations/0`,
@@ -289,6 +295,12 @@ const slips: [title: string, slip: Slip, fault: string, says: RegExp][] = [
     (m) => (m.tables[0].notes[1].multiplies = 'wholeDistance'),
     `implausible ${table}/notes/1/multiplies`,
     /what it makes of the groundRoll/,
+  ],
+  [
+    'a headwind that shortens the whole distance alone',
+    (m) => (m.tables[0].notes[0].multiplies = 'wholeDistance'),
+    `implausible ${table}/notes/0/multiplies`,
+    /shortens the wholeDistance alone: no note says what it makes of the groundRoll/,
   ],
   [
     'speeds that fall with mass',

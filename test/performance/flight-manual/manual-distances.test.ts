@@ -28,6 +28,24 @@ describe("the manual's distances", () => {
     expect(ask([factored])).toMatchObject({ groundRoll: 160, wholeDistance: 320 });
   });
 
+  it('are the whole distance alone where the roll of another sheet, on its edge, comes out at or above it', () => {
+    const rollOnly = takeoffTable({
+      id: 'roll',
+      outputs: ['groundRoll'],
+      cells: takeoffTable().cells.map((cells) => cells.slice(0, 1)),
+    });
+    // a short distance for 900 kg: below the 200 m of roll at 1000 kg
+    const light = takeoffTable({
+      id: 'light',
+      conditions: { ...takeoffTable().conditions, mass: 900 },
+      outputs: ['takeoffDistance'],
+      cells: takeoffTable().cells.map(([, distance]) => [0.5 * (distance as number)]),
+    });
+    const found = ask([rollOnly, light], { mass: 900 });
+    expect(found).toMatchObject({ wholeDistance: 200, sheets: [{ id: 'light' }], edges: [] });
+    expect(found).toHaveProperty('groundRoll', undefined);
+  });
+
   it('name a single mass as an edge for a lighter aeroplane, and are outside for a heavier one', () => {
     expect(ask([takeoffTable()], { mass: 900 })).toMatchObject({
       groundRoll: 200,
