@@ -186,6 +186,8 @@ export interface OtherMethod {
   readonly method: Method;
   readonly distance: number;
   readonly ratio: number;
+  /** of the ground rolls */
+  readonly rollRatio: number;
 }
 
 /** What an answer took from the flight manual. */

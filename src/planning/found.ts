@@ -40,6 +40,8 @@ export interface Found<NotReached> {
   readonly outside?: OutsideManual | undefined;
   /** the manual has sheets for the configuration, and none for this surface or a dry paved one to carry from */
   readonly noSheet?: boolean;
+  /** the aeroplane that the manual is of cannot be asked the same, so that no ratio of physics carries its figures */
+  readonly unscaled?: boolean;
   readonly other?: OtherMethod | undefined;
 }
 
@@ -84,7 +86,7 @@ export function found<Result extends object, NotReached extends Result>(
     return { ...physics, method: 'flight-manual', notReached: reading, runs: none };
   }
   const manual = byManual(finding, reading);
-  if (manual === undefined) return physics;
+  if (manual === undefined) return { ...physics, unscaled: true };
   const [taken, beside] = chosen.byManual ? [manual, physics] : [physics, manual];
   return { ...taken, flightManual: manual.flightManual, other: otherMethod(taken, beside) };
 }
@@ -171,7 +173,12 @@ function otherMethod(taken: Found<unknown>, beside: Found<unknown>): OtherMethod
   const other = beside.runs.stated;
   if (stated === undefined || other === undefined) return undefined;
   const distance = other.groundRoll + other.airDistance;
-  return { method: beside.method, distance, ratio: distance / (stated.groundRoll + stated.airDistance) };
+  return {
+    method: beside.method,
+    distance,
+    ratio: distance / (stated.groundRoll + stated.airDistance),
+    rollRatio: other.groundRoll / stated.groundRoll,
+  };
 }
 
 /** The same distances under the names by which checks are of them. */

@@ -304,3 +304,14 @@ describe('how sure a figure of the flight manual is', () => {
     ]);
   });
 });
+
+describe('notes of roll and whole distance that cross', () => {
+  it('leave the roll to physics: no part of an answer is below nothing', () => {
+    const crossing = { ...headwindNote, change: -0.5, multiplies: 'wholeDistance' } as ManualNote;
+    const { groundRoll, airDistance, takeoffDistance } = distances(byManual([crossing], headwind(9)));
+    expectRatio(takeoffDistance.value, 1005 * ft, 1e-9);
+    expect(groundRoll.method).toBe('stated');
+    expect(airDistance.value).toBeGreaterThan(0);
+    expectRatio(groundRoll.value + airDistance.value, takeoffDistance.value, 1e-12);
+  });
+});

@@ -120,3 +120,33 @@ export const fitUpTo = (mass: number) =>
 export const fittedUpTo = (mass: number): OfAnyPhase => ({
   aeroplane: { fit: { takeoff: { takeoff: fitUpTo(mass) }, landing: { landing: fitUpTo(mass) } } },
 });
+
+/** That manual with a speed table from 900 kg to a mass, for a configuration, of speeds near those as stated. */
+export const withSpeedsTo = (mass: number, configuration: 'takeoff' | 'landing'): FlightManual => ({
+  ...manualOf(),
+  speedTables: [
+    {
+      id: 'speed-table',
+      page: '5-9',
+      configurations: [configuration],
+      airspeed: 'cas',
+      speeds: configuration === 'takeoff' ? ['liftOff', 'screen'] : ['landingReference'],
+      masses: [900, mass],
+      cells:
+        configuration === 'takeoff'
+          ? [
+              [27, 28.5],
+              [28.5, 30],
+            ]
+          : [[30], [32]],
+    },
+  ],
+});
+
+/** That manual with its ground rolls so many times as long, and its whole distances as they are. */
+export const withRollTimes = (times: number): FlightManual => {
+  const shorter = (table: ManualTable) => ({
+    cells: table.cells.map(([roll, whole]) => [(roll as number) * times, whole as number]),
+  });
+  return manualOf(shorter(takeoffTable), shorter(landingTable));
+};

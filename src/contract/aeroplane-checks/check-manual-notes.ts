@@ -24,7 +24,13 @@ export function checkManualNotes(entered: EnteredSheet): Fault[] {
 }
 
 function isSame(one: ManualNoteOnWire, other: ManualNoteOnWire): boolean {
-  return one.multiplies === other.multiplies && isAboutSame(one, other);
+  return isOfSame(one.multiplies, other.multiplies) && isAboutSame(one, other);
+}
+
+/** Roll and whole distance may have a note each; what is of both, or adds to both, leaves nothing for another note. */
+function isOfSame(one: ManualNoteOnWire['multiplies'], other: ManualNoteOnWire['multiplies']): boolean {
+  const ofBoth = ['both', 'groundRollAddedToBoth'];
+  return one === other || ofBoth.includes(one) || ofBoth.includes(other);
 }
 
 function isAboutSame(one: ManualNoteOnWire, other: ManualNoteOnWire): boolean {

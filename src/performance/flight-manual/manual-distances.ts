@@ -43,13 +43,13 @@ function some<T>(list: readonly T[]): readonly T[] | undefined {
   return list.length > 0 ? list : undefined;
 }
 
-/** The ground roll, unless it is of another sheet and silent on other things than the whole distance, or not below it. */
+/** The ground roll, unless it is not below the whole distance, as notes of each may bring about, or silent on other things than it. */
 function besideIt(
   roll: SheetFound | undefined,
   distance: SheetFound | undefined,
   whole: ManualOutput,
 ): SheetFound | undefined {
-  if (roll === undefined || distance === undefined || roll.sheet === distance.sheet) return roll;
+  if (roll === undefined || distance === undefined) return roll;
   if (roll.figures.outside.length > 0 || distance.figures.outside.length > 0) return roll;
   const isSilentAlike = roll.figures.silent.join() === distance.figures.silent.join();
   const isBelow = (roll.figures.outputs.groundRoll as number) < (distance.figures.outputs[whole] as number);

@@ -40,7 +40,7 @@ export interface AnswerContext extends ConditionsContext {
   readonly thin: ThinBecause | undefined;
   readonly assumed: readonly AnyAssumed[];
   /** the method of the distances, and what stands beside them */
-  readonly found: Pick<Found<unknown>, 'method' | 'flightManual' | 'outside' | 'noSheet' | 'other'>;
+  readonly found: Pick<Found<unknown>, 'method' | 'flightManual' | 'outside' | 'noSheet' | 'unscaled' | 'other'>;
   /** the speed at which the wheels leave or meet the runway */
   readonly wheelSpeed: SpeedSet;
   /** the ground roll as stated, without factors, and what it would be in still air [m]; undefined where there is none */

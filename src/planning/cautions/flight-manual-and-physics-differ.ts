@@ -12,19 +12,29 @@ export const flightManualAndPhysicsDiffer: CautionTest<AnswerContext> = {
     "The flight manual and the aeroplane's physics differ by more than twice what the physics is usually off; a table, a unit or the definition may be wrong. Not where the manual is the longer because the edge of its table stands for what lies beyond.",
   source: 'HouseManual',
   test: (context) => {
-    const { found, wholeDistance, phase, question } = context;
+    const { found, wholeDistance, phase, question, roll } = context;
     const { other, method, flightManual } = found;
     if (other === undefined || wholeDistance === undefined) return undefined;
     const physics = [method, other.method].includes('fitted') ? 'fitted' : 'stated';
     const threshold = physicsSpread[physics];
-    if (Math.abs(Math.log(other.ratio)) <= threshold) return undefined;
+    const isRollApart = Math.abs(Math.log(other.rollRatio)) > threshold;
+    if (Math.abs(Math.log(other.ratio)) <= threshold && !isRollApart) return undefined;
     const isByPhysics = isPhysicsByName(question);
-    const isManualLonger = other.ratio > 1 === isByPhysics;
+    const ratio = Math.abs(Math.log(other.ratio)) > threshold ? other.ratio : other.rollRatio;
+    const isManualLonger = ratio > 1 === isByPhysics;
     const isHeldAtEdge = (flightManual?.figures.edges.length ?? 0) > 0;
     // the edge of a table is used because it is the longer
     if (isHeldAtEdge && isManualLonger) return undefined;
     const [names, otherName] = isByPhysics ? ['Physics', 'the flight manual'] : ['The flight manual', 'physics'];
-    const off = other.ratio - 1;
+    const off = ratio - 1;
+    if (ratio === other.rollRatio && roll !== undefined) {
+      return {
+        message: `${names} gives a ground roll of ${textIn(context, 'distance', roll)}, ${otherName} ${textIn(context, 'distance', roll * ratio)}: ${percentText(Math.abs(off))} ${off < 0 ? 'less' : 'more'}.`,
+        at: '/aeroplane',
+        value: ratio,
+        threshold: Math.exp(threshold),
+      };
+    }
     return {
       message: `${names} gives a ${phase} distance of ${textIn(context, 'distance', wholeDistance.value)}, ${otherName} ${textIn(context, 'distance', other.distance)}: ${percentText(Math.abs(off))} ${off < 0 ? 'less' : 'more'}.`,
       at: '/aeroplane',

@@ -11,11 +11,17 @@ export const flightManualNotUsed: CautionTest<AnswerContext> = {
   meaning:
     'Physics was asked for by name although the flight manual has a table for this configuration; strong where the table does not reach what is asked.',
   source: 'HouseManual',
-  test: ({ found: { outside, flightManual, noSheet, method, other }, question, surface, wholeDistance }) => {
+  test: ({ found: { outside, flightManual, noSheet, unscaled, method, other }, question, surface, wholeDistance }) => {
     if (noSheet && wholeDistance !== undefined) {
       return {
         message: `Every distance here is physics on ${method} figures: the flight manual has 0 tables for ${surface}, and none for dry pavement to carry from.`,
         at: '/runway/surface',
+      };
+    }
+    if (unscaled && wholeDistance !== undefined && !isPhysicsByName(question)) {
+      return {
+        message: `Every distance here, ${measureText(question.units, 'distance', wholeDistance.value, 'up')} in all, is physics on ${method} figures: the aeroplane on file cannot be asked the same, so that no ratio carries its manual's figures to the changed one.`,
+        at: '/aeroplane/changes',
       };
     }
     if (wholeDistance === undefined || !isPhysicsByName(question)) return undefined;

@@ -15,6 +15,7 @@ import { filmCountsAsWet } from './film-counts-as-wet.ts';
 import { fitOutsideRange } from './fit-outside-range.ts';
 import { flareAboveScreen } from './flare-above-screen.ts';
 import { flightManualAndPhysicsDiffer } from './flight-manual-and-physics-differ.ts';
+import { flightManualBeside } from './flight-manual-beside.ts';
 import { flightManualEdge } from './flight-manual-edge.ts';
 import { flightManualNotUsed } from './flight-manual-not-used.ts';
 import { flightManualSilent } from './flight-manual-silent.ts';
@@ -51,6 +52,7 @@ export const landingCautions: readonly CautionTest<LandingContext>[] = [
   stageNotKnown,
   flightManualNotUsed,
   flightManualEdge,
+  flightManualBeside,
   flightManualSilent,
   flightManualAndPhysicsDiffer,
   fitOutsideRange,

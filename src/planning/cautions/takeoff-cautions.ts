@@ -19,6 +19,7 @@ import { engineOutDataMissing } from './engine-out-data-missing.ts';
 import { filmCountsAsWet } from './film-counts-as-wet.ts';
 import { fitOutsideRange } from './fit-outside-range.ts';
 import { flightManualAndPhysicsDiffer } from './flight-manual-and-physics-differ.ts';
+import { flightManualBeside } from './flight-manual-beside.ts';
 import { flightManualEdge } from './flight-manual-edge.ts';
 import { flightManualNotUsed } from './flight-manual-not-used.ts';
 import { flightManualSilent } from './flight-manual-silent.ts';
@@ -58,6 +59,7 @@ export const takeoffCautions: readonly CautionTest<TakeoffContext>[] = [
   stageNotKnown,
   flightManualNotUsed,
   flightManualEdge,
+  flightManualBeside,
   flightManualSilent,
   flightManualAndPhysicsDiffer,
   fitOutsideRange,

@@ -226,6 +226,12 @@ const slips: [title: string, slip: Slip, fault: string, says: RegExp][] = [
     /not a unit/,
   ],
   [
+    'a note of both distances and another of the same, a share of the roll added to both',
+    (m) => m.tables[0].notes.push({ ...m.tables[0].notes[0], multiplies: 'groundRollAddedToBoth' }),
+    `contradiction ${table}/notes/3`,
+    /already/,
+  ],
+  [
     'a note twice',
     (m) => m.tables[0].notes.push({ ...m.tables[0].notes[0] }),
     `contradiction ${table}/notes/3`,

@@ -3,7 +3,7 @@ import { landingCautions } from '../../../src/planning/cautions/landing-cautions
 import { takeoffCautions } from '../../../src/planning/cautions/takeoff-cautions.ts';
 import type { contaminantKinds } from '../../../src/planning/question.ts';
 import { references } from '../../../src/references.ts';
-import { fittedUpTo, manualOf, withManual } from '../../support/flown-by-manual.ts';
+import { fittedUpTo, manualOf, withManual, withRollTimes, withSpeedsTo } from '../../support/flown-by-manual.ts';
 import {
   along,
   type LandingChanges,
@@ -110,6 +110,20 @@ interface Pair {
 }
 
 const pairs: readonly Pair[] = [
+  {
+    code: 'flight-manual-beside',
+    severity: 'strong',
+    raised: withManual(withSpeedsTo(1000, 'landing')),
+    silent: withManual(withSpeedsTo(1010, 'landing')),
+    says: /^The flight manual ends before what is asked\. Of its speeds: speed-table ends at a mass of 1 000 kg, and 1 010 kg is asked, so that the speeds are not the manual's\.$/,
+  },
+  {
+    code: 'flight-manual-and-physics-differ',
+    severity: 'caution',
+    raised: withManual(withRollTimes(0.5)),
+    silent: withManual(withRollTimes(1)),
+    says: /gives a ground roll of \d+ m, physics \d+ m: [\d.]+ % more\.$/,
+  },
   {
     code: 'report-replaced',
     severity: 'caution',
