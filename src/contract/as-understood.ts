@@ -45,5 +45,8 @@ export function asUnderstood(
   question.rounding = rounding;
   if (detail !== undefined) question.detail = detail;
   if (select !== undefined) question.select = select;
+  if ('decisionSpeed' in request && request.decisionSpeed !== undefined) {
+    (question as Draft<TakeoffQuestion>).decisionSpeed = request.decisionSpeed;
+  }
   return question;
 }

@@ -1,15 +1,21 @@
 import { z } from 'zod';
-import { details } from '../planning/detail/detail.ts';
+import { details, landingDetails } from '../planning/detail/detail.ts';
 import { workingOrigins, workingParts, workingUnits } from '../planning/working/working-line.ts';
 import { unitFamilies, unitFor } from '../units/presentation.ts';
 import { measure, quantity, source } from './answer-parts.ts';
 import { shownSchema } from './shown-quantity.ts';
 
 /** What a question may ask beyond the answer itself, and how that is answered. */
-export const detail = z.array(z.enum(details)).max(details.length).meta({
-  description:
-    'What the answer shall hold beyond what it always holds: working, every quantity in the order of the work, in SI; trajectory, the path at even steps of distance; sensitivities, what each distance changes by with each main input.',
-});
+const said =
+  'What the answer shall hold beyond what it always holds: working, every quantity in the order of the work, in SI; trajectory, the path at even steps of distance; sensitivities, what each distance changes by with each main input';
+export const takeoffDetail = z
+  .array(z.enum(details))
+  .max(details.length)
+  .meta({ description: `${said}; rejected, from where the takeoff still stops and the speeds to expect on the way.` });
+export const landingDetail = z
+  .array(z.enum(landingDetails))
+  .max(landingDetails.length)
+  .meta({ description: `${said}.` });
 
 const workingLine = z
   .strictObject({

@@ -1,6 +1,5 @@
 import { z } from 'zod';
 import { aeroplaneChoice } from './aeroplane-choice.ts';
-import { detail } from './detail.ts';
 import { hours } from './hours.ts';
 import { mass } from './quantities.ts';
 import { asOf, edges, method, reference, rounding, select, units } from './question-frame.ts';
@@ -10,7 +9,11 @@ import { id } from './text.ts';
 import { weatherChoice } from './weather.ts';
 
 /** The members of a question of a field length, in the order in which it is read. */
-export function questionShape<Procedure extends z.ZodType>(phase: 'takeoff' | 'landing', procedure: Procedure) {
+export function questionShape<Procedure extends z.ZodType, Detail extends z.ZodType>(
+  phase: 'takeoff' | 'landing',
+  procedure: Procedure,
+  detail: Detail,
+) {
   return {
     reference: reference.exactOptional(),
     asOf: asOf.exactOptional(),
@@ -30,7 +33,7 @@ export function questionShape<Procedure extends z.ZodType>(phase: 'takeoff' | 'l
     edges: edges.exactOptional(),
     units: units.exactOptional(),
     rounding: rounding.exactOptional(),
-    detail: detail.exactOptional(),
+    detail: z.exactOptional(detail),
     select: select.exactOptional(),
   };
 }

@@ -1,11 +1,12 @@
 import { z } from 'zod';
+import { takeoffDetail } from './detail.ts';
 import { takeoffProcedure } from './procedure.ts';
 import { airspeed } from './quantities.ts';
 import { questionShape } from './question-shape.ts';
 
 export const takeoffRequest = z
   .strictObject({
-    ...questionShape('takeoff', takeoffProcedure),
+    ...questionShape('takeoff', takeoffProcedure, takeoffDetail),
     decisionSpeed: airspeed
       .meta({
         description:

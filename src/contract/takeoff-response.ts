@@ -9,6 +9,7 @@ import { decisionSpeed, engineOut } from './engine-out.ts';
 import { hourAnswer } from './hours.ts';
 import { obstaclePath } from './obstacle-path.ts';
 import { rounding, units } from './question-frame.ts';
+import { rejected } from './rejected.ts';
 import { runway } from './runway.ts';
 import { takeoffRequest } from './takeoff-request.ts';
 
@@ -57,6 +58,7 @@ export const takeoffResponse = z
     engineOut: engineOut.exactOptional(),
     obstaclePath: obstaclePath.exactOptional(),
     ...answerEnd,
+    rejected: rejected.exactOptional(),
     hours: z
       .array(hourAnswer)
       .meta({ description: 'The same question for each of the hours asked for.' })

@@ -24,8 +24,9 @@ import { toRunway } from './to-runway.ts';
 import { toWeather } from './to-weather.ts';
 import type { Whole } from './whole-request.ts';
 
-/** What a takeoff and a landing are asked alike. */
-export type CommonRequest = Omit<TakeoffRequest, 'procedure'> & Omit<LandingRequest, 'procedure'>;
+/** What a takeoff and a landing are asked alike; of the detail a landing knows less. */
+export type CommonRequest = Omit<TakeoffRequest, 'procedure' | 'decisionSpeed'> &
+  Omit<LandingRequest, 'procedure' | 'detail'>;
 
 /**
  * Faults of meaning in what a takeoff and a landing are asked alike.

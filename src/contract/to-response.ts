@@ -14,6 +14,7 @@ import { type Stamp, toBasis, toContribution } from './to-basis.ts';
 import { toSensitivities, toTrajectory, toWorking } from './to-detail.ts';
 import { toDecisionSpeed, toEngineOut } from './to-engine-out.ts';
 import { toObstaclePath } from './to-obstacle-path.ts';
+import { toRejected } from './to-rejected.ts';
 import { toShortfall } from './to-shortfall.ts';
 import { toSpeedSet } from './to-speed-set.ts';
 import type { Whole } from './whole-request.ts';
@@ -47,9 +48,10 @@ export function toResponse(
   if (answer.obstaclePath !== undefined) response.obstaclePath = toObstaclePath(how, answer.obstaclePath);
   if (answer.assessment !== undefined) response.assessment = toAssessment(how, answer.assessment);
   if (answer.shortfall !== undefined) response.shortfall = answer.shortfall.map((one) => toShortfall(how, one));
-  const { working, trajectory, sensitivities } = answer.detail ?? {};
+  const { working, trajectory, sensitivities, rejected } = answer.detail ?? {};
   if (working !== undefined) response.working = toWorking(how, working);
   if (trajectory !== undefined) response.trajectory = toTrajectory(how, trajectory);
+  if (rejected !== undefined) response.rejected = toRejected(how, rejected);
   if (sensitivities !== undefined) response.sensitivities = toSensitivities(how, sensitivities, 'takeoffDistance');
   response.basis = toBasis(how, answer, question.aeroplaneDigest, stamp, (one) => {
     const band = toContribution(how, one) as Draft<TakeoffContribution>;

@@ -88,7 +88,7 @@ const wind: fc.Arbitrary<WindOnWire> = fc.oneof(
   }),
 );
 
-type Question = Omit<StatedRequest<TakeoffRequest>, 'aeroplane' | 'mass' | 'configuration' | 'procedure'>;
+type Question = Omit<StatedRequest<TakeoffRequest>, 'aeroplane' | 'mass' | 'configuration' | 'procedure' | 'detail'>;
 
 /** Weather, runway and rules with every choice of form. */
 const anySurroundings = (phase: 'takeoff' | 'landing'): fc.Arbitrary<Question> =>

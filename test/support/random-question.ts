@@ -19,6 +19,7 @@ interface OfOneSetting {
 /** A definition, on file or made up: only what the dice need of it. */
 export interface OnFile {
   readonly id: string;
+  readonly engines: number;
   readonly masses: { readonly empty?: WrittenQuantity; readonly maximumTakeoff: WrittenQuantity };
   readonly configurations: Readonly<Record<string, OfOneSetting>>;
   readonly propulsion: { readonly powerSettings?: object };
@@ -53,6 +54,10 @@ export function randomQuestion(dice: Dice, onFile: readonly OnFile[], phase: Pha
     ...maybe(0.2, () => ({ stage: pick(['dispatch', 'in-flight']) })),
     ...maybe(0.7, () => ({ units: pick(unitFamilies) })),
     ...maybe(0.7, () => ({ rounding: pick(['safe', 'none']) })),
+    ...(phase === 'takeoff' && definition.engines > 1
+      ? maybe(0.3, () => ({ decisionSpeed: { value: Math.round(45 + 70 * dice.roll()), unit: 'kt' } }))
+      : {}),
+    ...(phase === 'takeoff' ? maybe(0.15, () => ({ detail: ['rejected'] })) : {}),
   };
 }
 

@@ -152,7 +152,7 @@ export function sampleTakeoff(): TakeoffRequest {
 
 /** A landing of it with every member that a question can have, by id. */
 export function sampleLanding(): LandingRequest {
-  const { procedure: _, ...common } = sampleTakeoff();
+  const { procedure: _, detail: _d, ...common } = sampleTakeoff();
   return {
     ...common,
     mass: { value: 960, unit: 'kg' },

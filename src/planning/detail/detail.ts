@@ -1,9 +1,12 @@
 import type { TrajectoryPoint } from '../../performance/trajectory.ts';
 import type { Measure } from '../answer.ts';
+import type { Rejected } from '../engine-failure/rejected-takeoff.ts';
 import type { WorkingLine } from '../working/working-line.ts';
 
 /** What an answer can hold beyond what it always holds. */
-export const details = ['working', 'trajectory', 'sensitivities'] as const;
+export const details = ['working', 'trajectory', 'sensitivities', 'rejected'] as const;
+/** Those that an answer to a landing can hold. */
+export const landingDetails = ['working', 'trajectory', 'sensitivities'] as const satisfies readonly DetailName[];
 export type DetailName = (typeof details)[number];
 
 /** By how much each distance changes when one input is so much more. */
@@ -30,4 +33,6 @@ export interface Detail {
   /** at even steps of distance */
   readonly trajectory?: readonly TrajectoryPoint[];
   readonly sensitivities?: readonly Sensitivity[];
+  /** of a takeoff alone, with and without distances */
+  readonly rejected?: Rejected;
 }

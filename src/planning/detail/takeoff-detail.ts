@@ -1,5 +1,6 @@
 import { takeoffTrajectory } from '../../performance/takeoff/takeoff-trajectory.ts';
 import type { TakeoffAnswer } from '../answer.ts';
+import { rejectedTakeoff } from '../engine-failure/rejected-takeoff.ts';
 import { isRefused } from '../fault.ts';
 import { sharesOf } from '../manual/shares.ts';
 import { askedAsFitted } from '../method.ts';
@@ -48,6 +49,7 @@ export function takeoffDetail(given: TakeoffQuestion, answer: TakeoffAnswer, ask
       ? {}
       : { trajectory: evenTrajectory(points, answer.distances.takeoffDistance.value, answer.distances) }),
     ...(moved === undefined ? {} : { sensitivities: moved }),
+    ...(asked.includes('rejected') ? { rejected: rejectedTakeoff(question, prepared) } : {}),
   };
 }
 

@@ -15,7 +15,7 @@ export function decisionOfSingle({ aeroplane, decisionSpeed, units }: TakeoffQue
     code: 'contradiction',
     message: `${aeroplane.name} has one engine: after a failure there is no takeoff to go on with, so no speed decides between going on and stopping.`,
     received: measureText(units, 'speed', decisionSpeed),
-    hint: 'Leave decisionSpeed away; detail "rejected-takeoff" tells from where it still stops.',
+    hint: 'Leave decisionSpeed away; detail "rejected" tells from where it still stops.',
   };
 }
 

@@ -56,6 +56,17 @@ describe('lastPointToStop', () => {
     expectNear(pointOf(found.powerHolds).stopDistance, 900 / 8 + 68 + 38 + 38 ** 2 / 10, 1e-6);
   });
 
+  it('is the speed below which the brakes hold, where they hold at no greater one and the length does not matter', () => {
+    // 5 m/s2 up to 20 m/s over the ground and nothing above: idle for 3 s at the cue's speed, 20 m/s is the last
+    const braking = { at: (speed: number) => (speed <= 20 ? 5 / g : 0), kinks: [20] };
+    const fading = { ...rejected, stop: { ...stop, braking } };
+    const lost = pointOf(lastPointToStop(fading, 50_000).lossOfPower);
+    expect(lost.outcome).toBe('last-point');
+    expectNear(lost.airspeed, 20, 1e-4);
+    // 20^2/8 + 60 + 20^2/10
+    expectNear(lost.stopDistance, 150, 1e-2);
+  });
+
   it('names a length that nothing fits, brakes that do not hold, wind, and thrust that is not known', () => {
     // at once at standstill: 2 s at 4 m/s2 to 8 m/s over 8 m, 8 m, 6.4 m
     const found = lastPointToStop(rejected, 20);

@@ -79,7 +79,8 @@ const commuter: StopRule = {
   ],
 };
 
-const advisory: StopRule = {
+/** Where no rule asks for a rejected takeoff: the times of a pilot who does not expect it. */
+export const advisoryStop: StopRule = {
   id: 'advisory',
   phrase: 'no rule: an advisory figure',
   isRequired: false,
@@ -99,7 +100,7 @@ const advisory: StopRule = {
  */
 export function stopRuleOf({ certification: { basis, stopRule } }: Pick<Aeroplane, 'certification'>): StopRule {
   if (basis === 'cs-25') return stopRule === 'before-1998' ? before1998 : current;
-  return basis === 'cs-23-commuter' ? commuter : advisory;
+  return basis === 'cs-23-commuter' ? commuter : advisoryStop;
 }
 
 /** The delays of a rule as performance takes them [s]. */
