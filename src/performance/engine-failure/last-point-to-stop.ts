@@ -117,11 +117,7 @@ function lastPoint(run: TakeoffRun, available: number, rejectAt: RejectAt): Last
   if (needed(first) > available) return { outcome: 'does-not-stop-within', shortest: needed(first) };
   const length = Math.min(available, longest);
   const found = brent((airspeed) => needed(rejectAt(airspeed)) - length, headwind, rotationSpeed, tolerance);
-  // where the stop ends at a jump, at a speed from which there is none, the root may lie on its far side
-  const last =
-    found.outcome === 'root'
-      ? [found.root, found.root - 2 * tolerance].map(rejectAt).find((one) => one?.stop.outcome === 'stops')
-      : undefined;
+  const last = found.outcome === 'root' ? rejectAt(found.root) : undefined;
   if (last?.stop.outcome !== 'stops') throw new Error(`no last point between ${headwind} and ${rotationSpeed} m/s`);
   // short of the length where the stop from a little more is not known: what lies beyond is not known either
   const unknown = latest?.stop.outcome === 'outside-stated-data' && last.stop.distance < length - settled;

@@ -57,14 +57,15 @@ describe('lastPointToStop', () => {
   });
 
   it('is the speed below which the brakes hold, where they hold at no greater one and the length does not matter', () => {
-    // 5 m/s2 up to 20 m/s over the ground and nothing above: idle for 3 s at the cue's speed, 20 m/s is the last
-    const braking = { at: (speed: number) => (speed <= 20 ? 5 / g : 0), kinks: [20] };
-    const fading = { ...rejected, stop: { ...stop, braking } };
-    const lost = pointOf(lastPointToStop(fading, 50_000).lossOfPower);
-    expect(lost.outcome).toBe('last-point');
-    expectNear(lost.airspeed, 20, 1e-4);
-    // 20^2/8 + 60 + 20^2/10
-    expectNear(lost.stopDistance, 150, 1e-2);
+    // 5 m/s2 up to a speed over the ground and nothing above: idle for 3 s at the cue's speed, that speed is the last
+    for (const fades of [7.7, 11.3, 13.1, 17.9, 20, 23.3, 26.6, 28.9]) {
+      const braking = { at: (speed: number) => (speed <= fades ? 5 / g : 0), kinks: [fades] };
+      const fading = { ...rejected, stop: { ...stop, braking } };
+      const lost = pointOf(lastPointToStop(fading, 50_000).lossOfPower);
+      expect(lost.outcome).toBe('last-point');
+      expectNear(lost.airspeed, fades, 1e-4);
+      expectNear(lost.stopDistance, fades ** 2 / 8 + 3 * fades + fades ** 2 / 10, 1e-2);
+    }
   });
 
   it('names a length that nothing fits, brakes that do not hold, wind, and thrust that is not known', () => {
