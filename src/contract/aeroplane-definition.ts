@@ -107,6 +107,23 @@ const engineOut = z
       .enum(['feathered', 'windmilling', 'stopped'])
       .meta({ description: 'State of the propeller of the dead engine.' })
       .exactOptional(),
+    approach: z
+      .strictObject({
+        configuration: id.meta({ description: 'The configuration whose flap and greatest lift the approach has.' }),
+        airDragIncrementCoefficient: z
+          .number()
+          .min(-0.05)
+          .max(0.3)
+          .meta({ description: 'Drag coefficient added in the air with that flap and the gear up.' }),
+        stallRatio: z
+          .number()
+          .min(1.1)
+          .max(1.4)
+          .meta({ description: 'Speed of the climb over the stall speed of that configuration.' })
+          .exactOptional(),
+      })
+      .meta({ id: 'ApproachClimb', description: 'The climb of an approach with one engine out, gear up.' })
+      .exactOptional(),
   })
   .meta({ id: 'EngineOut', description: 'What is different with one engine out.' });
 

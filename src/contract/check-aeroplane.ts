@@ -1,6 +1,7 @@
 import type { Fault } from '../planning/fault.ts';
 import { checkConfiguration } from './aeroplane-checks/check-configuration.ts';
 import { checkCounts, mostConfigurations } from './aeroplane-checks/check-counts.ts';
+import { checkEngineOut } from './aeroplane-checks/check-engine-out.ts';
 import { checkFit } from './aeroplane-checks/check-fit.ts';
 import { checkFlightManual } from './aeroplane-checks/check-flight-manual.ts';
 import { checkMasses } from './aeroplane-checks/check-masses.ts';
@@ -30,6 +31,7 @@ export function checkAeroplane(definition: AeroplaneDefinition, at: string): Fau
   return [
     ...checkCounts(definition, at),
     ...checkMasses(definition, at),
+    ...checkEngineOut(definition, at),
     ...(wingArea === undefined ? loading : checkWing(definition, at)),
     ...checkPowerplant(definition, at),
     ...tables,

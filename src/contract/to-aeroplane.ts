@@ -108,6 +108,7 @@ function toEngineOut(given: Given<'engineOut'>): Made<'engineOut'> {
     vmcg: perhaps(metresPerSecond, given.vmcg),
     dragIncrementCoefficient: given.dragIncrementCoefficient,
     propeller: given.propeller,
+    approach: given.approach,
   });
 }
 

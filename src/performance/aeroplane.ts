@@ -71,6 +71,13 @@ export interface Aeroplane {
     readonly vmcg?: number;
     readonly dragIncrementCoefficient?: number;
     readonly propeller?: 'feathered' | 'windmilling' | 'stopped';
+    /** the climb of an approach with one engine out: flap of a configuration, gear up */
+    readonly approach?: {
+      readonly configuration: string;
+      readonly airDragIncrementCoefficient: number;
+      /** over the stall speed of that configuration */
+      readonly stallRatio?: number;
+    };
   };
   readonly limitations?: {
     readonly demonstratedCrosswind?: number;

@@ -8,6 +8,7 @@ import { balkedLandingClimb } from './balked-landing.ts';
 import { raisedCautions } from './cautions/caution-test.ts';
 import { landingCautions } from './cautions/landing-cautions.ts';
 import { climbChecks, climbedWithAll } from './climb-checks.ts';
+import { approachWithOneOut } from './engine-failure/approach-with-one-out.ts';
 import { balkedWithOneOut } from './engine-failure/balked-with-one-out.ts';
 import { isRefused, type Refused } from './fault.ts';
 import { checkedRuns } from './found.ts';
@@ -77,7 +78,7 @@ export function planLanding(asked: LandingQuestion): LandingAnswer | Refused {
     further: () => {
       const balked = balkedLanding.outcome === 'computed' ? balkedLanding : undefined;
       return climbChecks(rules.demands, question.aeroplane, ({ engines, of, atHeight = 0 }) => {
-        if (of === 'approach') return { why: 'no configuration of the approach with one engine out is known' };
+        if (of === 'approach') return approachWithOneOut(question, prepared);
         return engines === 'all' ? climbedWithAll(balked) : balkedWithOneOut(question, prepared, atHeight);
       });
     },

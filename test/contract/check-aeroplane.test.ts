@@ -37,6 +37,13 @@ const slips: [title: string, pointer: string, value: unknown, fault: string, say
     'contradiction /masses/maximumLanding',
     /not above the empty/,
   ],
+  [
+    'an approach with one engine out in a configuration that is not there',
+    '/engineOut',
+    { approach: { configuration: 'takeoff-11', airDragIncrementCoefficient: 0.01 } },
+    'unknown-id /engineOut/approach/configuration',
+    /takeoff-10/,
+  ],
   ['a wing area in square feet', '/wing/area', { value: 166, unit: 'm2' }, 'implausible /wing/area', /wing loading/],
   ['a span in feet', '/wing/span', { value: 34, unit: 'm' }, 'implausible /wing/span', /aspect ratio/],
   [
