@@ -48,10 +48,10 @@ describe('sealFolder', () => {
         `catalogue ${folder}: sythelor-jet.json: /engines: `,
       );
       expect(readFileSync(join(folder, manifestName), 'utf8')).toBe(before);
-      writeFileSync(path, text.replace('"revision": "1"', '"revision": "2"'));
+      writeFileSync(path, text.replace(/"revision": "[^"]*"/, '"revision": "next"'));
       expect(() => readCatalogue({ builtIn: false, folder })).toThrow(CatalogueFault);
       expect('sealed' in sealFolder(folder)).toBe(true);
-      expect(readCatalogue({ builtIn: false, folder }).get('sythelor-jet')?.definition.revision).toBe('2');
+      expect(readCatalogue({ builtIn: false, folder }).get('sythelor-jet')?.definition.revision).toBe('next');
     });
   });
 
