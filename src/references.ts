@@ -181,8 +181,7 @@ export const references = entries({
     status: 'memory',
   },
   More1978: {
-    title:
-      'More, The Levenberg-Marquardt Algorithm: Implementation and Theory, Lecture Notes in Mathematics 630 (1978)',
+    title: 'More, The Levenberg-Marquardt Algorithm: Implementation and Theory, Springer LNM 630 (1978)',
     status: 'memory',
   },
   Brent1973: { title: 'Brent, Algorithms for Minimization without Derivatives, 1973', status: 'memory' },

@@ -2,7 +2,7 @@ import { z } from 'zod';
 import { advisory, air, assumption, modelVersion, sources } from './answer-parts.ts';
 import { elevation } from './quantities.ts';
 import { asOf, reference, rounding, units } from './question-frame.ts';
-import { stillWeather } from './weather.ts';
+import { stillWeatherChoice } from './weather.ts';
 
 /** What POST /v1/air is asked and answers. */
 export const airRequest = z
@@ -12,7 +12,7 @@ export const airRequest = z
     elevation: elevation
       .meta({ description: 'Height of the aerodrome above mean sea level; needed with a QNH.' })
       .exactOptional(),
-    weather: stillWeather,
+    weather: stillWeatherChoice,
     units: units.exactOptional(),
     rounding: rounding.exactOptional(),
   })

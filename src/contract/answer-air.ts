@@ -8,16 +8,19 @@ import { foundAir } from './found-air.ts';
 import { toAdvisory } from './to-advisory.ts';
 import { toAir } from './to-air.ts';
 import { type Stamp, toAssumed, toSources } from './to-basis.ts';
+import { stillAsUnderstood, toKnownStillWeather } from './to-known-weather.ts';
 import type { StillWeatherOnWire } from './weather.ts';
 
 /** The air at an aerodrome from gate to gate. */
 export function answerAir(request: AirRequest, stamp: Stamp): AirResponse | Refused {
-  const air = foundAir(request.weather, request.elevation);
+  const weather = toKnownStillWeather(request.weather);
+  if (Array.isArray(weather)) return { refused: weather };
+  const air = foundAir(weather, request.elevation);
   if (Array.isArray(air)) return { refused: air };
   const how = presentationOf(request);
   const text = (altitude: number) => measureText(how.units, 'altitude', altitude);
   const sentence = `Density altitude ${text(air.densityAltitude)}, pressure altitude ${text(air.pressureAltitude)}.`;
-  const { reference, asOf, elevation, weather } = request;
+  const { reference, asOf, elevation } = request;
   return {
     outcome: 'computed',
     advisory: toAdvisory(how, sentence, []),
@@ -32,7 +35,7 @@ export function answerAir(request: AirRequest, stamp: Stamp): AirResponse | Refu
       ...(reference === undefined ? {} : { reference }),
       ...(asOf === undefined ? {} : { asOf }),
       ...(elevation === undefined ? {} : { elevation }),
-      weather,
+      weather: stillAsUnderstood(request.weather, weather),
       ...how,
     },
   };

@@ -20,20 +20,23 @@ import { toAdvisory } from './to-advisory.ts';
 import { toAir } from './to-air.ts';
 import { type Stamp, toAssumed, toSources } from './to-basis.ts';
 import { aeroplaneAt, toKnownAeroplane } from './to-known-aeroplane.ts';
+import { stillAsUnderstood, toKnownStillWeather } from './to-known-weather.ts';
 import { toSpeedSet } from './to-speed-set.ts';
 
 /** Stall and reference speeds, from gate to gate. */
 export function answerSpeeds(request: SpeedsRequest, lookup: AeroplaneLookup, stamp: Stamp): SpeedsResponse | Refused {
   const known = toKnownAeroplane(request.aeroplane, lookup);
-  const air = foundAir(request.weather, request.elevation);
+  const weather = toKnownStillWeather(request.weather);
+  const air = Array.isArray(weather) ? weather : foundAir(weather, request.elevation);
   const faults = [
     ...(Array.isArray(known)
       ? known
       : [...checkMass(request.mass, known.aeroplane), ...checkConfigurationId(request.configuration, known.aeroplane)]),
     ...(Array.isArray(air) ? air : []),
   ];
-  if (Array.isArray(known) || Array.isArray(air) || faults.length > 0) return { refused: faults };
-  const { reference, asOf, aeroplane, mass, configuration, elevation, weather, bank } = request;
+  if (Array.isArray(known) || Array.isArray(weather) || Array.isArray(air) || faults.length > 0)
+    return { refused: faults };
+  const { reference, asOf, aeroplane, mass, configuration, elevation, bank } = request;
   const loadFactor = bank && turnLoadFactor(si('angle', bank));
   const configured = {
     aeroplane: known.aeroplane,
@@ -75,7 +78,7 @@ export function answerSpeeds(request: SpeedsRequest, lookup: AeroplaneLookup, st
       mass,
       configuration,
       ...(elevation === undefined ? {} : { elevation }),
-      weather,
+      weather: stillAsUnderstood(request.weather, weather),
       ...(bank === undefined ? {} : { bank }),
       ...how,
     },

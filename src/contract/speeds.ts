@@ -4,7 +4,7 @@ import { advisory, air, assumption, digest, modelVersion, sources, speedSet } fr
 import { bankAngle, elevation, mass } from './quantities.ts';
 import { asOf, reference, rounding, units } from './question-frame.ts';
 import { id } from './text.ts';
-import { stillWeather } from './weather.ts';
+import { stillWeatherChoice } from './weather.ts';
 
 /** What POST /v1/speeds is asked and answers. */
 export const speedsRequest = z
@@ -17,7 +17,7 @@ export const speedsRequest = z
     elevation: elevation
       .meta({ description: 'Height of the aerodrome above mean sea level; needed with a QNH.' })
       .exactOptional(),
-    weather: stillWeather,
+    weather: stillWeatherChoice,
     bank: bankAngle.meta({ description: 'Angle of bank of a level turn, for the stall speed in it.' }).exactOptional(),
     units: units.exactOptional(),
     rounding: rounding.exactOptional(),

@@ -12,7 +12,15 @@ import { atText } from './at-text.ts';
 import type { Draft } from './present.ts';
 import type { Q } from './quantity.ts';
 import { toGivenWeather } from './to-weather.ts';
-import type { PressureOnWire, WeatherByReport, WeatherChoice, WeatherOnWire, WindOnWire } from './weather.ts';
+import type {
+  PressureOnWire,
+  StillWeatherChoice,
+  StillWeatherOnWire,
+  WeatherByReport,
+  WeatherChoice,
+  WeatherOnWire,
+  WindOnWire,
+} from './weather.ts';
 import { written } from './written.ts';
 
 /** The weather of a question, whole, and what was read of a report. */
@@ -46,6 +54,24 @@ export function toKnownWeather(given: WeatherChoice, asOf: string | undefined): 
 }
 
 const atReport = (fault: ReportFault) => atText(fault, '/weather/report');
+
+/**
+ * The air of a question without a wind, whole: as it is given, or as a report has it with what the question puts in its place.
+ *
+ * @returns the air as it can be asked without the report, or every fault of the report
+ */
+export function toKnownStillWeather(given: StillWeatherChoice): StillWeatherOnWire | Fault[] {
+  if (!('report' in given)) return given;
+  const known = toKnownWeather({ ...given, wind: 'calm' }, undefined);
+  if (Array.isArray(known)) return known;
+  const { wind: _, ...air } = known.weather;
+  return air;
+}
+
+/** The air as a question understands it: beside its report, where it has one. */
+export function stillAsUnderstood(given: StillWeatherChoice, air: StillWeatherOnWire): StillWeatherChoice {
+  return 'report' in given ? { report: given.report, ...air } : air;
+}
 
 function dewPointOf({ dewPoint }: WeatherByReport, read: Weather): Pick<WeatherOnWire, 'dewPoint'> {
   if (dewPoint !== undefined) return { dewPoint };

@@ -93,6 +93,27 @@ export const stillWeather = z
   .strictObject(air)
   .meta({ id: 'StillWeather', description: 'The air at the aerodrome, without its wind.' });
 
+/** A report of which the air alone is taken, with what stands in its place. */
+export const stillWeatherByReport = z
+  .strictObject({
+    report: reportText,
+    temperature: air.temperature.exactOptional(),
+    dewPoint: air.dewPoint,
+    pressure: pressure.exactOptional(),
+  })
+  .meta({
+    id: 'StillWeatherByReport',
+    description:
+      'A report of which temperature, dew point and pressure are taken, and what is given here in their place.',
+  });
+
+/** The air member by member, or by a report. */
+export const stillWeatherChoice = z.union([stillWeather, stillWeatherByReport]).meta({
+  id: 'StillWeatherChoice',
+  description: 'The air in exactly one of two forms: member by member, or a report.',
+});
+
+export type StillWeatherChoice = z.infer<typeof stillWeatherChoice>;
 export type WeatherOnWire = z.infer<typeof weather>;
 export type WeatherByReport = z.infer<typeof weatherByReport>;
 export type WeatherChoice = z.infer<typeof weatherChoice>;

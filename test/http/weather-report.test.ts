@@ -137,3 +137,26 @@ describe('a report that cannot be taken', () => {
     expect(fault).toMatchObject({ code: 'missing', hint: 'give the wind beside the report' });
   });
 });
+
+describe('a question without a wind', () => {
+  const elevation = q(800, 'ft');
+  const speeds = { aeroplane: { id: 'pellibrin-trainer' }, mass: q(700, 'kg'), configuration: 'takeoff-12' };
+  it.each([
+    ['/v1/air', {}],
+    ['/v1/speeds', speeds],
+  ])('takes the air of a report, whatever its wind: %s', async (path, more) => {
+    const { wind: _, ...air } = memberByMember;
+    const body = { ...more, elevation, units: 'm-kt-kg', rounding: 'none' };
+    const [byReport, stated] = await Promise.all([
+      post(app, path, { ...body, weather: { report: report.replace('23009G21KT', '/////KT') } }),
+      post(app, path, { ...body, weather: air }),
+    ]);
+    expect(byReport.statusCode, byReport.body).toBe(200);
+    const { question, ...answer } = byReport.json();
+    const { question: __, ...same } = stated.json();
+    expect(answer).toEqual(same);
+    expect(question.weather).toEqual({ report: report.replace('23009G21KT', '/////KT'), ...air });
+    const refused = await post(app, path, { ...body, weather: { report: report.replace('18/09', '18/19') } });
+    expect(refused.statusCode).toBe(422);
+  });
+});
