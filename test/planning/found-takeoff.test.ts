@@ -226,6 +226,16 @@ describe('what else the flight manual prints', () => {
     expect(answered(question).climb?.method).toBe('stated');
   });
 
+  it('is no climb of a changed aeroplane, and then nothing is said of where its table ends', () => {
+    const lighter = { ...climbTable, conditions: { ...climbTable.conditions, mass: 900 } };
+    const flightManual = { ...manualOf(), tables: [...manualOf().tables, lighter] };
+    const onFile = changed(byManual(), { aeroplane: { flightManual } });
+    const codes = (asked: TakeoffQuestion) => answered(asked).cautions.map(({ code }) => code);
+    expect(codes(onFile)).toContain('flight-manual-beside');
+    const changes = { basedOn: 'x', revision: '1', because: 'floats', changed: [], flewAs: onFile.aeroplane };
+    expect(codes({ ...onFile, changes })).not.toContain('flight-manual-beside');
+  });
+
   it('is the speed schedule at the mass asked, in place of the one stated', () => {
     const flightManual = { ...manualOf(), speedTables: [speedTable] };
     const { speeds } = answered(changed(byManual(), { aeroplane: { flightManual } }));

@@ -3,7 +3,7 @@ import { manualClimb } from '../../performance/flight-manual/manual-climb.ts';
 import type { ManualBound } from '../../performance/flight-manual/manual-figures.ts';
 import { manualSpeeds } from '../../performance/flight-manual/manual-speeds.ts';
 import type { Question } from '../question.ts';
-import { dryPavement } from './spoken-ground.ts';
+import { manualAsked } from './manual-asked.ts';
 
 /** Where the speeds and the climb of the flight manual end: an edge that stands for what lies beyond, or no figure at all. */
 export interface BoundsBeside {
@@ -15,24 +15,14 @@ export interface BoundsBeside {
 
 /** Where what the manual prints beside its distances does not reach the question. */
 export function boundsBeside(question: Question, air: Air): readonly BoundsBeside[] {
-  const { aeroplane, configuration: id, mass, edges = 'use' } = question;
+  const { aeroplane, configuration: id, mass, edges } = question;
   const manual = aeroplane.flightManual;
   const configuration = aeroplane.configurations[id];
   if (manual === undefined || configuration === undefined) return [];
   const speeds = manualSpeeds(manual, id, mass, edges);
-  const climb = manualClimb(manual, {
-    configuration: id,
-    flap: configuration.flap,
-    mass,
-    pressureAltitude: air.pressureAltitude,
-    temperature: air.temperature,
-    standardTemperature: air.temperature - air.temperatureDeviation,
-    headwind: 0,
-    creditedHeadwind: 0,
-    slope: 0,
-    surface: dryPavement,
-    edges,
-  });
+  // a changed aeroplane climbs by physics, whatever the manual of the one on file prints
+  const climb =
+    question.changes?.flewAs === undefined ? manualClimb(manual, manualAsked(question, configuration, air)) : undefined;
   const found: BoundsBeside[] = [];
   for (const [of, one] of [
     ['speeds', speeds],

@@ -3,7 +3,7 @@ import type { ClimbFigures } from '../answer.ts';
 import type { Conditions } from '../conditions.ts';
 import { isPhysicsByName } from '../method.ts';
 import type { Question } from '../question.ts';
-import { dryPavement } from './spoken-ground.ts';
+import { manualAsked } from './manual-asked.ts';
 
 /**
  * The climb that the flight manual prints for the configuration, all engines at full power.
@@ -18,22 +18,10 @@ export function climbByManual(
   { configuration, air }: Pick<Conditions, 'configuration' | 'air'>,
   airspeed: number,
 ): ClimbFigures | undefined {
-  const { aeroplane, changes, configuration: id, mass, edges = 'use' } = question;
+  const { aeroplane, changes } = question;
   const manual = aeroplane.flightManual;
   if (manual === undefined || isPhysicsByName(question) || changes?.flewAs !== undefined) return undefined;
-  const found = manualClimb(manual, {
-    configuration: id,
-    flap: configuration.flap,
-    mass,
-    pressureAltitude: air.pressureAltitude,
-    temperature: air.temperature,
-    standardTemperature: air.temperature - air.temperatureDeviation,
-    headwind: 0,
-    creditedHeadwind: 0,
-    slope: 0,
-    surface: dryPavement,
-    edges,
-  });
+  const found = manualClimb(manual, manualAsked(question, configuration, air));
   if (found === undefined || found.outcome !== 'climb' || found.gradient === undefined) return undefined;
   const { gradient, rate = (airspeed * gradient) / Math.hypot(1, gradient) } = found;
   return { gradient, rate, method: 'flight-manual' };

@@ -5,6 +5,7 @@ import { manualDistances } from '../../performance/flight-manual/manual-distance
 import type { ManualFigures, OutsideManual } from '../../performance/flight-manual/manual-figures.ts';
 import type { Question } from '../question.ts';
 import type { RunwayCondition } from '../runway-condition.ts';
+import { manualAsked } from './manual-asked.ts';
 import type { Silence } from './silence.ts';
 import { dryPavement, spokenGround } from './spoken-ground.ts';
 
@@ -38,23 +39,18 @@ export interface ReadingConditions {
 export function manualReading(
   manual: FlightManual,
   phase: 'takeoff' | 'landing',
-  { configuration: id, mass, runway, edges = 'use' }: Question,
+  question: Question,
   { configuration, air, wind, creditedHeadwind, condition }: ReadingConditions,
 ): ManualReading | OutsideManual | undefined {
+  const { runway } = question;
   const ground = spokenGround(runway.surface, condition);
   const asked = {
+    ...manualAsked(question, configuration, air),
     phase,
-    configuration: id,
-    flap: configuration.flap,
-    mass,
-    pressureAltitude: air.pressureAltitude,
-    temperature: air.temperature,
-    standardTemperature: air.temperature - air.temperatureDeviation,
     headwind: wind.headwind,
     creditedHeadwind: wind.headwind,
     slope: runway.slope,
     surface: ground ?? dryPavement,
-    edges,
   };
   const stated = manualDistances(manual, asked);
   if (stated === undefined || stated.outcome === 'outside-flight-manual') return stated;
